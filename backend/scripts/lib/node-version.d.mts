@@ -1,0 +1,1 @@
+export function checkPlatform(version?: string, platform?: string): void;

@@ -1,0 +1,1 @@
+export function removeOrphans(workspace: string): void;

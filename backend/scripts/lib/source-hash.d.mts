@@ -1,0 +1,1 @@
+export function hashSources(base: string, places: string[]): string;

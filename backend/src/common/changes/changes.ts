@@ -1,0 +1,27 @@
+import { Injectable } from '@nestjs/common';
+import { EventEmitter2 } from '@nestjs/event-emitter';
+import { UnitOfWork } from '../unit-of-work/unit-of-work.js';
+
+export const changeTopics = ['thread', 'visits', 'holds', 'outcomes', 'lot', 'ledger'] as const;
+export type ChangeTopic = (typeof changeTopics)[number];
+
+/** What pages that look at a lot should fetch anew. */
+export interface LotChange {
+  readonly lotId: string;
+  readonly topics: readonly ChangeTopic[];
+}
+
+export const LOT_CHANGED = 'lot.changed';
+
+/** Tells, once a change is there to stay, whoever listens inside this process; the sockets carry it on. */
+@Injectable()
+export class Changes {
+  constructor(
+    private readonly unitOfWork: UnitOfWork,
+    private readonly events: EventEmitter2,
+  ) {}
+
+  lot(lotId: string, ...topics: ChangeTopic[]): void {
+    this.unitOfWork.afterCommit(() => this.events.emit(LOT_CHANGED, { lotId, topics } satisfies LotChange));
+  }
+}

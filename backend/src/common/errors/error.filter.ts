@@ -1,0 +1,21 @@
+import { type ArgumentsHost, Catch, type ExceptionFilter } from '@nestjs/common';
+import type { Request, Response } from 'express';
+import { PinoLogger } from 'nestjs-pino';
+import { errorBodyOf } from './error-body.js';
+
+/** Every error leaves in the one shape; what nobody foresaw is logged whole and told by its entry number only. */
+@Catch()
+export class ErrorFilter implements ExceptionFilter {
+  constructor(private readonly logger: PinoLogger) {}
+
+  catch(error: unknown, host: ArgumentsHost): void {
+    const http = host.switchToHttp();
+    const request = http.getRequest<Request & { id?: unknown }>();
+    const response = http.getResponse<Response>();
+    const { status, body } = errorBodyOf(error, String(request.id ?? '').slice(0, 8));
+    if (status >= 500) this.logger.error({ err: error, entry: body.entry }, 'request failed');
+    if (response.headersSent) return;
+    if (body.code === 'sign-in-throttled') response.setHeader('Retry-After', String(body.params?.retryAfterSeconds ?? 60));
+    response.status(status).json(body);
+  }
+}

@@ -1,0 +1,14 @@
+import { accounts } from './0001-accounts.js';
+import { departments } from './0002-departments.js';
+import { lots } from './0003-lots.js';
+import { visits } from './0004-visits.js';
+import { holds } from './0005-holds.js';
+import { outcomes } from './0006-outcomes.js';
+import { threads } from './0007-threads.js';
+import { ledger } from './0008-ledger.js';
+import { notices } from './0009-notices.js';
+import { requests } from './0010-requests.js';
+import type { Migration } from './migration.js';
+
+/** Every step, in order. */
+export const migrations: readonly Migration[] = [accounts, departments, lots, visits, holds, outcomes, threads, ledger, notices, requests];

@@ -1,0 +1,44 @@
+/**
+ * Every kind of ledger entry and what it carries: a closed union. Payloads hold codes and values, never words in a language, never secrets.
+ */
+export interface LedgerPayloads {
+  'organization-added': { name: string; kind: string };
+  'person-invited': { email: string; roles: string[] };
+  'person-joined': { personId: string; roles: string[] };
+  'person-changed': { personId: string; roles?: string[]; isDisabled?: boolean };
+  'invitation-withdrawn': { email: string };
+  'operator-joined': { personId: string };
+  'rule-card-drafted': { ruleCardId: string; version: number };
+  'rule-card-published': { ruleCardId: string; version: number; effectiveFrom: string };
+  'closure-added': { date: string; from: string | null; to: string | null; why: string };
+  'closure-removed': { date: string };
+  'tract-added': { name: string };
+  'lot-added': { number: string; address: string; builderId: string };
+  'lot-changed': { fields: string[]; permitStatus?: string; permitNumber?: string | null };
+  'geometry-set': { unitNumber: number };
+  'party-asked': { kind: string; organizationId: string; organizationName: string };
+  'party-joined': { kind: string; organizationId: string; organizationName: string };
+  'party-refused': { kind: string; organizationId: string; organizationName: string; why: string | null };
+  'visit-requested': { visitId: string; stageCode: string; startAt: string; endAt: string; callerName: string | null };
+  'visit-booked': { visitId: string; stageCode: string; startAt: string; endAt: string; inspectorName: string };
+  'visit-moved': { visitId: string; fromStartAt: string; startAt: string; endAt: string };
+  'visit-withdrawn': { visitId: string; reason: string };
+  'visit-declined': { visitId: string; reason: string };
+  'visit-freed': { visitId: string; reason: string };
+  'visit-not-reached': { visitId: string };
+  'test-started': { holdId: string; system: string; ordinal: number; method: string; unitNumber: number };
+  'reading-added': { holdId: string; system: string; readingId: string; pressurePsi: number | null; levelIn: number | null; gaugeValve: string | null; madeAt: string };
+  'reading-struck': { holdId: string; readingId: string; why: string };
+  'test-ended': { holdId: string; system: string; ordinal: number; reason: string };
+  'test-up': { visitId: string; readingIds: string[]; madeAt: string };
+  'no-longer-up': { visitId: string };
+  'visit-begun': { visitId: string; takenOver: boolean };
+  'visit-begin-undone': { visitId: string };
+  outcome: { visitId: string; kind: string; reason: string | null; systems: Array<{ unitNumber: number; system: string; answer: string }> };
+  'correction-opened': { correctionId: string; number: number; subject: string; severity: string };
+  'correction-fixed': { correctionId: string; number: number };
+  'correction-accepted': { correctionId: string; number: number };
+  'correction-reopened': { correctionId: string; number: number; why: string };
+  'plumbing-state': { unitNumber: number; stageCode: string; from: string; to: string };
+  comment: { commentId: string };
+}

@@ -1,0 +1,43 @@
+import '@testing-library/jest-dom/vitest';
+import { cleanup } from '@testing-library/react';
+import i18next from 'i18next';
+import { afterEach } from 'vitest';
+import { startI18n } from './lib/i18n';
+import { listNamespaces } from './lib/locale-files';
+
+/** What jsdom has not got, and the words of the page: run before every spec of the front end. */
+
+class NoResizeObserver implements ResizeObserver {
+  observe(): void {}
+  unobserve(): void {}
+  disconnect(): void {}
+}
+
+function matchMediaStub(query: string): MediaQueryList {
+  const target = new EventTarget();
+  return Object.assign(target, {
+    matches: false,
+    media: query,
+    onchange: null,
+    addListener: () => undefined,
+    removeListener: () => undefined,
+  });
+}
+
+if (typeof window !== 'undefined') {
+  window.matchMedia ??= matchMediaStub;
+  window.ResizeObserver ??= NoResizeObserver;
+  window.HTMLElement.prototype.scrollIntoView ??= () => undefined;
+  window.HTMLDialogElement.prototype.showModal ??= function showModal(this: HTMLDialogElement) {
+    this.open = true;
+  };
+  window.HTMLDialogElement.prototype.close ??= function close(this: HTMLDialogElement) {
+    this.open = false;
+  };
+}
+
+/** The phrases as the page loads them, all namespaces at once so that no spec waits for one. */
+await startI18n('en');
+await i18next.loadNamespaces(listNamespaces());
+
+afterEach(() => cleanup());
