@@ -1,10 +1,11 @@
 import { createTemplate, dropTemplate } from './test-database.js';
 
-/** Runs once before all tests. Without a database the tests that need one say so themselves. */
+/** Runs once before all tests, though vitest calls it once a project. Without a database the tests that need one say so themselves. */
 export async function setup(): Promise<void> {
-  if (process.env.TEST_DATABASE_ADMIN_URL) await createTemplate();
+  if (!process.env.TEST_DATABASE_ADMIN_URL || process.env.TEST_DATABASE_TEMPLATE) return;
+  await createTemplate();
 }
 
 export async function teardown(): Promise<void> {
-  if (process.env.TEST_DATABASE_ADMIN_URL) await dropTemplate();
+  if (process.env.TEST_DATABASE_TEMPLATE) await dropTemplate();
 }

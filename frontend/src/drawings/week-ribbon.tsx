@@ -188,6 +188,8 @@ function useDrag(onMove: (weeks: number) => void): Drag {
         startX.current = null;
         if (Math.abs(dx) < dragThreshold) return;
         isDragged.current = true;
+        // The press that follows this release comes before any timer.
+        window.setTimeout(() => (isDragged.current = false), 0);
         const weekWidth = event.currentTarget.getBoundingClientRect().width / 2 || 1;
         onMove(-Math.sign(dx) * Math.max(1, Math.round(Math.abs(dx) / weekWidth)));
       },
