@@ -5,6 +5,7 @@ import { ScheduleModule } from '@nestjs/schedule';
 import { LoggerModule } from 'nestjs-pino';
 import { AccessGuard } from './common/access/access.guard.js';
 import { CommonModule } from './common/common.module.js';
+import { type Clock } from './common/time/clock.js';
 import { ContractInterceptor } from './common/contract/contract.interceptor.js';
 import { ErrorFilter } from './common/errors/error.filter.js';
 import { loggingParams } from './common/logging/logging.js';
@@ -17,7 +18,7 @@ import { features } from './features.js';
 
 @Module({})
 export class AppModule {
-  static of(environment: Environment): DynamicModule {
+  static of(environment: Environment, clock?: Clock): DynamicModule {
     return {
       module: AppModule,
       imports: [
@@ -26,7 +27,7 @@ export class AppModule {
         EventEmitterModule.forRoot(),
         ScheduleModule.forRoot(),
         DatabaseModule,
-        CommonModule,
+        CommonModule.with(clock),
         LedgerModule,
         OutboxModule,
         ...features,

@@ -1,4 +1,4 @@
-import { Global, Module } from '@nestjs/common';
+import { type DynamicModule, Global, Module } from '@nestjs/common';
 import { DiscoveryModule } from '@nestjs/core';
 import { AccessCheck } from './access/access.check.js';
 import { Changes } from './changes/changes.js';
@@ -7,9 +7,15 @@ import { UnitOfWork } from './unit-of-work/unit-of-work.js';
 
 /** What every module uses and what knows no domain word. */
 @Global()
-@Module({
-  imports: [DiscoveryModule],
-  providers: [{ provide: Clock, useClass: SystemClock }, UnitOfWork, Changes, AccessCheck],
-  exports: [Clock, UnitOfWork, Changes, AccessCheck],
-})
-export class CommonModule {}
+@Module({})
+export class CommonModule {
+  /** `clock` is another than the system's where the past is told (demo) or the present is set (tests). */
+  static with(clock: Clock = new SystemClock()): DynamicModule {
+    return {
+      module: CommonModule,
+      imports: [DiscoveryModule],
+      providers: [{ provide: Clock, useValue: clock }, UnitOfWork, Changes, AccessCheck],
+      exports: [Clock, UnitOfWork, Changes, AccessCheck],
+    };
+  }
+}

@@ -2,7 +2,7 @@ import type { Locale } from '@holdwater/shared-types/common/locale.js';
 import { useTranslation } from 'react-i18next';
 import { ApiError, isApiError, type ApiErrorCode } from './api-error';
 import { useLocale } from './i18n';
-import { dateWords, dayClockWords } from './time';
+import { dateWords, dayClockWords, durationWords } from './time';
 
 export interface ErrorWords {
   readonly title: string;
@@ -39,7 +39,7 @@ export function useErrorWords(error: unknown): ErrorWords | null {
   const locale = useLocale();
   if (error === null || error === undefined) return null;
   const fault = isApiError(error) ? error : new ApiError('unknown', { status: 0 });
-  const params = { ...errorParams(fault.params, locale), context: contextOf(fault) };
+  const params = { ...errorParams(fault.params, locale), ...finerParams(fault, locale) };
   return {
     title: t(`${fault.code}.title`, params),
     safe: t(`${fault.code}.safe`, params),
@@ -49,10 +49,13 @@ export function useErrorWords(error: unknown): ErrorWords | null {
   };
 }
 
-/** Some refusals have finer words for what they name: `sign-in-failed` with tries left, `stale-state` with the state it is in now. */
-function contextOf(fault: ApiError): string | undefined {
-  if (fault.code === 'sign-in-failed' && typeof fault.params['triesLeft'] === 'number') return 'tries';
-  return undefined;
+/** Some refusals have finer words when they name a number: how many tries are left, how long to wait. */
+function finerParams({ code, params }: ApiError, locale: Locale): Record<string, unknown> {
+  const triesLeft = params['triesLeft'];
+  if (code === 'sign-in-failed' && typeof triesLeft === 'number') return { context: 'triesLeft', count: triesLeft };
+  const seconds = params['retryAfterSeconds'];
+  if (typeof seconds === 'number') return { context: 'wait', wait: durationWords(Math.ceil(seconds / 60), locale) };
+  return {};
 }
 
 /** Words of one field's fault, by the code the contract gives (`required`, `too-long`); an unknown one says it is not right. */

@@ -12,7 +12,8 @@ export interface ChosenOrganization {
 
 export type SessionState =
   | { readonly kind: 'starting' }
-  | { readonly kind: 'signed-out' }
+  /** `hasLeft`: by an own sign-out, not because the session ran out or never was. */
+  | { readonly kind: 'signed-out'; readonly hasLeft: boolean }
   /** No answer at the start: it is not known whether somebody is signed in. */
   | { readonly kind: 'unknown'; readonly error: unknown }
   | { readonly kind: 'signed-in'; readonly me: Me };

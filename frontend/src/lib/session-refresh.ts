@@ -3,15 +3,20 @@ import { isApiError } from './api-error';
 import { setAccessToken } from './access-token';
 import { http, toApiError } from './http';
 
-type Lost = () => void;
-
 let running: Promise<Session> | null = null;
-const lostListeners = new Set<Lost>();
+const lostListeners = new Set<() => void>();
+const renewedListeners = new Set<(session: Session) => void>();
 
 /** Called when the session is over on the server's word (never for a lost signal). */
-export function onSessionLost(listener: Lost): () => void {
+export function onSessionLost(listener: () => void): () => void {
   lostListeners.add(listener);
   return () => lostListeners.delete(listener);
+}
+
+/** Called with every renewed session: the person may have changed in another tab. */
+export function onSessionRenewed(listener: (session: Session) => void): () => void {
+  renewedListeners.add(listener);
+  return () => renewedListeners.delete(listener);
 }
 
 /**
@@ -31,6 +36,7 @@ async function askForRefresh(): Promise<Session> {
     const headers = { 'X-Sent-At': new Date().toISOString(), 'Idempotency-Key': crypto.randomUUID() };
     const answer = await http.request<Session>({ method: refreshSession.method, url: refreshSession.path, headers });
     setAccessToken(answer.data.accessToken);
+    renewedListeners.forEach((listener) => listener(answer.data));
     return answer.data;
   } catch (error) {
     const fault = toApiError(error);

@@ -38,11 +38,7 @@ describe('house geometry', () => {
 
   it.each<[string, unknown, Record<string, string>]>([
     ['an unknown key', { ...house, roof: 1 }, { '': 'unknown' }],
-    [
-      'an unknown key further in',
-      { ...house, plugs: [{ ...house.plugs[0], color: 'red' }] },
-      { 'plugs.0': 'unknown' },
-    ],
+    ['an unknown key further in', { ...house, plugs: [{ ...house.plugs[0], color: 'red' }] }, { 'plugs.0': 'unknown' }],
     [
       'a rating of zero',
       { ...house, plugs: [{ ...house.plugs[0], ratedPsi: 0 }] },

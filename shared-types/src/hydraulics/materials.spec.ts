@@ -23,9 +23,18 @@ describe('materials', () => {
 
   it('never takes air in PVC, ABS or CPVC water lines, and in PEX only where all allow it', () => {
     // A pipe maker's technical guide (PVC, ABS, CPVC); 2018 IRC M2101.10 (PEX)
-    expect(materials.filter((material) => mayHoldAirInWaterLine(material, both))).toEqual(['pex', 'copper', 'cast-iron', 'steel']);
+    expect(materials.filter((material) => mayHoldAirInWaterLine(material, both))).toEqual([
+      'pex',
+      'copper',
+      'cast-iron',
+      'steel',
+    ]);
     for (const allowed of oneOfTwo) {
-      expect(materials.filter((material) => mayHoldAirInWaterLine(material, allowed))).toEqual(['copper', 'cast-iron', 'steel']);
+      expect(materials.filter((material) => mayHoldAirInWaterLine(material, allowed))).toEqual([
+        'copper',
+        'cast-iron',
+        'steel',
+      ]);
     }
   });
 });

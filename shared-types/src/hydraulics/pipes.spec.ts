@@ -1,5 +1,12 @@
 import { describe, expect, it } from 'vitest';
-import { boreAreaSqIn, gallonsPerFoot, insideDiameterIn, isNominalSize, nominalSizesIn, type NominalSizeIn } from './pipes.js';
+import {
+  boreAreaSqIn,
+  gallonsPerFoot,
+  insideDiameterIn,
+  isNominalSize,
+  nominalSizesIn,
+  type NominalSizeIn,
+} from './pipes.js';
 
 describe('schedule 40 pipe, ID = OD − 2 × minimum wall', () => {
   // ASTM D1785/D2665 dimensions: inside diameters to three places, gallons per foot computed from them to five.
@@ -26,8 +33,7 @@ describe('schedule 40 pipe, ID = OD − 2 × minimum wall', () => {
     expect(Math.abs((gallonsPerFoot(nominalIn) * 100) / gallons - 1)).toBeLessThan(0.003);
   });
 
-  // Force on a plug: printed to three figures from inside diameters of 2.067, 3.068, 4.026 and 6.065 in (4 in) and
-  // the like; half a pound in a hundred is allowed.
+  // Force on a plug, pressure × bore, computed for these bores and printed to two or three figures: half a percent is allowed.
   it.each<[NominalSizeIn, number, number]>([
     [2, 14.5, 43.6],
     [3, 32.0, 96.1],

@@ -28,7 +28,8 @@ describe('Theil–Sen', () => {
     const meanX = sen.reduce((sum, { x }) => sum + x, 0) / sen.length;
     const meanY = sen.reduce((sum, { y }) => sum + y, 0) / sen.length;
     const least =
-      sen.reduce((sum, { x, y }) => sum + (x - meanX) * (y - meanY), 0) / sen.reduce((sum, { x }) => sum + (x - meanX) ** 2, 0);
+      sen.reduce((sum, { x, y }) => sum + (x - meanX) * (y - meanY), 0) /
+      sen.reduce((sum, { x }) => sum + (x - meanX) ** 2, 0);
     expect(least).toBeCloseTo(4.021352, 6);
     expect(medianSlope(pairwiseSlopes(sen))).not.toBeCloseTo(least, 2);
   });

@@ -18,7 +18,9 @@ const volumeUnits: VolumeUnit[] = ['gal', 'L'];
 const amount = fc.double({ min: -1e6, max: 1e6, noNaN: true });
 
 /** A there-and-back may cost a few of the last bits. */
-const near = (value: number, expected: number) => expect(Math.abs(value - expected)).toBeLessThanOrEqual(1e-12 * Math.max(1, Math.abs(expected)));
+function near(value: number, expected: number): void {
+  expect(Math.abs(value - expected)).toBeLessThanOrEqual(1e-12 * Math.max(1, Math.abs(expected)));
+}
 
 describe('pressure units', () => {
   it.each<[PressureUnit, number]>([

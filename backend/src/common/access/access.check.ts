@@ -29,7 +29,7 @@ export class AccessCheck implements OnApplicationBootstrap {
     return this.discovery.getControllers().flatMap(({ instance, metatype }) => {
       if (!instance || !metatype) return [];
       const prototype = Object.getPrototypeOf(instance) as object;
-      const base = String(Reflect.getMetadata(PATH_METADATA, metatype) ?? '');
+      const base = (Reflect.getMetadata(PATH_METADATA, metatype) as string | undefined) ?? '';
       return this.scanner.getAllMethodNames(prototype).flatMap((name) => this.routeOf(prototype, name, base, metatype.name));
     });
   }
@@ -37,10 +37,10 @@ export class AccessCheck implements OnApplicationBootstrap {
   private routeOf(prototype: object, name: string, base: string, controller: string): DeclaredRoute[] {
     const handler = (prototype as Record<string, unknown>)[name];
     if (typeof handler !== 'function') return [];
-    const path: unknown = Reflect.getMetadata(PATH_METADATA, handler);
+    const path = Reflect.getMetadata(PATH_METADATA, handler) as string | undefined;
     if (path === undefined) return [];
     const method = RequestMethod[Reflect.getMetadata(METHOD_METADATA, handler) as number] ?? 'ALL';
     const access = (Reflect.getMetadata(ACCESS, handler) as Access | undefined) ?? null;
-    return [{ method, path: `/${[base, String(path)].join('/')}`.replaceAll(/\/+/g, '/'), handler: `${controller}.${name}`, access }];
+    return [{ method, path: `/${[base, path].join('/')}`.replaceAll(/\/+/g, '/'), handler: `${controller}.${name}`, access }];
   }
 }

@@ -1,7 +1,7 @@
 import { type ExecutionContext, Injectable } from '@nestjs/common';
 import { Reflector } from '@nestjs/core';
 import { AuthGuard } from '@nestjs/passport';
-import { AppError, refuse } from '../errors/app-error.js';
+import { refuse } from '../errors/app-error.js';
 import { currentRequest } from '../request/request-context.js';
 import { ACCESS, type Access } from './access.js';
 import type { Actor } from './actor.js';
@@ -27,8 +27,7 @@ export class AccessGuard extends AuthGuard('jwt') {
   }
 
   override handleRequest<T>(error: unknown, user: T | false): T {
-    if (error instanceof AppError) throw error;
-    if (error) throw error;
+    if (error instanceof Error) throw error;
     return user || refuse('signed-out');
   }
 }

@@ -89,7 +89,7 @@ function httpErrorOf(error: HttpException): AppError {
 function databaseFaultOf(error: unknown): DatabaseFault | null {
   if (typeof error !== 'object' || error === null) return null;
   const inner = 'original' in error ? error.original : 'parent' in error ? error.parent : error;
-  return typeof inner === 'object' && inner !== null ? (inner as DatabaseFault) : null;
+  return typeof inner === 'object' && inner !== null ? (inner) : null;
 }
 
 /** The SQLSTATE behind an error of the database, or null. */

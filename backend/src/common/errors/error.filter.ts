@@ -10,12 +10,12 @@ export class ErrorFilter implements ExceptionFilter {
 
   catch(error: unknown, host: ArgumentsHost): void {
     const http = host.switchToHttp();
-    const request = http.getRequest<Request & { id?: unknown }>();
+    const request = http.getRequest<Request & { id?: string }>();
     const response = http.getResponse<Response>();
-    const { status, body } = errorBodyOf(error, String(request.id ?? '').slice(0, 8));
+    const { status, body } = errorBodyOf(error, (request.id ?? '').slice(0, 8));
     if (status >= 500) this.logger.error({ err: error, entry: body.entry }, 'request failed');
     if (response.headersSent) return;
-    if (body.code === 'sign-in-throttled') response.setHeader('Retry-After', String(body.params?.retryAfterSeconds ?? 60));
+    if (body.code === 'sign-in-throttled') response.setHeader('Retry-After', `${(body.params?.retryAfterSeconds as number | undefined) ?? 60}`);
     response.status(status).json(body);
   }
 }

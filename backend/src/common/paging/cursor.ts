@@ -10,7 +10,7 @@ export function fromCursor(cursor: string, count: number): Array<string | number
   try {
     const keys: unknown = JSON.parse(Buffer.from(cursor, 'base64url').toString('utf8'));
     const isKeys = Array.isArray(keys) && keys.length === count && keys.every((key) => typeof key === 'string' || typeof key === 'number');
-    if (isKeys) return keys as Array<string | number>;
+    if (isKeys) return keys;
   } catch {
     // falls through to the refusal: a cursor is ours or it is nothing
   }

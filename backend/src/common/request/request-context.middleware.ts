@@ -5,8 +5,8 @@ import { requestContext } from './request-context.js';
 const keyPattern = /^[A-Za-z0-9_-]{8,100}$/;
 
 /** Opens the context of a request: its id, the client's clock, the idempotency key. */
-export function openRequestContext(request: Request & { id?: unknown }, _response: Response, next: NextFunction): void {
-  const requestId = String(request.id ?? randomUUID());
+export function openRequestContext(request: Request & { id?: string }, _response: Response, next: NextFunction): void {
+  const requestId = request.id ?? randomUUID();
   requestContext.run({ requestId, actor: null, clockOffsetMs: offsetOf(request), idempotency: idempotencyOf(request) }, next);
 }
 

@@ -20,8 +20,10 @@ interface Running {
 type Idempotency = NonNullable<RequestContext['idempotency']>;
 
 /** Carries the stored answer of an earlier, equal request out of the transaction. */
-class StoredAnswer {
-  constructor(readonly answer: unknown) {}
+class StoredAnswer extends Error {
+  constructor(readonly answer: unknown) {
+    super('answered before');
+  }
 }
 
 /**

@@ -1,0 +1,155 @@
+import { Injectable } from '@nestjs/common';
+import type { NoticeAnswer, NoticeInput, NoticeWindow } from '@holdwater/shared-types/scheduling/notice.contract.js';
+import { Temporal } from 'temporal-polyfill';
+import { closedSpansOf } from '../scheduling/working-time/closed-spans.js';
+import { localDateOf } from '../scheduling/working-time/local-instant.js';
+import { computeNotice } from '../scheduling/working-time/notice.js';
+import { windowsOfDates } from '../scheduling/working-time/windows-of-dates.js';
+import { isWorkingDay } from '../scheduling/working-time/working-days.js';
+import { ClosuresQueries, type ClosureRecord } from './closures.queries.js';
+import { daysOff } from './days-off.js';
+import { DepartmentsQueries } from './departments.queries.js';
+import { RuleCardsQueries, type RuleCardVersion } from './rule-cards.queries.js';
+
+/** A window of a day with the rule card version that makes it and how many visits it takes. */
+export interface DepartmentWindow extends NoticeWindow {
+  readonly ruleCardId: string;
+  readonly room: number;
+}
+
+export interface DepartmentNotice extends Omit<NoticeAnswer, 'windows'> {
+  readonly zone: string;
+  /** The version in force today: it sets cut-off, days ahead and horizon. */
+  readonly ruleCard: RuleCardVersion;
+  /** Each day's windows by the version in force on that day. */
+  readonly windows: DepartmentWindow[];
+}
+
+/** A day of the department's calendar. */
+export interface DepartmentDay {
+  readonly date: string;
+  readonly isWorkingDay: boolean;
+  /** Instants; both null for a whole day. `why` is the department's own words, `holidayCode` a federal holiday's. */
+  readonly closed: ReadonlyArray<{ from: string | null; to: string | null; why: string; holidayCode: string | null }>;
+}
+
+/** A department's working time: rule cards, holidays and closures put together for the pure rules of scheduling. */
+@Injectable()
+export class WorkingTimeQueries {
+  constructor(
+    private readonly departments: DepartmentsQueries,
+    private readonly ruleCards: RuleCardsQueries,
+    private readonly closures: ClosuresQueries,
+  ) {}
+
+  /** Which windows a request made now may ask for. Throws `no-rule-card` when none is in force today. */
+  async noticeFor(departmentId: string, now: Date): Promise<DepartmentNotice> {
+    const { zone } = await this.departments.getDepartment(departmentId);
+    const today = localDateOf(now, zone);
+    const ruleCard = await this.ruleCards.getRuleCardInForce(departmentId, today);
+    const closures = await this.closures.listClosures(departmentId, today);
+    const { windows: _, ...notice } = computeNotice({
+      ...this.inputOf(zone, ruleCard, closures, today, lastYearNeeded(today, ruleCard)),
+      now: now.toISOString(),
+      windows: [],
+    });
+    const windows = await this.windowsBetween(departmentId, notice.firstDate, notice.lastDate);
+    return { ...notice, zone, ruleCard, windows };
+  }
+
+  /** Every window from one day to another, both included, each by the version in force on its day; days without one have none. */
+  async windowsBetween(departmentId: string, fromDate: string, toDate: string): Promise<DepartmentWindow[]> {
+    const { zone } = await this.departments.getDepartment(departmentId);
+    const versions = await this.ruleCards.listInForceBetween(departmentId, fromDate, toDate);
+    const closures = await this.closures.listClosures(departmentId, fromDate, toDate);
+    return versions.flatMap((version) => {
+      const [from, to] = shared(version, fromDate, toDate);
+      const rooms = new Map(version.content.asking.windows.map(({ label, room }) => [label, room]));
+      return windowsOfDates(this.inputOf(zone, version, closures, from, yearOf(to)), from, to).map((window) => ({
+        ...window,
+        ruleCardId: version.id,
+        room: rooms.get(window.label) ?? 0,
+      }));
+    });
+  }
+
+  /** What is closed on a day, and whether it is a working day at all. */
+  async closedOn(departmentId: string, date: string): Promise<DepartmentDay> {
+    const [day] = await this.daysBetween(departmentId, date, date);
+    return day ?? { date, isWorkingDay: false, closed: [] };
+  }
+
+  /** Every day from one to another, both included, with what is closed on it. */
+  async daysBetween(departmentId: string, fromDate: string, toDate: string): Promise<DepartmentDay[]> {
+    const { zone } = await this.departments.getDepartment(departmentId);
+    const versions = await this.ruleCards.listInForceBetween(departmentId, fromDate, toDate);
+    const closures = await this.closures.listClosures(departmentId, fromDate, toDate);
+    return datesFrom(fromDate, toDate).map((date) => {
+      const version = versions.find((each) => rules(each, date));
+      if (!version) return { date, isWorkingDay: false, closed: closedOf(zone, date, closures, []) };
+      const rule = this.inputOf(zone, version, closures, date, yearOf(date));
+      const holidays = daysOff(version.content.asking.holidays, yearOf(date), yearOf(date)).filter((day) => day.date === date);
+      return { date, isWorkingDay: isWorkingDay(rule, date), closed: closedOf(zone, date, closures, holidays) };
+    });
+  }
+
+  private inputOf(zone: string, version: RuleCardVersion, closures: readonly ClosureRecord[], from: string, toYear: number): Omit<NoticeInput, 'now'> {
+    const { asking } = version.content;
+    return {
+      zone,
+      workingDays: asking.workingDays,
+      closures: [...daysOff(asking.holidays, yearOf(from), toYear).map(({ date }) => date), ...closures.map(closureOf)],
+      cutoff: asking.cutoff,
+      workingDaysAhead: asking.workingDaysAhead,
+      horizonWorkingDays: asking.horizonWorkingDays,
+      windows: asking.windows,
+    };
+  }
+}
+
+function closureOf({ date, from, to }: ClosureRecord) {
+  return from === null || to === null ? date : { date, from, to };
+}
+
+function closedOf(zone: string, date: string, closures: readonly ClosureRecord[], holidays: ReadonlyArray<{ date: string; code: string | null }>) {
+  const ofHolidays = holidays.map(({ code }) => ({ from: null, to: null, why: '', holidayCode: code ?? 'own' }));
+  const ofClosures = closures.flatMap((closure) =>
+    closedSpansOf({ zone, closures: [closureOf(closure)] }, date).map((span) => ({
+      from: span.from === null ? null : span.startAt,
+      to: span.to === null ? null : span.endAt,
+      why: closure.why,
+      holidayCode: null,
+    })),
+  );
+  return [...ofHolidays, ...ofClosures];
+}
+
+function rules(version: RuleCardVersion, date: string): boolean {
+  return (version.effectiveFrom ?? date) <= date && date <= (version.effectiveTo ?? date);
+}
+
+/** The part of a span that a version rules. */
+function shared(version: RuleCardVersion, fromDate: string, toDate: string): [string, string] {
+  const from = version.effectiveFrom !== null && version.effectiveFrom > fromDate ? version.effectiveFrom : fromDate;
+  const to = version.effectiveTo !== null && version.effectiveTo < toDate ? version.effectiveTo : toDate;
+  return [from, to];
+}
+
+/** Far enough ahead that no day of the horizon lies in a year whose holidays were not looked at; a weekly day has at least 40 a year. */
+function lastYearNeeded(today: string, { content: { asking } }: RuleCardVersion): number {
+  const days = asking.workingDaysAhead + asking.horizonWorkingDays;
+  return yearOf(today) + 1 + Math.ceil(days / (40 * new Set(asking.workingDays).size));
+}
+
+function yearOf(date: string): number {
+  return Number(date.slice(0, 4));
+}
+
+function datesFrom(fromDate: string, toDate: string): string[] {
+  const dates: string[] = [];
+  const last = Temporal.PlainDate.from(toDate);
+  for (let day = Temporal.PlainDate.from(fromDate); Temporal.PlainDate.compare(day, last) <= 0; day = day.add({ days: 1 })) {
+    dates.push(day.toString());
+  }
+  return dates;
+}

@@ -1,0 +1,57 @@
+import { Suspense, type ReactNode } from 'react';
+import { useTranslation } from 'react-i18next';
+import { Link, Outlet, useLocation } from 'react-router-dom';
+import { Act } from '../../components/act';
+import { BrandMark } from '../../components/brand-mark';
+import { DoneLine } from '../../components/done-line';
+import { Lines } from '../../components/lines';
+import { useSession } from '../../lib/session-context';
+import { SessionUnknown } from '../signed-in';
+import { AppLayout } from './app-layout';
+import { LanguageChoice } from './language-choice';
+
+/** The frame of pages that anyone may read. Somebody signed in keeps the whole frame. */
+export function OpenLayout(): ReactNode {
+  const { state } = useSession();
+  const { t } = useTranslation('app');
+  const { pathname } = useLocation();
+  if (state.kind === 'signed-in') return <AppLayout />;
+  if (state.kind === 'starting') return <main className="sheet" />;
+  if (state.kind === 'unknown') return <SessionUnknown error={state.error} />;
+  return (
+    <div className="sheet open">
+      <a className="skip btn" href="#page">
+        {t('skip')}
+      </a>
+      <header className="top">
+        <Link className="brand" to="/sign-in">
+          <BrandMark size={26} />
+          <span>Holdwater</span>
+        </Link>
+        <nav className="nav" aria-label={t('sheetsName')}>
+          <ul>
+            <li>
+              <Link to="/rule-cards" aria-current={pathname.startsWith('/rule-cards') ? 'page' : undefined}>
+                {t('sheets.ruleCards')}
+              </Link>
+            </li>
+          </ul>
+        </nav>
+        <div className="cell">
+          <LanguageChoice />
+        </div>
+        <div className="cell">
+          <Act size="sm" to="/sign-in">
+            {t('signIn')}
+          </Act>
+        </div>
+      </header>
+      <main id="page" tabIndex={-1}>
+        <Suspense fallback={<Lines />}>
+          <Outlet />
+        </Suspense>
+      </main>
+      <DoneLine />
+    </div>
+  );
+}
