@@ -1,6 +1,7 @@
 import type { INestApplication } from '@nestjs/common';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { Logger } from 'nestjs-pino';
+import { SocketAdapter } from './realtime/socket-adapter.js';
 import { openRequestContext } from './common/request/request-context.middleware.js';
 import { servePage } from './common/page/page.js';
 import type { Environment } from './config/environment.js';
@@ -20,5 +21,6 @@ export function furnish(app: INestApplication, environment: Environment): void {
   servePage(app, environment.STATIC_DIR, environment.APP_URL.startsWith('https:'));
   express.useBodyParser('json', { limit: bodyLimit });
   app.use(openRequestContext);
+  app.useWebSocketAdapter(new SocketAdapter(app, environment.DATABASE_URL));
   app.enableShutdownHooks();
 }

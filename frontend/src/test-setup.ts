@@ -1,5 +1,5 @@
 import '@testing-library/jest-dom/vitest';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import i18next from 'i18next';
 import { afterEach } from 'vitest';
 import { startI18n } from './lib/i18n';
@@ -24,17 +24,25 @@ function matchMediaStub(query: string): MediaQueryList {
   });
 }
 
-if (typeof window !== 'undefined') {
-  window.matchMedia ??= matchMediaStub;
-  window.ResizeObserver ??= NoResizeObserver;
-  window.HTMLElement.prototype.scrollIntoView ??= () => undefined;
-  window.HTMLDialogElement.prototype.showModal ??= function showModal(this: HTMLDialogElement) {
-    this.open = true;
-  };
-  window.HTMLDialogElement.prototype.close ??= function close(this: HTMLDialogElement) {
-    this.open = false;
-  };
+/** Puts a stub where jsdom has nothing; what it has stays. */
+function fill(owner: object, name: string, value: unknown): void {
+  if (!Reflect.has(owner, name)) Object.defineProperty(owner, name, { value, writable: true, configurable: true });
 }
+
+if (typeof window !== 'undefined') {
+  fill(window, 'matchMedia', matchMediaStub);
+  fill(window, 'ResizeObserver', NoResizeObserver);
+  fill(window.HTMLElement.prototype, 'scrollIntoView', () => undefined);
+  fill(window.HTMLDialogElement.prototype, 'showModal', function showModal(this: HTMLDialogElement) {
+    this.open = true;
+  });
+  fill(window.HTMLDialogElement.prototype, 'close', function close(this: HTMLDialogElement) {
+    this.open = false;
+  });
+}
+
+/** On a busy machine the thing waited for may take longer than the usual second. */
+configure({ asyncUtilTimeout: 15_000 });
 
 /** The phrases as the page loads them, all namespaces at once so that no spec waits for one. */
 await startI18n('en');

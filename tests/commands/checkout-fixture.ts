@@ -36,6 +36,9 @@ export function useCheckout() {
     return (await response.json()) as Answer;
   }
 
+  // Real starts and stops of PostgreSQL, on a machine that may be busy with other tests.
+  vi.setConfig({ testTimeout: 240_000, hookTimeout: 240_000 });
+
   beforeEach(async () => {
     const checkout = makeStandInCheckout();
     fixture.folder = checkout.folder;

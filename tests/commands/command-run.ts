@@ -12,14 +12,16 @@ export interface CommandRun {
   signal: (signal: NodeJS.Signals) => void;
 }
 
-/** Runs one of the commands in a checkout. */
+/** Runs one of the commands in a checkout: a file straight, any other name through npm. */
 export function runCommand(
   folder: string,
   script: string,
   env: NodeJS.ProcessEnv = {},
   args: string[] = [],
 ): CommandRun {
-  const child = spawn(process.execPath, [path.join(folder, 'backend/scripts', script), ...args], {
+  const isFile = script.endsWith('.mjs');
+  const words = isFile ? [path.join(folder, 'backend/scripts', script), ...args] : ['run', script, ...args];
+  const child = spawn(isFile ? process.execPath : 'npm', words, {
     cwd: folder,
     env: { ...process.env, ...env },
     stdio: ['ignore', 'pipe', 'pipe'],

@@ -1,4 +1,4 @@
-import { chmodSync, cpSync, mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { chmodSync, cpSync, mkdirSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import os from 'node:os';
 import path from 'node:path';
@@ -77,7 +77,7 @@ function write(folder: string, files: Record<string, string>) {
   }
 }
 
-/** A compiler that writes files, and one line into builds.txt to count it by. */
+/** A compiler that writes files, and one line into builds.txt to count it by; it watches, or serves the page, when asked. */
 function compilerOf(folder: string, files: Record<string, string>): string {
   return `
     const { appendFileSync, mkdirSync, writeFileSync } = require('node:fs');
@@ -86,6 +86,14 @@ function compilerOf(folder: string, files: Record<string, string>): string {
       const file = ${JSON.stringify(folder)} + '/' + name;
       mkdirSync(require('node:path').dirname(file), { recursive: true });
       writeFileSync(file, text);
+    }
+    const option = (name) => process.argv[process.argv.indexOf(name) + 1];
+    if (process.argv.includes('-w')) setInterval(() => {}, 1e6);
+    if (process.argv.includes('--port')) {
+      require('node:http').createServer(async (request, response) => {
+        const answer = request.url.startsWith('/api/') && await fetch(process.env.API_URL + request.url);
+        response.end(answer ? await answer.text() : '');
+      }).listen(Number(option('--port')), option('--host'));
     }
   `;
 }
@@ -98,6 +106,9 @@ export function makeStandInCheckout() {
   write(folder, {
     'package-lock.json': '{ "lockfileVersion": 3, "packages": {} }',
     'node_modules/.package-lock.json': '{ "packages": {} }',
+    'package.json': readFileSync(path.join(root, 'package.json'), 'utf8'),
+    'backend/dist/package.json': '{}', // the stand-ins are CommonJS
+    'fake-services/dist/package.json': '{}',
     'node_modules/.bin/tsc': compilerOf(folder, programs),
     'node_modules/.bin/vite': compilerOf(folder, page),
     'node_modules/.bin/eslint': `process.exit(require('node:fs').existsSync('lint-fault') ? 1 : 0);`,

@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process';
 import { chmodSync, existsSync, readFileSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import net from 'node:net';
 import path from 'node:path';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import { describeProcess } from '../../backend/scripts/lib/process-identity.mjs';
 import { ready, stop, useCheckout } from './checkout-fixture.js';
 import { listProcessesOf, readAddresses } from './command-run.js';
@@ -34,7 +34,6 @@ describe('npm start', () => {
     expect(demo).toEqual([
       { email: 'ana@example.test', password: 'demo-word', role: 'desk', organization: 'Lakeview' },
     ]);
-    expect(command.output()).toContain('demo-word');
     const { role, environment } = await checkout.ask();
     expect(role).toBe('holdwater_app');
     expect(environment).toMatchObject({ HOLDWATER_MODE: 'demo', HOST: '127.0.0.1', DATABASE_URL: database, TZ: 'UTC' });
@@ -47,6 +46,7 @@ describe('npm start', () => {
     // 127.0.0.1 in hexadecimal, in the machine's byte order.
     for (const listener of listeners) expect(listener).toMatch(/^0100007F:/);
     expect(await stop(command)).toBe(0);
+    expect(command.output()).toMatch(/demo-word/);
     expect(existsSync(addressesFile())).toBe(false);
     expect(listProcessesOf(checkout.folder)).toEqual([]);
   });
@@ -147,6 +147,14 @@ describe('npm start', () => {
     expect(command.output()).toContain('a line of the server');
     expect(existsSync(addressesFile())).toBe(false);
     expect(listProcessesOf(checkout.folder)).toEqual([]);
+  });
+
+  it.each(['SIGTERM', 'SIGKILL'] as const)('ends everything when npm gets %s', async (signal) => {
+    const command = checkout.run('start');
+    await command.until(ready);
+    command.signal(signal);
+    await vi.waitFor(() => expect(listProcessesOf(checkout.folder)).toEqual([]), { timeout: 20_000 });
+    expect(existsSync(addressesFile())).toBe(false);
   });
 
   it('says what is wrong with PORT', async () => {

@@ -4,6 +4,8 @@ import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { listProcessesOf, runCommand } from './command-run.js';
 import { makeStandInCheckout } from './stand-in-checkout.js';
 
+vi.setConfig({ testTimeout: 240_000, hookTimeout: 240_000 });
+
 const report = (...statuses: string[]) =>
   JSON.stringify({
     testResults: [

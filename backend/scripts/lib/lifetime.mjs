@@ -1,4 +1,5 @@
 import { constants } from 'node:os';
+import { watchNpm } from './npm-watch.mjs';
 import { reportFailure, say } from './problem.mjs';
 
 /**
@@ -57,6 +58,11 @@ export function runCommandLine(main, { exitCodeWhenStopped } = {}) {
       lifetime.end(exitCodeWhenStopped ?? 128 + constants.signals[signal]);
     });
   }
+  watchNpm(() => {
+    if (ended) return;
+    say('\nStopping, because npm was stopped …');
+    lifetime.end(exitCodeWhenStopped ?? 1);
+  });
   process.stdout.on('error', (error) => endOnClosedOutput(error, lifetime));
   main(lifetime).then(
     (code) => lifetime.end(code ?? 0),

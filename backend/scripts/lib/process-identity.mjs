@@ -2,6 +2,7 @@ import { readFileSync, readlinkSync } from 'node:fs';
 import path from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 
+const parentField = 4;
 const startTicksField = 22;
 const checkMs = 50;
 
@@ -13,16 +14,27 @@ function readProcFile(pid, name) {
   }
 }
 
+/** The fields of /proc/…/stat from the third on, by their number in proc(5); null when there is no such process. */
+function findStat(pid) {
+  const stat = readProcFile(pid, 'stat');
+  if (stat === null) return null;
+  // The second field is the program's name in brackets and may hold spaces: count from behind it.
+  const fields = stat.slice(stat.lastIndexOf(')') + 2).split(' ');
+  const isDead = fields[0] === 'Z' || fields[0] === 'X';
+  return isDead ? null : (number) => Number(fields[number - 3]);
+}
+
 /**
  * When the process began, in clock ticks since boot (proc(5), stat field 22), or null when there is none. With the number of
  * the process it names one process for good, however often the system gives the number out again. Zombies do not count.
  */
 export function findStartTicks(pid) {
-  const stat = readProcFile(pid, 'stat');
-  if (stat === null) return null;
-  // The second field is the program's name in brackets and may hold spaces: count from behind it.
-  const fields = stat.slice(stat.lastIndexOf(')') + 2).split(' ');
-  return fields[0] === 'Z' || fields[0] === 'X' ? null : Number(fields[startTicksField - 3]);
+  return findStat(pid)?.(startTicksField) ?? null;
+}
+
+/** The number of the process's parent, or null when there is no such process. */
+export function findParent(pid) {
+  return findStat(pid)?.(parentField) ?? null;
 }
 
 /** The process's command line with spaces between its words; empty when there is no such process. */

@@ -45,7 +45,10 @@ export class AccountsQueries {
        WHERE m.organization_id IN (:organizationIds) AND NOT m.is_disabled AND NOT p.is_disabled
          ${roles ? 'AND m.roles && ARRAY[:roles]::text[]' : ''}
        ORDER BY p.name, p.id`,
-      { replacements: { organizationIds: [...organizationIds], ...(roles && { roles: [...roles] }) }, type: QueryTypes.SELECT },
+      {
+        replacements: { organizationIds: [...organizationIds], ...(roles && { roles: [...roles] }) },
+        type: QueryTypes.SELECT,
+      },
     );
   }
 
@@ -53,10 +56,13 @@ export class AccountsQueries {
   async getPersons(ids: readonly string[]): Promise<Map<string, PersonFacts>> {
     const wanted = [...new Set(ids)];
     if (wanted.length === 0) return new Map();
-    const found = await this.sequelize.query<PersonFacts>(`SELECT ${personColumns} FROM persons p WHERE p.id IN (:wanted)`, {
-      replacements: { wanted },
-      type: QueryTypes.SELECT,
-    });
+    const found = await this.sequelize.query<PersonFacts>(
+      `SELECT ${personColumns} FROM persons p WHERE p.id IN (:wanted)`,
+      {
+        replacements: { wanted },
+        type: QueryTypes.SELECT,
+      },
+    );
     return mapOfAll(wanted, found);
   }
 

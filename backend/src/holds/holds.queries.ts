@@ -77,4 +77,10 @@ export class HoldsQueries {
   async lockStanding(lotId: string, unitNumber: number, stageCode: string, system: System): Promise<HoldModel | null> {
     return this.holds.findOne({ where: { lotId, unitNumber, stageCode, system, state: 'standing' }, lock: true });
   }
+
+  /** How many tests of this unit, stage and system there were. */
+  async lastOrdinal(lotId: string, unitNumber: number, stageCode: string, system: System): Promise<number> {
+    const last = await this.holds.max<number | null, HoldModel>('ordinal', { where: { lotId, unitNumber, stageCode, system } });
+    return last ?? 0;
+  }
 }

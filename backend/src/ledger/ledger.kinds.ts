@@ -8,11 +8,14 @@ export interface LedgerPayloads {
   'person-changed': { personId: string; roles?: string[]; isDisabled?: boolean };
   'invitation-withdrawn': { email: string };
   'operator-joined': { personId: string };
+  'password-changed': { personId: string };
+  'session-reused': { personId: string };
   'rule-card-drafted': { ruleCardId: string; version: number };
   'rule-card-published': { ruleCardId: string; version: number; effectiveFrom: string };
   'closure-added': { date: string; from: string | null; to: string | null; why: string };
   'closure-removed': { date: string };
   'tract-added': { name: string };
+  'tract-changed': { name: string; fields: string[] };
   'lot-added': { number: string; address: string; builderId: string };
   'lot-changed': { fields: string[]; permitStatus?: string; permitNumber?: string | null };
   'geometry-set': { unitNumber: number };

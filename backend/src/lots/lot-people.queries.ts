@@ -3,6 +3,7 @@ import { InjectConnection } from '@nestjs/sequelize';
 import type { MemberRole } from '@holdwater/shared-types/accounts/roles.js';
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
+import { groupBy } from './group-by.js';
 
 /** A person one talks to at a party of a lot. */
 export interface LotPerson {
@@ -32,12 +33,6 @@ export class LotPeopleQueries {
        ORDER BY p.name, p.id`,
       { replacements: { organizationIds: [...organizationIds], roles: [...roles] }, type: QueryTypes.SELECT },
     );
-    const byOrganization = new Map<string, LotPerson[]>();
-    for (const person of found) {
-      const others = byOrganization.get(person.organizationId);
-      if (others) others.push(person);
-      else byOrganization.set(person.organizationId, [person]);
-    }
-    return byOrganization;
+    return groupBy(found, ({ organizationId }) => organizationId);
   }
 }

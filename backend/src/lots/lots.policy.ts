@@ -35,6 +35,11 @@ export function isImpartialInspectorOf(actor: Actor, lot: LotParties): boolean {
   return hasRole(actor, lot.departmentId, 'inspector') && !isMember(actor, lot.builderId) && !isMember(actor, lot.plumberId);
 }
 
+/** A new lot is its builder's. */
+export function canAddLots(actor: Actor, builderId: string): boolean {
+  return hasRole(actor, builderId, 'superintendent');
+}
+
 export function canEditLot(actor: Actor, lot: LotParties): boolean {
   return isSuperintendentOf(actor, lot);
 }

@@ -8,6 +8,8 @@ export interface VisitEventFacts {
   calendarSequence: number;
   inspectorName: string | null;
   plannedStartAt: string | null;
+  /** An inspector the visit was taken from (moved to another, not reached): their calendar entry goes too. */
+  formerInspectorId?: string | null;
 }
 
 type VisitEvent = { visit: VisitEventFacts };
@@ -30,9 +32,10 @@ export interface OutboxPayloads extends Record<NoticeKind, object> {
   'correction-reopened': { correctionId: string; number: number; why: string };
   'correction-accepted': { correctionId: string; number: number };
   comment: { commentId: string; excerpt: string };
-  'consent-asked': { organizationId: string; kind: string };
-  'consent-given': { organizationId: string; kind: string };
-  'consent-refused': { organizationId: string; kind: string; why: string | null };
+  /** `lotCount` lots at once, the event's own lot being the first of them. */
+  'consent-asked': { organizationId: string; kind: string; lotCount: number };
+  'consent-given': { organizationId: string; kind: string; lotCount: number };
+  'consent-refused': { organizationId: string; kind: string; why: string | null; lotCount: number };
   'rule-card-published': { ruleCardId: string; departmentId: string; version: number; effectiveFrom: string };
   /** Mail of an account to one address. The link's secret is sealed, never readable in the table. */
   'account-mail': {

@@ -1,21 +1,21 @@
 import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
-import { stateAfter, type VisitMove } from '@holdwater/shared-types/visits/visit.states.js';
+import { stateAfter, type VisitMove, type VisitState } from '@holdwater/shared-types/visits/visit.states.js';
 import { ClearancesService } from '../clearances/clearances.service.js';
 import type { Actor } from '../common/access/actor.js';
 import { Changes } from '../common/changes/changes.js';
 import { refuse } from '../common/errors/app-error.js';
 import { Clock } from '../common/time/clock.js';
-import { canReadLot } from '../lots/lots.policy.js';
+import { canReadLot, type LotParties } from '../lots/lots.policy.js';
+import { LotsQueries } from '../lots/lots.queries.js';
 import { nextCalendarSequence } from './calendar-sequence.js';
 import { consequencesOf, type VisitChanges } from './move-consequences.js';
-import { type VisitLot, VisitLotQueries } from './visit-lot.queries.js';
 import { VisitModel } from './visit.model.js';
 
 export interface LockedVisit {
   visit: VisitModel;
   /** Its parties; `departmentId` is the visit's own department. */
-  lot: VisitLot;
+  lot: LotParties;
 }
 
 export interface MoveOptions {
@@ -29,7 +29,7 @@ export interface MoveOptions {
 export class VisitMoves {
   constructor(
     @InjectModel(VisitModel) private readonly visits: typeof VisitModel,
-    private readonly lots: VisitLotQueries,
+    private readonly lots: LotsQueries,
     private readonly clearances: ClearancesService,
     private readonly changes: Changes,
     private readonly clock: Clock,
@@ -38,9 +38,14 @@ export class VisitMoves {
   /** The visit with its row locked until the end of the transaction. Throws `not-found` unless the actor may read its lot. */
   async lockVisit(actor: Actor, visitId: string): Promise<LockedVisit> {
     const visit = (await this.findLocked(visitId)) ?? refuse('not-found');
-    const lot = await this.lots.getLotOf(visit);
+    const lot = await this.partiesOf(visit);
     if (!canReadLot(actor, lot)) refuse('not-found');
     return { visit, lot };
+  }
+
+  /** The parties a visit's policies look at. */
+  async partiesOf(visit: Pick<VisitModel, 'lotId' | 'departmentId'>): Promise<LotParties> {
+    return { ...(await this.lots.partiesOf(visit.lotId)), departmentId: visit.departmentId };
   }
 
   /** As `lockVisit`, for acts without a person. */
@@ -54,9 +59,7 @@ export class VisitMoves {
    * of its units out anew. Ledger and outbox are the caller's. Changes the given instance too.
    */
   async apply(visit: VisitModel, move: VisitMove, { expectedVersion, changes = {} }: MoveOptions): Promise<VisitModel> {
-    const to = stateAfter(visit.state, move, visit.begunFrom ?? 'booked');
-    const isOtherVersion = expectedVersion !== null && expectedVersion !== visit.version;
-    if (to === null || isOtherVersion) return refuseStale(visit);
+    const to = this.requireCurrent(visit, move, expectedVersion);
     const values = { ...consequencesOf(move, visit.state, to, this.clock.now()), ...changes, state: to, version: visit.version + 1 };
     const calendarSequence = nextCalendarSequence(visit, {
       state: to,
@@ -68,6 +71,13 @@ export class VisitMoves {
     visit.set({ ...values, calendarSequence });
     await this.afterChange(visit);
     return visit;
+  }
+
+  /** Where a move would lead. Throws `stale-state` as `apply` does; for acts that have more to ask before they change anything. */
+  requireCurrent(visit: VisitModel, move: VisitMove, expectedVersion: number | null): VisitState {
+    const to = stateAfter(visit.state, move, visit.begunFrom ?? 'booked');
+    const isOtherVersion = expectedVersion !== null && expectedVersion !== visit.version;
+    return to === null || isOtherVersion ? refuseStale(visit) : to;
   }
 
   /** What every change of a visit brings with it: the plumbing state of its units, and the pages that look at its lot. */

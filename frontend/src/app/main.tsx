@@ -3,6 +3,7 @@ import { createRoot } from 'react-dom/client';
 import { startI18n } from '../lib/i18n';
 import '../theme/sheet.css';
 import './layout/layout.css';
+import './layout/tables.css';
 import { Providers } from './providers';
 import { App } from './router';
 

@@ -5,13 +5,8 @@ import { AppLayout } from './layout/app-layout';
 import { OpenLayout } from './layout/open-layout';
 import { NotFoundPage } from './not-found-page';
 import { RouteError } from './route-error';
+import type { RouteHandle } from './route-handle';
 import { SignedIn } from './signed-in';
-
-/** What the layout needs to know of a route. */
-export interface RouteHandle {
-  /** One thing is done here: on a phone the page's own head with its arrow stands alone, without ribbon and bars. */
-  readonly isTask?: boolean;
-}
 
 type Page = ComponentType<Record<never, never>>;
 

@@ -46,7 +46,19 @@ function boxClass({ error, labelPlace, isNumeral, isEntry }: FieldProps): string
 
 /** A ruled field: label, control, unit, and beneath it what is wrong with the likely fix. */
 export function Field(props: FieldProps): ReactNode {
-  const { label, labelPlace = 'above', unit, error, fix, hint, isOptional, isNumeral, isEntry, trailing, ...rest } = props;
+  const {
+    label,
+    labelPlace = 'above',
+    unit,
+    error,
+    fix,
+    hint,
+    isOptional,
+    isNumeral,
+    isEntry: _isEntry,
+    trailing,
+    ...rest
+  } = props;
   const { children, ref, id: ownId, ...input } = rest;
   const made = useId();
   const { t } = useTranslation('marks');

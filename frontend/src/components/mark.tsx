@@ -33,7 +33,7 @@ function markNumber(name: MarkName, number: number): ReactNode {
       x="10"
       y="15.4"
       textAnchor="middle"
-      className={`mark-no${two} ${name === 'correction-open' ? 'on-red' : ''}`}
+      className={`mark-no${two} ${name === 'correction-open' ? 'on-red' : 'on-brass'}`}
     >
       {number}
     </text>

@@ -52,12 +52,7 @@ export const otherGlyphs = {
   ),
   'no-signal': (
     <>
-      <path
-        d="M4.2 16v-3M8.2 16V9.6M12.2 16V6M16.2 16V3"
-        stroke="var(--ink)"
-        strokeWidth="2.1"
-        opacity=".45"
-      />
+      <path d="M4.2 16v-3M8.2 16V9.6M12.2 16V6M16.2 16V3" stroke="var(--ink)" strokeWidth="2.1" opacity=".45" />
       <path d="M2.4 3.6 17.6 17.4" stroke="var(--ink)" strokeWidth="1.9" />
     </>
   ),

@@ -8,13 +8,7 @@ export const tornTagPath = 'M3.2 9.6 9.4 3.4H17V18.2l-2.3-2.1-2.3 2.1-2.3-2.1-2.
 function hung(color: string, hole: string): ReactNode {
   return (
     <>
-      <path
-        d="M8.7 8.5C6.4 7.6 3.4 5 1.2 1.2"
-        fill="none"
-        stroke={color}
-        strokeWidth="1.5"
-        strokeLinecap="round"
-      />
+      <path d="M8.7 8.5C6.4 7.6 3.4 5 1.2 1.2" fill="none" stroke={color} strokeWidth="1.5" strokeLinecap="round" />
       <circle cx="8.7" cy="8.5" r="2" fill={hole} />
     </>
   );

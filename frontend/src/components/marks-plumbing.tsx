@@ -68,9 +68,7 @@ export const plumbingGlyphs = {
       />
     </>
   ),
-  'correction-open': (
-    <path d={triangle} fill="var(--red)" stroke="var(--red)" strokeWidth="1" strokeLinejoin="round" />
-  ),
+  'correction-open': <path d={triangle} fill="var(--red)" stroke="var(--red)" strokeWidth="1" strokeLinejoin="round" />,
   'correction-fixed': (
     <>
       <path d="M6 9.6h8L18 16.9H2Z" fill="var(--brassFill)" />

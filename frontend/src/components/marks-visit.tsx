@@ -4,12 +4,7 @@ const rim = 'M3.6 3H6.6M13.4 3H16.4';
 const stroke = { fill: 'none', strokeWidth: 1.6, strokeLinecap: 'round', strokeLinejoin: 'round' } as const;
 
 function fluid(top: number): ReactNode {
-  return (
-    <path
-      d={`M6.8 ${top}h6.4V15.4a1.2 1.2 0 0 1-1.2 1.2H8a1.2 1.2 0 0 1-1.2-1.2Z`}
-      fill="var(--water)"
-    />
-  );
+  return <path d={`M6.8 ${top}h6.4V15.4a1.2 1.2 0 0 1-1.2 1.2H8a1.2 1.2 0 0 1-1.2-1.2Z`} fill="var(--water)" />;
 }
 
 function vessel(color: string, inside?: ReactNode, dashed = false): ReactNode {

@@ -30,15 +30,7 @@ export interface SlipProps {
   style?: CSSProperties;
 }
 
-const closedStates: readonly MarkName[] = [
-  'pass',
-  'fail',
-  'not-ready',
-  'no-access',
-  'withdrawn',
-  'declined',
-  'freed',
-];
+const closedStates: readonly MarkName[] = ['pass', 'fail', 'not-ready', 'no-access', 'withdrawn', 'declined', 'freed'];
 
 /** A visit: a ruled slip with a sight glass on its left edge, as full as the share of systems standing. */
 export function Slip(props: SlipProps): ReactNode {
@@ -66,7 +58,18 @@ export function Slip(props: SlipProps): ReactNode {
   );
 }
 
-function SlipInside({ title, place, time, state, share = 0, word, tone, waits, corrections, form }: SlipProps): ReactNode {
+function SlipInside({
+  title,
+  place,
+  time,
+  state,
+  share = 0,
+  word,
+  tone,
+  waits,
+  corrections,
+  form,
+}: SlipProps): ReactNode {
   const { t } = useTranslation('marks');
   return (
     <>

@@ -48,7 +48,10 @@ export function HeadChain({ rows, scale, levelFt }: ChainProps): ReactNode {
   const wordsOf = useRowWords();
   const at = scale.frame.left + scale.frame.width + 2;
   const levelY = levelFt === null ? null : scale.y(levelFt);
-  const places = labelPlaces(rows.map((row) => scale.y(row.heightFt)), levelY);
+  const places = labelPlaces(
+    rows.map((row) => scale.y(row.heightFt)),
+    levelY,
+  );
   const slash = (y: number): string => `M${at - 3.5} ${y + 3.5}l7-7`;
   return (
     <g>

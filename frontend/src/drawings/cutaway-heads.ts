@@ -27,10 +27,17 @@ export interface HeadRow {
  * Heads from the top down: attic, floors, the lowest plug. The plan's answer where there is one; else the level less the
  * height, at 0.433 psi per foot. Empty without a level and without a plan.
  */
-export function headRows(house: DrawnHouse, levelFt: number | null, levels: readonly PlanLevel[], plugName: string | null): HeadRow[] {
+export function headRows(
+  house: DrawnHouse,
+  levelFt: number | null,
+  levels: readonly PlanLevel[],
+  plugName: string | null,
+): HeadRow[] {
   if (levelFt === null && levels.length === 0) return [];
   const row = (kind: HeadRow['kind'], name: string, heightFt: number): HeadRow => {
-    const planned = levels.find((level) => level.name === name && Math.abs(level.elevationFt - house.datumFt - heightFt) < 0.01);
+    const planned = levels.find(
+      (level) => level.name === name && Math.abs(level.elevationFt - house.datumFt - heightFt) < 0.01,
+    );
     const headFt = levelFt === null ? null : Math.max(0, levelFt - heightFt);
     return {
       key: `${kind}-${name}`,

@@ -10,12 +10,7 @@ export function LevelLine({ scale, levelFt }: { scale: CutawayScale; levelFt: nu
   return (
     <g fill="none" stroke="var(--water)">
       <path d={`M${scale.x(-0.2)} ${y}H${scale.x(31.4)}`} strokeWidth="1.3" strokeDasharray="9 3" />
-      <path
-        d={`M${sign - 7} ${y - 12}h14l-7 11Z`}
-        fill="var(--paper)"
-        strokeWidth="1.8"
-        strokeLinejoin="round"
-      />
+      <path d={`M${sign - 7} ${y - 12}h14l-7 11Z`} fill="var(--paper)" strokeWidth="1.8" strokeLinejoin="round" />
       <path d={`M${sign - 5.5} ${y + 4}h11M${sign - 2.5} ${y + 7.5}h5`} strokeWidth="1.5" />
     </g>
   );
@@ -27,11 +22,7 @@ export function AtticCut({ scale, cutFt }: { scale: CutawayScale; cutFt: number 
   const y = scale.y(cutFt);
   return (
     <g fill="none">
-      <path
-        d={`M${x - 10} ${y - 1}l20 -6M${x - 10} ${y + 6}l20 -6`}
-        stroke="var(--paper)"
-        strokeWidth="3.5"
-      />
+      <path d={`M${x - 10} ${y - 1}l20 -6M${x - 10} ${y + 6}l20 -6`} stroke="var(--paper)" strokeWidth="3.5" />
       <path d={`M${x - 11} ${y - 2}l22 -6.5`} stroke="var(--ink)" strokeWidth="1.3" />
     </g>
   );

@@ -1,6 +1,6 @@
 import { useId, type ReactNode } from 'react';
 import { round2 } from '../components/mark-geometry';
-import type { Opening, Run, Runs } from './cutaway-runs';
+import type { Opening, Run, Runs } from './cutaway-run';
 import { feetPath, type CutawayScale } from './cutaway-scale';
 
 interface PipesProps {

@@ -72,8 +72,17 @@ function Walls({ house, scale }: { house: DrawnHouse; scale: CutawayScale }): Re
     return { from: floor.heightFt, to: above ? above.heightFt - 1 : house.atticFt - 0.55, isOdd: index % 2 === 1 };
   });
   const stud = (at: number, wide: number, from: number, to: number): string =>
-    feetPath(scale, [[at, from], [at, to]]) + feetPath(scale, [[at + wide, from], [at + wide, to]]);
-  const outer = spans.map(({ from, to }) => stud(0, 0.46, from, to) + stud(houseWidthFt - 0.46, 0.46, from, to)).join('');
+    feetPath(scale, [
+      [at, from],
+      [at, to],
+    ]) +
+    feetPath(scale, [
+      [at + wide, from],
+      [at + wide, to],
+    ]);
+  const outer = spans
+    .map(({ from, to }) => stud(0, 0.46, from, to) + stud(houseWidthFt - 0.46, 0.46, from, to))
+    .join('');
   const inner = spans
     .flatMap(({ from, to, isOdd }) => (isOdd ? [15.5, 7.6] : [4, 13.2]).map((at) => stud(at, 0.4, from, to)))
     .join('');
@@ -96,8 +105,17 @@ function Roof({ house, scale }: { house: DrawnHouse; scale: CutawayScale }): Rea
     ]);
   const at = (x: number): number => eaveFt + Math.min(x, houseWidthFt - x) * slope;
   const webs =
-    feetPath(scale, [[0.4, atticFt], [7.5, at(7.5)], [10, atticFt], [15, at(15)], [17.6, atticFt]]) +
-    feetPath(scale, [[24.4, at(24.4)], [23, atticFt]]);
+    feetPath(scale, [
+      [0.4, atticFt],
+      [7.5, at(7.5)],
+      [10, atticFt],
+      [15, at(15)],
+      [17.6, atticFt],
+    ]) +
+    feetPath(scale, [
+      [24.4, at(24.4)],
+      [23, atticFt],
+    ]);
   return (
     <>
       <path d={side(1.6, 0) + side(1.75, 0.5)} fill="none" stroke="var(--ink)" strokeWidth="1" />

@@ -37,9 +37,7 @@ export function CutawayTwin({ rows, bare }: TwinProps): ReactNode {
           ))}
         </tbody>
       </table>
-      {bare ? (
-        <p>{t('cutaway.notUnderTest', { from: feetWords(bare.fromFt), to: feetWords(bare.toFt) })}</p>
-      ) : null}
+      {bare ? <p>{t('cutaway.notUnderTest', { from: feetWords(bare.fromFt), to: feetWords(bare.toFt) })}</p> : null}
     </div>
   );
 }

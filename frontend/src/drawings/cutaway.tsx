@@ -58,30 +58,59 @@ export function Cutaway(props: CutawayProps): ReactNode {
   const levelFt = method === null || isAir || fillLevelFt === null ? null : fillLevelFt - drawn.datumFt;
   const runs = useMemo(() => runsOf(drawn, method, levelFt), [drawn, method, levelFt]);
   const plug = [...house.plugs].sort((a, b) => a.elevationFt - b.elevationFt)[0] ?? null;
-  const rows = isWaterView || method === null ? [] : headRows(isGroundwork ? { ...drawn, floors: drawn.floors.slice(0, 1) } : drawn, levelFt, levels, plug?.name ?? null);
+  const rows =
+    isWaterView || method === null
+      ? []
+      : headRows(
+          isGroundwork ? { ...drawn, floors: drawn.floors.slice(0, 1) } : drawn,
+          levelFt,
+          levels,
+          plug?.name ?? null,
+        );
   const isBare = levelFt !== null && method !== 'sectional' && !isGroundwork && levelFt < drawn.ventFt - 0.05;
-  const name = levelFt !== null ? t('cutaway.atLevel', { feet: feetWords(levelFt) }) : t(isAir ? 'cutaway.underAir' : 'cutaway.noTest');
+  const name =
+    levelFt !== null
+      ? t('cutaway.atLevel', { feet: feetWords(levelFt) })
+      : t(isAir ? 'cutaway.underAir' : 'cutaway.noTest');
   const hatchFill = patterns.fill('not-under-test');
   const isRoomy = hasLabels && width >= 480;
   return (
     <figure className="drawing" ref={place}>
-      <svg width={width} height={scale.height} viewBox={`0 0 ${width} ${scale.height}`} aria-label={name} role={props.onTouch ? 'group' : 'img'}>
+      <svg
+        width={width}
+        height={scale.height}
+        viewBox={`0 0 ${width} ${scale.height}`}
+        aria-label={name}
+        role={props.onTouch ? 'group' : 'img'}
+      >
         {patterns.defs}
         <Structure house={drawn} scale={scale} soilFill={patterns.fill('soil')} isGroundwork={isGroundwork} />
-        {isWaterView || isGroundwork ? null : <WaterLines house={drawn} scale={scale} isOwnView={false} gaugeFt={null} />}
+        {isWaterView || isGroundwork ? null : (
+          <WaterLines house={drawn} scale={scale} isOwnView={false} gaugeFt={null} />
+        )}
         <Pipes runs={runs} scale={scale} levelFt={levelFt} isAir={isAir} isPale={isWaterView} hatchFill={hatchFill} />
         {isGroundwork ? null : <LaundryBox house={drawn} scale={scale} />}
         <TestPlug scale={scale} hatchFill={hatchFill} />
-        {isWaterView ? <WaterLines house={drawn} scale={scale} isOwnView gaugeFt={gaugeOf(house, drawn.datumFt)} /> : null}
+        {isWaterView ? (
+          <WaterLines house={drawn} scale={scale} isOwnView gaugeFt={gaugeOf(house, drawn.datumFt)} />
+        ) : null}
         {levelFt === null || isWaterView ? null : <LevelLine scale={scale} levelFt={levelFt} />}
         {isCut(method) && !isWaterView && drawn.cutFt !== null ? <AtticCut scale={scale} cutFt={drawn.cutFt} /> : null}
         {hasLabels ? <FeetRule house={drawn} scale={scale} /> : null}
         {hasLabels ? <HeadChain rows={rows} scale={scale} levelFt={isWaterView ? null : levelFt} /> : null}
         {isRoomy && !isWaterView ? (
-          <Callouts house={drawn} scale={scale} method={method} levelFt={levelFt} plugSizeIn={plug?.nominalIn ?? null} />
+          <Callouts
+            house={drawn}
+            scale={scale}
+            method={method}
+            levelFt={levelFt}
+            plugSizeIn={plug?.nominalIn ?? null}
+          />
         ) : null}
         <Keys {...props} scale={scale} />
-        {props.onTouch ? <TouchSurface frame={scale.frame} place={props.touched ?? null} onTouch={props.onTouch} /> : null}
+        {props.onTouch ? (
+          <TouchSurface frame={scale.frame} place={props.touched ?? null} onTouch={props.onTouch} />
+        ) : null}
       </svg>
       <CutawayTwin rows={rows} bare={isBare && levelFt !== null ? { fromFt: levelFt, toFt: drawn.ventFt } : null} />
       <KeyWords {...props} />
@@ -97,7 +126,10 @@ function gaugeOf(house: CutawayHouse, datumFt: number): number | null {
 /** Correction triangles, photo numbers, and the ring round a place just touched. */
 function Keys({ corrections = [], photos = [], touched, scale }: CutawayProps & { scale: CutawayScale }): ReactNode {
   const { frame } = scale;
-  const at = (place: TouchPlace): [number, number] => [frame.left + place.x * frame.width, frame.top + place.y * frame.height];
+  const at = (place: TouchPlace): [number, number] => [
+    frame.left + place.x * frame.width,
+    frame.top + place.y * frame.height,
+  ];
   return (
     <g>
       {touched ? (
@@ -112,7 +144,13 @@ function Keys({ corrections = [], photos = [], touched, scale }: CutawayProps & 
         />
       ) : null}
       {photos.map((photo) => (
-        <MarkAt key={`p${photo.number}`} name="photo" number={photo.number} x={at(photo)[0] - 10} y={at(photo)[1] - 10} />
+        <MarkAt
+          key={`p${photo.number}`}
+          name="photo"
+          number={photo.number}
+          x={at(photo)[0] - 10}
+          y={at(photo)[1] - 10}
+        />
       ))}
       {corrections.map((one) => {
         const [x, y] = at(one);

@@ -95,7 +95,14 @@ function Ticks({ max, increment = 1, size = 220, at, radius }: DialProps & { at:
   const numbers = Array.from({ length: Math.floor(max / major) + 1 }, (_, index) => index * major);
   return (
     <>
-      <path d={readings.filter((r) => !isMultiple(r, major)).map(line).join('')} stroke="var(--ink)" strokeWidth=".7" />
+      <path
+        d={readings
+          .filter((r) => !isMultiple(r, major))
+          .map(line)
+          .join('')}
+        stroke="var(--ink)"
+        strokeWidth=".7"
+      />
       <path d={numbers.map(line).join('')} stroke="var(--ink)" strokeWidth="1.6" />
       {numbers
         .filter((_, index) => !isSmall || index % 2 === 0)

@@ -111,9 +111,9 @@ export function findNext<T extends { middle: PlatPoint }>(all: readonly T[], fro
   return best;
 }
 
-/** A round number of feet that takes up about a quarter of the sheet. */
-export function scaleBarFt(widthFt: number): number {
-  const rough = widthFt / 4;
-  const steps = [20, 40, 60, 80, 120, 200, 300, 400, 600, 1000, 2000];
-  return [...steps].reverse().find((step) => step <= rough) ?? 20;
+const barSteps = [20, 40, 60, 80, 120, 200, 300, 400, 600, 1000, 2000, 4000];
+
+/** A round number of feet whose bar is long enough for its three numbers. */
+export function scaleBarFt(pxPerFt: number): number {
+  return barSteps.find((step) => step * pxPerFt >= 110) ?? 8000;
 }

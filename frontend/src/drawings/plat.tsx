@@ -1,8 +1,9 @@
 import type { ClearState } from '@holdwater/shared-types/clearances/clearance.rules.js';
 import { useId, useMemo, type KeyboardEvent, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
+import { North, PlatRoad, ScaleBar } from './plat-signs';
 import { PlatLot, type PlacedLot } from './plat-lot';
-import { boundsOf, findNext, inset, isWay, polygonPath, roomiestPoint, scaleBarFt, type PlatPoint } from './plat-geometry';
+import { boundsOf, findNext, inset, isWay, polygonPath, roomiestPoint, type PlatPoint } from './plat-geometry';
 import { usePatterns } from './patterns';
 import { useDrawnWidth } from './use-drawn-width';
 
@@ -35,17 +36,33 @@ const margin = 14;
 
 /** The plat of a tract: each lot in its plumbing state, one chosen. A list to assistive readers; arrow keys go to the lot beside. */
 export function Plat(props: PlatProps): ReactNode {
-  const { tract, lots, roads = [], otherParcels = [], chosen, onChoose, onOpen, northDegrees = 0, maxHeight = 560 } = props;
+  const {
+    tract,
+    lots,
+    roads = [],
+    otherParcels = [],
+    chosen,
+    onChoose,
+    onOpen,
+    northDegrees = 0,
+    maxHeight = 560,
+  } = props;
   const { t } = useTranslation('marks');
   const id = useId();
   const [place, width] = useDrawnWidth(760);
   const patterns = usePatterns(['waves', 'batt']);
   const all = useMemo(
-    () => boundsOf([...lots, ...otherParcels].flatMap((parcel) => parcel.polygon).concat(roads.flatMap((r) => r.centerline))),
+    () =>
+      boundsOf(
+        [...lots, ...otherParcels].flatMap((parcel) => parcel.polygon).concat(roads.flatMap((r) => r.centerline)),
+      ),
     [lots, otherParcels, roads],
   );
   const footer = 44;
-  const pxPerFt = Math.min((width - 2 * margin) / (all.maxX - all.minX), (maxHeight - 2 * margin - footer) / (all.maxY - all.minY));
+  const pxPerFt = Math.min(
+    (width - 2 * margin) / (all.maxX - all.minX),
+    (maxHeight - 2 * margin - footer) / (all.maxY - all.minY),
+  );
   const height = Math.ceil((all.maxY - all.minY) * pxPerFt + 2 * margin + footer);
   const toPx = ([x, y]: PlatPoint): PlatPoint => [margin + (x - all.minX) * pxPerFt, margin + (y - all.minY) * pxPerFt];
   const placed: PlacedLot[] = lots.map((lot) => {
@@ -70,16 +87,29 @@ export function Plat(props: PlatProps): ReactNode {
       >
         {patterns.defs}
         {otherParcels.map((parcel) => (
-          <path key={parcel.name} d={polygonPath(parcel.polygon.map(toPx))} fill="none" stroke="var(--rule2)" strokeDasharray="10 3 2 3" />
+          <path
+            key={parcel.name}
+            d={polygonPath(parcel.polygon.map(toPx))}
+            fill="none"
+            stroke="var(--rule2)"
+            strokeDasharray="10 3 2 3"
+          />
         ))}
         {placed.map((lot) => (
-          <PlatLot key={lot.id} lot={lot} id={optionId(lot.id)} isChosen={lot.id === chosen} fill={patterns.fill} onChoose={onChoose} />
+          <PlatLot
+            key={lot.id}
+            lot={lot}
+            id={optionId(lot.id)}
+            isChosen={lot.id === chosen}
+            fill={patterns.fill}
+            onChoose={onChoose}
+          />
         ))}
         {roads.map((road) => (
-          <Road key={road.name} name={road.name} line={road.centerline.map(toPx)} />
+          <PlatRoad key={road.name} name={road.name} line={road.centerline.map(toPx)} />
         ))}
         {chosenLot ? <Chosen lot={chosenLot} /> : null}
-        <ScaleBar x={margin} y={height - 10} widthFt={all.maxX - all.minX} pxPerFt={pxPerFt} />
+        <ScaleBar x={margin} y={height - 10} pxPerFt={pxPerFt} />
         <North x={width - margin - 22} y={height - 24} degrees={northDegrees} />
       </svg>
     </div>
@@ -112,72 +142,6 @@ function Chosen({ lot }: { lot: PlacedLot }): ReactNode {
     <g fill="none" stroke="var(--primer)" pointerEvents="none">
       <path d={polygonPath(lot.polygon)} strokeWidth="4" />
       <path d={polygonPath(inner)} strokeWidth="1.2" />
-    </g>
-  );
-}
-
-/** The centre line of a road with its name along the longest straight of it. */
-function Road({ name, line }: { name: string; line: readonly PlatPoint[] }): ReactNode {
-  let longest = { length: 0, x: 0, y: 0, degrees: 0 };
-  line.slice(1).forEach(([x1, y1], index) => {
-    const [x0, y0] = line[index] ?? [x1, y1];
-    const length = Math.hypot(x1 - x0, y1 - y0);
-    if (length <= longest.length) return;
-    const raw = (Math.atan2(y1 - y0, x1 - x0) * 180) / Math.PI;
-    const degrees = raw > 90 ? raw - 180 : raw <= -90 ? raw + 180 : raw;
-    longest = { length, x: (x0 + x1) / 2, y: (y0 + y1) / 2, degrees };
-  });
-  return (
-    <g aria-hidden="true" pointerEvents="none">
-      <path d={polygonPath(line, false)} fill="none" stroke="var(--rule2)" strokeDasharray="14 4 3 4" />
-      <text
-        className="street halo"
-        textAnchor="middle"
-        transform={`translate(${longest.x} ${longest.y + 5}) rotate(${longest.degrees} 0 -5)`}
-      >
-        {name}
-      </text>
-    </g>
-  );
-}
-
-function ScaleBar({ x, y, widthFt, pxPerFt }: { x: number; y: number; widthFt: number; pxPerFt: number }): ReactNode {
-  const { t } = useTranslation('marks');
-  const feet = scaleBarFt(widthFt);
-  const quarter = (feet * pxPerFt) / 4;
-  return (
-    <g aria-hidden="true">
-      <path
-        d={`M${x} ${y}h${quarter * 4}M${x} ${y}v-7M${x + quarter} ${y}v-4M${x + quarter * 2} ${y}v-7M${x + quarter * 3} ${y}v-4M${x + quarter * 4} ${y}v-7`}
-        fill="none"
-        stroke="var(--ink)"
-        strokeWidth="1.2"
-      />
-      <path d={`M${x} ${y}h${quarter}M${x + quarter * 2} ${y}h${quarter}`} stroke="var(--ink)" strokeWidth="4" />
-      <text className="m s12" x={x} y={y - 12}>
-        0
-      </text>
-      <text className="m s12" x={x + quarter * 2} y={y - 12} textAnchor="middle">
-        {feet / 2}
-      </text>
-      <text className="m s12" x={x + quarter * 4} y={y - 12} textAnchor="middle">
-        {t('plat.feet', { count: feet })}
-      </text>
-    </g>
-  );
-}
-
-function North({ x, y, degrees }: { x: number; y: number; degrees: number }): ReactNode {
-  const { t } = useTranslation('marks');
-  return (
-    <g aria-hidden="true" transform={`translate(${x} ${y})`}>
-      <g transform={`rotate(${degrees})`} fill="none" stroke="var(--ink)">
-        <path d="M0 20V-16M-6 -4 0 -18 6 -4" strokeWidth="1.4" />
-        <path d="M-10 7H10" strokeWidth="1.2" />
-      </g>
-      <text className="s12 b" x="12" y="-8">
-        {t('plat.north')}
-      </text>
     </g>
   );
 }

@@ -58,7 +58,12 @@ export function RunRoad(props: RunRoadProps): ReactNode {
   const layout = layOutRoad(places, miles, minHeight);
   const yOf = (id: string): number => layout.stops[stops.findIndex((stop) => stop.id === id)] ?? layout.top;
   return (
-    <div className="road" style={{ height: layout.height }} role="group" aria-label={t('road.name', { miles: miles.toFixed(1) })}>
+    <div
+      className="road"
+      style={{ height: layout.height }}
+      role="group"
+      aria-label={t('road.name', { miles: miles.toFixed(1) })}
+    >
       <svg width="210" height={layout.height} viewBox={`0 0 210 ${layout.height}`} aria-hidden="true">
         <MileRule layout={layout} miles={miles} />
         <Tarmac layout={layout} miles={miles} driven={drivenMiles} />
@@ -66,7 +71,9 @@ export function RunRoad(props: RunRoadProps): ReactNode {
           <Leader key={stop.id} stop={stop} roadY={layout.yOfMile(stop.atMile)} y={layout.stops[index] ?? 0} />
         ))}
         <Here y={layout.yOfMile(drivenMiles)} />
-        {endWords ? <path d={`M${roadX + 8} ${layout.yOfMile(miles)}h52`} stroke="var(--ink)" strokeWidth="1.2" /> : null}
+        {endWords ? (
+          <path d={`M${roadX + 8} ${layout.yOfMile(miles)}h52`} stroke="var(--ink)" strokeWidth="1.2" />
+        ) : null}
       </svg>
       <span className="hidden-words">{t('road.here', { miles: drivenMiles.toFixed(1) })}</span>
       <ol>

@@ -36,7 +36,12 @@ export function TouchSurface({ frame, place, onTouch }: TouchSurfaceProps): Reac
       onTouch(shown);
       return;
     }
-    const ways: Record<string, [number, number]> = { ArrowLeft: [-1, 0], ArrowRight: [1, 0], ArrowUp: [0, -1], ArrowDown: [0, 1] };
+    const ways: Record<string, [number, number]> = {
+      ArrowLeft: [-1, 0],
+      ArrowRight: [1, 0],
+      ArrowUp: [0, -1],
+      ArrowDown: [0, 1],
+    };
     const way = ways[event.key];
     if (!way) return;
     event.preventDefault();
@@ -45,9 +50,7 @@ export function TouchSurface({ frame, place, onTouch }: TouchSurfaceProps): Reac
   const [x, y] = [frame.left + shown.x * frame.width, frame.top + shown.y * frame.height];
   return (
     <>
-      {cross ? (
-        <path d={`M${x - 12} ${y}h24M${x} ${y - 12}v24`} stroke="var(--primer)" strokeWidth="2" />
-      ) : null}
+      {cross ? <path d={`M${x - 12} ${y}h24M${x} ${y - 12}v24`} stroke="var(--primer)" strokeWidth="2" /> : null}
       <rect
         className="touch"
         x={frame.left}

@@ -23,14 +23,22 @@ export interface DayDrawingProps {
 
 /** One day of the desk's ribbon: shelves, what stands on them, and now. */
 export function DayDrawing({ day, hours, isPast, nowFraction }: DayDrawingProps): ReactNode {
-  const rows = Math.max(1, ...day.shelves.map((shelf) => (shelf.row ?? 0) + 1), ...day.marks.map((m) => (m.row ?? 0) + 1));
+  const rows = Math.max(
+    1,
+    ...day.shelves.map((shelf) => (shelf.row ?? 0) + 1),
+    ...day.marks.map((m) => (m.row ?? 0) + 1),
+  );
   const topOf = (row = 0): number => (rows === 1 ? 12 : 4 + row * 23);
   const ticks = { '--half': `${50 / (hours.to - hours.from)}%`, '--hour': `${100 / (hours.to - hours.from)}%` };
   return (
     <span className="day-draw" aria-hidden="true">
       <span className="ticks" style={ticks as CSSProperties} />
       {(day.closures ?? []).map((span) => (
-        <span key={`${span.row}-${span.from}`} className="closure hatched" style={box(span, hours, topOf(span.row) - 1)} />
+        <span
+          key={`${span.row}-${span.from}`}
+          className="closure hatched"
+          style={box(span, hours, topOf(span.row) - 1)}
+        />
       ))}
       {day.shelves.map((shelf) => (
         <Shelf key={`${shelf.row}-${shelf.from}`} shelf={shelf} hours={hours} top={topOf(shelf.row)} isPast={isPast} />
@@ -125,7 +133,9 @@ export function SlimDayDrawing({ day }: { day: RibbonDay }): ReactNode {
   return (
     <span className="day-draw slim" aria-hidden="true">
       {marks.map((mark, index) => (
-        <Standing key={index} state={mark.mark} />
+        <span key={index}>
+          <Standing state={mark.mark} />
+        </span>
       ))}
     </span>
   );

@@ -1,10 +1,11 @@
 import { useRef, type KeyboardEvent, type PointerEvent, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Icon } from '../components/icon';
-import { Mark } from '../components/mark';
+import { RibbonColumn } from './week-ribbon-column';
 import { DayDrawing, SlimDayDrawing } from './week-ribbon-day';
 import type { RibbonDay, WeekRibbonProps } from './week-ribbon.types';
 
+export { RibbonEnd } from './ribbon-end';
 export type { RibbonDay, RibbonMark, RibbonShelf, WeekRibbonProps } from './week-ribbon.types';
 
 const daysInWeek = 5;
@@ -35,7 +36,7 @@ export function WeekRibbon(props: WeekRibbonProps): ReactNode {
       )}
       <div className="ribbon-days" onKeyDown={(event) => walk(event, onMove)} {...drag.handlers}>
         {days.map((day, index) => (
-          <Day
+          <RibbonColumn
             key={day.date}
             day={day}
             edges={edgesOf(days, index)}
@@ -53,7 +54,7 @@ export function WeekRibbon(props: WeekRibbonProps): ReactNode {
                 nowFraction={day.isToday ? nowFraction : undefined}
               />
             )}
-          </Day>
+          </RibbonColumn>
         ))}
       </div>
       {isPhone ? null : <Step word={t('ribbon.later')} icon="right" onStep={() => onMove(1)} />}
@@ -68,73 +69,6 @@ function Step({ word, icon, onStep }: { word: string; icon: 'left' | 'right'; on
       <Icon name={icon} size={18} />
     </button>
   );
-}
-
-interface DayProps {
-  day: RibbonDay;
-  edges: string;
-  hasGapAfter: boolean;
-  isTabStop: boolean;
-  onPick: (date: string) => void;
-  children: ReactNode;
-}
-
-function Day({ day, edges, hasGapAfter, isTabStop, onPick, children }: DayProps): ReactNode {
-  const { t, i18n } = useTranslation('marks');
-  const language = i18n.resolvedLanguage ?? 'en';
-  const words = dayWords(day, t);
-  return (
-    <>
-      <button
-        type="button"
-        className={`day ${day.isToday ? 'today' : ''} ${day.isClosed ? 'closed' : ''} ${edges}`}
-        aria-label={words}
-        aria-current={day.isToday ? 'date' : undefined}
-        aria-pressed={day.isBracketed ?? false}
-        tabIndex={isTabStop ? 0 : -1}
-        onClick={() => onPick(day.date)}
-      >
-        <DayHead day={day} language={language} note={t('ribbon.closed')} notUp={t('ribbon.notUp', { count: day.notUp })} />
-        {children}
-        {day.notUp > 0 ? <Mark name="waits-on" size={16} className="flag" /> : null}
-        <span className="hidden-words list-words" aria-hidden="true">
-          {words}
-        </span>
-      </button>
-      {hasGapAfter ? <span className={`ribbon-gap ${edges === 'covered' ? 'covered' : ''}`} /> : null}
-    </>
-  );
-}
-
-function DayHead(props: { day: RibbonDay; language: string; note: string; notUp: string }): ReactNode {
-  const { day, language, note, notUp } = props;
-  const at = new Date(`${day.date}T12:00:00Z`);
-  const format = (options: Intl.DateTimeFormatOptions): string =>
-    new Intl.DateTimeFormat(language, { ...options, timeZone: 'UTC' }).format(at);
-  const visits = day.visits ?? day.marks.length;
-  const isUrgent = day.isNoteUrgent ?? day.notUp > 0;
-  const shown = day.note ?? (day.isClosed ? note : day.notUp > 0 ? notUp : visits > 0 ? String(visits) : '');
-  return (
-    <span className="day-head" aria-hidden="true">
-      <span>
-        <span className="wide">{format({ weekday: 'short' })}</span>
-        <span className="slim">{format({ weekday: 'narrow' })}</span>
-        <span className="n">{format({ day: 'numeric' })}</span>
-      </span>
-      <span className={`note ${isUrgent ? 'brass' : ''}`}>{shown}</span>
-    </span>
-  );
-}
-
-type Translate = ReturnType<typeof useTranslation>['t'];
-
-/** "Wed, Apr 15, 4 visits, 2 not up" */
-function dayWords(day: RibbonDay, t: Translate): string {
-  const parts = [day.label, day.isToday ? t('ribbon.today') : '', day.isClosed ? t('ribbon.closed') : ''];
-  if (!day.isClosed) parts.push(t('ribbon.visits', { count: day.visits ?? day.marks.length }));
-  if (day.notUp > 0) parts.push(t('ribbon.notUp', { count: day.notUp }));
-  else if (day.note && !day.isClosed) parts.push(day.note);
-  return parts.filter((part) => part !== '').join(', ');
 }
 
 function edgesOf(days: readonly RibbonDay[], index: number): string {
@@ -195,19 +129,4 @@ function useDrag(onMove: (weeks: number) => void): Drag {
       },
     },
   };
-}
-
-/** What waits on you, for the right end of the ribbon: a lozenge, a count in words, two lines. */
-export function RibbonEnd({ title, lines }: { title: ReactNode; lines: readonly ReactNode[] }): ReactNode {
-  return (
-    <>
-      <span className="st">
-        <Mark name="waits-on-you" />
-        <span>{title}</span>
-      </span>
-      {lines.slice(0, 2).map((line, index) => (
-        <div key={index}>{line}</div>
-      ))}
-    </>
-  );
 }

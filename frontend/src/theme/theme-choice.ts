@@ -52,7 +52,11 @@ function subscribe(listener: () => void): () => void {
 }
 
 /** The chosen theme, the theme drawn, and the way to choose another. */
-export function useThemeChoice(): { choice: ThemeChoice; theme: ThemeName; chooseTheme: (choice: ThemeChoice) => void } {
+export function useThemeChoice(): {
+  choice: ThemeChoice;
+  theme: ThemeName;
+  chooseTheme: (choice: ThemeChoice) => void;
+} {
   const choice = useSyncExternalStore(subscribe, () => current);
   const theme = useSyncExternalStore(subscribe, () => resolveTheme(current));
   return { choice, theme, chooseTheme };

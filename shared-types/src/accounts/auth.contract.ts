@@ -84,6 +84,7 @@ export const readInvitation = route({
   status: 200,
   body: z.strictObject({ token: linkToken }),
   answer: z.object({
+    /** Empty for the installation's first operator, who names it. */
     email: z.string(),
     name: z.string(),
     /** Null for the installation's first operator. */
@@ -99,7 +100,14 @@ export const acceptInvitation = route({
   path: '/api/auth/invitation/accept',
   summary: 'Join the organization; a new person chooses name and password',
   status: 200,
-  body: z.strictObject({ token: linkToken, name: line(120).optional(), password: z.string().max(256).optional(), locale: locale.optional() }),
+  body: z.strictObject({
+    token: linkToken,
+    /** Needed where the invitation names no address: the installation's first operator. */
+    email: email.optional(),
+    name: line(120).optional(),
+    password: z.string().max(256).optional(),
+    locale: locale.optional(),
+  }),
   answer: session,
 });
 

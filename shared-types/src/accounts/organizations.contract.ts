@@ -1,7 +1,8 @@
 import { z } from 'zod';
-import { email, id, instant, line, phone } from '../common/fields.js';
+import { email, id, instant, line, phone, zone } from '../common/fields.js';
 import { done, pageOf, pageQuery } from '../common/paging.js';
 import { route } from '../common/route.js';
+import { siteElevationFt } from '../hydraulics/field-kinds.js';
 import { organizationBrief } from './person.contract.js';
 import { memberRole, organizationKind } from './roles.js';
 
@@ -33,12 +34,30 @@ export const listOrganizations = route({
   answer: pageOf(organizationBrief),
 });
 
+const newOrganization = z
+  .strictObject({
+    name: line(120),
+    kind: organizationKind,
+    phone: phone.optional(),
+    ownerEmail: email,
+    ownerName: line(120),
+    /** A department's own; others have neither. */
+    zone: zone.optional(),
+    elevationFt: siteElevationFt.optional(),
+  })
+  .superRefine((organization, ctx) => {
+    if (organization.kind !== 'department') return;
+    for (const path of ['zone', 'elevationFt'] as const) {
+      if (organization[path] === undefined) ctx.addIssue({ code: 'custom', message: 'required', path: [path] });
+    }
+  });
+
 export const createOrganization = route({
   method: 'POST',
   path: '/api/organizations',
   summary: 'Operator: add an organization and invite its first owner',
   status: 201,
-  body: z.strictObject({ name: line(120), kind: organizationKind, phone: phone.optional(), ownerEmail: email, ownerName: line(120) }),
+  body: newOrganization,
   answer: organizationBrief,
 });
 

@@ -31,6 +31,7 @@ export const errorCatalogue = {
   'no-rule-card': 409,
   // lots
   'lot-number-taken': 409,
+  'tract-name-taken': 409,
   'party-pending': 409,
   'party-already-attached': 409,
   'party-has-visit': 409,

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { type z } from 'zod';
 import { dwvMethods } from '../holds/hold.states.js';
 import { dwvRule } from './dwv-rule.js';
 import {

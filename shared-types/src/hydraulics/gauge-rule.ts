@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { type z } from 'zod';
 import { list, optional, positive, strict } from './field-kinds.js';
 import { hydraulicLimits } from './hydraulic-limits.js';
 import { isAbove } from './tolerance.js';

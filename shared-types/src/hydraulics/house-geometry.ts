@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { type z } from 'zod';
 import { notNegative, number, optional, positive, siteElevationFt, strict } from './field-kinds.js';
 import { dwvHouseShape, materialList } from './house-fields.js';
 import {

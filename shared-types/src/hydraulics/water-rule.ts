@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import { type z } from 'zod';
 import { media } from '../holds/hold.states.js';
 import { choice, defaulted, flag, list, notNegative, optional, strict } from './field-kinds.js';
 import { gaugeIncrements } from './gauge-rule.js';

@@ -4,7 +4,12 @@ import { z } from 'zod';
 import { Clock } from '../../common/time/clock.js';
 
 /** What a good access token is; everything else is refused. */
-export const accessTokenRules = { algorithm: 'HS256', issuer: 'holdwater', audience: 'holdwater-api', minutes: 10 } as const;
+export const accessTokenRules = {
+  algorithm: 'HS256',
+  issuer: 'holdwater',
+  audience: 'holdwater-api',
+  minutes: 10,
+} as const;
 
 const claims = z.object({ sub: z.uuid(), sid: z.uuid(), iat: z.number(), exp: z.number() });
 
@@ -26,7 +31,10 @@ export class AccessTokens {
     const issuedAt = this.seconds();
     const exp = issuedAt + accessTokenRules.minutes * 60;
     const { algorithm, issuer, audience } = accessTokenRules;
-    const accessToken = this.jwt.sign({ sub: personId, sid: sessionId, iat: issuedAt, exp }, { algorithm, issuer, audience });
+    const accessToken = this.jwt.sign(
+      { sub: personId, sid: sessionId, iat: issuedAt, exp },
+      { algorithm, issuer, audience },
+    );
     return { accessToken, expiresAt: new Date(exp * 1000) };
   }
 
@@ -34,7 +42,9 @@ export class AccessTokens {
   find(token: string): AccessClaims | null {
     const { algorithm, issuer, audience } = accessTokenRules;
     try {
-      return this.findClaims(this.jwt.verify<object>(token, { algorithms: [algorithm], issuer, audience, ignoreExpiration: true }));
+      return this.findClaims(
+        this.jwt.verify<object>(token, { algorithms: [algorithm], issuer, audience, ignoreExpiration: true }),
+      );
     } catch {
       // a token that cannot be read is no token
       return null;

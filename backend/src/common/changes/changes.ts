@@ -13,6 +13,14 @@ export interface LotChange {
 
 export const LOT_CHANGED = 'lot.changed';
 
+/** A person has something new to fetch. */
+export interface PersonTold {
+  readonly personId: string;
+  readonly what: 'notices';
+}
+
+export const PERSON_TOLD = 'person.told';
+
 /** Tells, once a change is there to stay, whoever listens inside this process; the sockets carry it on. */
 @Injectable()
 export class Changes {
@@ -23,5 +31,9 @@ export class Changes {
 
   lot(lotId: string, ...topics: ChangeTopic[]): void {
     this.unitOfWork.afterCommit(() => this.events.emit(LOT_CHANGED, { lotId, topics } satisfies LotChange));
+  }
+
+  person(personId: string, what: PersonTold['what']): void {
+    this.unitOfWork.afterCommit(() => this.events.emit(PERSON_TOLD, { personId, what } satisfies PersonTold));
   }
 }

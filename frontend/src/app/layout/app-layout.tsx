@@ -4,7 +4,7 @@ import { Outlet, useLocation, useMatches } from 'react-router-dom';
 import { DoneLine } from '../../components/done-line';
 import { Lines } from '../../components/lines';
 import { useIsPhone } from '../../lib/use-media';
-import type { RouteHandle } from '../routes';
+import type { RouteHandle } from '../route-handle';
 import { useCurrentSheet } from './current-sheet';
 import { PhoneBar } from './phone-bar';
 import { PhoneTop } from './phone-top';

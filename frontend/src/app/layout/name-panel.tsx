@@ -3,17 +3,16 @@ import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Link, useNavigate } from 'react-router-dom';
 import { Act } from '../../components/act';
-import { Choice } from '../../components/choice';
 import { sayDone } from '../../components/done-line';
 import { Question } from '../../components/question';
 import { useErrorWords } from '../../lib/errors';
 import { useMe, useSession } from '../../lib/session-context';
 import { useIsPhone } from '../../lib/use-media';
-import { themeChoices, useThemeChoice } from '../../theme/theme-choice';
 import { phoneSheetsFor, sheetsFor } from '../sheets';
 import { useWorker } from '../use-worker';
 import { LanguageChoice } from './language-choice';
 import { openShortcutList } from './shortcut-list-state';
+import { ThemeChoice } from './theme-choice';
 
 /** Everything that is one's own: organizations, the pages the bars leave out, language, theme, the ways out. */
 export function NamePanel({ id, onLeave }: { id: string; onLeave: () => void }): ReactNode {
@@ -119,13 +118,6 @@ function OwnPages(): ReactNode {
       </li>
     </ul>
   );
-}
-
-function ThemeChoice(): ReactNode {
-  const { t } = useTranslation('app');
-  const { choice, chooseTheme } = useThemeChoice();
-  const options = themeChoices.map((value) => ({ value, label: t(`themes.${value}`) }));
-  return <Choice label={t('theme')} isLabelShown options={options} value={choice} onChange={chooseTheme} />;
 }
 
 function WaysOut(): ReactNode {

@@ -37,7 +37,7 @@ export function PhoneBar(): ReactNode {
   links.push({
     to: '/notices',
     icon: 'notices',
-    word: t('notices'),
+    word: t('noticesWord'),
     count: unread,
     countWords: t('unread', { count: unread }),
     isHere: pathname === '/notices',
@@ -50,8 +50,7 @@ export function PhoneBar(): ReactNode {
             <Link to={link.to} aria-current={link.isHere ? 'page' : undefined}>
               {link.isHere ? <Daub /> : null}
               <Icon name={link.icon} size={24} />
-              <span>{link.word}</span>
-              <Count value={link.count} label={link.countWords} />
+              <span>{link.word}</span> <Count value={link.count} label={link.countWords} />
             </Link>
           </li>
         ))}

@@ -32,6 +32,7 @@ export function Shortcuts(): ReactNode {
     if (sheet !== undefined) void navigate(sheet.path);
   });
   useShortcut('?', openShortcutList);
+  useEffect(() => closeShortcutList, []);
   return isOpen ? <ShortcutList /> : null;
 }
 

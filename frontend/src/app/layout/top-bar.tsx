@@ -53,8 +53,7 @@ function SheetLink(props: { sheet: Sheet; number: number; isHere: boolean; count
       <span className="no" aria-hidden="true">
         {number}
       </span>
-      {t(`sheets.${sheet.id}`)}
-      <Count value={count} label={t(`counts.${sheet.id}`, { count })} />
+      {t(`sheets.${sheet.id}`)} <Count value={count} label={t(`counts.${sheet.id}`, { count })} />
       {isHere ? <Daub /> : null}
     </Link>
   );
@@ -67,7 +66,7 @@ function NoticesCell(): ReactNode {
   return (
     <Link className="cell" to="/notices" aria-current={pathname === '/notices' ? 'page' : undefined}>
       <Icon name="notices" />
-      <span className="notices-word">{t('notices')}</span>
+      <span className="notices-word">{t('noticesWord')}</span>{' '}
       <Count value={unread} label={t('unread', { count: unread })} />
     </Link>
   );

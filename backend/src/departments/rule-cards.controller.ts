@@ -1,0 +1,45 @@
+import { Controller } from '@nestjs/common';
+import { draftRuleCard, editRuleCard, publishRuleCard, readPublicRuleCard, readRuleCard } from '@holdwater/shared-types/departments/departments.contract.js';
+import type { RouteInput } from '@holdwater/shared-types/common/route.js';
+import { anyone, signedIn } from '../common/access/access.js';
+import type { Actor } from '../common/access/actor.js';
+import { CurrentActor } from '../common/access/current-actor.js';
+import { Input } from '../common/contract/contract-input.js';
+import { ContractRoute } from '../common/contract/contract-route.js';
+import { PublishRuleCardService } from './publish-rule-card.service.js';
+import { ReadDepartmentsService } from './read-departments.service.js';
+import { RuleCardDraftsService } from './rule-card-drafts.service.js';
+
+@Controller()
+export class RuleCardsController {
+  constructor(
+    private readonly reading: ReadDepartmentsService,
+    private readonly drafts: RuleCardDraftsService,
+    private readonly publishing: PublishRuleCardService,
+  ) {}
+
+  @ContractRoute(readRuleCard, signedIn('departments.canReadDraft'))
+  async read(@Input() { params }: RouteInput<typeof readRuleCard>, @CurrentActor() actor: Actor) {
+    return this.reading.readRuleCard(actor, params.ruleCardId);
+  }
+
+  @ContractRoute(readPublicRuleCard, anyone)
+  async readPublic(@Input() { params }: RouteInput<typeof readPublicRuleCard>) {
+    return this.reading.readRuleCard(null, params.ruleCardId);
+  }
+
+  @ContractRoute(draftRuleCard, signedIn('departments.canEditRuleCards'))
+  async draft(@Input() { params }: RouteInput<typeof draftRuleCard>, @CurrentActor() actor: Actor) {
+    return this.drafts.draft(actor, params.departmentId);
+  }
+
+  @ContractRoute(editRuleCard, signedIn('departments.canEditRuleCards'))
+  async edit(@Input() { params, body }: RouteInput<typeof editRuleCard>, @CurrentActor() actor: Actor) {
+    return this.drafts.edit(actor, params.ruleCardId, body.content);
+  }
+
+  @ContractRoute(publishRuleCard, signedIn('departments.canEditRuleCards'))
+  async publish(@Input() { params, body }: RouteInput<typeof publishRuleCard>, @CurrentActor() actor: Actor) {
+    return this.publishing.publish(actor, params.ruleCardId, body.effectiveFrom);
+  }
+}

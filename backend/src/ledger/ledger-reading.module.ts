@@ -1,0 +1,9 @@
+import { Module } from '@nestjs/common';
+import { LotsModule } from '../lots/lots.module.js';
+import { LedgerController } from './ledger.controller.js';
+import { LedgerQueries } from './ledger.queries.js';
+import { LedgerVerifier } from './ledger.verifier.js';
+
+/** Reading and checking the ledger; writing it is `LedgerModule`, which everything uses. */
+@Module({ imports: [LotsModule], controllers: [LedgerController], providers: [LedgerQueries, LedgerVerifier], exports: [LedgerVerifier] })
+export class LedgerReadingModule {}

@@ -1,0 +1,40 @@
+import { Injectable } from '@nestjs/common';
+import { InjectConnection } from '@nestjs/sequelize';
+import type { LedgerEntry } from '@holdwater/shared-types/ledger/ledger.contract.js';
+import { QueryTypes } from 'sequelize';
+import { Sequelize } from 'sequelize-typescript';
+import { fromCursor, toPage } from '../common/paging/cursor.js';
+
+interface EntryRow extends Omit<LedgerEntry, 'at'> {
+  at: Date;
+}
+
+@Injectable()
+export class LedgerQueries {
+  constructor(@InjectConnection() private readonly sequelize: Sequelize) {}
+
+  /** A page of a lot's entries, newest first, and how many there are. */
+  async listOfLot(lotId: string, { cursor, limit }: { cursor?: string; limit: number }) {
+    const [before] = cursor ? fromCursor(cursor, 1) : [null];
+    const rows = await this.sequelize.query<EntryRow>(
+      `SELECT e.sequence, e.at, e.kind, p.name AS "actorName", e.actor_role AS "actorRole", e.payload, e.hash
+       FROM ledger_entries e LEFT JOIN persons p ON p.id = e.actor_id
+       WHERE e.lot_id = :lotId AND e.sequence < :before ORDER BY e.sequence DESC LIMIT :take`,
+      { replacements: { lotId, before: Number(before ?? 2_147_483_647), take: limit + 1 }, type: QueryTypes.SELECT },
+    );
+    const page = toPage(rows, limit, (row) => [row.sequence]);
+    return {
+      items: page.items.map((row): LedgerEntry => ({ ...row, at: row.at.toISOString() })),
+      nextCursor: page.nextCursor,
+      total: await this.countOfLot(lotId),
+    };
+  }
+
+  private async countOfLot(lotId: string): Promise<number> {
+    const [row] = await this.sequelize.query<{ count: number }>('SELECT count(*)::int AS count FROM ledger_entries WHERE lot_id = :lotId', {
+      replacements: { lotId },
+      type: QueryTypes.SELECT,
+    });
+    return row?.count ?? 0;
+  }
+}

@@ -1,0 +1,123 @@
+import { OnEvent } from '@nestjs/event-emitter';
+import { Interval } from '@nestjs/schedule';
+import {
+  ConnectedSocket,
+  MessageBody,
+  type OnGatewayInit,
+  SubscribeMessage,
+  WebSocketGateway,
+  WebSocketServer,
+} from '@nestjs/websockets';
+import type { Server, Socket } from 'socket.io';
+import { z } from 'zod';
+import { Authentication } from '../accounts/sessions/authentication.service.js';
+import { type Actor, organizationIds } from '../common/access/actor.js';
+import { LOT_CHANGED, type LotChange, PERSON_TOLD, type PersonTold } from '../common/changes/changes.js';
+import { LotsQueries } from '../lots/lots.queries.js';
+import { canReadLot } from '../lots/lots.policy.js';
+
+type Known = Socket & { data: { actor: Actor } };
+
+const lotRequest = z.object({ lotId: z.uuid() });
+/** How often open sockets are asked again whether they still may. */
+const recheckMs = 60_000;
+const lotRoom = (lotId: string) => `lot:${lotId}`;
+const personRoom = (personId: string) => `person:${personId}`;
+const organizationRoom = (organizationId: string) => `organization:${organizationId}`;
+
+/**
+ * Tells pages what to fetch anew; carries no data of a lot itself. A socket joins a lot's room only after the policy was asked, and leaves
+ * it when the right is lost.
+ */
+@WebSocketGateway({ cors: false })
+export class RealtimeGateway implements OnGatewayInit<Server> {
+  @WebSocketServer() private readonly server!: Server;
+
+  constructor(
+    private readonly authentication: Authentication,
+    private readonly lots: LotsQueries,
+  ) {}
+
+  afterInit(server: Server): void {
+    server.use((socket, next) => void this.admit(socket, next));
+  }
+
+  @SubscribeMessage('lot:watch')
+  async watch(@ConnectedSocket() socket: Known, @MessageBody() body: unknown): Promise<{ ok: boolean }> {
+    const request = lotRequest.safeParse(body);
+    if (!request.success || !(await this.mayWatch(socket.data.actor, request.data.lotId))) return { ok: false };
+    await socket.join(lotRoom(request.data.lotId));
+    return { ok: true };
+  }
+
+  @SubscribeMessage('lot:unwatch')
+  async unwatch(@ConnectedSocket() socket: Known, @MessageBody() body: unknown): Promise<{ ok: boolean }> {
+    const request = lotRequest.safeParse(body);
+    if (request.success) await socket.leave(lotRoom(request.data.lotId));
+    return { ok: request.success };
+  }
+
+  @OnEvent(LOT_CHANGED)
+  async lotChanged({ lotId, topics }: LotChange): Promise<void> {
+    this.server?.to(lotRoom(lotId)).emit('changed', { lotId, topics });
+    if (topics.every((topic) => topic === 'ledger' || topic === 'thread')) return;
+    const lot = await this.lots.partiesOf(lotId);
+    const rooms = [lot.builderId, lot.plumberId, lot.departmentId].filter((id) => id !== null).map(organizationRoom);
+    this.server?.to(rooms).emit('waiting', {});
+    if (topics.includes('lot')) await this.evict(lotId);
+  }
+
+  @OnEvent(PERSON_TOLD)
+  personTold({ personId, what }: PersonTold): void {
+    this.server?.to(personRoom(personId)).emit(what, {});
+  }
+
+  /** A session that ended, a person disabled, a right lost: out within a minute, or at once where the lot itself changed hands. */
+  @Interval(recheckMs)
+  async recheck(): Promise<void> {
+    const sockets = [...(this.server?.sockets.sockets.values() ?? [])] as Known[];
+    for (const socket of sockets) {
+      const actor = await this.authentication.findActor(socket.data.actor);
+      if (actor === null) socket.disconnect(true);
+      else socket.data.actor = actor;
+    }
+    const lotIds = new Set(sockets.flatMap((socket) => [...socket.rooms].filter((room) => room.startsWith('lot:'))));
+    for (const room of lotIds) await this.evict(room.slice('lot:'.length));
+  }
+
+  private async admit(socket: Socket, next: (error?: Error) => void): Promise<void> {
+    try {
+      const token: unknown = (socket.handshake.auth as { token?: unknown }).token;
+      const actor = typeof token === 'string' ? await this.authentication.findActorOfToken(token) : null;
+      if (actor === null) {
+        next(new Error('signed-out'));
+        return;
+      }
+      (socket as Known).data.actor = actor;
+      await socket.join([personRoom(actor.personId), ...organizationIds(actor).map(organizationRoom)]);
+      next();
+    } catch {
+      next(new Error('busy'));
+    }
+  }
+
+  private async mayWatch(actor: Actor, lotId: string): Promise<boolean> {
+    try {
+      await this.lots.getLotFor(actor, lotId);
+      return true;
+    } catch {
+      return false;
+    }
+  }
+
+  /** Sockets of this process that may no longer read the lot leave its room; the other processes do the same for theirs. */
+  private async evict(lotId: string): Promise<void> {
+    const ids = this.server?.sockets.adapter.rooms.get(lotRoom(lotId)) ?? new Set<string>();
+    if (ids.size === 0) return;
+    const lot = await this.lots.partiesOf(lotId);
+    for (const id of ids) {
+      const socket = this.server.sockets.sockets.get(id) as Known | undefined;
+      if (socket && !canReadLot(socket.data.actor, lot)) await socket.leave(lotRoom(lotId));
+    }
+  }
+}

@@ -1,0 +1,8 @@
+import type { ReactNode } from 'react';
+import { Cutaway } from '../../../drawings/cutaway';
+import { signInHouse } from './sign-in-house';
+
+/** What the product is about, drawn large: a house that holds water. */
+export function SignInPicture(): ReactNode {
+  return <Cutaway house={signInHouse} method="attic-cut" fillLevelFt={signInHouse.atticCutFt} maxHeight={820} />;
+}
