@@ -8,9 +8,10 @@ import { HoldsModule } from './holds/holds.module.js';
 import { OutcomesModule } from './outcomes/outcomes.module.js';
 import { ThreadsModule } from './threads/threads.module.js';
 import { LedgerReadingModule } from './ledger/ledger-reading.module.js';
+import { PlansModule } from './plans/plans.module.js';
 import { RealtimeModule } from './realtime/realtime.module.js';
 import { NoticesModule } from './notices/notices.module.js';
 import { OperationsModule } from './operations/operations.module.js';
 
 /** The modules with domain words, in the order their imports may go. */
-export const features: Type[] = [AccountsModule, DepartmentsModule, LotsModule, ClearancesModule, VisitsModule, HoldsModule, OutcomesModule, ThreadsModule, NoticesModule, LedgerReadingModule, RealtimeModule, OperationsModule];
+export const features: Type[] = [AccountsModule, DepartmentsModule, LotsModule, PlansModule, ClearancesModule, VisitsModule, HoldsModule, OutcomesModule, ThreadsModule, NoticesModule, LedgerReadingModule, RealtimeModule, OperationsModule];

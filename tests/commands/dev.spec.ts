@@ -14,6 +14,7 @@ describe('npm run dev', () => {
     expect({ web, api }).toEqual({ web: `http://127.0.0.1:${checkout.port}`, api: `${web}/api` });
     const { role, environment } = await checkout.ask();
     expect(role).toBe('holdwater_app');
+    expect(environment).not.toHaveProperty('STATIC_DIR'); // vite serves the page, built or not
     expect(environment['PORT']).not.toBe(String(checkout.port));
     appendFileSync(path.join(checkout.folder, 'backend/dist/main.js'), `process.stdout.write('changed\\n');`);
     await vi.waitFor(() => expect(command.output()).toMatch(/^server +\| changed$/m), { timeout: 60_000 });

@@ -1,4 +1,5 @@
 import { spawn } from 'node:child_process';
+import { once } from 'node:events';
 import { chmodSync, existsSync, readFileSync, rmSync, statSync, writeFileSync } from 'node:fs';
 import net from 'node:net';
 import path from 'node:path';
@@ -155,6 +156,22 @@ describe('npm start', () => {
     command.signal(signal);
     await vi.waitFor(() => expect(listProcessesOf(checkout.folder)).toEqual([]), { timeout: 20_000 });
     expect(existsSync(addressesFile())).toBe(false);
+  });
+
+  it('ends everything in order on Ctrl-C in a terminal', async () => {
+    // script(1) makes the terminal; its line discipline turns the character 3 into SIGINT for npm, shell and command alike.
+    const env = { ...process.env, PORT: String(checkout.port), NODE_ENV: '' };
+    const terminal = spawn('script', ['-qfec', 'npm start', '/dev/null'], { cwd: checkout.folder, env });
+    const ended = once(terminal, 'close');
+    let output = '';
+    terminal.stdout.on('data', (chunk: Buffer) => void (output += chunk.toString()));
+    await vi.waitFor(() => expect(output).toMatch(ready), { timeout: 120_000 });
+    terminal.stdin.write('\x03');
+    await ended;
+    await vi.waitFor(() => expect(listProcessesOf(checkout.folder)).toEqual([]), { timeout: 20_000 });
+    expect(existsSync(addressesFile())).toBe(false);
+    const databaseLog = readFileSync(path.join(checkout.folder, '.data/log/database.log'), 'utf8');
+    expect(databaseLog).toContain('database system is shut down');
   });
 
   it('says what is wrong with PORT', async () => {

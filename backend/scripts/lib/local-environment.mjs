@@ -21,7 +21,7 @@ export function getLocalEnvironment({ urls, secrets, ports }) {
     SMTP_URL: `smtp://${loopback}:${ports.smtp}`,
     MAIL_FROM: 'holdwater@example.test',
     ROLE: 'all',
-    STATIC_DIR: path.join(root, 'frontend/dist'),
+    ...(ports.web === ports.server ? { STATIC_DIR: path.join(root, 'frontend/dist') } : {}),
     TZ: 'UTC',
   };
 }

@@ -23,10 +23,18 @@ beforeEach(async () => {
   server.clock.set(testNow);
   number += 1;
   const { builder, plumber, department } = world.organizations;
-  lot = await createLot({ builder, plumber, department, tract: world.tract, number: String(number), now: server.clock.now() });
+  lot = await createLot({
+    builder,
+    plumber,
+    department,
+    tract: world.tract,
+    number: String(number),
+    now: server.clock.now(),
+  });
 });
 
-const insert = (sql: string, replacements: Record<string, unknown>) => server.db.query(sql, { replacements: { ...replacements, now: server.clock.now() } });
+const insert = (sql: string, replacements: Record<string, unknown>) =>
+  server.db.query(sql, { replacements: { ...replacements, now: server.clock.now() } });
 const recompute = (stage = stageCode) => server.get(ClearancesService).recompute(lot.id, 1, stage);
 
 async function addVisit(state: string, stage = stageCode): Promise<string> {
@@ -56,7 +64,12 @@ interface Seen {
 }
 
 /** A closed visit with its outcome, a minute after it began. */
-async function addOutcome({ kind = 'pass', systems = { dwv: 'pass', water: 'pass' }, lookedAt = ['nail-plates', 'supports'], stage }: Seen = {}) {
+async function addOutcome({
+  kind = 'pass',
+  systems = { dwv: 'pass', water: 'pass' },
+  lookedAt = ['nail-plates', 'supports'],
+  stage,
+}: Seen = {}) {
   const visitId = await addVisit('closed', stage);
   server.clock.advance(1);
   const outcomeId = randomUUID();
@@ -66,19 +79,26 @@ async function addOutcome({ kind = 'pass', systems = { dwv: 'pass', water: 'pass
     { outcomeId, visitId, kind, reason: kind === 'no-access' ? 'locked' : null, by: world.people.inspector.id },
   );
   for (const [system, answer] of Object.entries(systems)) {
-    await insert(`INSERT INTO outcome_systems (id, outcome_id, unit_number, system, answer) VALUES (:id, :outcomeId, 1, :system, :answer)`, {
-      ...{ id: randomUUID(), outcomeId, system, answer },
-    });
+    await insert(
+      `INSERT INTO outcome_systems (id, outcome_id, unit_number, system, answer) VALUES (:id, :outcomeId, 1, :system, :answer)`,
+      {
+        ...{ id: randomUUID(), outcomeId, system, answer },
+      },
+    );
   }
   for (const point of lookedAt) {
-    await insert(`INSERT INTO outcome_work (id, outcome_id, point_code, is_looked_at) VALUES (:id, :outcomeId, :point, true)`, { id: randomUUID(), outcomeId, point });
+    await insert(
+      `INSERT INTO outcome_work (id, outcome_id, point_code, is_looked_at) VALUES (:id, :outcomeId, :point, true)`,
+      { id: randomUUID(), outcomeId, point },
+    );
   }
   return visitId;
 }
 
 async function addHold(method: string, system = 'dwv', endedAfterMinutes: number | null = null): Promise<string> {
   const id = randomUUID();
-  const endedAt = endedAfterMinutes === null ? null : new Date(server.clock.now().getTime() + endedAfterMinutes * 60_000);
+  const endedAt =
+    endedAfterMinutes === null ? null : new Date(server.clock.now().getTime() + endedAfterMinutes * 60_000);
   await insert(
     `INSERT INTO holds (id, client_id, lot_id, unit_number, stage_code, system, ordinal, plumber_id, method, medium, state, started_by, started_at, received_at,
        ended_at, end_reason)
@@ -95,7 +115,12 @@ async function addHold(method: string, system = 'dwv', endedAfterMinutes: number
   return id;
 }
 
-async function addCorrection(visitId: string, state: string, severity = 'fix-before-cover', pointCode: string | null = null) {
+async function addCorrection(
+  visitId: string,
+  state: string,
+  severity = 'fix-before-cover',
+  pointCode: string | null = null,
+) {
   await insert(
     `INSERT INTO corrections (id, client_id, lot_id, visit_id, unit_number, stage_code, number, subject, point_code, text, place, severity, state, opened_at,
        opened_by, fixed_at, accepted_at)
@@ -122,7 +147,8 @@ describe('state of plumbing', () => {
     await addOutcome();
     expect(await recompute()).toBe('clear');
     expect(await recompute()).toBe('clear');
-    const [rows] = await server.db.query(`SELECT payload ->> 'from' AS from, payload ->> 'to' AS to, actor_id FROM ledger_entries
+    const [rows] = await server.db
+      .query(`SELECT payload ->> 'from' AS from, payload ->> 'to' AS to, actor_id FROM ledger_entries
       WHERE lot_id = '${lot.id}' AND kind = 'plumbing-state' ORDER BY sequence`);
     expect(rows).toEqual([
       { from: 'not-tested', to: 'under-test', actor_id: null },
@@ -141,7 +167,11 @@ describe('state of plumbing', () => {
     const [state] = await server.get(ClearancesQueries).listStates([lot.id]);
     expect(state).toMatchObject({ unitNumber: 1, stageCode, state: 'clear', since });
     const { body } = await world.as('plumber').get(`/api/lots/${lot.id}`);
-    expect(body.stages[1]).toMatchObject({ code: 'rough-in', state: 'clear', units: [{ unitNumber: 1, state: 'clear' }] });
+    expect(body.stages[1]).toMatchObject({
+      code: 'rough-in',
+      state: 'clear',
+      units: [{ unitNumber: 1, state: 'clear' }],
+    });
     expect(body.currentStage).toBe('groundwork');
   });
 
@@ -208,7 +238,9 @@ describe('state of plumbing', () => {
     await addHold('stack-to-roof');
     const states = await Promise.all([recompute(), recompute(), recompute()]);
     expect(states).toEqual(['under-test', 'under-test', 'under-test']);
-    const [rows] = await server.db.query(`SELECT 1 FROM ledger_entries WHERE lot_id = '${lot.id}' AND kind = 'plumbing-state'`);
+    const [rows] = await server.db.query(
+      `SELECT 1 FROM ledger_entries WHERE lot_id = '${lot.id}' AND kind = 'plumbing-state'`,
+    );
     expect(rows).toHaveLength(1);
   });
 });

@@ -40,7 +40,9 @@ describe('closures', () => {
   });
 
   it('takes the closed day out of the windows, and of a closed span those that overlap it', async () => {
-    const windows = await server.get(WorkingTimeQueries).windowsBetween(world.organizations.department.id, '2027-03-08', '2027-03-11');
+    const windows = await server
+      .get(WorkingTimeQueries)
+      .windowsBetween(world.organizations.department.id, '2027-03-08', '2027-03-11');
     const labels = (date: string) => windows.filter((window) => window.date === date).map(({ label }) => label);
     expect(labels('2027-03-08')).toEqual(['early', 'mid', 'noon', 'late']);
     expect(labels('2027-03-09')).toEqual(['early', 'mid']);
@@ -73,7 +75,14 @@ describe('closures', () => {
   it('lets nobody else close or open', async () => {
     const { body } = await world.as('desk').get(`/api/departments/${world.organizations.department.id}`);
     const closureId: string = body.closures[0].id;
-    for (const person of ['inspector', 'departmentOwner', 'superintendent', 'plumber', 'otherDesk', 'operator'] as const) {
+    for (const person of [
+      'inspector',
+      'departmentOwner',
+      'superintendent',
+      'plumber',
+      'otherDesk',
+      'operator',
+    ] as const) {
       expect((await world.as(person).post(path, whole)).body.code).toBe('not-allowed');
       expect((await world.as(person).delete(`${path}/${closureId}`)).body.code).toBe('not-allowed');
     }
@@ -89,7 +98,9 @@ describe('closures', () => {
   });
 
   it('does not find the closure of another department', async () => {
-    const { body } = await world.as('otherDesk').post(`/api/departments/${world.organizations.otherDepartment.id}/closures`, whole);
+    const { body } = await world
+      .as('otherDesk')
+      .post(`/api/departments/${world.organizations.otherDepartment.id}/closures`, whole);
     expect((await world.as('desk').delete(`${path}/${body.id}`)).body.code).toBe('not-found');
   });
 
@@ -97,6 +108,8 @@ describe('closures', () => {
     isEffectFailing = true;
     expect((await world.as('desk').post(path, { ...whole, date: '2027-03-22' })).status).toBe(500);
     isEffectFailing = false;
-    expect((await server.get(WorkingTimeQueries).closedOn(world.organizations.department.id, '2027-03-22')).closed).toEqual([]);
+    expect(
+      (await server.get(WorkingTimeQueries).closedOn(world.organizations.department.id, '2027-03-22')).closed,
+    ).toEqual([]);
   });
 });

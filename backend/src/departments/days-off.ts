@@ -13,7 +13,8 @@ const firstFederalYear = 1986;
 /** The days off of a rule card in some years, both included: the federal list as it is observed, with the department's adds and drops. */
 export function daysOff(holidays: RuleCardContent['asking']['holidays'], fromYear: number, toYear: number): DayOff[] {
   const choice = { addedDates: holidays.adds, droppedDates: holidays.drops };
-  if (holidays.federal && toYear >= firstFederalYear) return departmentHolidays(Math.max(fromYear, firstFederalYear), toYear, choice);
+  if (holidays.federal && toYear >= firstFederalYear)
+    return departmentHolidays(Math.max(fromYear, firstFederalYear), toYear, choice);
   const isWithin = (date: string) => Number(date.slice(0, 4)) >= fromYear && Number(date.slice(0, 4)) <= toYear;
   return [...new Set(holidays.adds)]
     .filter(isWithin)

@@ -1,5 +1,9 @@
 import { Controller } from '@nestjs/common';
-import { listDepartments, listPublicRuleCards, readDepartment } from '@holdwater/shared-types/departments/departments.contract.js';
+import {
+  listDepartments,
+  listPublicRuleCards,
+  readDepartment,
+} from '@holdwater/shared-types/departments/departments.contract.js';
 import type { RouteInput } from '@holdwater/shared-types/common/route.js';
 import { anyone, signedIn } from '../common/access/access.js';
 import type { Actor } from '../common/access/actor.js';

@@ -19,6 +19,10 @@ export function presentRuleCard(card: RuleCardVersion, department: DepartmentRec
   };
 }
 
-export function presentDepartment(department: DepartmentRecord, inForce: RuleCardVersion | null, today: string): Department {
+export function presentDepartment(
+  department: DepartmentRecord,
+  inForce: RuleCardVersion | null,
+  today: string,
+): Department {
   return { ...department, ruleCard: inForce && presentRuleCardBrief(inForce, today) };
 }

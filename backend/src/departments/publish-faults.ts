@@ -27,10 +27,13 @@ function testFaults({ stages, tests }: RuleCardContent): Record<string, string> 
   return faults;
 }
 
-function windowFaults({ asking: { windows, workingDays, reinspectionWindows } }: RuleCardContent): Record<string, string> {
+function windowFaults({
+  asking: { windows, workingDays, reinspectionWindows },
+}: RuleCardContent): Record<string, string> {
   const faults: Record<string, string> = {};
   windows.forEach(({ days }, w) => {
-    if (days.length > 0 && !days.some((day) => workingDays.includes(day))) faults[`asking.windows.${w}.days`] = 'nobody-works';
+    if (days.length > 0 && !days.some((day) => workingDays.includes(day)))
+      faults[`asking.windows.${w}.days`] = 'nobody-works';
   });
   (reinspectionWindows ?? []).forEach((label, r) => {
     if (!windows.some((window) => window.label === label)) faults[`asking.reinspectionWindows.${r}`] = 'unknown';

@@ -44,8 +44,17 @@ export class PublishRuleCardService {
       await this.endVersionBefore(departmentId, effectiveFrom);
       await this.write(actor, ruleCardId, effectiveFrom);
       const who = { personId: actor.personId, role: 'desk' };
-      await this.ledger.appendTo(`department:${departmentId}`, 'rule-card-published', { ruleCardId, version, effectiveFrom }, who);
-      await this.outbox.add('rule-card-published', { actorId: actor.personId }, { ruleCardId, departmentId, version, effectiveFrom });
+      await this.ledger.appendTo(
+        `department:${departmentId}`,
+        'rule-card-published',
+        { ruleCardId, version, effectiveFrom },
+        who,
+      );
+      await this.outbox.add(
+        'rule-card-published',
+        { actorId: actor.personId },
+        { ruleCardId, departmentId, version, effectiveFrom },
+      );
       return this.reading.readRuleCard(actor, ruleCardId);
     });
   }
@@ -56,7 +65,8 @@ export class PublishRuleCardService {
     if (effectiveFrom < today) refuse('rule-card-in-the-past', { today }, { effectiveFrom: 'in-the-past' });
     const versions = await this.ruleCards.listVersions(departmentId);
     const later = versions.find((card) => card.effectiveFrom !== null && card.effectiveFrom >= effectiveFrom);
-    if (later) refuse('rule-card-overlap', { version: later.version, from: later.effectiveFrom }, { effectiveFrom: 'taken' });
+    if (later)
+      refuse('rule-card-overlap', { version: later.version, from: later.effectiveFrom }, { effectiveFrom: 'taken' });
   }
 
   private async endVersionBefore(departmentId: string, effectiveFrom: string): Promise<void> {
@@ -71,7 +81,10 @@ export class PublishRuleCardService {
     await this.sequelize.query(
       `UPDATE rule_cards SET state = 'published', effective = daterange(CAST(:effectiveFrom AS date), NULL), published_by = :personId, published_at = :now
        WHERE id = :ruleCardId`,
-      { replacements: { ruleCardId, effectiveFrom, personId: actor.personId, now: this.clock.now() }, type: QueryTypes.UPDATE },
+      {
+        replacements: { ruleCardId, effectiveFrom, personId: actor.personId, now: this.clock.now() },
+        type: QueryTypes.UPDATE,
+      },
     );
   }
 }

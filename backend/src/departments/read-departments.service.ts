@@ -34,8 +34,12 @@ export class ReadDepartmentsService {
     const isOwn = canReadDraft(actor, departmentId);
     return {
       department,
-      ruleCards: versions.filter(({ state }) => isOwn || state === 'published').map((card) => presentRuleCardBrief(card, today)),
-      closures: (await this.closures.listClosures(departmentId, today)).map(({ departmentId: _, ...closure }) => closure),
+      ruleCards: versions
+        .filter(({ state }) => isOwn || state === 'published')
+        .map((card) => presentRuleCardBrief(card, today)),
+      closures: (await this.closures.listClosures(departmentId, today)).map(
+        ({ departmentId: _, ...closure }) => closure,
+      ),
       abilities: { canEditRuleCards: canEditRuleCards(actor, departmentId), canClose: canClose(actor, departmentId) },
     };
   }

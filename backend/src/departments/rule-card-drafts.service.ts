@@ -71,7 +71,12 @@ export class RuleCardDraftsService {
       createdBy: actor.personId,
       createdAt: this.clock.now(),
     });
-    await this.ledger.appendTo(`department:${departmentId}`, 'rule-card-drafted', { ruleCardId: id, version }, { personId: actor.personId, role: 'desk' });
+    await this.ledger.appendTo(
+      `department:${departmentId}`,
+      'rule-card-drafted',
+      { ruleCardId: id, version },
+      { personId: actor.personId, role: 'desk' },
+    );
     return id;
   }
 }

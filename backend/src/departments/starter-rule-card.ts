@@ -37,9 +37,36 @@ const waterTest = {
  */
 export const starterRuleCard: RuleCardContent = ruleCardContent.parse({
   stages: [
-    { code: 'groundwork', name: { en: 'Groundwork', es: 'Plomería bajo losa' }, inspectionCode: '', order: 1, systems: ['dwv'], covers: 'slab', minutesPerVisit: 30, work: [] },
-    { code: 'rough-in', name: { en: 'Rough-in', es: 'Plomería oculta' }, inspectionCode: '', order: 2, systems: ['dwv', 'water'], covers: 'wall', minutesPerVisit: 45, work: [] },
-    { code: 'final', name: { en: 'Final', es: 'Final' }, inspectionCode: '', order: 3, systems: [], covers: null, minutesPerVisit: 30, work: [] },
+    {
+      code: 'groundwork',
+      name: { en: 'Groundwork', es: 'Plomería bajo losa' },
+      inspectionCode: '',
+      order: 1,
+      systems: ['dwv'],
+      covers: 'slab',
+      minutesPerVisit: 30,
+      work: [],
+    },
+    {
+      code: 'rough-in',
+      name: { en: 'Rough-in', es: 'Plomería oculta' },
+      inspectionCode: '',
+      order: 2,
+      systems: ['dwv', 'water'],
+      covers: 'wall',
+      minutesPerVisit: 45,
+      work: [],
+    },
+    {
+      code: 'final',
+      name: { en: 'Final', es: 'Final' },
+      inspectionCode: '',
+      order: 3,
+      systems: [],
+      covers: null,
+      minutesPerVisit: 30,
+      work: [],
+    },
   ],
   tests: [dwvTest('groundwork'), dwvTest('rough-in'), waterTest],
   asking: {

@@ -1,15 +1,15 @@
 import { Injectable } from '@nestjs/common';
-import type { NoticeAnswer, NoticeInput, NoticeWindow } from '@holdwater/shared-types/scheduling/notice.contract.js';
+import type { NoticeAnswer, NoticeWindow } from '@holdwater/shared-types/scheduling/notice.contract.js';
 import { Temporal } from 'temporal-polyfill';
-import { closedSpansOf } from '../scheduling/working-time/closed-spans.js';
 import { localDateOf } from '../scheduling/working-time/local-instant.js';
 import { computeNotice } from '../scheduling/working-time/notice.js';
 import { windowsOfDates } from '../scheduling/working-time/windows-of-dates.js';
 import { isWorkingDay } from '../scheduling/working-time/working-days.js';
-import { ClosuresQueries, type ClosureRecord } from './closures.queries.js';
+import { ClosuresQueries } from './closures.queries.js';
 import { daysOff } from './days-off.js';
 import { DepartmentsQueries } from './departments.queries.js';
 import { RuleCardsQueries, type RuleCardVersion } from './rule-cards.queries.js';
+import { type ClosedPart, closedOf, lastYearNeeded, ruleOf, yearOf } from './working-rule.js';
 
 /** A window of a day with the rule card version that makes it and how many visits it takes. */
 export interface DepartmentWindow extends NoticeWindow {
@@ -29,8 +29,7 @@ export interface DepartmentNotice extends Omit<NoticeAnswer, 'windows'> {
 export interface DepartmentDay {
   readonly date: string;
   readonly isWorkingDay: boolean;
-  /** Instants; both null for a whole day. `why` is the department's own words, `holidayCode` a federal holiday's. */
-  readonly closed: ReadonlyArray<{ from: string | null; to: string | null; why: string; holidayCode: string | null }>;
+  readonly closed: readonly ClosedPart[];
 }
 
 /** A department's working time: rule cards, holidays and closures put together for the pure rules of scheduling. */
@@ -49,7 +48,7 @@ export class WorkingTimeQueries {
     const ruleCard = await this.ruleCards.getRuleCardInForce(departmentId, today);
     const closures = await this.closures.listClosures(departmentId, today);
     const { windows: _, ...notice } = computeNotice({
-      ...this.inputOf(zone, ruleCard, closures, today, lastYearNeeded(today, ruleCard)),
+      ...ruleOf(zone, ruleCard, closures, today, lastYearNeeded(today, ruleCard)),
       now: now.toISOString(),
       windows: [],
     });
@@ -65,7 +64,7 @@ export class WorkingTimeQueries {
     return versions.flatMap((version) => {
       const [from, to] = shared(version, fromDate, toDate);
       const rooms = new Map(version.content.asking.windows.map(({ label, room }) => [label, room]));
-      return windowsOfDates(this.inputOf(zone, version, closures, from, yearOf(to)), from, to).map((window) => ({
+      return windowsOfDates(ruleOf(zone, version, closures, from, yearOf(to)), from, to).map((window) => ({
         ...window,
         ruleCardId: version.id,
         room: rooms.get(window.label) ?? 0,
@@ -87,41 +86,13 @@ export class WorkingTimeQueries {
     return datesFrom(fromDate, toDate).map((date) => {
       const version = versions.find((each) => rules(each, date));
       if (!version) return { date, isWorkingDay: false, closed: closedOf(zone, date, closures, []) };
-      const rule = this.inputOf(zone, version, closures, date, yearOf(date));
-      const holidays = daysOff(version.content.asking.holidays, yearOf(date), yearOf(date)).filter((day) => day.date === date);
+      const rule = ruleOf(zone, version, closures, date, yearOf(date));
+      const holidays = daysOff(version.content.asking.holidays, yearOf(date), yearOf(date)).filter(
+        (day) => day.date === date,
+      );
       return { date, isWorkingDay: isWorkingDay(rule, date), closed: closedOf(zone, date, closures, holidays) };
     });
   }
-
-  private inputOf(zone: string, version: RuleCardVersion, closures: readonly ClosureRecord[], from: string, toYear: number): Omit<NoticeInput, 'now'> {
-    const { asking } = version.content;
-    return {
-      zone,
-      workingDays: asking.workingDays,
-      closures: [...daysOff(asking.holidays, yearOf(from), toYear).map(({ date }) => date), ...closures.map(closureOf)],
-      cutoff: asking.cutoff,
-      workingDaysAhead: asking.workingDaysAhead,
-      horizonWorkingDays: asking.horizonWorkingDays,
-      windows: asking.windows,
-    };
-  }
-}
-
-function closureOf({ date, from, to }: ClosureRecord) {
-  return from === null || to === null ? date : { date, from, to };
-}
-
-function closedOf(zone: string, date: string, closures: readonly ClosureRecord[], holidays: ReadonlyArray<{ date: string; code: string | null }>) {
-  const ofHolidays = holidays.map(({ code }) => ({ from: null, to: null, why: '', holidayCode: code ?? 'own' }));
-  const ofClosures = closures.flatMap((closure) =>
-    closedSpansOf({ zone, closures: [closureOf(closure)] }, date).map((span) => ({
-      from: span.from === null ? null : span.startAt,
-      to: span.to === null ? null : span.endAt,
-      why: closure.why,
-      holidayCode: null,
-    })),
-  );
-  return [...ofHolidays, ...ofClosures];
 }
 
 function rules(version: RuleCardVersion, date: string): boolean {
@@ -135,20 +106,14 @@ function shared(version: RuleCardVersion, fromDate: string, toDate: string): [st
   return [from, to];
 }
 
-/** Far enough ahead that no day of the horizon lies in a year whose holidays were not looked at; a weekly day has at least 40 a year. */
-function lastYearNeeded(today: string, { content: { asking } }: RuleCardVersion): number {
-  const days = asking.workingDaysAhead + asking.horizonWorkingDays;
-  return yearOf(today) + 1 + Math.ceil(days / (40 * new Set(asking.workingDays).size));
-}
-
-function yearOf(date: string): number {
-  return Number(date.slice(0, 4));
-}
-
 function datesFrom(fromDate: string, toDate: string): string[] {
   const dates: string[] = [];
   const last = Temporal.PlainDate.from(toDate);
-  for (let day = Temporal.PlainDate.from(fromDate); Temporal.PlainDate.compare(day, last) <= 0; day = day.add({ days: 1 })) {
+  for (
+    let day = Temporal.PlainDate.from(fromDate);
+    Temporal.PlainDate.compare(day, last) <= 0;
+    day = day.add({ days: 1 })
+  ) {
     dates.push(day.toString());
   }
   return dates;

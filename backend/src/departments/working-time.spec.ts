@@ -22,7 +22,12 @@ describe('working time of a department', () => {
     const { id } = world.organizations.department;
     // Tuesday 15:00 in Denver is 22:00 UTC
     const inTime = await workingTime.noticeFor(id, new Date('2027-03-02T22:00:00Z'));
-    expect(inTime).toMatchObject({ countsForDate: '2027-03-02', firstDate: '2027-03-03', zone: 'America/Denver', cutoffAt: '2027-03-02T22:00:00.000Z' });
+    expect(inTime).toMatchObject({
+      countsForDate: '2027-03-02',
+      firstDate: '2027-03-03',
+      zone: 'America/Denver',
+      cutoffAt: '2027-03-02T22:00:00.000Z',
+    });
     const late = await workingTime.noticeFor(id, new Date('2027-03-02T22:00:00.001Z'));
     expect(late).toMatchObject({ countsForDate: '2027-03-03', firstDate: '2027-03-04' });
     expect(inTime.windows[0]).toEqual({
@@ -43,22 +48,34 @@ describe('working time of a department', () => {
       isWorkingDay: false,
       closed: [{ from: null, to: null, why: '', holidayCode: 'memorial-day' }],
     });
-    expect(daysOff({ federal: true, adds: ['2027-12-27'], drops: ['2027-05-31'] }, 2027, 2027).map(({ date }) => date)).not.toContain('2027-05-31');
-    expect(daysOff({ federal: false, adds: ['2027-12-27', '2026-12-28'], drops: [] }, 2027, 2027)).toEqual([{ date: '2027-12-27', code: null }]);
+    expect(
+      daysOff({ federal: true, adds: ['2027-12-27'], drops: ['2027-05-31'] }, 2027, 2027).map(({ date }) => date),
+    ).not.toContain('2027-05-31');
+    expect(daysOff({ federal: false, adds: ['2027-12-27', '2026-12-28'], drops: [] }, 2027, 2027)).toEqual([
+      { date: '2027-12-27', code: null },
+    ]);
   });
 
   it('answers for years before the federal list is known', async () => {
     const [day] = await workingTime.daysBetween(world.organizations.department.id, '1970-01-01', '1970-01-01');
     expect(day).toEqual({ date: '1970-01-01', isWorkingDay: false, closed: [] });
-    expect(daysOff({ federal: true, adds: ['1970-01-02'], drops: [] }, 1970, 1970)).toEqual([{ date: '1970-01-02', code: null }]);
+    expect(daysOff({ federal: true, adds: ['1970-01-02'], drops: [] }, 1970, 1970)).toEqual([
+      { date: '1970-01-02', code: null },
+    ]);
   });
 
   it('takes each day’s windows from the version in force on that day', async () => {
     const { id } = world.organizations.otherDepartment;
-    await server.db.query(`UPDATE rule_cards SET effective = daterange('2027-01-01', '2027-03-08') WHERE department_id = :id`, { replacements: { id } });
+    await server.db.query(
+      `UPDATE rule_cards SET effective = daterange('2027-01-01', '2027-03-08') WHERE department_id = :id`,
+      { replacements: { id } },
+    );
     const [window] = askingFixture.windows;
     const asking = { ...askingFixture, windows: [{ ...window!, label: 'dawn', room: 5 }] };
-    const next = await publishRuleCard(server, id, ruleCardContent({ asking }), { version: 2, effectiveFrom: '2027-03-08' });
+    const next = await publishRuleCard(server, id, ruleCardContent({ asking }), {
+      version: 2,
+      effectiveFrom: '2027-03-08',
+    });
     const windows = await workingTime.windowsBetween(id, '2027-03-04', '2027-03-08');
     expect(windows.map(({ date, label, room }) => [date, label, room])).toEqual([
       ['2027-03-04', 'early', 3],
@@ -73,15 +90,29 @@ describe('working time of a department', () => {
   });
 
   it('says so when no rule card is in force', async () => {
-    await expect(workingTime.noticeFor(world.organizations.department.id, new Date('2026-06-01T12:00:00Z'))).rejects.toMatchObject({ code: 'no-rule-card' });
+    await expect(
+      workingTime.noticeFor(world.organizations.department.id, new Date('2026-06-01T12:00:00Z')),
+    ).rejects.toMatchObject({ code: 'no-rule-card' });
   });
 
   it('looks far enough ahead for a horizon of a year of one day a week', async () => {
-    const asking = { ...askingFixture, workingDays: [1], workingDaysAhead: 60, horizonWorkingDays: 260, windows: [{ ...askingFixture.windows[0]!, days: [] }] };
-    await server.db.query(`UPDATE rule_cards SET effective = daterange('2027-01-01', '2027-04-01') WHERE department_id = :id`, {
-      replacements: { id: world.organizations.department.id },
+    const asking = {
+      ...askingFixture,
+      workingDays: [1],
+      workingDaysAhead: 60,
+      horizonWorkingDays: 260,
+      windows: [{ ...askingFixture.windows[0]!, days: [] }],
+    };
+    await server.db.query(
+      `UPDATE rule_cards SET effective = daterange('2027-01-01', '2027-04-01') WHERE department_id = :id`,
+      {
+        replacements: { id: world.organizations.department.id },
+      },
+    );
+    await publishRuleCard(server, world.organizations.department.id, ruleCardContent({ asking }), {
+      version: 2,
+      effectiveFrom: '2027-04-01',
     });
-    await publishRuleCard(server, world.organizations.department.id, ruleCardContent({ asking }), { version: 2, effectiveFrom: '2027-04-01' });
     const notice = await workingTime.noticeFor(world.organizations.department.id, new Date('2027-04-05T12:00:00Z'));
     // Labor Day 2032 is Monday the 6th of September
     const lastYear = notice.windows.filter(({ date }) => date.startsWith('2032-09')).map(({ date }) => date);

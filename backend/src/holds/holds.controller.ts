@@ -1,5 +1,12 @@
 import { Controller } from '@nestjs/common';
-import { addReading, endHold, type Hold, listHolds, startHold, strikeReading } from '@holdwater/shared-types/holds/hold.contract.js';
+import {
+  addReading,
+  endHold,
+  type Hold,
+  listHolds,
+  startHold,
+  strikeReading,
+} from '@holdwater/shared-types/holds/hold.contract.js';
 import type { RouteInput } from '@holdwater/shared-types/common/route.js';
 import { signedIn } from '../common/access/access.js';
 import type { Actor } from '../common/access/actor.js';

@@ -24,10 +24,13 @@ describe('tests over the API', () => {
   const startAs = (person: WorldPerson, index: 0 | 1 | 2 | 3 | 4 | 5, body: object) =>
     world.as(person).post(`/api/lots/${lot(index).id}/holds`, body);
   const kindsOf = async (lotId: string) => {
-    const rows = await server.db.query<{ kind: string }>('SELECT kind FROM ledger_entries WHERE lot_id = :lotId ORDER BY sequence', {
-      replacements: { lotId },
-      type: QueryTypes.SELECT,
-    });
+    const rows = await server.db.query<{ kind: string }>(
+      'SELECT kind FROM ledger_entries WHERE lot_id = :lotId ORDER BY sequence',
+      {
+        replacements: { lotId },
+        type: QueryTypes.SELECT,
+      },
+    );
     return rows.map((row) => row.kind);
   };
 
@@ -37,10 +40,19 @@ describe('tests over the API', () => {
       const hold = await scenario.start(lot(0), body);
       expect(hold).toMatchObject({ ordinal: 1, minimumPsi: 100, ceilingPsi: 160, settleMinutes: 0, state: 'standing' });
       expect(hold.readings).toEqual([
-        expect.objectContaining({ pressurePsi: 120, gaugeValve: 'open', byName: 'Ruben Achterberg', byRole: 'plumber', isStruck: false }),
+        expect.objectContaining({
+          pressurePsi: 120,
+          gaugeValve: 'open',
+          byName: 'Ruben Achterberg',
+          byRole: 'plumber',
+          isStruck: false,
+        }),
       ]);
       expect(await kindsOf(lot(0).id)).toEqual(['test-started', 'reading-added', 'plumbing-state']);
-      const list = await world.as('inspector').get(`/api/lots/${lot(0).id}/holds`).expect(200);
+      const list = await world
+        .as('inspector')
+        .get(`/api/lots/${lot(0).id}/holds`)
+        .expect(200);
       expect(list.body).toEqual({ items: [hold] });
     });
 
@@ -71,7 +83,9 @@ describe('tests over the API', () => {
       const bodies = Array.from({ length: 5 }, () => scenario.dwvBody());
       const answers = await Promise.all(bodies.map((body) => startAs('plumber', 2, body)));
       expect(answers.map((answer) => answer.status).sort()).toEqual([201, 409, 409, 409, 409]);
-      expect(answers.filter((answer) => answer.status === 409).every((answer) => answer.body.code === 'hold-standing')).toBe(true);
+      expect(
+        answers.filter((answer) => answer.status === 409).every((answer) => answer.body.code === 'hold-standing'),
+      ).toBe(true);
     });
 
     it('sees the units of one lot apart', async () => {
@@ -80,9 +94,19 @@ describe('tests over the API', () => {
     });
 
     it.each([
-      ['a method the card does not accept', { method: 'sectional' }, 409, { code: 'method-not-accepted', fields: { method: 'method-not-accepted' } }],
+      [
+        'a method the card does not accept',
+        { method: 'sectional' },
+        409,
+        { code: 'method-not-accepted', fields: { method: 'method-not-accepted' } },
+      ],
       ['a stage the card does not name', { stageCode: 'attic' }, 400, { code: 'stage-unknown' }],
-      ['a unit the lot does not have', { unitNumber: 9 }, 400, { code: 'bad-input', fields: { unitNumber: 'no-such-unit' } }],
+      [
+        'a unit the lot does not have',
+        { unitNumber: 9 },
+        400,
+        { code: 'bad-input', fields: { unitNumber: 'no-such-unit' } },
+      ],
       ['no tape', { tape: null }, 400, { code: 'bad-input', fields: { tape: 'required' } }],
     ])('refuses %s', async (_what, overrides, status, body) => {
       const answer = await startAs('plumber', 3, { ...scenario.dwvBody(), ...overrides }).expect(status);
@@ -92,7 +116,10 @@ describe('tests over the API', () => {
     it('writes nothing when the first reading does not fit', async () => {
       const body = scenario.waterBody({ firstReading: scenario.pressure(201) });
       const answer = await startAs('plumber', 3, body).expect(400);
-      expect(answer.body).toMatchObject({ code: 'reading-out-of-gauge', fields: { 'firstReading.pressurePsi': 'above-gauge-range' } });
+      expect(answer.body).toMatchObject({
+        code: 'reading-out-of-gauge',
+        fields: { 'firstReading.pressurePsi': 'above-gauge-range' },
+      });
       const future = scenario.waterBody({ firstReading: scenario.pressure(120, 'open', -10) });
       expect((await startAs('plumber', 3, future).expect(400)).body.code).toBe('reading-in-the-future');
       expect(await HoldModel.count({ where: { lotId: lot(3).id } })).toBe(0);
@@ -105,9 +132,15 @@ describe('tests over the API', () => {
       }
       for (const person of ['otherPlumber', 'otherSuperintendent', 'otherInspector', 'operator'] as const) {
         await startAs(person, 3, scenario.dwvBody()).expect(404);
-        await world.as(person).get(`/api/lots/${lot(3).id}/holds`).expect(404);
+        await world
+          .as(person)
+          .get(`/api/lots/${lot(3).id}/holds`)
+          .expect(404);
       }
-      await world.nobody().post(`/api/lots/${lot(3).id}/holds`, scenario.dwvBody()).expect(401);
+      await world
+        .nobody()
+        .post(`/api/lots/${lot(3).id}/holds`, scenario.dwvBody())
+        .expect(401);
     });
 
     it('needs a department with a rule card in force', async () => {
@@ -128,7 +161,10 @@ describe('tests over the API', () => {
       for (const person of ['plumber', 'helper', 'superintendent', 'inspector'] as const) {
         await addAs(person, scenario.pressure(119)).expect(201);
       }
-      const roles = await ReadingModel.findAll({ where: { holdId: hold.id, pressurePsi: 119 }, order: [['receivedAt', 'ASC']] });
+      const roles = await ReadingModel.findAll({
+        where: { holdId: hold.id, pressurePsi: 119 },
+        order: [['receivedAt', 'ASC']],
+      });
       expect(roles.map((row) => row.byRole).sort()).toEqual(['helper', 'inspector', 'plumber', 'superintendent']);
     });
 
@@ -136,7 +172,8 @@ describe('tests over the API', () => {
       for (const person of ['desk', 'plumberOwner', 'builderOwner', 'departmentOwner'] as const) {
         expect((await addAs(person, scenario.pressure(119)).expect(403)).body.code).toBe('not-allowed');
       }
-      for (const person of ['otherPlumber', 'otherInspector'] as const) await addAs(person, scenario.pressure(119)).expect(404);
+      for (const person of ['otherPlumber', 'otherInspector'] as const)
+        await addAs(person, scenario.pressure(119)).expect(404);
     });
 
     it('stand in the order they were made, the late ones among the others; a repeat is the same one', async () => {
@@ -180,16 +217,22 @@ describe('tests over the API', () => {
     it('made at one moment stand in the order they came', async () => {
       const madeAt = scenario.stamp(1).madeAt;
       for (const psi of [71, 73, 72]) await addAs('plumber', { ...scenario.pressure(psi), madeAt }).expect(201);
-      const list = await world.as('plumber').get(`/api/lots/${lot(4).id}/holds`).expect(200);
+      const list = await world
+        .as('plumber')
+        .get(`/api/lots/${lot(4).id}/holds`)
+        .expect(200);
       const water = (list.body.items as Hold[]).find((each) => each.id === hold.id);
-      const pressures = water?.readings.map((reading) => reading.pressurePsi).filter((psi) => psi !== null && psi > 70 && psi < 74);
+      const pressures = water?.readings
+        .map((reading) => reading.pressurePsi)
+        .filter((psi) => psi !== null && psi > 70 && psi < 74);
       expect(pressures).toEqual([71, 73, 72]);
     });
 
     it('are struck once with a reason by the plumber or whoever made them, and kept', async () => {
       const added = await addAs('superintendent', scenario.pressure(55)).expect(201);
       const reading = (added.body as Hold).readings.find((each) => each.pressurePsi === 55);
-      const strikeAs = (person: WorldPerson, why = 'misread') => world.as(person).post(`/api/readings/${reading?.id}/strike`, { why });
+      const strikeAs = (person: WorldPerson, why = 'misread') =>
+        world.as(person).post(`/api/readings/${reading?.id}/strike`, { why });
       for (const person of ['helper', 'inspector', 'desk', 'builderOwner'] as const) {
         expect((await strikeAs(person).expect(403)).body.code).toBe('not-allowed');
       }
@@ -200,14 +243,19 @@ describe('tests over the API', () => {
         isStruck: true,
         struckWhy: 'misread',
       });
-      expect((await strikeAs('plumber').expect(409)).body).toMatchObject({ code: 'reading-struck', params: { why: 'misread' } });
+      expect((await strikeAs('plumber').expect(409)).body).toMatchObject({
+        code: 'reading-struck',
+        params: { why: 'misread' },
+      });
       expect((await strikeAs('plumber', ' ').expect(400)).body.fields).toEqual({ why: 'required' });
       await world.as('plumber').post(`/api/readings/${randomUUID()}/strike`, { why: 'none' }).expect(404);
     });
 
     it('cannot be edited or removed in the database itself', async () => {
       const where = { replacements: { id: hold.readings[0]?.id }, type: QueryTypes.UPDATE } as const;
-      await expect(server.db.query('UPDATE readings SET pressure_psi = 1 WHERE id = :id', where)).rejects.toThrow(/never edited/);
+      await expect(server.db.query('UPDATE readings SET pressure_psi = 1 WHERE id = :id', where)).rejects.toThrow(
+        /never edited/,
+      );
       await expect(server.db.query('DELETE FROM readings WHERE id = :id', where)).rejects.toThrow(/permission denied/);
     });
   });
@@ -215,7 +263,10 @@ describe('tests over the API', () => {
   describe('ending one', () => {
     let hold: Hold;
     beforeAll(async () => {
-      hold = await scenario.start(lot(5), scenario.waterBody({ ...scenario.stamp(90), firstReading: scenario.pressure(120, 'open', 90) }));
+      hold = await scenario.start(
+        lot(5),
+        scenario.waterBody({ ...scenario.stamp(90), firstReading: scenario.pressure(120, 'open', 90) }),
+      );
     });
     const endAs = (person: WorldPerson, body: object) => world.as(person).post(`/api/holds/${hold.id}/end`, body);
 
@@ -235,7 +286,10 @@ describe('tests over the API', () => {
     });
 
     it('still takes a reading that was made while it stood, and none made after', async () => {
-      const late = await world.as('helper').post(`/api/holds/${hold.id}/readings`, scenario.pressure(111, 'open', 45)).expect(201);
+      const late = await world
+        .as('helper')
+        .post(`/api/holds/${hold.id}/readings`, scenario.pressure(111, 'open', 45))
+        .expect(201);
       expect((late.body as Hold).readings.map((reading) => reading.pressurePsi)).toEqual([120, 111]);
       const after = await world.as('helper').post(`/api/holds/${hold.id}/readings`, scenario.pressure(111)).expect(409);
       expect(after.body).toMatchObject({ code: 'hold-ended', params: { endReason: 'lost' } });
@@ -243,7 +297,10 @@ describe('tests over the API', () => {
 
     it('leaves room for the next, which counts on', async () => {
       expect((await scenario.start(lot(5), scenario.waterBody())).ordinal).toBe(2);
-      const list = await world.as('desk').get(`/api/lots/${lot(5).id}/holds`).expect(200);
+      const list = await world
+        .as('desk')
+        .get(`/api/lots/${lot(5).id}/holds`)
+        .expect(200);
       expect((list.body.items as Hold[]).map((each) => each.ordinal)).toEqual([2, 1]);
     });
   });

@@ -29,7 +29,17 @@ import { TestedVisitQueries } from './tested-visit.queries.js';
     VisitsModule,
   ],
   controllers: [HoldsController, TestUpController],
-  providers: [HoldsQueries, TestedVisitQueries, HoldsPresenter, ReadingLog, TestDown, HoldEnd, StartHold, Readings, TestUp],
+  providers: [
+    HoldsQueries,
+    TestedVisitQueries,
+    HoldsPresenter,
+    ReadingLog,
+    TestDown,
+    HoldEnd,
+    StartHold,
+    Readings,
+    TestUp,
+  ],
   exports: [HoldsQueries, ReadingLog],
 })
 export class HoldsModule {}

@@ -1,7 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import type { MemberRole } from '@holdwater/shared-types/accounts/roles.js';
 import type { Actor } from '../common/access/actor.js';
-import { canEndHold, canSayTestUp, canStartHold, canStrikeReading, downMoveOf, isVisitOfAnother } from './holds.policy.js';
+import {
+  canEndHold,
+  canSayTestUp,
+  canStartHold,
+  canStrikeReading,
+  downMoveOf,
+  isVisitOfAnother,
+} from './holds.policy.js';
 
 const lot = { builderId: 'builder', plumberId: 'plumber', departmentId: 'department', mayPlumberRequest: true };
 type Place = [organizationId: string, ...roles: MemberRole[]];

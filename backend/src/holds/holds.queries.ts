@@ -52,11 +52,19 @@ export class HoldsQueries {
   /** The readings of several tests, late arrivals in the place of the time they were made at. */
   async listNamedReadings(holdIds: readonly string[]): Promise<NamedReading[]> {
     if (holdIds.length === 0) return [];
-    return this.sequelize.query<NamedReading>(namedReadings, { replacements: { holdIds: [...holdIds] }, type: QueryTypes.SELECT });
+    return this.sequelize.query<NamedReading>(namedReadings, {
+      replacements: { holdIds: [...holdIds] },
+      type: QueryTypes.SELECT,
+    });
   }
 
   /** The standing tests of some units of a lot at a stage, locked until the end of the unit of work where asked for. */
-  async listStanding(lotId: string, stageCode: string, unitNumbers: readonly number[], isLocking = false): Promise<StandingHold[]> {
+  async listStanding(
+    lotId: string,
+    stageCode: string,
+    unitNumbers: readonly number[],
+    isLocking = false,
+  ): Promise<StandingHold[]> {
     const holds = await this.holds.findAll({
       where: { lotId, stageCode, unitNumber: [...unitNumbers], state: 'standing' },
       order: [['id', 'ASC']],
@@ -80,7 +88,9 @@ export class HoldsQueries {
 
   /** How many tests of this unit, stage and system there were. */
   async lastOrdinal(lotId: string, unitNumber: number, stageCode: string, system: System): Promise<number> {
-    const last = await this.holds.max<number | null, HoldModel>('ordinal', { where: { lotId, unitNumber, stageCode, system } });
+    const last = await this.holds.max<number | null, HoldModel>('ordinal', {
+      where: { lotId, unitNumber, stageCode, system },
+    });
     return last ?? 0;
   }
 }

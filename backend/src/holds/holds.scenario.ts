@@ -93,11 +93,19 @@ export class HoldScenario {
   }
 
   async visit(lot: LotModel, wish: VisitWish = {}): Promise<VisitModel> {
-    const { label = 'mid', stageCode = 'rough-in', inspector = 'inspector', unitNumbers = [1], state = 'booked' } = wish;
+    const {
+      label = 'mid',
+      stageCode = 'rough-in',
+      inspector = 'inspector',
+      unitNumbers = [1],
+      state = 'booked',
+    } = wish;
     const now = this.server.clock.now();
     const [startAt, endAt] = windows[label].map((at) => new Date(at)) as [Date, Date];
     this.visits += 1;
-    const from = wish.plannedAt ? Date.parse(wish.plannedAt) : Date.parse('2027-03-02T00:00:00Z') + this.visits * 30 * 60_000;
+    const from = wish.plannedAt
+      ? Date.parse(wish.plannedAt)
+      : Date.parse('2027-03-02T00:00:00Z') + this.visits * 30 * 60_000;
     return VisitModel.create({
       id: randomUUID(),
       lotId: lot.id,

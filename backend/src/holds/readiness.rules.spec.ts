@@ -18,7 +18,8 @@ const water = (readings: CountedReading[], parts: Partial<StandingTest> = {}): S
   readings,
   ...parts,
 });
-const drain = (readings: CountedReading[]): StandingTest => water(readings, { system: 'dwv', minimumPsi: null, ceilingPsi: null });
+const drain = (readings: CountedReading[]): StandingTest =>
+  water(readings, { system: 'dwv', minimumPsi: null, ceilingPsi: null });
 const wanted = requiredTests([1], ['dwv', 'water']);
 
 describe('whether the tests of a visit are up', () => {
@@ -55,7 +56,12 @@ describe('whether the tests of a visit are up', () => {
 
   it('goes by the last reading with the valve open: a shut one after it tells nothing of the pipe, a struck one nothing at all', () => {
     const open = read(5, 90);
-    const readings = [read(0, 130), open, read(20, 130, { gaugeValve: 'shut' }), read(30, 130, { struckAt: new Date() })];
+    const readings = [
+      read(0, 130),
+      open,
+      read(20, 130, { gaugeValve: 'shut' }),
+      read(30, 130, { struckAt: new Date() }),
+    ];
     expect(lastCounted(water(readings))).toBe(open);
     expect(readinessOf(wanted, [water(readings)]).missing.at(-1)?.why).toBe('below-minimum');
   });
@@ -69,7 +75,9 @@ describe('whether the tests of a visit are up', () => {
   });
 
   it('takes a system without a minimum at any reading', () => {
-    expect(readinessOf([{ unitNumber: 1, system: 'water' }], [water([read(0, 1)], { minimumPsi: null })]).missing).toEqual([]);
+    expect(
+      readinessOf([{ unitNumber: 1, system: 'water' }], [water([read(0, 1)], { minimumPsi: null })]).missing,
+    ).toEqual([]);
   });
 
   it('warns of one over its lowest-rated part, whatever else is missing', () => {

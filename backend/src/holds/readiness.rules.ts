@@ -44,7 +44,9 @@ export interface Readiness {
 
 /** Every required system of every unit of a visit, by unit and in the card's order of systems. */
 export function requiredTests(unitNumbers: readonly number[], systems: readonly System[]): RequiredTest[] {
-  return [...unitNumbers].sort((a, b) => a - b).flatMap((unitNumber) => systems.map((system) => ({ unitNumber, system })));
+  return [...unitNumbers]
+    .sort((a, b) => a - b)
+    .flatMap((unitNumber) => systems.map((system) => ({ unitNumber, system })));
 }
 
 /**
@@ -70,11 +72,17 @@ export function readinessOf(required: readonly RequiredTest[], standing: readonl
 export function lastCounted(test: Pick<StandingTest, 'system' | 'medium' | 'readings'>): CountedReading | undefined {
   return test.readings
     .filter((reading) => reading.struckAt === null && (isLevelTest(test) || reading.gaugeValve === 'open'))
-    .reduce<CountedReading | undefined>((last, reading) => (last && isLater(last, reading) ? last : reading), undefined);
+    .reduce<CountedReading | undefined>(
+      (last, reading) => (last && isLater(last, reading) ? last : reading),
+      undefined,
+    );
 }
 
 function isLater(a: CountedReading, b: CountedReading): boolean {
-  return a.madeAt.getTime() - b.madeAt.getTime() > 0 || (a.madeAt.getTime() === b.madeAt.getTime() && a.receivedAt > b.receivedAt);
+  return (
+    a.madeAt.getTime() - b.madeAt.getTime() > 0 ||
+    (a.madeAt.getTime() === b.madeAt.getTime() && a.receivedAt > b.receivedAt)
+  );
 }
 
 function whyMissing(test: StandingTest | undefined, reading: CountedReading | undefined): MissingWhy | null {
@@ -84,7 +92,11 @@ function whyMissing(test: StandingTest | undefined, reading: CountedReading | un
   return isBelow ? 'below-minimum' : null;
 }
 
-function overLimitOf(required: RequiredTest, test: StandingTest | undefined, reading: CountedReading | undefined): OverLimit | null {
+function overLimitOf(
+  required: RequiredTest,
+  test: StandingTest | undefined,
+  reading: CountedReading | undefined,
+): OverLimit | null {
   const ceilingPsi = test?.ceilingPsi ?? null;
   const pressurePsi = reading?.pressurePsi ?? null;
   if (ceilingPsi === null || pressurePsi === null || pressurePsi <= ceilingPsi) return null;

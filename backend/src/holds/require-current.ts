@@ -13,5 +13,6 @@ export function requireCurrent(
   expectedVersion: number,
 ): void {
   const isPossible = stateAfter(visit.state, move, visit.begunFrom ?? 'booked') !== null;
-  if (!isPossible || visit.version !== expectedVersion) refuse('stale-state', { is: visit.state, version: visit.version });
+  if (!isPossible || visit.version !== expectedVersion)
+    refuse('stale-state', { is: visit.state, version: visit.version });
 }

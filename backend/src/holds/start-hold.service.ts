@@ -91,7 +91,13 @@ export class StartHold {
     return inForce.get(departmentId) ?? refuse('no-rule-card');
   }
 
-  private async create(actor: Actor, lot: LotRecord, visit: VisitModel | null, body: Body, terms: TestTerms): Promise<HoldModel> {
+  private async create(
+    actor: Actor,
+    lot: LotRecord,
+    visit: VisitModel | null,
+    body: Body,
+    terms: TestTerms,
+  ): Promise<HoldModel> {
     const now = this.clock.now();
     const startedAt = correctedMadeAt(body.madeAt, now);
     const { unitNumber, stageCode, system } = body;

@@ -11,7 +11,7 @@ const content = ruleCardContent({
       acceptedMethods: ['stack-to-roof', 'air'] as const,
       pressures: [{ medium: 'air' as const, minimumPsi: 5, preferredPsi: null }],
     }),
-  })) as typeof base.tests,
+  })),
 });
 
 const water: ChosenTest = { stageCode: 'rough-in', system: 'water', method: 'gauge', medium: 'water', gauge: {} };
@@ -47,12 +47,18 @@ describe('the terms of a test', () => {
   });
 
   it('asks for the instrument it is read with', () => {
-    expect(() => termsOf(content, { ...water, gauge: null })).toThrow(expect.objectContaining({ fields: { gauge: 'required' } }));
-    expect(() => termsOf(content, { ...drain, tape: null, gauge: {} })).toThrow(expect.objectContaining({ fields: { tape: 'required' } }));
+    expect(() => termsOf(content, { ...water, gauge: null })).toThrow(
+      expect.objectContaining({ fields: { gauge: 'required' } }),
+    );
+    expect(() => termsOf(content, { ...drain, tape: null, gauge: {} })).toThrow(
+      expect.objectContaining({ fields: { tape: 'required' } }),
+    );
   });
 
   it('knows no stage and no system the card does not name', () => {
-    expect(() => termsOf(content, { ...water, stageCode: 'attic' })).toThrow(expect.objectContaining({ code: 'stage-unknown' }));
+    expect(() => termsOf(content, { ...water, stageCode: 'attic' })).toThrow(
+      expect.objectContaining({ code: 'stage-unknown' }),
+    );
     expect(() => termsOf(content, { ...water, stageCode: 'groundwork' })).toThrow(
       expect.objectContaining({ code: 'bad-input', fields: { system: 'not-of-this-stage' } }),
     );

@@ -51,7 +51,11 @@ function minimumOf(rule: TestRule, chosen: ChosenTest): number | null {
   const pressure = rule.pressures.find((each) => each.medium === chosen.medium);
   const isAccepted = isFitting && !isOdd && (isLevelTest(chosen) || pressure !== undefined);
   if (!isAccepted) {
-    refuse('method-not-accepted', { acceptedMedia: rule.pressures.map((each) => each.medium) }, { medium: 'medium-not-accepted' });
+    refuse(
+      'method-not-accepted',
+      { acceptedMedia: rule.pressures.map((each) => each.medium) },
+      { medium: 'medium-not-accepted' },
+    );
   }
   return isLevelTest(chosen) ? null : (pressure?.minimumPsi ?? null);
 }

@@ -21,14 +21,21 @@ describe('saying that the test is up, and that it is down again', () => {
   afterAll(() => server?.close());
 
   const upAs = (person: WorldPerson, visit: VisitModel, parts: object = {}) =>
-    world.as(person).post(`/api/visits/${visit.id}/test-up`, { ...scenario.stamp(), expectedVersion: visit.version, ...parts });
+    world
+      .as(person)
+      .post(`/api/visits/${visit.id}/test-up`, { ...scenario.stamp(), expectedVersion: visit.version, ...parts });
   const downAs = (person: WorldPerson, visit: VisitModel, parts: object = {}) =>
-    world.as(person).post(`/api/visits/${visit.id}/no-longer-up`, { ...scenario.stamp(), expectedVersion: visit.version, ...parts });
+    world
+      .as(person)
+      .post(`/api/visits/${visit.id}/no-longer-up`, { ...scenario.stamp(), expectedVersion: visit.version, ...parts });
   const eventsOf = async (visitId: string) => {
-    const rows = await server.db.query<{ kind: string }>('SELECT kind FROM outbox_events WHERE visit_id = :visitId ORDER BY position', {
-      replacements: { visitId },
-      type: QueryTypes.SELECT,
-    });
+    const rows = await server.db.query<{ kind: string }>(
+      'SELECT kind FROM outbox_events WHERE visit_id = :visitId ORDER BY position',
+      {
+        replacements: { visitId },
+        type: QueryTypes.SELECT,
+      },
+    );
     return rows.map((row) => row.kind);
   };
 
@@ -43,7 +50,8 @@ describe('saying that the test is up, and that it is down again', () => {
       for (const person of ['superintendent', 'helper', 'plumberOwner', 'inspector', 'desk'] as const) {
         expect((await upAs(person, visit).expect(403)).body.code).toBe('not-allowed');
       }
-      for (const person of ['otherPlumber', 'otherInspector', 'operator'] as const) await upAs(person, visit).expect(404);
+      for (const person of ['otherPlumber', 'otherInspector', 'operator'] as const)
+        await upAs(person, visit).expect(404);
       await visit.reload();
       expect(visit.state).toBe('booked');
     });
@@ -68,7 +76,10 @@ describe('saying that the test is up, and that it is down again', () => {
       const stale = await upAs('plumber', visit).expect(409);
       expect(stale.body).toMatchObject({ code: 'stale-state', params: { is: 'ready', version: 1 } });
       await visit.reload();
-      expect((await upAs('plumber', visit).expect(409)).body).toMatchObject({ code: 'stale-state', params: { is: 'ready' } });
+      expect((await upAs('plumber', visit).expect(409)).body).toMatchObject({
+        code: 'stale-state',
+        params: { is: 'ready' },
+      });
     });
 
     it('is taken back by the plumber, or by the inspector of the visit, and by nobody else', async () => {
@@ -87,7 +98,10 @@ describe('saying that the test is up, and that it is down again', () => {
       await visit.reload();
       await downAs('plumber', visit).expect(200);
       await visit.reload();
-      expect((await downAs('plumber', visit).expect(409)).body).toMatchObject({ code: 'stale-state', params: { is: 'booked' } });
+      expect((await downAs('plumber', visit).expect(409)).body).toMatchObject({
+        code: 'stale-state',
+        params: { is: 'booked' },
+      });
       expect(await eventsOf(visit.id)).toEqual(['test-up', 'no-longer-up', 'test-up', 'no-longer-up']);
     });
 
@@ -96,7 +110,10 @@ describe('saying that the test is up, and that it is down again', () => {
       await upAs('plumber', visit).expect(200);
       const list = await world.as('plumber').get(`/api/lots/${visit.lotId}/holds`).expect(200);
       const water = (list.body.items as Array<{ id: string; system: string }>).find((hold) => hold.system === 'water');
-      await world.as('plumber').post(`/api/holds/${water?.id}/end`, { ...scenario.stamp(), reason: 'lost' }).expect(200);
+      await world
+        .as('plumber')
+        .post(`/api/holds/${water?.id}/end`, { ...scenario.stamp(), reason: 'lost' })
+        .expect(200);
       await visit.reload();
       expect(visit.state).toBe('booked');
       const statements = await TestUpModel.findAll({ where: { visitId: visit.id, endedAt: null } });
@@ -119,7 +136,13 @@ describe('saying that the test is up, and that it is down again', () => {
   describe('with something missing', () => {
     let visit: VisitModel;
     beforeAll(async () => {
-      await LotUnitModel.create({ id: randomUUID(), lotId: world.lots[1].id, number: 2, label: 'Flat', geometry: null });
+      await LotUnitModel.create({
+        id: randomUUID(),
+        lotId: world.lots[1].id,
+        number: 2,
+        label: 'Flat',
+        geometry: null,
+      });
       visit = await scenario.visit(world.lots[1], { unitNumbers: [1, 2], inspector: 'secondInspector' });
     });
 
@@ -143,7 +166,8 @@ describe('saying that the test is up, and that it is down again', () => {
     it('adds the readings given with it first, and keeps none of them when it is refused', async () => {
       const list = await world.as('plumber').get(`/api/lots/${visit.lotId}/holds`).expect(200);
       const holds = list.body.items as Array<{ id: string; system: string; unitNumber: number }>;
-      const idOf = (unitNumber: number) => holds.find((hold) => hold.system === 'water' && hold.unitNumber === unitNumber)?.id;
+      const idOf = (unitNumber: number) =>
+        holds.find((hold) => hold.system === 'water' && hold.unitNumber === unitNumber)?.id;
       const readings = [
         { holdId: idOf(1), ...scenario.pressure(110) },
         { holdId: idOf(2), ...scenario.pressure(105) },
@@ -212,7 +236,10 @@ describe('saying that the test is up, and that it is down again', () => {
     });
     await scenario.standUp(world.lots[3]);
     expect((await upAs('plumber', kept).expect(200)).body.state).toBe('ready');
-    const refused = await world.as('plumber').post(`/api/lots/${world.lots[2].id}/holds`, scenario.dwvBody({ stageCode: 'groundwork' })).expect(409);
+    const refused = await world
+      .as('plumber')
+      .post(`/api/lots/${world.lots[2].id}/holds`, scenario.dwvBody({ stageCode: 'groundwork' }))
+      .expect(409);
     expect(refused.body.code).toBe('no-rule-card');
   });
 });

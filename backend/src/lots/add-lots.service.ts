@@ -13,7 +13,9 @@ import { canAddLots } from './lots.policy.js';
 import { TractModel } from './tract.model.js';
 
 /** A lot about to be added: its own fields, without parties. */
-export type LotDraft = Omit<LotRecord, 'id' | 'builderId' | 'plumberId' | 'departmentId' | 'tractId'> & { readonly unitLabels: readonly string[] };
+export type LotDraft = Omit<LotRecord, 'id' | 'builderId' | 'plumberId' | 'departmentId' | 'tractId'> & {
+  readonly unitLabels: readonly string[];
+};
 
 /** Where new lots go and whom to ask to join them. */
 export interface LotTies {
@@ -43,7 +45,8 @@ export class AddLotsService {
 
   /** Throws `bad-input` when the tract is not the builder's or a party is none of its kind. */
   async refuseTies({ builderId, tractId, plumberId, departmentId }: LotTies): Promise<void> {
-    if (tractId && (await this.tracts.count({ where: { id: tractId, builderId } })) === 0) refuse('bad-input', {}, { tractId: 'unknown' });
+    if (tractId && (await this.tracts.count({ where: { id: tractId, builderId } })) === 0)
+      refuse('bad-input', {}, { tractId: 'unknown' });
     if (plumberId) await this.asking.getOrganization('plumber', plumberId, 'plumberId');
     if (departmentId) await this.asking.getOrganization('department', departmentId, 'departmentId');
   }
@@ -59,14 +62,23 @@ export class AddLotsService {
     await this.units.bulkCreate(rows.flatMap(({ row, unitLabels }) => unitsOf(row.id, unitLabels)));
     for (const { row } of rows) {
       const who = { personId: actor.personId, role: 'superintendent' };
-      await this.ledger.appendToLot(row.id, 'lot-added', { number: row.number, address: row.address, builderId: ties.builderId }, who);
+      await this.ledger.appendToLot(
+        row.id,
+        'lot-added',
+        { number: row.number, address: row.address, builderId: ties.builderId },
+        who,
+      );
     }
     const lotIds = rows.map(({ row }) => row.id);
     await this.askParties(actor, lotIds, ties);
     return lotIds;
   }
 
-  private async askParties(actor: Actor, lotIds: readonly string[], { builderId, plumberId, departmentId }: LotTies): Promise<void> {
+  private async askParties(
+    actor: Actor,
+    lotIds: readonly string[],
+    { builderId, plumberId, departmentId }: LotTies,
+  ): Promise<void> {
     if (plumberId) {
       const plumber = await this.asking.getOrganization('plumber', plumberId, 'plumberId');
       await this.asking.ask(actor, builderId, lotIds, plumber, 'plumber');

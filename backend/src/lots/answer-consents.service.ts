@@ -51,8 +51,17 @@ export class AnswerConsentsService {
     });
   }
 
-  private async write(actor: Actor, asked: readonly ConsentRecord[], { isJoining, why, organizationId }: Answer): Promise<void> {
-    const answered = { answeredBy: actor.personId, answeredAt: this.clock.now(), isJoining, why: isJoining ? null : (why ?? null) };
+  private async write(
+    actor: Actor,
+    asked: readonly ConsentRecord[],
+    { isJoining, why, organizationId }: Answer,
+  ): Promise<void> {
+    const answered = {
+      answeredBy: actor.personId,
+      answeredAt: this.clock.now(),
+      isJoining,
+      why: isJoining ? null : (why ?? null),
+    };
     await this.models.update(answered, { where: { id: asked.map(({ id }) => id) } });
     if (!isJoining) return;
     for (const { lotId, kind } of asked) {
@@ -61,7 +70,11 @@ export class AnswerConsentsService {
     }
   }
 
-  private async record(actor: Actor, asked: readonly ConsentRecord[], { organizationId, isJoining, ...answer }: Answer): Promise<void> {
+  private async record(
+    actor: Actor,
+    asked: readonly ConsentRecord[],
+    { organizationId, isJoining, ...answer }: Answer,
+  ): Promise<void> {
     const why = answer.why ?? null;
     const who = { personId: actor.personId, role: answeringRole(actor, organizationId) };
     const organizationName = (await this.parties.listOrganizations([organizationId])).get(organizationId)?.name ?? '';
@@ -75,7 +88,11 @@ export class AnswerConsentsService {
   }
 
   /** Each builder is told once, however many of its lots were answered. */
-  private async tell(actor: Actor, asked: readonly ConsentRecord[], { isJoining, why }: { isJoining: boolean; why: string | null }): Promise<void> {
+  private async tell(
+    actor: Actor,
+    asked: readonly ConsentRecord[],
+    { isJoining, why }: { isJoining: boolean; why: string | null },
+  ): Promise<void> {
     const briefs = await this.lots.listBriefs(asked.map(({ lotId }) => lotId));
     for (const ofBuilder of groupBy(asked, ({ lotId }) => briefs.get(lotId)?.builderId).values()) {
       const [first] = ofBuilder;

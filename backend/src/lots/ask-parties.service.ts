@@ -56,11 +56,23 @@ export class AskPartiesService {
   }
 
   /** Asks one organization about several lots of a builder at once, with one notice for all of them. Inside the caller's unit of work. */
-  async ask(actor: Actor, builderId: string, lotIds: readonly string[], organization: OrganizationRecord, kind: AskedKind): Promise<void> {
-    const isOutside = kind === 'department' && ((await this.departments.findDepartment(organization.id))?.isOutside ?? false);
-    await this.consents.bulkCreate(lotIds.map((lotId) => this.consentOf(actor, lotId, organization.id, kind, isOutside)));
+  async ask(
+    actor: Actor,
+    builderId: string,
+    lotIds: readonly string[],
+    organization: OrganizationRecord,
+    kind: AskedKind,
+  ): Promise<void> {
+    const isOutside =
+      kind === 'department' && ((await this.departments.findDepartment(organization.id))?.isOutside ?? false);
+    await this.consents.bulkCreate(
+      lotIds.map((lotId) => this.consentOf(actor, lotId, organization.id, kind, isOutside)),
+    );
     if (isOutside) await this.lotModels.update({ departmentId: organization.id }, { where: { id: [...lotIds] } });
-    const who = { personId: actor.personId, role: hasRole(actor, builderId, 'superintendent') ? 'superintendent' : 'owner' };
+    const who = {
+      personId: actor.personId,
+      role: hasRole(actor, builderId, 'superintendent') ? 'superintendent' : 'owner',
+    };
     const payload = { kind, organizationId: organization.id, organizationName: organization.name };
     for (const lotId of lotIds) {
       await this.ledger.appendToLot(lotId, isOutside ? 'party-joined' : 'party-asked', payload, who);
@@ -74,7 +86,15 @@ export class AskPartiesService {
   private consentOf(actor: Actor, lotId: string, organizationId: string, kind: AskedKind, isOutside: boolean) {
     const now = this.clock.now();
     const answer = { answeredBy: actor.personId, answeredAt: now, isJoining: true };
-    return { id: randomUUID(), lotId, kind, organizationId, askedBy: actor.personId, askedAt: now, ...(isOutside && answer) };
+    return {
+      id: randomUUID(),
+      lotId,
+      kind,
+      organizationId,
+      askedBy: actor.personId,
+      askedAt: now,
+      ...(isOutside && answer),
+    };
   }
 
   private async refuseTaken(lot: LotRecord, kind: AskedKind): Promise<void> {

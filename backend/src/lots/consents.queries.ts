@@ -38,11 +38,20 @@ export class ConsentsQueries {
        ORDER BY c.asked_at, t.name, l.number, c.id`,
       { readerIds: organizationIds(actor) },
     );
-    return rows.map(({ organizationId: id, organizationName: name, organizationKind: kind, organizationPhone: phone, askedAt, ...row }) => ({
-      ...row,
-      organization: { id, name, kind, phone },
-      askedAt: askedAt.toISOString(),
-    }));
+    return rows.map(
+      ({
+        organizationId: id,
+        organizationName: name,
+        organizationKind: kind,
+        organizationPhone: phone,
+        askedAt,
+        ...row
+      }) => ({
+        ...row,
+        organization: { id, name, kind, phone },
+        askedAt: askedAt.toISOString(),
+      }),
+    );
   }
 
   /** The newest asking of an organization on each of these lots, locked in order of lot. */

@@ -14,7 +14,13 @@ let nextNumber = 500;
 beforeAll(async () => {
   server = await startTestApp();
   world = await createWorld(server);
-  outside = await OrganizationModel.create({ id: randomUUID(), name: 'Farrow County', kind: 'department', phone: null, createdAt: server.clock.now() });
+  outside = await OrganizationModel.create({
+    id: randomUUID(),
+    name: 'Farrow County',
+    kind: 'department',
+    phone: null,
+    createdAt: server.clock.now(),
+  });
   await DepartmentModel.create({ id: outside.id, zone: 'America/Boise', elevationFt: 2700, isOutside: true });
 });
 afterAll(() => server.close());
@@ -22,26 +28,42 @@ afterAll(() => server.close());
 /** A lot of Odderly Homes that asks strangers to join. */
 async function lotAsking(extra: object): Promise<string> {
   nextNumber += 1;
-  const given = { builderId: world.organizations.builder.id, tractId: world.tract.id, number: String(nextNumber), address: `${nextNumber} Tern Court`, ...extra };
+  const given = {
+    builderId: world.organizations.builder.id,
+    tractId: world.tract.id,
+    number: String(nextNumber),
+    address: `${nextNumber} Tern Court`,
+    ...extra,
+  };
   const { status, body } = await world.as('superintendent').post('/api/lots', given);
   expect(status).toBe(201);
   return body.id as string;
 }
 const askingPlumber = () => lotAsking({ plumberId: world.organizations.otherPlumber.id });
 const answer = (person: WorldPerson, lotIds: string[], isJoining: boolean, why?: string) =>
-  world.as(person).post('/api/consents', { organizationId: world.organizations.otherPlumber.id, lotIds, isJoining, why });
+  world
+    .as(person)
+    .post('/api/consents', { organizationId: world.organizations.otherPlumber.id, lotIds, isJoining, why });
 const askedLots = async (person: WorldPerson) =>
   ((await world.as(person).get('/api/consents')).body.items as Array<{ lotId: string }>).map(({ lotId }) => lotId);
 const partiesOf = async (lotId: string) => {
   const { body } = await world.as('superintendent').get(`/api/lots/${lotId}`);
-  return body.parties.map((party: { kind: string; status: string; organization: { name: string } }) => [party.kind, party.status, party.organization.name]);
+  return body.parties.map((party: { kind: string; status: string; organization: { name: string } }) => [
+    party.kind,
+    party.status,
+    party.organization.name,
+  ]);
 };
 const eventsOf = async (kind: string, lotId: string) => {
-  const [rows] = await server.db.query('SELECT payload FROM outbox_events WHERE kind = :kind AND lot_id = :lotId', { replacements: { kind, lotId } });
+  const [rows] = await server.db.query('SELECT payload FROM outbox_events WHERE kind = :kind AND lot_id = :lotId', {
+    replacements: { kind, lotId },
+  });
   return rows as Array<{ payload: Record<string, unknown> }>;
 };
 const ledgerKinds = async (lotId: string) => {
-  const [rows] = await server.db.query('SELECT kind FROM ledger_entries WHERE lot_id = :lotId ORDER BY sequence', { replacements: { lotId } });
+  const [rows] = await server.db.query('SELECT kind FROM ledger_entries WHERE lot_id = :lotId ORDER BY sequence', {
+    replacements: { lotId },
+  });
   return (rows as Array<{ kind: string }>).map(({ kind }) => kind);
 };
 
@@ -63,22 +85,32 @@ describe('asking a party to join', () => {
     });
     expect((await world.as('otherPlumber').get(`/api/lots/${lotId}`)).status).toBe(404);
     expect(await askedLots('otherHelper')).toEqual([lotId]);
-    for (const person of ['plumber', 'otherSuperintendent', 'otherDesk', 'operator'] as const) expect(await askedLots(person)).toEqual([]);
+    for (const person of ['plumber', 'otherSuperintendent', 'otherDesk', 'operator'] as const)
+      expect(await askedLots(person)).toEqual([]);
     expect(await partiesOf(lotId)).toEqual([
       ['builder', 'attached', 'Odderly Homes'],
       ['plumber', 'pending', 'Merrow'],
     ]);
-    expect(await eventsOf('consent-asked', lotId)).toMatchObject([{ payload: { organizationId: world.organizations.otherPlumber.id, kind: 'plumber', lotCount: 1 } }]);
+    expect(await eventsOf('consent-asked', lotId)).toMatchObject([
+      { payload: { organizationId: world.organizations.otherPlumber.id, kind: 'plumber', lotCount: 1 } },
+    ]);
     await answer('otherPlumber', [lotId], false);
   });
 
   it('asks one at a time, and none where one is attached', async () => {
     const lotId = await askingPlumber();
-    const ask = (kind: string, organizationId: string) => world.as('builderOwner').post(`/api/lots/${lotId}/parties`, { kind, organizationId });
+    const ask = (kind: string, organizationId: string) =>
+      world.as('builderOwner').post(`/api/lots/${lotId}/parties`, { kind, organizationId });
     expect((await ask('plumber', world.organizations.plumber.id)).body.code).toBe('party-pending');
-    expect((await ask('department', world.organizations.plumber.id)).body.fields).toEqual({ organizationId: 'unknown' });
+    expect((await ask('department', world.organizations.plumber.id)).body.fields).toEqual({
+      organizationId: 'unknown',
+    });
     const asked = await ask('department', world.organizations.otherDepartment.id);
-    expect(asked.body.parties.map(({ status }: { status: string }) => status)).toEqual(['attached', 'pending', 'pending']);
+    expect(asked.body.parties.map(({ status }: { status: string }) => status)).toEqual([
+      'attached',
+      'pending',
+      'pending',
+    ]);
     await answer('otherPlumber', [lotId], true);
     expect((await ask('plumber', world.organizations.otherPlumber.id)).body.code).toBe('party-already-attached');
     expect((await ask('plumber', world.organizations.plumber.id)).body.code).toBe('party-already-attached');
@@ -95,7 +127,10 @@ describe('asking a party to join', () => {
 
   it('takes two askings at once as one', async () => {
     const lotId = await lotAsking({});
-    const ask = () => world.as('superintendent').post(`/api/lots/${lotId}/parties`, { kind: 'plumber', organizationId: world.organizations.plumber.id });
+    const ask = () =>
+      world
+        .as('superintendent')
+        .post(`/api/lots/${lotId}/parties`, { kind: 'plumber', organizationId: world.organizations.plumber.id });
     const answers = await Promise.all([ask(), ask()]);
     expect(answers.map(({ status }) => status).sort()).toEqual([200, 409]);
   });
@@ -134,7 +169,9 @@ describe('answering', () => {
     expect(await eventsOf('consent-refused', lotId)).toMatchObject([{ payload: { why: 'No crew in May' } }]);
     expect((await world.as('otherPlumber').get(`/api/lots/${lotId}`)).status).toBe(404);
     server.clock.advance(1);
-    const again = await world.as('superintendent').post(`/api/lots/${lotId}/parties`, { kind: 'plumber', organizationId: world.organizations.otherPlumber.id });
+    const again = await world
+      .as('superintendent')
+      .post(`/api/lots/${lotId}/parties`, { kind: 'plumber', organizationId: world.organizations.otherPlumber.id });
     expect(again.status).toBe(200);
     expect((await answer('otherPlumber', [lotId], true)).status).toBe(200);
     expect(await partiesOf(lotId)).toContainEqual(['plumber', 'attached', 'Merrow']);
@@ -152,12 +189,18 @@ describe('answering', () => {
   it('says how it was answered before', async () => {
     const lotId = await askingPlumber();
     await answer('otherPlumber', [lotId], true);
-    expect((await answer('otherPlumberOwner', [lotId], false)).body).toMatchObject({ code: 'stale-state', params: { is: 'attached', lotId } });
+    expect((await answer('otherPlumberOwner', [lotId], false)).body).toMatchObject({
+      code: 'stale-state',
+      params: { is: 'attached', lotId },
+    });
   });
 
   it('lets two colleagues answer at once: one is told that it was answered', async () => {
     const lotId = await askingPlumber();
-    const answers = await Promise.all([answer('otherPlumber', [lotId], true), answer('otherPlumberOwner', [lotId], false)]);
+    const answers = await Promise.all([
+      answer('otherPlumber', [lotId], true),
+      answer('otherPlumberOwner', [lotId], false),
+    ]);
     expect(answers.map(({ status }) => status).sort()).toEqual([200, 409]);
   });
 
@@ -172,9 +215,15 @@ describe('answering', () => {
 
   it('lets desk and owner of a department answer, its inspector not', async () => {
     const organizationId = world.organizations.otherDepartment.id;
-    for (const [person, status] of [['otherInspector', 403], ['otherDesk', 200], ['otherDepartmentOwner', 200]] as const) {
+    for (const [person, status] of [
+      ['otherInspector', 403],
+      ['otherDesk', 200],
+      ['otherDepartmentOwner', 200],
+    ] as const) {
       const lotId = await lotAsking({ departmentId: organizationId });
-      const answered = await world.as(person).post('/api/consents', { organizationId, lotIds: [lotId], isJoining: true });
+      const answered = await world
+        .as(person)
+        .post('/api/consents', { organizationId, lotIds: [lotId], isJoining: true });
       expect(answered.status).toBe(status);
       const { body } = await world.as('superintendent').get(`/api/lots/${lotId}`);
       expect(body.zone).toBe(status === 200 ? 'America/Chicago' : null);

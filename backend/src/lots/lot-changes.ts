@@ -9,7 +9,11 @@ export type LotFields = Partial<Omit<LotRecord, 'id' | 'builderId' | 'plumberId'
 export function fieldsGiven({ permit, access, ...fields }: LotUpdate): LotFields {
   return withoutUndefined({
     ...fields,
-    ...(permit && { permitNumber: permit.number || null, permitStatus: permit.status, permitHolder: permit.holder || null }),
+    ...(permit && {
+      permitNumber: permit.number || null,
+      permitStatus: permit.status,
+      permitHolder: permit.holder || null,
+    }),
     ...(access && {
       gateCode: access.gateCode || null,
       contactName: access.contactName || null,

@@ -54,7 +54,8 @@ export class LotDetailPresenter {
   }
 
   private async accessFor(actor: Actor, lot: LotRecord, zone: string | null): Promise<LotAccess | null> {
-    const isComingToday = zone !== null && (await this.progress.isPlannedOn(lot.id, actor.personId, localDateOf(this.clock.now(), zone)));
+    const isComingToday =
+      zone !== null && (await this.progress.isPlannedOn(lot.id, actor.personId, localDateOf(this.clock.now(), zone)));
     if (!canSeeAccess(actor, lot, isComingToday)) return null;
     const { gateCode, contactName, contactPhone, hazards } = lot;
     return { gateCode, contactName, contactPhone, hazards };

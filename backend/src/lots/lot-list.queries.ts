@@ -29,15 +29,18 @@ const sortKeys = {
 };
 const sortOrder = `${sortKeys.sortTract}, ${sortKeys.sortPrefix}, ${sortKeys.sortNumber}, l.number, l.id`;
 
-/** Every stage of the rule card in force with the place, in the pinned order, of its unit furthest from clear; 1 is clear. */
+/** The stages of the rule cards in force, taken out of their JSON once, not once a lot. */
+const stagesInForce = `WITH stages AS MATERIALIZED (
+  SELECT rc.department_id, stage.value ->> 'code' AS code, (stage.value ->> 'order')::int AS place
+  FROM rule_cards rc JOIN departments d ON d.id = rc.department_id CROSS JOIN jsonb_array_elements(rc.content -> 'stages') stage
+  WHERE rc.state = 'published' AND rc.effective @> CAST((CAST(:now AS timestamptz) AT TIME ZONE d.zone) AS date))`;
+
+/** Every stage of a lot with the place, in the pinned order, of its unit furthest from clear; 1 is clear. */
 const stageStates = `
-  SELECT stage.value ->> 'code' AS code, (stage.value ->> 'order')::int AS place,
-    max(COALESCE(array_position(ARRAY[:clearStates]::text[], c.state), :notTested)) AS worst
-  FROM rule_cards rc CROSS JOIN jsonb_array_elements(rc.content -> 'stages') stage CROSS JOIN lot_units u
-  LEFT JOIN clearances c ON c.lot_id = u.lot_id AND c.unit_number = u.number AND c.stage_code = stage.value ->> 'code'
-  WHERE rc.department_id = l.department_id AND rc.state = 'published' AND u.lot_id = l.id
-    AND rc.effective @> CAST((CAST(:now AS timestamptz) AT TIME ZONE d.zone) AS date)
-  GROUP BY 1, 2`;
+  SELECT stages.code, stages.place, max(COALESCE(array_position(ARRAY[:clearStates]::text[], c.state), :notTested)) AS worst
+  FROM stages CROSS JOIN lot_units u
+  LEFT JOIN clearances c ON c.lot_id = u.lot_id AND c.unit_number = u.number AND c.stage_code = stages.code
+  WHERE stages.department_id = l.department_id AND u.lot_id = l.id GROUP BY 1, 2`;
 
 const isInState = `(SELECT s.worst FROM (${stageStates}) s WHERE s.code = :stage) = :statePlace`;
 /** The current stage is the first that is not clear; a lot is clear when it has stages and none is left. */
@@ -51,7 +54,8 @@ export class LotListQueries {
 
   async pageLots(filter: LotFilter): Promise<{ items: LotBrief[]; nextCursor: string | null }> {
     const rows = await this.select<SortedBrief>(
-      `SELECT ${briefColumns}, ${sortKeys.sortTract} AS "sortTract", ${sortKeys.sortPrefix} AS "sortPrefix", ${sortKeys.sortNumber}::text AS "sortNumber"
+      `${filter.state === undefined ? '' : stagesInForce}
+       SELECT ${briefColumns}, ${sortKeys.sortTract} AS "sortTract", ${sortKeys.sortPrefix} AS "sortPrefix", ${sortKeys.sortNumber}::text AS "sortNumber"
        FROM ${briefTables} WHERE ${conditionsOf(filter).join(' AND ')} ORDER BY ${sortOrder} LIMIT :limit`,
       replacementsOf(filter),
     );
@@ -81,13 +85,23 @@ function conditionsOf({ cursor, tractId, organizationId, state, stage }: LotFilt
   if (tractId !== undefined) conditions.push('l.tract_id = :tractId');
   if (organizationId !== undefined) conditions.push(':organizationId IN (l.builder_id, l.plumber_id, l.department_id)');
   if (state !== undefined) conditions.push(stage === undefined ? isCurrentlyInState : isInState);
-  if (cursor !== undefined) conditions.push(`(${sortOrder}) > (:afterTract, :afterPrefix, CAST(:afterNumber AS numeric), :after, CAST(:afterId AS uuid))`);
+  if (cursor !== undefined)
+    conditions.push(
+      `(${sortOrder}) > (:afterTract, :afterPrefix, CAST(:afterNumber AS numeric), :after, CAST(:afterId AS uuid))`,
+    );
   return conditions;
 }
 
 function replacementsOf({ readerIds, cursor, limit, ...filter }: LotFilter): Record<string, unknown> {
   const statePlace = filter.state === undefined ? null : clearStates.indexOf(filter.state) + 1;
-  const base = { ...filter, readerIds: [...readerIds], limit: limit + 1, clearStates: [...clearStates], notTested: clearStates.length, statePlace };
+  const base = {
+    ...filter,
+    readerIds: [...readerIds],
+    limit: limit + 1,
+    clearStates: [...clearStates],
+    notTested: clearStates.length,
+    statePlace,
+  };
   if (cursor === undefined) return base;
   const [afterTract, afterPrefix, afterNumber, after, afterId] = fromCursor(cursor, 5).map(String);
   const isOurs = /^[0-9]+$/.test(afterNumber ?? '') && id.safeParse(afterId).success;

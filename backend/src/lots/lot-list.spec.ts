@@ -25,7 +25,9 @@ const numbersFor = async (person: WorldPerson, query = '') => {
 };
 const inOrder = ['1', '2', '3', '4', '5', '6', '10', '10B', '11', '100', 'A-9', 'A-10', '3'];
 const setState = (lotId: string, stageCode: string, state: string) =>
-  server.db.query('INSERT INTO clearances VALUES (:lotId, 1, :stageCode, :state, now())', { replacements: { lotId, stageCode, state } });
+  server.db.query('INSERT INTO clearances VALUES (:lotId, 1, :stageCode, :state, now())', {
+    replacements: { lotId, stageCode, state },
+  });
 
 describe('the list of lots', () => {
   it('orders numbers as people read them, lots without a tract last, and shows each party its own', async () => {
@@ -39,7 +41,9 @@ describe('the list of lots', () => {
     const seen: string[] = [];
     let cursor: string | null = '';
     while (cursor !== null) {
-      const { body } = await world.as('builderOwner').get(`/api/lots?limit=${limit}${cursor ? `&cursor=${cursor}` : ''}`);
+      const { body } = await world
+        .as('builderOwner')
+        .get(`/api/lots?limit=${limit}${cursor ? `&cursor=${cursor}` : ''}`);
       seen.push(...body.items.map(({ number }: { number: string }) => number));
       cursor = body.nextCursor;
     }
@@ -49,7 +53,10 @@ describe('the list of lots', () => {
   it('refuses a cursor it did not make', async () => {
     const forged = Buffer.from(JSON.stringify(['0', '', 'x', '1', 'y'])).toString('base64url');
     for (const cursor of ['nonsense', forged]) {
-      expect((await world.as('desk').get(`/api/lots?cursor=${cursor}`)).body).toMatchObject({ code: 'bad-input', fields: { cursor: 'not-a-cursor' } });
+      expect((await world.as('desk').get(`/api/lots?cursor=${cursor}`)).body).toMatchObject({
+        code: 'bad-input',
+        fields: { cursor: 'not-a-cursor' },
+      });
     }
   });
 
@@ -118,7 +125,15 @@ describe('finding lots', () => {
     expect(await found('superintendent', '1')).not.toContain('7');
     expect(await found('otherPlumber', 'Quillback')).toEqual(['7']);
     const { builder } = world.organizations;
-    for (let n = 300; n < 315; n += 1) await createLot({ builder, plumber: null, department: null, tract: null, number: String(n), now: server.clock.now() });
+    for (let n = 300; n < 315; n += 1)
+      await createLot({
+        builder,
+        plumber: null,
+        department: null,
+        tract: null,
+        number: String(n),
+        now: server.clock.now(),
+      });
     expect(await found('superintendent', 'Quillback')).toHaveLength(12);
   });
 

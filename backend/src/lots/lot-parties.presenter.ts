@@ -27,7 +27,9 @@ export class LotPartiesPresenter {
     const people = await this.people.listPeople(attached.map(({ organizationId }) => organizationId));
     return named.flatMap(({ kind, organizationId, status }) => {
       const organization = organizations.get(organizationId);
-      return organization ? [{ kind, organization, status, people: (people.get(organizationId) ?? []).map(briefOf) }] : [];
+      return organization
+        ? [{ kind, organization, status, people: (people.get(organizationId) ?? []).map(briefOf) }]
+        : [];
     });
   }
 }

@@ -25,9 +25,12 @@ export class LotPartiesQueries {
   constructor(@InjectConnection() private readonly sequelize: Sequelize) {}
 
   async listOrganizations(ids: readonly string[]): Promise<Map<string, OrganizationRecord>> {
-    const found = await this.select<OrganizationRecord>('SELECT id, name, kind, phone FROM organizations WHERE id = ANY (ARRAY[:ids]::uuid[])', {
-      ids: [...ids],
-    });
+    const found = await this.select<OrganizationRecord>(
+      'SELECT id, name, kind, phone FROM organizations WHERE id = ANY (ARRAY[:ids]::uuid[])',
+      {
+        ids: [...ids],
+      },
+    );
     return new Map(found.map((organization) => [organization.id, organization]));
   }
 

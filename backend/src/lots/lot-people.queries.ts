@@ -24,7 +24,10 @@ export class LotPeopleQueries {
   constructor(@InjectConnection() private readonly sequelize: Sequelize) {}
 
   /** By organization, those in force with a role that stands for it on a lot, by name. */
-  async listPeople(organizationIds: readonly string[], roles: readonly MemberRole[] = spokenForBy): Promise<Map<string, LotPerson[]>> {
+  async listPeople(
+    organizationIds: readonly string[],
+    roles: readonly MemberRole[] = spokenForBy,
+  ): Promise<Map<string, LotPerson[]>> {
     const found = await this.sequelize.query<LotPerson>(
       `SELECT p.id, m.organization_id AS "organizationId", p.name, p.phone, p.email, p.locale, m.roles
        FROM memberships m JOIN persons p ON p.id = m.person_id

@@ -13,7 +13,11 @@ describe('stages of a lot', () => {
   });
 
   it('follows the order of the department, not that of the list', () => {
-    expect(lotStages([...stages].reverse(), [1], []).map(({ code }) => code)).toEqual(['groundwork', 'rough-in', 'final']);
+    expect(lotStages([...stages].reverse(), [1], []).map(({ code }) => code)).toEqual([
+      'groundwork',
+      'rough-in',
+      'final',
+    ]);
   });
 
   it('reads what has no row as not tested, unit by unit', () => {
@@ -30,7 +34,15 @@ describe('stages of a lot', () => {
   it('names the first stage that is not clear as the current one', () => {
     const clear = (stageCode: string) => ({ unitNumber: 1, stageCode, state: 'clear' as const });
     expect(currentStageOf(lotStages(stages, [1], [clear('groundwork')]))).toBe('rough-in');
-    expect(currentStageOf(lotStages(stages, [1], stages.map(({ code }) => clear(code))))).toBeNull();
+    expect(
+      currentStageOf(
+        lotStages(
+          stages,
+          [1],
+          stages.map(({ code }) => clear(code)),
+        ),
+      ),
+    ).toBeNull();
     expect(currentStageOf([])).toBeNull();
   });
 });

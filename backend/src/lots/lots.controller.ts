@@ -1,6 +1,13 @@
 import { Controller } from '@nestjs/common';
 import type { RouteInput } from '@holdwater/shared-types/common/route.js';
-import { createLot, listLots, readLot, searchLots, setGeometry, updateLot } from '@holdwater/shared-types/lots/lot.contract.js';
+import {
+  createLot,
+  listLots,
+  readLot,
+  searchLots,
+  setGeometry,
+  updateLot,
+} from '@holdwater/shared-types/lots/lot.contract.js';
 import { signedIn } from '../common/access/access.js';
 import type { Actor } from '../common/access/actor.js';
 import { CurrentActor } from '../common/access/current-actor.js';

@@ -31,7 +31,11 @@ import { UpdateLotService } from './update-lot.service.js';
 
 /** Tracts and lots, the house on each, its parties and their consent. */
 @Module({
-  imports: [SequelizeModule.forFeature([LotModel, LotUnitModel, LotConsentModel, TractModel]), DepartmentsModule, ClearancesModule],
+  imports: [
+    SequelizeModule.forFeature([LotModel, LotUnitModel, LotConsentModel, TractModel]),
+    DepartmentsModule,
+    ClearancesModule,
+  ],
   controllers: [LotsController, ConsentsController, TractsController, ImportLotsController],
   providers: [
     LotsQueries,

@@ -15,7 +15,12 @@ import {
   readingRole,
 } from './lots.policy.js';
 
-const lot: LotParties = { builderId: 'builder', plumberId: 'plumber', departmentId: 'department', mayPlumberRequest: true };
+const lot: LotParties = {
+  builderId: 'builder',
+  plumberId: 'plumber',
+  departmentId: 'department',
+  mayPlumberRequest: true,
+};
 const strangers: LotParties = { builderId: 'b2', plumberId: 'p2', departmentId: 'd2', mayPlumberRequest: true };
 
 type Place = [organizationId: string, ...roles: MemberRole[]];
@@ -25,7 +30,11 @@ const actorOf = (...places: Place[]): Actor => ({
   sessionId: 'session',
   name: 'Person',
   isOperator: false,
-  memberships: places.map(([organizationId, ...roles]) => ({ organizationId, kind: kinds[organizationId] ?? 'builder', roles })),
+  memberships: places.map(([organizationId, ...roles]) => ({
+    organizationId,
+    kind: kinds[organizationId] ?? 'builder',
+    roles,
+  })),
 });
 
 const people = {
@@ -55,7 +64,15 @@ const acts = [
 
 /** The table "Who may" of definitions, row by row. */
 const may: Record<keyof typeof people, ReadonlyArray<keyof LotAbilities>> = {
-  superintendent: ['canEdit', 'canEditGeometry', 'canSetPermit', 'canAttach', 'canRequest', 'canAddReading', 'canComment'],
+  superintendent: [
+    'canEdit',
+    'canEditGeometry',
+    'canSetPermit',
+    'canAttach',
+    'canRequest',
+    'canAddReading',
+    'canComment',
+  ],
   builderOwner: ['canAttach'],
   plumber: ['canEditGeometry', 'canRequest', 'canTest', 'canAddReading', 'canSayTestUp', 'canFix', 'canComment'],
   helper: ['canAddReading', 'canComment'],
@@ -103,20 +120,19 @@ describe('lots policy', () => {
   });
 
   it('shows gate code and hazards to builder and plumber, and to an inspector on the day only', () => {
-    for (const name of ['superintendent', 'builderOwner', 'plumber', 'helper'] as const) expect(canSeeAccess(people[name], lot, false)).toBe(true);
+    for (const name of ['superintendent', 'builderOwner', 'plumber', 'helper'] as const)
+      expect(canSeeAccess(people[name], lot, false)).toBe(true);
     expect(canSeeAccess(people.inspector, lot, false)).toBe(false);
     expect(canSeeAccess(people.inspector, lot, true)).toBe(true);
     expect(canSeeAccess(people.desk, lot, true)).toBe(false);
   });
 
   it('names the role of a reading, and refuses one to the desk and to owners', () => {
-    expect([people.superintendent, people.plumber, people.helper, people.inspector].map((actor) => readingRole(actor, lot))).toEqual([
-      'superintendent',
-      'plumber',
-      'helper',
-      'inspector',
-    ]);
-    for (const actor of [people.desk, people.builderOwner, people.plumberOwner]) expect(canAddReading(actor, lot)).toBe(false);
+    expect(
+      [people.superintendent, people.plumber, people.helper, people.inspector].map((actor) => readingRole(actor, lot)),
+    ).toEqual(['superintendent', 'plumber', 'helper', 'inspector']);
+    for (const actor of [people.desk, people.builderOwner, people.plumberOwner])
+      expect(canAddReading(actor, lot)).toBe(false);
   });
 
   it('lets superintendents add lots to their own builder, and attach parties as its owner may too', () => {

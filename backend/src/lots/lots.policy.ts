@@ -32,7 +32,9 @@ export function isDeskOf(actor: Actor, lot: LotParties): boolean {
 
 /** An inspector of the lot's department who does not belong to its builder or plumber, whatever other roles they hold. */
 export function isImpartialInspectorOf(actor: Actor, lot: LotParties): boolean {
-  return hasRole(actor, lot.departmentId, 'inspector') && !isMember(actor, lot.builderId) && !isMember(actor, lot.plumberId);
+  return (
+    hasRole(actor, lot.departmentId, 'inspector') && !isMember(actor, lot.builderId) && !isMember(actor, lot.plumberId)
+  );
 }
 
 /** A new lot is its builder's. */
@@ -72,7 +74,10 @@ export function canAddReading(actor: Actor, lot: LotParties): boolean {
 }
 
 /** The role a reading is added in; null for whoever may not. */
-export function readingRole(actor: Actor, lot: LotParties): 'plumber' | 'helper' | 'superintendent' | 'inspector' | null {
+export function readingRole(
+  actor: Actor,
+  lot: LotParties,
+): 'plumber' | 'helper' | 'superintendent' | 'inspector' | null {
   if (isPlumberOf(actor, lot)) return 'plumber';
   if (isHelperOf(actor, lot)) return 'helper';
   if (isSuperintendentOf(actor, lot)) return 'superintendent';
@@ -104,7 +109,11 @@ export function actingRole(actor: Actor, lot: LotParties): string | null {
 
 /** Gate code, contact and hazards: builder and plumber, and the inspector who comes that day. */
 export function canSeeAccess(actor: Actor, lot: LotParties, isComingToday: boolean): boolean {
-  return isMember(actor, lot.builderId) || isMember(actor, lot.plumberId) || (isComingToday && hasRole(actor, lot.departmentId, 'inspector'));
+  return (
+    isMember(actor, lot.builderId) ||
+    isMember(actor, lot.plumberId) ||
+    (isComingToday && hasRole(actor, lot.departmentId, 'inspector'))
+  );
 }
 
 /** What the page shows by. */

@@ -52,8 +52,13 @@ export class LotsPresenter {
 function summaryOf(brief: LotBrief, gathered: Gathered): LotSummary {
   const { id, number, address, permitNumber, builderName, plumberName, departmentName, departmentId } = brief;
   const ruleCard = departmentId === null ? undefined : gathered.ruleCards.get(departmentId);
-  const stages = lotStages(ruleCard?.content.stages ?? [], gathered.unitNumbers.get(id) ?? [], gathered.states.get(id) ?? []);
-  const tract = brief.tractId !== null && brief.tractName !== null ? { id: brief.tractId, name: brief.tractName } : null;
+  const stages = lotStages(
+    ruleCard?.content.stages ?? [],
+    gathered.unitNumbers.get(id) ?? [],
+    gathered.states.get(id) ?? [],
+  );
+  const tract =
+    brief.tractId !== null && brief.tractName !== null ? { id: brief.tractId, name: brief.tractName } : null;
   return {
     ...{ id, number, tract, address, permitNumber, builderName, plumberName, departmentName, departmentId, stages },
     currentStage: currentStageOf(stages),
@@ -64,5 +69,11 @@ function summaryOf(brief: LotBrief, gathered: Gathered): LotSummary {
 
 function nextVisitOf(row: NextVisitRow | undefined): LotSummary['nextVisit'] {
   if (!row) return null;
-  return { id: row.id, state: row.state, startAt: row.startAt.toISOString(), endAt: row.endAt.toISOString(), zone: row.zone };
+  return {
+    id: row.id,
+    state: row.state,
+    startAt: row.startAt.toISOString(),
+    endAt: row.endAt.toISOString(),
+    zone: row.zone,
+  };
 }

@@ -43,7 +43,9 @@ export class LotsQueries {
 
   /** The ids of every lot the actor may read. */
   async listLotIdsFor(actor: Actor): Promise<string[]> {
-    const found = await this.select<{ id: string }>(`SELECT l.id FROM lots l WHERE ${isReadable}`, { readerIds: organizationIds(actor) });
+    const found = await this.select<{ id: string }>(`SELECT l.id FROM lots l WHERE ${isReadable}`, {
+      readerIds: organizationIds(actor),
+    });
     return found.map(({ id }) => id);
   }
 
@@ -67,7 +69,9 @@ export class LotsQueries {
   }
 
   private async findLot(lotId: string, lock: '' | 'FOR NO KEY UPDATE' = ''): Promise<LotRecord | null> {
-    const [lot] = await this.select<LotRecord>(`SELECT ${lotColumns} FROM lots l WHERE l.id = :lotId ${lock}`, { lotId });
+    const [lot] = await this.select<LotRecord>(`SELECT ${lotColumns} FROM lots l WHERE l.id = :lotId ${lock}`, {
+      lotId,
+    });
     return lot ?? null;
   }
 

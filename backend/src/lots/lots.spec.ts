@@ -14,7 +14,16 @@ beforeAll(async () => {
 afterAll(() => server.close());
 beforeEach(() => server.clock.set(testNow));
 
-const own: WorldPerson[] = ['superintendent', 'builderOwner', 'plumber', 'helper', 'plumberOwner', 'desk', 'inspector', 'departmentOwner'];
+const own: WorldPerson[] = [
+  'superintendent',
+  'builderOwner',
+  'plumber',
+  'helper',
+  'plumberOwner',
+  'desk',
+  'inspector',
+  'departmentOwner',
+];
 const strangers: WorldPerson[] = ['otherSuperintendent', 'otherPlumber', 'otherDesk', 'otherInspector', 'operator'];
 const newLot = (number: string, extra: object = {}) => ({
   builderId: world.organizations.builder.id,
@@ -24,7 +33,9 @@ const newLot = (number: string, extra: object = {}) => ({
   ...extra,
 });
 const entriesOf = async (lotId: string) => {
-  const [rows] = await server.db.query(`SELECT kind, actor_role, payload FROM ledger_entries WHERE lot_id = '${lotId}' ORDER BY sequence`);
+  const [rows] = await server.db.query(
+    `SELECT kind, actor_role, payload FROM ledger_entries WHERE lot_id = '${lotId}' ORDER BY sequence`,
+  );
   return rows as Array<{ kind: string; actor_role: string; payload: Record<string, unknown> }>;
 };
 
@@ -53,7 +64,12 @@ describe('reading a lot', () => {
   it.each(own)('shows it to the %s of its three organizations', async (person) => {
     const { status, body } = await world.as(person).get(`/api/lots/${world.lots[0].id}`);
     expect(status).toBe(200);
-    expect(body).toMatchObject({ number: '1', builderName: 'Odderly Homes', zone: 'America/Denver', tract: { name: 'Quillback Rise' } });
+    expect(body).toMatchObject({
+      number: '1',
+      builderName: 'Odderly Homes',
+      zone: 'America/Denver',
+      tract: { name: 'Quillback Rise' },
+    });
   });
 
   it.each(strangers)('hides it from the %s as if it were not there', async (person) => {
@@ -70,7 +86,12 @@ describe('reading a lot', () => {
       ['rough-in', 'not-tested'],
       ['final', 'not-tested'],
     ]);
-    expect(body).toMatchObject({ currentStage: 'groundwork', nextVisit: null, openCorrections: 0, ruleCard: { version: 1, effectiveFrom: '2027-01-01' } });
+    expect(body).toMatchObject({
+      currentStage: 'groundwork',
+      nextVisit: null,
+      openCorrections: 0,
+      ruleCard: { version: 1, effectiveFrom: '2027-01-01' },
+    });
     const parties = body.parties.map((party: { kind: string; status: string; people: Array<{ name: string }> }) => [
       party.kind,
       party.status,
@@ -93,7 +114,12 @@ describe('reading a lot', () => {
     server.clock.set('2027-03-03T06:59:00Z');
     expect(await accessFor('inspector')).toBeNull();
     server.clock.set('2027-03-03T07:00:00Z');
-    expect(await accessFor('inspector')).toEqual({ gateCode: '4471', contactName: 'Site office', contactPhone: '555-0119', hazards: null });
+    expect(await accessFor('inspector')).toEqual({
+      gateCode: '4471',
+      contactName: 'Site office',
+      contactPhone: '555-0119',
+      hazards: null,
+    });
     expect(await accessFor('secondInspector')).toBeNull();
     expect(await accessFor('desk')).toBeNull();
     expect(await accessFor('plumber')).toMatchObject({ gateCode: '4471' });
@@ -106,7 +132,13 @@ describe('reading a lot', () => {
     await bookVisit(lotId, '2027-03-01', '2027-03-01T16:00:00Z', 'closed');
     const id = await bookVisit(lotId, '2027-03-08', '2027-03-08T20:30:00Z');
     const { body } = await world.as('plumber').get(`/api/lots/${lotId}`);
-    expect(body.nextVisit).toEqual({ id, state: 'booked', startAt: '2027-03-08T20:30:00.000Z', endAt: '2027-03-08T22:30:00.000Z', zone: 'America/Denver' });
+    expect(body.nextVisit).toEqual({
+      id,
+      state: 'booked',
+      startAt: '2027-03-08T20:30:00.000Z',
+      endAt: '2027-03-08T22:30:00.000Z',
+      zone: 'America/Denver',
+    });
   });
 });
 
@@ -134,14 +166,18 @@ describe('adding a lot', () => {
       currentStage: null,
       ruleCard: null,
     });
-    expect(await entriesOf(body.id)).toMatchObject([{ kind: 'lot-added', actor_role: 'superintendent', payload: { number: '21' } }]);
+    expect(await entriesOf(body.id)).toMatchObject([
+      { kind: 'lot-added', actor_role: 'superintendent', payload: { number: '21' } },
+    ]);
   });
 
   it('refuses a number the tract has already, and an address twice outside of tracts', async () => {
     expect((await world.as('superintendent').post('/api/lots', newLot('1'))).body.code).toBe('lot-number-taken');
     const alone = newLot('900', { tractId: null });
     expect((await world.as('superintendent').post('/api/lots', alone)).status).toBe(201);
-    expect((await world.as('superintendent').post('/api/lots', { ...alone, number: '901' })).body.code).toBe('lot-number-taken');
+    expect((await world.as('superintendent').post('/api/lots', { ...alone, number: '901' })).body.code).toBe(
+      'lot-number-taken',
+    );
   });
 
   it.each([
@@ -163,7 +199,9 @@ describe('adding a lot', () => {
     const foreign = newLot('78', { tractId: world.otherTract.id });
     expect((await world.as('superintendent').post('/api/lots', foreign)).body.fields).toEqual({ tractId: 'unknown' });
     const wrongKind = newLot('78', { plumberId: world.organizations.otherBuilder.id });
-    expect((await world.as('superintendent').post('/api/lots', wrongKind)).body.fields).toEqual({ plumberId: 'unknown' });
+    expect((await world.as('superintendent').post('/api/lots', wrongKind)).body.fields).toEqual({
+      plumberId: 'unknown',
+    });
   });
 
   it('lets superintendents of the builder alone add', async () => {
@@ -185,7 +223,11 @@ describe('adding a lot', () => {
 describe('changing a lot', () => {
   it('changes what differs and records the names of the fields, never a gate code', async () => {
     const { body: lot } = await world.as('superintendent').post('/api/lots', newLot('31'));
-    const update = { address: '31 Tern Court', coverDate: '2027-04-01', access: { gateCode: '8812', contactName: null, contactPhone: null, hazards: null } };
+    const update = {
+      address: '31 Tern Court',
+      coverDate: '2027-04-01',
+      access: { gateCode: '8812', contactName: null, contactPhone: null, hazards: null },
+    };
     const { body } = await world.as('superintendent').patch(`/api/lots/${lot.id}`, update);
     expect(body).toMatchObject({ address: '31 Tern Court', coverDate: '2027-04-01', access: { gateCode: '8812' } });
     await world.as('superintendent').patch(`/api/lots/${lot.id}`, update);
@@ -202,7 +244,11 @@ describe('changing a lot', () => {
     expect((await world.as('desk').patch(path, { permit, address: 'elsewhere' })).body.code).toBe('not-allowed');
     expect((await world.as('desk').patch(path, { mayPlumberRequest: false })).body.code).toBe('not-allowed');
     const last = (await entriesOf(world.lots[4].id)).at(-1);
-    expect(last).toMatchObject({ kind: 'lot-changed', actor_role: 'desk', payload: { permitStatus: 'expired', permitNumber: 'P-27-5' } });
+    expect(last).toMatchObject({
+      kind: 'lot-changed',
+      actor_role: 'desk',
+      payload: { permitStatus: 'expired', permitNumber: 'P-27-5' },
+    });
   });
 
   it.each([
@@ -222,7 +268,9 @@ describe('changing a lot', () => {
   it('refuses a number taken and half a place, counting what stands already', async () => {
     const path = `/api/lots/${world.lots[5].id}`;
     expect((await world.as('superintendent').patch(path, { number: '1' })).body.code).toBe('lot-number-taken');
-    expect((await world.as('superintendent').patch(path, { latitude: null })).body.fields).toEqual({ latitude: 'both-or-neither' });
+    expect((await world.as('superintendent').patch(path, { latitude: null })).body.fields).toEqual({
+      latitude: 'both-or-neither',
+    });
   });
 });
 
@@ -236,7 +284,11 @@ describe('house geometry', () => {
       expect(status).toBe(200);
       expect(body.units[0].geometry).toMatchObject({ ventTerminalFt: 31 });
     }
-    expect((await entriesOf(world.lots[0].id)).at(-1)).toMatchObject({ kind: 'geometry-set', actor_role: 'plumber', payload: { unitNumber: 1 } });
+    expect((await entriesOf(world.lots[0].id)).at(-1)).toMatchObject({
+      kind: 'geometry-set',
+      actor_role: 'plumber',
+      payload: { unitNumber: 1 },
+    });
   });
 
   it.each(['builderOwner', 'helper', 'inspector', 'desk'] as const)('is refused to the %s', async (person) => {

@@ -25,6 +25,14 @@ export class ReadLotsService {
   /** At most twelve lots of the actor's by number, permit or address. */
   async search(actor: Actor, words: string): Promise<RouteAnswer<typeof searchLots>> {
     const found = await this.lists.searchLots(organizationIds(actor), words, mostFound);
-    return { items: found.map(({ id, number, tractName, address, permitNumber }) => ({ id, number, tractName, address, permitNumber })) };
+    return {
+      items: found.map(({ id, number, tractName, address, permitNumber }) => ({
+        id,
+        number,
+        tractName,
+        address,
+        permitNumber,
+      })),
+    };
   }
 }

@@ -18,7 +18,9 @@ describe('beginning a visit', () => {
   afterAll(() => server?.close());
 
   const beginAs = (person: WorldPerson, visit: VisitModel, parts: object = {}) =>
-    world.as(person).post(`/api/visits/${visit.id}/begin`, { ...scenario.stamp(), expectedVersion: visit.version, ...parts });
+    world
+      .as(person)
+      .post(`/api/visits/${visit.id}/begin`, { ...scenario.stamp(), expectedVersion: visit.version, ...parts });
   const undoAs = (person: WorldPerson, visit: VisitModel) =>
     world.as(person).post(`/api/visits/${visit.id}/undo-begin`, { expectedVersion: visit.version });
   const eventsOf = (visitId: string) =>
@@ -33,7 +35,8 @@ describe('beginning a visit', () => {
       expect((await beginAs(person, visit).expect(403)).body.code).toBe('not-allowed');
       expect((await undoAs(person, visit).expect(403)).body.code).toBe('not-allowed');
     }
-    for (const person of ['otherInspector', 'otherPlumber', 'operator'] as const) await beginAs(person, visit).expect(404);
+    for (const person of ['otherInspector', 'otherPlumber', 'operator'] as const)
+      await beginAs(person, visit).expect(404);
     await world.nobody().post(`/api/visits/${visit.id}/begin`, {}).expect(401);
   });
 
@@ -46,8 +49,15 @@ describe('beginning a visit', () => {
     const events = await eventsOf(visit.id);
     expect(events.map((event) => event.kind)).toEqual(['visit-underway']);
     await visit.reload();
-    expect(visit).toMatchObject({ begunFrom: 'booked', begunBy: world.people.inspector.id, begunAt: new Date(body.madeAt) });
-    expect((await beginAs('inspector', visit).expect(409)).body).toMatchObject({ code: 'stale-state', params: { is: 'underway', version: 1 } });
+    expect(visit).toMatchObject({
+      begunFrom: 'booked',
+      begunBy: world.people.inspector.id,
+      begunAt: new Date(body.madeAt),
+    });
+    expect((await beginAs('inspector', visit).expect(409)).body).toMatchObject({
+      code: 'stale-state',
+      params: { is: 'underway', version: 1 },
+    });
   });
 
   it('waits for the window unless the test is up', async () => {
@@ -70,11 +80,19 @@ describe('beginning a visit', () => {
 
   describe('of another', () => {
     it('is taken over only knowingly, and then stands in the new name', async () => {
-      const visit = await scenario.visit(world.lots[5], { label: 'late', state: 'ready', plannedAt: '2027-03-02T20:30:00Z' });
+      const visit = await scenario.visit(world.lots[5], {
+        label: 'late',
+        state: 'ready',
+        plannedAt: '2027-03-02T20:30:00Z',
+      });
       const refused = await beginAs('secondInspector', visit).expect(409);
       expect(refused.body).toMatchObject({ code: 'visit-of-another', params: { inspectorName: 'Noor Haverty' } });
       const taken = await beginAs('secondInspector', visit, { isTakingOver: true }).expect(200);
-      expect(taken.body).toMatchObject({ state: 'underway', inspector: { name: 'Gil Strand' }, plannedStartAt: '2027-03-02T20:30:00.000Z' });
+      expect(taken.body).toMatchObject({
+        state: 'underway',
+        inspector: { name: 'Gil Strand' },
+        plannedStartAt: '2027-03-02T20:30:00.000Z',
+      });
       const [event] = await eventsOf(visit.id);
       expect(event?.payload.visit.formerInspectorId).toBe(world.people.inspector.id);
       await visit.reload();
@@ -82,8 +100,17 @@ describe('beginning a visit', () => {
     });
 
     it('is refused where the planned spans would overlap, and stays as it was', async () => {
-      await scenario.visit(world.lots[0], { label: 'early', stageCode: 'groundwork', inspector: 'secondInspector', plannedAt: '2027-03-02T14:30:00Z' });
-      const visit = await scenario.visit(world.lots[1], { label: 'early', stageCode: 'groundwork', plannedAt: '2027-03-02T14:45:00Z' });
+      await scenario.visit(world.lots[0], {
+        label: 'early',
+        stageCode: 'groundwork',
+        inspector: 'secondInspector',
+        plannedAt: '2027-03-02T14:30:00Z',
+      });
+      const visit = await scenario.visit(world.lots[1], {
+        label: 'early',
+        stageCode: 'groundwork',
+        plannedAt: '2027-03-02T14:45:00Z',
+      });
       const refused = await beginAs('secondInspector', visit, { isTakingOver: true }).expect(409);
       expect(refused.body).toMatchObject({ code: 'visit-of-another', params: { why: 'own-visit-at-that-time' } });
       await visit.reload();
@@ -93,7 +120,9 @@ describe('beginning a visit', () => {
     it('is never taken over by one who belongs to the builder or the plumber', async () => {
       await join(world.people.secondInspector, world.organizations.plumber, ['helper'], server.clock.now());
       const visit = await scenario.visit(world.lots[2], { label: 'early', stageCode: 'groundwork' });
-      expect((await beginAs('secondInspector', visit, { isTakingOver: true }).expect(403)).body.code).toBe('not-allowed');
+      expect((await beginAs('secondInspector', visit, { isTakingOver: true }).expect(403)).body.code).toBe(
+        'not-allowed',
+      );
     });
   });
 
@@ -109,7 +138,10 @@ describe('beginning a visit', () => {
       expect(undone.body).toMatchObject({ state, version: 2 });
       await visit.reload();
       expect(visit).toMatchObject({ begunAt: null, begunBy: null, begunFrom: null });
-      expect((await undoAs('inspector', visit).expect(409)).body).toMatchObject({ code: 'stale-state', params: { is: state } });
+      expect((await undoAs('inspector', visit).expect(409)).body).toMatchObject({
+        code: 'stale-state',
+        params: { is: state },
+      });
     });
 
     it('after a minute it is too late', async () => {

@@ -83,7 +83,9 @@ export class BeginVisit {
     const payload = { visitId: visit.id, takenOver: formerInspectorId !== null };
     await this.ledger.appendToLot(visit.lotId, 'visit-begun', payload, { personId: actor.personId, role: 'inspector' });
     const subject = { lotId: visit.lotId, visitId: visit.id, actorId: actor.personId };
-    await this.outbox.add('visit-underway', subject, { visit: { ...(await this.events.factsOf(visit)), formerInspectorId } });
+    await this.outbox.add('visit-underway', subject, {
+      visit: { ...(await this.events.factsOf(visit)), formerInspectorId },
+    });
   }
 
   private async refuseOfAnother(visit: VisitModel): Promise<never> {

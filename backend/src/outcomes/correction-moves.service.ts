@@ -28,6 +28,11 @@ export class CorrectionMoves {
     return this.corrections.findByPk(id, { lock: true });
   }
 
+  /** Several at once, in the order of their ids so that two acts never wait for each other in a ring; unknown ones are left out. */
+  async lockAll(ids: readonly string[]): Promise<CorrectionModel[]> {
+    return this.corrections.findAll({ where: { id: [...ids] }, order: [['id', 'ASC']], lock: true });
+  }
+
   /**
    * Makes a move of the table, told once; the plumbing state follows.
    * @throws correction-unfixed, stale-state
@@ -57,7 +62,10 @@ export class CorrectionMoves {
 }
 
 /** @throws correction-unfixed where one still open is to be decided, else stale-state with what it is now */
-export function requireCorrectionMove(correction: Pick<CorrectionModel, 'state' | 'version' | 'number'>, move: CorrectionMove): void {
+export function requireCorrectionMove(
+  correction: Pick<CorrectionModel, 'state' | 'version' | 'number'>,
+  move: CorrectionMove,
+): void {
   const { state, version, number } = correction;
   if (state === correctionMoveTable[move].from) return;
   if (move !== 'fix' && state === 'open') refuse('correction-unfixed', { number, is: state });

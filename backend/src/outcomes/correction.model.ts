@@ -1,4 +1,8 @@
-import type { CorrectionState, CorrectionSubject, Severity } from '@holdwater/shared-types/outcomes/correction.states.js';
+import type {
+  CorrectionState,
+  CorrectionSubject,
+  Severity,
+} from '@holdwater/shared-types/outcomes/correction.states.js';
 import { Column, DataType, Model, PrimaryKey, Table } from 'sequelize-typescript';
 
 /** One thing to put right, until the inspector accepts it. */

@@ -32,12 +32,18 @@ export class CorrectionsController {
   }
 
   @ContractRoute(acceptCorrection, signedIn('outcomes.canDecideCorrection'))
-  accept(@CurrentActor() actor: Actor, @Input() { params, body }: RouteInput<typeof acceptCorrection>): Promise<Correction> {
+  accept(
+    @CurrentActor() actor: Actor,
+    @Input() { params, body }: RouteInput<typeof acceptCorrection>,
+  ): Promise<Correction> {
     return this.corrections.move(actor, params.correctionId, { move: 'accept' }, body);
   }
 
   @ContractRoute(reopenCorrection, signedIn('outcomes.canDecideCorrection'))
-  reopen(@CurrentActor() actor: Actor, @Input() { params, body }: RouteInput<typeof reopenCorrection>): Promise<Correction> {
+  reopen(
+    @CurrentActor() actor: Actor,
+    @Input() { params, body }: RouteInput<typeof reopenCorrection>,
+  ): Promise<Correction> {
     return this.corrections.move(actor, params.correctionId, { move: 'reopen', why: body.why }, body);
   }
 }

@@ -62,7 +62,9 @@ export class CorrectionsQueries {
       isReadable,
       ...(state === undefined ? [] : ['c.state = :state']),
       ...(lotId === undefined ? [] : ['c.lot_id = :lotId']),
-      ...(after === undefined ? [] : ['(c.opened_at, c.number, c.id) < (CAST(:openedAt AS timestamptz), :number, CAST(:id AS uuid))']),
+      ...(after === undefined
+        ? []
+        : ['(c.opened_at, c.number, c.id) < (CAST(:openedAt AS timestamptz), :number, CAST(:id AS uuid))']),
     ];
     return this.select(`WHERE ${where.join(' AND ')} ORDER BY c.opened_at DESC, c.number DESC, c.id DESC LIMIT :most`, {
       readerIds: [...readerIds],

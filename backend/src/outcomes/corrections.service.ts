@@ -92,7 +92,12 @@ function requireVersion(correction: CorrectionModel, expectedVersion: number): v
 }
 
 /** An act sent twice: the same move was already made, by the same person or in the same words, from the very version named. */
-function isMadeByThisAct(actor: Actor, correction: CorrectionModel, made: Made<CorrectionStep>, act: CorrectionAct): boolean {
+function isMadeByThisAct(
+  actor: Actor,
+  correction: CorrectionModel,
+  made: Made<CorrectionStep>,
+  act: CorrectionAct,
+): boolean {
   const isNext = correction.version === act.expectedVersion + 1;
   if (!isNext || correction.state !== correctionMoveTable[made.move].to) return false;
   if (made.move === 'fix') return correction.fixedBy === actor.personId && correction.fixNote === made.note;

@@ -20,7 +20,9 @@ export class NewCorrections {
   /** @throws bad-input where a client id was used before */
   async open(visit: VisitModel, given: readonly NewCorrection[], at: Date, by: LedgerActor): Promise<void> {
     await this.requireFresh(given);
-    const last = await this.corrections.max<number | null, CorrectionModel>('number', { where: { lotId: visit.lotId } });
+    const last = await this.corrections.max<number | null, CorrectionModel>('number', {
+      where: { lotId: visit.lotId },
+    });
     let number = last ?? 0;
     for (const each of given) {
       number += 1;
@@ -28,7 +30,13 @@ export class NewCorrections {
     }
   }
 
-  private async openOne(visit: VisitModel, given: NewCorrection, number: number, at: Date, by: LedgerActor): Promise<void> {
+  private async openOne(
+    visit: VisitModel,
+    given: NewCorrection,
+    number: number,
+    at: Date,
+    by: LedgerActor,
+  ): Promise<void> {
     const { lotId, stageCode } = visit;
     const { subject, severity } = given;
     const correction = await this.corrections.create({

@@ -37,7 +37,13 @@ export class OutcomeWriter {
   ) {}
 
   /** `seen` is null where nothing was: then there are neither systems nor work. */
-  async write(visit: VisitModel, entry: OutcomeEntry, verdict: Verdict, seen: { result: SeenResult; stage: Stage } | null, by: LedgerActor) {
+  async write(
+    visit: VisitModel,
+    entry: OutcomeEntry,
+    verdict: Verdict,
+    seen: { result: SeenResult; stage: Stage } | null,
+    by: LedgerActor,
+  ) {
     const outcome = await this.outcomes.create({
       id: randomUUID(),
       visitId: visit.id,
@@ -50,7 +56,11 @@ export class OutcomeWriter {
       await this.writeSystems(outcome.id, seen.result);
       await this.writeWork(outcome.id, seen.result, seen.stage);
     }
-    const systems = (seen?.result.systems ?? []).map(({ unitNumber, system, answer }) => ({ unitNumber, system, answer }));
+    const systems = (seen?.result.systems ?? []).map(({ unitNumber, system, answer }) => ({
+      unitNumber,
+      system,
+      answer,
+    }));
     await this.ledger.appendToLot(visit.lotId, 'outcome', { visitId: visit.id, ...verdict, systems }, by);
   }
 
@@ -79,7 +89,12 @@ export class OutcomeWriter {
   /** Every point of the stage, looked at or not. */
   private async writeWork(outcomeId: string, seen: SeenResult, stage: Stage): Promise<void> {
     await this.work.bulkCreate(
-      stage.work.map(({ code }) => ({ id: randomUUID(), outcomeId, pointCode: code, isLookedAt: seen.lookedAt.includes(code) })),
+      stage.work.map(({ code }) => ({
+        id: randomUUID(),
+        outcomeId,
+        pointCode: code,
+        isLookedAt: seen.lookedAt.includes(code),
+      })),
     );
   }
 }

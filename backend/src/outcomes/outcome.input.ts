@@ -1,6 +1,10 @@
 import type { RouteInput } from '@holdwater/shared-types/common/route.js';
 import type { Stage } from '@holdwater/shared-types/departments/rule-card.content.js';
-import type { CorrectionState, CorrectionSubject, Severity } from '@holdwater/shared-types/outcomes/correction.states.js';
+import type {
+  CorrectionState,
+  CorrectionSubject,
+  Severity,
+} from '@holdwater/shared-types/outcomes/correction.states.js';
 import type { recordOutcome } from '@holdwater/shared-types/outcomes/outcome.contract.js';
 
 export type OutcomeBody = RouteInput<typeof recordOutcome>['body'];

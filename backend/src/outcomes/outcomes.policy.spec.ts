@@ -1,7 +1,13 @@
 import { describe, expect, it } from 'vitest';
 import type { MemberRole } from '@holdwater/shared-types/accounts/roles.js';
 import type { Actor } from '../common/access/actor.js';
-import { canDecideCorrection, canFixCorrection, canInspect, correctionAbilities, isOwnVisit } from './outcomes.policy.js';
+import {
+  canDecideCorrection,
+  canFixCorrection,
+  canInspect,
+  correctionAbilities,
+  isOwnVisit,
+} from './outcomes.policy.js';
 
 const lot = { builderId: 'builder', plumberId: 'plumber', departmentId: 'department', mayPlumberRequest: true };
 type Place = [organizationId: string, ...roles: MemberRole[]];

@@ -35,7 +35,10 @@ export class OutcomesQueries {
 
   /** The outcome of a visit, or null while it has none. */
   async findOfVisit(visitId: string): Promise<Outcome | null> {
-    const [row] = await this.sequelize.query<OutcomeRow>(outcomeSql, { replacements: { visitId }, type: QueryTypes.SELECT });
+    const [row] = await this.sequelize.query<OutcomeRow>(outcomeSql, {
+      replacements: { visitId },
+      type: QueryTypes.SELECT,
+    });
     return row ? presentOutcome(row) : null;
   }
 }

@@ -20,6 +20,7 @@ import { LotsQueries } from '../lots/lots.queries.js';
 import { VisitMoves } from '../visits/visit-moves.service.js';
 import type { VisitModel } from '../visits/visit.model.js';
 import { VisitsPresenter } from '../visits/visits.presenter.js';
+import type { CorrectionModel } from './correction.model.js';
 import { CorrectionMoves } from './correction-moves.service.js';
 import { presentCorrection } from './corrections.presenter.js';
 import { CorrectionsQueries } from './corrections.queries.js';
@@ -83,7 +84,8 @@ export class RecordOutcome {
     const by: LedgerActor = { personId: actor.personId, role: 'inspector' };
     const { result, clientId, expectedVersion } = body;
     const entry = { clientId, note: body.note ?? null, madeAt, receivedAt: this.clock.now() };
-    const verdict = result.kind === 'seen' ? await this.see(actor, visit, result, entry, by) : unseen(visit, result, madeAt);
+    const verdict =
+      result.kind === 'seen' ? await this.see(actor, visit, result, entry, by) : unseen(visit, result, madeAt);
     if (result.kind !== 'seen') await this.writer.write(visit, entry, verdict, null, by);
     // last, so that the plumbing state is worked out from everything above
     await this.visits.apply(visit, 'close', { expectedVersion, changes: { endedAt: madeAt } });
@@ -99,12 +101,14 @@ export class RecordOutcome {
   ): Promise<Verdict> {
     const { content } = await this.ruleCards.getRuleCard(visit.ruleCardId);
     const stage = getStage(content, visit.stageCode);
+    const decided = [...result.accepted, ...result.reopened.map((each) => each.correctionId)];
+    const locked = await this.moves.lockAll(decided);
     const earlier = await this.corrections.listOfLot(visit.lotId);
     const verdict = decideSeen(result, { stage, unitNumbers: visit.unitNumbers, corrections: earlier });
     await this.addReadings(actor, visit, result, entry.madeAt);
     await this.writer.write(visit, entry, verdict, { result, stage }, by);
     await this.opening.open(visit, result.corrections, entry.madeAt, by);
-    await this.moveCorrections(result, entry.madeAt, by);
+    await this.moveCorrections(locked, result, entry.madeAt, by);
     return verdict;
   }
 
@@ -122,13 +126,15 @@ export class RecordOutcome {
     }
   }
 
-  private async moveCorrections(result: SeenResult, at: Date, by: LedgerActor): Promise<void> {
-    const steps = [
-      ...result.accepted.map((id) => ({ id, step: { move: 'accept', at } as const })),
-      ...result.reopened.map(({ correctionId, why }) => ({ id: correctionId, step: { move: 'reopen', why, at } as const })),
-    ];
-    for (const { id, step } of steps) {
-      const correction = (await this.moves.findLocked(id)) ?? refuse('not-found');
+  private async moveCorrections(
+    locked: readonly CorrectionModel[],
+    result: SeenResult,
+    at: Date,
+    by: LedgerActor,
+  ): Promise<void> {
+    for (const correction of [...locked].sort((a, b) => a.number - b.number)) {
+      const reopened = result.reopened.find((each) => each.correctionId === correction.id);
+      const step = reopened ? ({ move: 'reopen', why: reopened.why, at } as const) : ({ move: 'accept', at } as const);
       await this.moves.apply(correction, step, by);
     }
   }

@@ -4,7 +4,12 @@ type Fields = Record<string, string>;
 
 /** What of an outcome does not fit its visit, by path: systems nobody asks for, units of other visits, points the card does not know. */
 export function inputFaults(seen: SeenResult, visit: SeenVisit): Fields {
-  return { ...systemFaults(seen, visit), ...pointFaults(seen, visit), ...correctionFaults(seen, visit), ...decidedFaults(seen, visit) };
+  return {
+    ...systemFaults(seen, visit),
+    ...pointFaults(seen, visit),
+    ...correctionFaults(seen, visit),
+    ...decidedFaults(seen, visit),
+  };
 }
 
 function systemFaults(seen: SeenResult, { stage, unitNumbers }: SeenVisit): Fields {
@@ -13,7 +18,9 @@ function systemFaults(seen: SeenResult, { stage, unitNumbers }: SeenVisit): Fiel
     const path = `result.systems.${index}`;
     if (!unitNumbers.includes(each.unitNumber)) fields[`${path}.unitNumber`] = 'not-of-this-visit';
     if (!stage.systems.includes(each.system)) fields[`${path}.system`] = 'not-of-this-stage';
-    const first = seen.systems.findIndex((other) => other.unitNumber === each.unitNumber && other.system === each.system);
+    const first = seen.systems.findIndex(
+      (other) => other.unitNumber === each.unitNumber && other.system === each.system,
+    );
     if (first !== index) fields[path] = 'named-twice';
     const isLevel = typeof each.levelIn === 'number';
     if (isLevel && each.system === 'water') fields[`${path}.levelIn`] = 'not-for-a-gauge';

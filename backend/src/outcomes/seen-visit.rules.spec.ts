@@ -55,12 +55,32 @@ function refusal(act: () => unknown): Pick<AppError, 'code' | 'params' | 'fields
 describe('what a seen visit comes to', () => {
   it.each<[string, SeenResult, SeenVisit, object]>([
     ['passes when all passed', seen(), visit(), { kind: 'pass', reason: null }],
-    ['fails with a system', seen({ systems: answers('fail', 'pass'), corrections: [correction()] }), visit(), { kind: 'fail', reason: null }],
-    ['fails for what was not seen', seen({ systems: answers('pass', 'not-seen') }), visit(), { kind: 'fail', reason: 'not-seen' }],
-    ['fails with the work', seen({ corrections: [correction({ subject: 'work' })] }), visit(), { kind: 'fail', reason: null }],
+    [
+      'fails with a system',
+      seen({ systems: answers('fail', 'pass'), corrections: [correction()] }),
+      visit(),
+      { kind: 'fail', reason: null },
+    ],
+    [
+      'fails for what was not seen',
+      seen({ systems: answers('pass', 'not-seen') }),
+      visit(),
+      { kind: 'fail', reason: 'not-seen' },
+    ],
+    [
+      'fails with the work',
+      seen({ corrections: [correction({ subject: 'work' })] }),
+      visit(),
+      { kind: 'fail', reason: null },
+    ],
     [
       'passes with work to fix later, and with a note',
-      seen({ corrections: [correction({ subject: 'work', severity: 'fix-before-final' }), correction({ subject: 'dwv', severity: 'note' })] }),
+      seen({
+        corrections: [
+          correction({ subject: 'work', severity: 'fix-before-final' }),
+          correction({ subject: 'dwv', severity: 'note' }),
+        ],
+      }),
       visit(),
       { kind: 'pass', reason: null },
     ],
@@ -70,8 +90,17 @@ describe('what a seen visit comes to', () => {
 
   it('fails with work that is reopened', () => {
     const work = earlier({ subject: 'work' });
-    expect(decideSeen(seen({ reopened: [{ correctionId: work.id, why: 'still bare' }] }), visit(work))).toEqual({ kind: 'fail', reason: null });
+    expect(decideSeen(seen({ reopened: [{ correctionId: work.id, why: 'still bare' }] }), visit(work))).toEqual({
+      kind: 'fail',
+      reason: null,
+    });
     expect(decideSeen(seen({ accepted: [work.id] }), visit(work)).kind).toBe('pass');
+  });
+
+  it('fails a system whose correction is reopened, without a new one', () => {
+    const fixed = earlier();
+    const result = seen({ systems: answers('fail', 'pass'), reopened: [{ correctionId: fixed.id, why: 'drips' }] });
+    expect(decideSeen(result, visit(fixed)).kind).toBe('fail');
   });
 
   it('leaves alone what belongs to another stage or unit', () => {
@@ -92,7 +121,11 @@ describe('what is refused', () => {
           { unitNumber: 2, system: 'water' },
         ],
       },
-      fields: { 'result.systems.1.water': 'required', 'result.systems.2.dwv': 'required', 'result.systems.2.water': 'required' },
+      fields: {
+        'result.systems.1.water': 'required',
+        'result.systems.2.dwv': 'required',
+        'result.systems.2.water': 'required',
+      },
     });
   });
 
@@ -101,7 +134,10 @@ describe('what is refused', () => {
     ['one on the other system', [{ subject: 'water' }]],
     ['one on the work', [{ subject: 'work' }]],
   ])('a failed system with %s', (_what, given) => {
-    const result = seen({ systems: answers('fail', 'fail'), corrections: [...given.map(correction), correction({ subject: 'water' })] });
+    const result = seen({
+      systems: answers('fail', 'fail'),
+      corrections: [...given.map(correction), correction({ subject: 'water' })],
+    });
     expect(refusal(() => decideSeen(result, visit()))).toMatchObject({
       code: 'fail-needs-a-correction',
       params: { systems: [{ unitNumber: 1, system: 'dwv' }] },
@@ -110,15 +146,12 @@ describe('what is refused', () => {
   });
 
   it('a failed system of one unit with a correction on another', () => {
-    const systems = [...answers('fail', 'pass'), ...answers('pass', 'pass').map((each) => ({ ...each, unitNumber: 2 }))];
+    const systems = [
+      ...answers('fail', 'pass'),
+      ...answers('pass', 'pass').map((each) => ({ ...each, unitNumber: 2 })),
+    ];
     const result = seen({ systems, corrections: [correction({ unitNumber: 2, severity: 'note' })] });
     expect(refusal(() => decideSeen(result, { ...visit(), unitNumbers: [1, 2] })).code).toBe('fail-needs-a-correction');
-  });
-
-  it('not a fail whose correction is a reopened one', () => {
-    const fixed = earlier();
-    const result = seen({ systems: answers('fail', 'pass'), reopened: [{ correctionId: fixed.id, why: 'drips' }] });
-    expect(decideSeen(result, visit(fixed)).kind).toBe('fail');
   });
 
   it('a pass over a correction to fix before cover: a new one, a reopened one, one still open', () => {

@@ -39,9 +39,14 @@ function requireFixed(seen: SeenResult, { corrections }: SeenVisit): void {
 function requireAnswers(seen: SeenResult, { stage, unitNumbers }: SeenVisit): void {
   const missing = unitNumbers
     .flatMap((unitNumber) => stage.systems.map((system) => ({ unitNumber, system })))
-    .filter(({ unitNumber, system }) => !seen.systems.some((each) => each.unitNumber === unitNumber && each.system === system));
+    .filter(
+      ({ unitNumber, system }) =>
+        !seen.systems.some((each) => each.unitNumber === unitNumber && each.system === system),
+    );
   if (missing.length === 0) return;
-  const fields = Object.fromEntries(missing.map(({ unitNumber, system }) => [`result.systems.${unitNumber}.${system}`, 'required']));
+  const fields = Object.fromEntries(
+    missing.map(({ unitNumber, system }) => [`result.systems.${unitNumber}.${system}`, 'required']),
+  );
   refuse('answers-missing', { missing }, fields);
 }
 
@@ -59,13 +64,15 @@ function openAfter(seen: SeenResult, { corrections, stage, unitNumbers }: SeenVi
 
 function requireCorrectionOfFail(seen: SeenResult, open: readonly OpenCorrection[]): void {
   const bare = answered(seen, 'fail').filter((each) => !open.some((correction) => isOn(correction, each)));
-  if (bare.length > 0) refuse('fail-needs-a-correction', { systems: bare.map(named) }, faultsAt(bare, 'needs-a-correction'));
+  if (bare.length > 0)
+    refuse('fail-needs-a-correction', { systems: bare.map(named) }, faultsAt(bare, 'needs-a-correction'));
 }
 
 function refusePassOverCorrection(seen: SeenResult, open: readonly OpenCorrection[]): void {
   const grave = open.filter((correction) => correction.severity === 'fix-before-cover');
   const passed = answered(seen, 'pass').filter((each) => grave.some((correction) => isOn(correction, each)));
-  if (passed.length > 0) refuse('pass-with-open-correction', { systems: passed.map(named) }, faultsAt(passed, 'has-a-correction'));
+  if (passed.length > 0)
+    refuse('pass-with-open-correction', { systems: passed.map(named) }, faultsAt(passed, 'has-a-correction'));
 }
 
 interface Answered {

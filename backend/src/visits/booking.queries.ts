@@ -20,14 +20,20 @@ export class BookingQueries {
   /** Holds a day of a department against every other booking until the end of the transaction. */
   async lockDay(departmentId: string, date: string): Promise<void> {
     const replacements = { departmentId, date };
-    await this.sequelize.query('INSERT INTO department_days (department_id, date) VALUES (:departmentId, :date) ON CONFLICT DO NOTHING', {
-      replacements,
-      type: QueryTypes.INSERT,
-    });
-    await this.sequelize.query('SELECT 1 FROM department_days WHERE department_id = :departmentId AND date = :date FOR UPDATE', {
-      replacements,
-      type: QueryTypes.SELECT,
-    });
+    await this.sequelize.query(
+      'INSERT INTO department_days (department_id, date) VALUES (:departmentId, :date) ON CONFLICT DO NOTHING',
+      {
+        replacements,
+        type: QueryTypes.INSERT,
+      },
+    );
+    await this.sequelize.query(
+      'SELECT 1 FROM department_days WHERE department_id = :departmentId AND date = :date FOR UPDATE',
+      {
+        replacements,
+        type: QueryTypes.SELECT,
+      },
+    );
   }
 
   /** The inspectors in force, by name, with every organization they belong to. */
@@ -43,7 +49,12 @@ export class BookingQueries {
   }
 
   /** When these inspectors are planned to be anywhere between two instants, whichever department sends them. */
-  async listBusy(inspectorIds: readonly string[], fromAt: Date, toAt: Date, exceptVisitId: string | null = null): Promise<BusySpan[]> {
+  async listBusy(
+    inspectorIds: readonly string[],
+    fromAt: Date,
+    toAt: Date,
+    exceptVisitId: string | null = null,
+  ): Promise<BusySpan[]> {
     return this.sequelize.query<BusySpan>(
       `SELECT inspector_id AS "inspectorId", lower(planned) AS "startAt", upper(planned) AS "endAt" FROM visits
        WHERE inspector_id = ANY (ARRAY[:inspectorIds]::uuid[]) AND state IN ('booked', 'ready', 'underway')
@@ -53,7 +64,12 @@ export class BookingQueries {
   }
 
   /** The places taken in a department's windows from one day to another, both included. */
-  async listTaken(departmentId: string, fromDate: string, toDate: string, exceptVisitId: string | null = null): Promise<TakenPlace[]> {
+  async listTaken(
+    departmentId: string,
+    fromDate: string,
+    toDate: string,
+    exceptVisitId: string | null = null,
+  ): Promise<TakenPlace[]> {
     return this.sequelize.query<TakenPlace>(
       `SELECT window_date::text AS date, window_label AS label, place, (state = 'ready' OR begun_from IS NOT DISTINCT FROM 'ready') AS "isUp"
        FROM visits

@@ -41,13 +41,16 @@ export class Booking {
    */
   async lockWindow(departmentId: string, date: string, label: string, isDesk: boolean): Promise<DayWindow> {
     await this.queries.lockDay(departmentId, date);
-    const window = (await this.windows.find(departmentId, date, label)) ?? refuse('window-unknown', { date, label }, { label: 'no-such-window' });
+    const window =
+      (await this.windows.find(departmentId, date, label)) ??
+      refuse('window-unknown', { date, label }, { label: 'no-such-window' });
     const now = this.clock.now();
     const notice = isDesk ? null : await this.workingTime.noticeFor(departmentId, now);
     const why = whyNotByTime(window, notice, now);
     if (why === 'closed') refuse('window-closed', await this.closedParams(departmentId, date));
     if (why === 'past') refuse('window-past', { startAt: window.startAt });
-    if (why === 'cut-off-passed') refuse('cut-off-passed', { firstDate: notice?.firstDate, cutoffAt: notice?.cutoffAt });
+    if (why === 'cut-off-passed')
+      refuse('cut-off-passed', { firstDate: notice?.firstDate, cutoffAt: notice?.cutoffAt });
     if (why === 'beyond-horizon') refuse('beyond-horizon', { lastDate: notice?.lastDate });
     return window;
   }
@@ -64,11 +67,22 @@ export class Booking {
     const places = await this.requireRoom(wish);
     const candidates = await this.candidatesFor(wish);
     const [fromAt, toAt] = [new Date(wish.window.startAt), new Date(wish.window.endAt)];
-    const busy = await this.queries.listBusy(candidates.map(({ id }) => id), fromAt, toAt, wish.exceptVisitId);
+    const busy = await this.queries.listBusy(
+      candidates.map(({ id }) => id),
+      fromAt,
+      toAt,
+      wish.exceptVisitId,
+    );
     return wish.lots.map((lot, index) => {
-      const seat = seatOf(wish, candidates, busy, lot) ?? refuse('window-full', { why: wish.inspectorId ? 'inspector-busy' : 'no-inspector' });
+      const seat =
+        seatOf(wish, candidates, busy, lot) ??
+        refuse('window-full', { why: wish.inspectorId ? 'inspector-busy' : 'no-inspector' });
       busy.push({ inspectorId: seat.inspectorId, ...seat.planned });
-      return { place: places[index] ?? null, inspectorId: seat.inspectorId, planned: [seat.planned.startAt, seat.planned.endAt] };
+      return {
+        place: places[index] ?? null,
+        inspectorId: seat.inspectorId,
+        planned: [seat.planned.startAt, seat.planned.endAt],
+      };
     });
   }
 
@@ -76,8 +90,11 @@ export class Booking {
     const inspectors = await this.queries.listInspectors(wish.departmentId);
     if (wish.inspectorId === undefined) return likedFirst(inspectors, wish.likedInspectorId ?? null);
     const named = inspectors.filter(({ id }) => id === wish.inspectorId);
-    const isPartial = named.some(({ organizationIds }) => wish.lots.some((lot) => organizationIds.some((id) => partyIdsOf(lot).includes(id))));
-    if (named.length === 0 || isPartial) refuse('bad-input', {}, { inspectorId: isPartial ? 'belongs-to-a-party' : 'no-such-inspector' });
+    const isPartial = named.some(({ organizationIds }) =>
+      wish.lots.some((lot) => organizationIds.some((id) => partyIdsOf(lot).includes(id))),
+    );
+    if (named.length === 0 || isPartial)
+      refuse('bad-input', {}, { inspectorId: isPartial ? 'belongs-to-a-party' : 'no-such-inspector' });
     return named;
   }
 
@@ -87,7 +104,12 @@ export class Booking {
   }
 }
 
-function seatOf(wish: SeatWish, candidates: readonly Candidate[], busy: Parameters<typeof firstFreeSeat>[2], lot: LotParties): Seat | null {
+function seatOf(
+  wish: SeatWish,
+  candidates: readonly Candidate[],
+  busy: Parameters<typeof firstFreeSeat>[2],
+  lot: LotParties,
+): Seat | null {
   const span = { startAt: new Date(wish.window.startAt), endAt: new Date(wish.window.endAt) };
   return firstFreeSeat(span, candidates, busy, wish.minutes, partyIdsOf(lot));
 }

@@ -5,8 +5,14 @@ import { calendarStatusOf, nextCalendarSequence } from './calendar-sequence.js';
 
 const early: InstantRange = [new Date('2027-03-03T14:30:00Z'), new Date('2027-03-03T16:00:00Z')];
 const late: InstantRange = [new Date('2027-03-03T20:30:00Z'), new Date('2027-03-03T22:30:00Z')];
-const visit = (state: VisitState, window = early, hasFirstPlace = false) => ({ state, window, hasFirstPlace, calendarSequence: 4 });
-const step = (before: ReturnType<typeof visit>, after: ReturnType<typeof visit>) => nextCalendarSequence(before, after) - 4;
+const visit = (state: VisitState, window = early, hasFirstPlace = false) => ({
+  state,
+  window,
+  hasFirstPlace,
+  calendarSequence: 4,
+});
+const step = (before: ReturnType<typeof visit>, after: ReturnType<typeof visit>) =>
+  nextCalendarSequence(before, after) - 4;
 
 // RFC 5546 §2.1.4: SEQUENCE is raised when DTSTART, DTEND or STATUS (among others) changes; it starts at 0 and never goes back
 describe('the SEQUENCE of a calendar entry', () => {

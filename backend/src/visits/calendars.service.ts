@@ -41,10 +41,20 @@ export class Calendars {
     const readerIds = readerIdsOf(actor, organizationId);
     const now = this.clock.now();
     const departments = await this.departmentsOf(readerIds);
-    const inForce = await this.ruleCards.listInForce(departments.map(({ id }) => id), now);
+    const inForce = await this.ruleCards.listInForce(
+      departments.map(({ id }) => id),
+      now,
+    );
     const lanes: Lane[] = [];
     for (const department of departments) {
-      lanes.push(await this.lanes.read(department, span, readerIds.includes(department.id), inForce.get(department.id)?.version ?? null));
+      lanes.push(
+        await this.lanes.read(
+          department,
+          span,
+          readerIds.includes(department.id),
+          inForce.get(department.id)?.version ?? null,
+        ),
+      );
     }
     const visits = this.presenter.presentRows(actor, await this.queries.listInSpan(readerIds, span));
     const zone = lanes[0]?.zone ?? 'UTC';

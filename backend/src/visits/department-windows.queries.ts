@@ -36,7 +36,12 @@ export class DepartmentWindows {
       const rooms = new Map(windows.map(({ label, room }) => [label, room]));
       return windowsOfDates({ zone, workingDays, closures: [], windows }, from, to)
         .filter(({ startAt, endAt }) => startAt < endAt) // a change of clocks may swallow a window whole
-        .map((window) => ({ ...window, room: rooms.get(window.label) ?? 0, isClosed: !open.has(keyOf(window)), ruleCard }));
+        .map((window) => ({
+          ...window,
+          room: rooms.get(window.label) ?? 0,
+          isClosed: !open.has(keyOf(window)),
+          ruleCard,
+        }));
     });
   }
 

@@ -1,7 +1,13 @@
 import { Injectable } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import type { RouteInput } from '@holdwater/shared-types/common/route.js';
-import type { declineVisit, freeVisit, setNotReached, VisitSummary, withdrawVisit } from '@holdwater/shared-types/visits/visit.contract.js';
+import type {
+  declineVisit,
+  freeVisit,
+  setNotReached,
+  VisitSummary,
+  withdrawVisit,
+} from '@holdwater/shared-types/visits/visit.contract.js';
 import type { VisitMove } from '@holdwater/shared-types/visits/visit.states.js';
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
@@ -21,7 +27,11 @@ interface Ending {
   readonly expectedVersion: number;
   readonly changes: VisitChanges;
   /** Writes it down; `wasBooked`: it stood in calendars until now. */
-  readonly tell: (visit: VisitModel, by: LedgerActor, before: { wasBooked: boolean; inspectorId: string | null }) => Promise<void>;
+  readonly tell: (
+    visit: VisitModel,
+    by: LedgerActor,
+    before: { wasBooked: boolean; inspectorId: string | null },
+  ) => Promise<void>;
 }
 
 /** Ends a visit, or gives it back to the requests. All throw `not-found`, `not-allowed`, `stale-state`. */
@@ -36,7 +46,11 @@ export class EndVisit {
     private readonly clock: Clock,
   ) {}
 
-  async withdraw(actor: Actor, visitId: string, { expectedVersion, reason, note }: RouteInput<typeof withdrawVisit>['body']): Promise<VisitSummary> {
+  async withdraw(
+    actor: Actor,
+    visitId: string,
+    { expectedVersion, reason, note }: RouteInput<typeof withdrawVisit>['body'],
+  ): Promise<VisitSummary> {
     return this.end(actor, visitId, {
       move: 'withdraw',
       expectedVersion,
@@ -45,7 +59,11 @@ export class EndVisit {
     });
   }
 
-  async decline(actor: Actor, visitId: string, { expectedVersion, reason }: RouteInput<typeof declineVisit>['body']): Promise<VisitSummary> {
+  async decline(
+    actor: Actor,
+    visitId: string,
+    { expectedVersion, reason }: RouteInput<typeof declineVisit>['body'],
+  ): Promise<VisitSummary> {
     return this.end(actor, visitId, {
       move: 'decline',
       expectedVersion,
@@ -54,7 +72,11 @@ export class EndVisit {
     });
   }
 
-  async free(actor: Actor, visitId: string, { expectedVersion, reason }: RouteInput<typeof freeVisit>['body']): Promise<VisitSummary> {
+  async free(
+    actor: Actor,
+    visitId: string,
+    { expectedVersion, reason }: RouteInput<typeof freeVisit>['body'],
+  ): Promise<VisitSummary> {
     return this.end(actor, visitId, {
       move: 'free-closure',
       expectedVersion,
@@ -64,7 +86,11 @@ export class EndVisit {
   }
 
   /** Keeps first place. What the plumber said of the test is over with the window it was said for; the test itself may go on standing. */
-  async setNotReached(actor: Actor, visitId: string, { expectedVersion, note }: RouteInput<typeof setNotReached>['body']): Promise<VisitSummary> {
+  async setNotReached(
+    actor: Actor,
+    visitId: string,
+    { expectedVersion, note }: RouteInput<typeof setNotReached>['body'],
+  ): Promise<VisitSummary> {
     return this.end(actor, visitId, {
       move: 'not-reached',
       expectedVersion,
@@ -76,7 +102,11 @@ export class EndVisit {
     });
   }
 
-  private async end(actor: Actor, visitId: string, { move, expectedVersion, changes, tell }: Ending): Promise<VisitSummary> {
+  private async end(
+    actor: Actor,
+    visitId: string,
+    { move, expectedVersion, changes, tell }: Ending,
+  ): Promise<VisitSummary> {
     return this.unitOfWork.run(async () => {
       const locked = await this.moves.lockVisit(actor, visitId);
       requireMove(actor, move, locked);
@@ -90,9 +120,12 @@ export class EndVisit {
   }
 
   private async endTestUp(visitId: string, personId: string): Promise<void> {
-    await this.sequelize.query('UPDATE test_ups SET ended_at = :now, ended_by = :personId WHERE visit_id = :visitId AND ended_at IS NULL', {
-      replacements: { visitId, personId, now: this.clock.now() },
-      type: QueryTypes.UPDATE,
-    });
+    await this.sequelize.query(
+      'UPDATE test_ups SET ended_at = :now, ended_by = :personId WHERE visit_id = :visitId AND ended_at IS NULL',
+      {
+        replacements: { visitId, personId, now: this.clock.now() },
+        type: QueryTypes.UPDATE,
+      },
+    );
   }
 }

@@ -41,7 +41,13 @@ export class FreeByClosure implements ClosureListener, OnModuleInit {
       `SELECT id FROM visits WHERE department_id = :departmentId AND window_date = :date AND state IN ('booked', 'ready')
          AND (CAST(:isWholeDay AS boolean) OR "window" && tstzrange(:startAt, :endAt)) ORDER BY id`,
       {
-        replacements: { departmentId, date, isWholeDay: from === null, startAt: span?.startAt ?? null, endAt: span?.endAt ?? null },
+        replacements: {
+          departmentId,
+          date,
+          isWholeDay: from === null,
+          startAt: span?.startAt ?? null,
+          endAt: span?.endAt ?? null,
+        },
         type: QueryTypes.SELECT,
       },
     );

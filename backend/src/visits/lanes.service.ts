@@ -32,24 +32,44 @@ export class Lanes {
   ) {}
 
   /** `ruleCardVersion` null: no version is in force today, so nothing can be asked for. */
-  async read(department: DepartmentRecord, span: DaySpan, isOwn: boolean, ruleCardVersion: number | null): Promise<Lane> {
+  async read(
+    department: DepartmentRecord,
+    span: DaySpan,
+    isOwn: boolean,
+    ruleCardVersion: number | null,
+  ): Promise<Lane> {
     const days = await this.readDays(department.id, span, isOwn, ruleCardVersion !== null);
     return { departmentId: department.id, name: department.name, zone: department.zone, isOwn, ruleCardVersion, days };
   }
 
-  async readDays(departmentId: string, { fromDate, toDate }: DaySpan, isOwn: boolean, isInForce: boolean): Promise<LaneDay[]> {
+  async readDays(
+    departmentId: string,
+    { fromDate, toDate }: DaySpan,
+    isOwn: boolean,
+    isInForce: boolean,
+  ): Promise<LaneDay[]> {
     const now = this.clock.now();
     const days = await this.workingTime.daysBetween(departmentId, fromDate, toDate);
     const windows = (await this.windows.list(departmentId, fromDate, toDate)).filter(({ isClosed }) => !isClosed);
     const taken = await this.queries.listTaken(departmentId, fromDate, toDate);
     const openDays = isOwn ? null : isInForce ? await this.workingTime.noticeFor(departmentId, now) : noDays;
-    return days.map((day) => dayOf(day, windows.filter(({ date }) => date === day.date), { now, isOwn, openDays, taken }));
+    return days.map((day) =>
+      dayOf(
+        day,
+        windows.filter(({ date }) => date === day.date),
+        { now, isOwn, openDays, taken },
+      ),
+    );
   }
 }
 
 const noDays: OpenDays = { firstDate: '9999-12-31', lastDate: '9999-12-31' };
 
-function dayOf({ date, isWorkingDay, closed }: DepartmentDay, windows: readonly DayWindow[], facts: LaneFacts): LaneDay {
+function dayOf(
+  { date, isWorkingDay, closed }: DepartmentDay,
+  windows: readonly DayWindow[],
+  facts: LaneFacts,
+): LaneDay {
   return {
     date,
     isWorkingDay,
@@ -64,5 +84,14 @@ function windowOf(window: DayWindow, { now, isOwn, openDays, taken }: LaneFacts)
   const here = taken.filter((place) => keyOf(place) === keyOf(window));
   const roomLeft = roomLeftOf(window, here);
   const isTakeable = roomLeft > 0 && whyNotByTime(window, openDays, now) === null;
-  return { date, label, startAt, endAt, room, roomLeft, up: isOwn ? here.filter(({ isUp }) => isUp).length : null, isTakeable };
+  return {
+    date,
+    label,
+    startAt,
+    endAt,
+    room,
+    roomLeft,
+    up: isOwn ? here.filter(({ isUp }) => isUp).length : null,
+    isTakeable,
+  };
 }

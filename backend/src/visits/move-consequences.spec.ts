@@ -8,7 +8,11 @@ describe('what a move brings with it', () => {
   it('begins from where the visit was, and takes it back whole', () => {
     expect(consequencesOf('begin', 'ready', 'underway', now)).toEqual({ begunAt: now, begunFrom: 'ready' });
     expect(consequencesOf('begin', 'booked', 'underway', now)).toEqual({ begunAt: now, begunFrom: 'booked' });
-    expect(consequencesOf('undo-begin', 'underway', 'ready', now)).toEqual({ begunAt: null, begunBy: null, begunFrom: null });
+    expect(consequencesOf('undo-begin', 'underway', 'ready', now)).toEqual({
+      begunAt: null,
+      begunBy: null,
+      begunFrom: null,
+    });
   });
 
   it('gives back inspector, span and place when not reached, and keeps first place', () => {
@@ -26,7 +30,8 @@ describe('what a move brings with it', () => {
 
   it('marks since when the test is up, and that it is no longer', () => {
     expect(consequencesOf('say-test-up', 'booked', 'ready', now)).toEqual({ readyAt: now });
-    for (const move of ['no-longer-up', 'find-not-up'] as const) expect(consequencesOf(move, 'ready', 'booked', now)).toEqual({ readyAt: null });
+    for (const move of ['no-longer-up', 'find-not-up'] as const)
+      expect(consequencesOf(move, 'ready', 'booked', now)).toEqual({ readyAt: null });
   });
 
   it('ends with its time exactly where the table leads out of the open states', () => {

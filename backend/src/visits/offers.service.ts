@@ -51,9 +51,16 @@ export class Offers {
     const notice = await this.workingTime.noticeFor(department.id, now);
     const isRetest = (await this.requested.listFacts(records, wish.lots, wish.stageCode)).some(isRetestOf);
     const [fromDate, toDate] = [localDateOf(now, department.zone), endOfWeek(notice.lastDate)];
-    const windows = (await this.windows.list(department.id, fromDate, toDate)).filter((window) => isForVisit(window, wish.stageCode, isRetest));
+    const windows = (await this.windows.list(department.id, fromDate, toDate)).filter((window) =>
+      isForVisit(window, wish.stageCode, isRetest),
+    );
     const { asking, readiness } = ruleCard.content;
-    const facts = await this.readFacts(department.id, windows, { now, openDays: notice, stageCode: wish.stageCode, lots: records });
+    const facts = await this.readFacts(department.id, windows, {
+      now,
+      openDays: notice,
+      stageCode: wish.stageCode,
+      lots: records,
+    });
     return {
       departmentId: department.id,
       departmentName: department.name,
@@ -85,15 +92,26 @@ export class Offers {
     if (!first || !last) return { ...base, taken: [], inspectors: null, busy: [] };
     const taken = await this.queries.listTaken(departmentId, first.date, last.date);
     const inspectors = await this.queries.listInspectors(departmentId);
-    const busy = await this.queries.listBusy(inspectors.map(({ id }) => id), new Date(first.startAt), new Date(last.endAt));
+    const busy = await this.queries.listBusy(
+      inspectors.map(({ id }) => id),
+      new Date(first.startAt),
+      new Date(last.endAt),
+    );
     return { ...base, taken, inspectors, busy };
   }
 }
 
 /** A re-inspection may be kept to some windows, and a version of a later day may not know the stage. */
-export function isForVisit({ label, ruleCard }: Pick<DayWindow, 'label' | 'ruleCard'>, stageCode: string, isRetest: boolean): boolean {
+export function isForVisit(
+  { label, ruleCard }: Pick<DayWindow, 'label' | 'ruleCard'>,
+  stageCode: string,
+  isRetest: boolean,
+): boolean {
   const { reinspectionWindows } = ruleCard.content.asking;
-  return stageOf(ruleCard, stageCode) !== null && (!isRetest || reinspectionWindows === null || reinspectionWindows.includes(label));
+  return (
+    stageOf(ruleCard, stageCode) !== null &&
+    (!isRetest || reinspectionWindows === null || reinspectionWindows.includes(label))
+  );
 }
 
 function offerOf(window: DayWindow, facts: OfferFacts): OfferedWindow {
@@ -107,7 +125,11 @@ export function roomLeftOf(window: DayWindow, taken: readonly TakenPlace[]): num
   return Math.max(0, window.room - taken.filter((place) => keyOf(place) === keyOf(window)).length);
 }
 
-function whyNoSeat(window: DayWindow, { lots, inspectors, busy, stageCode }: OfferFacts, roomLeft: number): WhyNot | null {
+function whyNoSeat(
+  window: DayWindow,
+  { lots, inspectors, busy, stageCode }: OfferFacts,
+  roomLeft: number,
+): WhyNot | null {
   if (roomLeft < lots.length) return 'full';
   const minutes = stageOf(window.ruleCard, stageCode)?.minutesPerVisit;
   if (inspectors === null || minutes === undefined || window.ruleCard.content.asking.booking === 'desk') return null;

@@ -42,7 +42,10 @@ export class PlaceVisit {
       const { visit } = locked;
       const window = await this.booking.lockWindow(visit.departmentId, wish.date, wish.label, true);
       // a request is tested by the version of the day it is placed on; one that was booked before keeps the version it was booked under
-      const ruleCardId = visit.hasFirstPlace || stageOf(window.ruleCard, visit.stageCode) === null ? visit.ruleCardId : window.ruleCard.id;
+      const ruleCardId =
+        visit.hasFirstPlace || stageOf(window.ruleCard, visit.stageCode) === null
+          ? visit.ruleCardId
+          : window.ruleCard.id;
       const seat = await this.seatFor(locked, window, wish);
       const changes = { ...windowChanges(window), ...seat, ruleCardId, endReason: null, endNote: null };
       await this.moves.apply(visit, 'place', { expectedVersion: wish.expectedVersion, changes });
@@ -60,13 +63,15 @@ export class PlaceVisit {
       const locked = await this.lock(actor, visitId, 'move', wish);
       const { visit, lot } = locked;
       const isDesk = isDeskOf(actor, lot);
-      if (wish.inspectorId !== undefined && (!isDesk || visit.state === 'requested')) refuse('bad-input', {}, { inspectorId: 'desk-places' });
+      if (wish.inspectorId !== undefined && (!isDesk || visit.state === 'requested'))
+        refuse('bad-input', {}, { inspectorId: 'desk-places' });
       if (isSame(visit, wish)) refuse('bad-input', {}, { label: 'same-window' });
       const window = await this.booking.lockWindow(visit.departmentId, wish.date, wish.label, isDesk);
       const isOpenToIt = isDesk || isForVisit(window, visit.stageCode, visit.isRetest);
       if (!isOpenToIt) refuse('window-unknown', { label: wish.label }, { label: 'not-for-this-visit' });
       const before = beforeOf(visit);
-      const seat = visit.state === 'requested' ? await this.wishFor(locked, window) : await this.seatFor(locked, window, wish);
+      const seat =
+        visit.state === 'requested' ? await this.wishFor(locked, window) : await this.seatFor(locked, window, wish);
       const changes = { ...windowChanges(window), ...seat };
       await this.moves.apply(visit, 'move', { expectedVersion: wish.expectedVersion, changes });
       await this.events.moved(visit, before, { personId: actor.personId, role: actingSide(actor, visit, lot) });
@@ -74,14 +79,23 @@ export class PlaceVisit {
     });
   }
 
-  private async lock(actor: Actor, visitId: string, move: VisitMove, { expectedVersion }: { expectedVersion: number }): Promise<LockedVisit> {
+  private async lock(
+    actor: Actor,
+    visitId: string,
+    move: VisitMove,
+    { expectedVersion }: { expectedVersion: number },
+  ): Promise<LockedVisit> {
     const locked = await this.moves.lockVisit(actor, visitId);
     requireMove(actor, move, locked);
     this.moves.requireCurrent(locked.visit, move, expectedVersion);
     return locked;
   }
 
-  private async seatFor({ visit, lot }: LockedVisit, window: DayWindow, wish: { inspectorId?: string | undefined }): Promise<TakenSeat> {
+  private async seatFor(
+    { visit, lot }: LockedVisit,
+    window: DayWindow,
+    wish: { inspectorId?: string | undefined },
+  ): Promise<TakenSeat> {
     const own = await this.ruleCards.getRuleCard(visit.ruleCardId);
     const stage = stageOf(own, visit.stageCode) ?? refuse('stage-unknown', { stageCode: visit.stageCode });
     const [seat] = await this.booking.takeSeats({
@@ -101,7 +115,9 @@ export class PlaceVisit {
 
   private async telling(actor: Actor, visitId: string, book: () => Promise<VisitSummary>): Promise<VisitSummary> {
     const { lotId, unitNumbers, stageCode } = await this.queries.getVisit(visitId);
-    return this.fullWindows.telling(actor, { lots: [{ lotId, unitNumbers }], stageCode }, () => this.unitOfWork.run(book));
+    return this.fullWindows.telling(actor, { lots: [{ lotId, unitNumbers }], stageCode }, () =>
+      this.unitOfWork.run(book),
+    );
   }
 }
 
@@ -114,5 +130,9 @@ function windowChanges({ date, label, startAt, endAt }: DayWindow) {
 }
 
 function isSame(visit: VisitModel, { date, label, inspectorId }: MoveWish): boolean {
-  return visit.windowDate === date && visit.windowLabel === label && (inspectorId === undefined || inspectorId === visit.inspectorId);
+  return (
+    visit.windowDate === date &&
+    visit.windowLabel === label &&
+    (inspectorId === undefined || inspectorId === visit.inspectorId)
+  );
 }

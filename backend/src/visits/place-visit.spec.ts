@@ -30,9 +30,13 @@ async function request(label = 'early', date = nextDay): Promise<VisitSummary> {
 }
 
 const place = (visit: VisitSummary, body: object = {}, by: WorldPerson = 'desk') =>
-  world.as(by).post(`/api/visits/${visit.id}/place`, { expectedVersion: visit.version, date: nextDay, label: 'early', ...body });
+  world
+    .as(by)
+    .post(`/api/visits/${visit.id}/place`, { expectedVersion: visit.version, date: nextDay, label: 'early', ...body });
 const move = (visit: VisitSummary, body: object, by: WorldPerson = 'superintendent') =>
-  world.as(by).post(`/api/visits/${visit.id}/move`, { expectedVersion: visit.version, date: nextDay, label: 'mid', ...body });
+  world
+    .as(by)
+    .post(`/api/visits/${visit.id}/move`, { expectedVersion: visit.version, date: nextDay, label: 'mid', ...body });
 const lastEventOf = async (visitId: string) => {
   const events = await server.db.query<{ kind: string; payload: Record<string, unknown> }>(
     'SELECT kind, payload FROM outbox_events WHERE visit_id = :visitId ORDER BY position',
@@ -45,13 +49,24 @@ describe('the desk places a request', () => {
   it('with the first free inspector; the entry begins with SEQUENCE 0', async () => {
     const visit = await request();
     const answer = await place(visit, { date: '2027-03-04', label: 'late' });
-    expect(answer.body).toMatchObject({ state: 'booked', version: 1, inspector: { name: 'Gil Strand' }, window: { date: '2027-03-04', label: 'late' } });
-    expect(await lastEventOf(visit.id)).toMatchObject({ count: 2, kind: 'visit-booked', payload: { visit: { calendarSequence: 0 } } });
+    expect(answer.body).toMatchObject({
+      state: 'booked',
+      version: 1,
+      inspector: { name: 'Gil Strand' },
+      window: { date: '2027-03-04', label: 'late' },
+    });
+    expect(await lastEventOf(visit.id)).toMatchObject({
+      count: 2,
+      kind: 'visit-booked',
+      payload: { visit: { calendarSequence: 0 } },
+    });
   });
 
   it('with the inspector it names, where they are free', async () => {
     const inspectorId = world.people.inspector.id;
-    expect((await place(await request(), { inspectorId, date: '2027-03-08' })).body.inspector.name).toBe('Noor Haverty');
+    expect((await place(await request(), { inspectorId, date: '2027-03-08' })).body.inspector.name).toBe(
+      'Noor Haverty',
+    );
     const wrong = await place(await request(), { inspectorId: world.people.desk.id });
     expect(wrong.body).toMatchObject({ code: 'bad-input', fields: { inspectorId: 'no-such-inspector' } });
     const foreign = await place(await request(), { inspectorId: world.people.otherInspector.id });
@@ -71,22 +86,32 @@ describe('the desk places a request', () => {
     for (const by of ['superintendent', 'plumber', 'helper', 'inspector', 'departmentOwner', 'builderOwner'] as const) {
       expect((await place(visit, {}, by)).body).toMatchObject({ code: 'not-allowed', params: { move: 'place' } });
     }
-    for (const by of ['otherDesk', 'otherSuperintendent', 'operator'] as const) expect((await place(visit, {}, by)).body.code).toBe('not-found');
+    for (const by of ['otherDesk', 'otherSuperintendent', 'operator'] as const)
+      expect((await place(visit, {}, by)).body.code).toBe('not-found');
     expect((await world.nobody().post(`/api/visits/${visit.id}/place`, {})).status).toBe(401);
     expect(await readVisit(world, visit.id)).toMatchObject({ state: 'requested', version: 0 });
   });
 
   it('is told what the visit is when that is something else now', async () => {
     const visit = await request();
-    expect((await place(visit, { expectedVersion: 3 })).body).toMatchObject({ code: 'stale-state', params: { is: 'requested', version: 0 } });
+    expect((await place(visit, { expectedVersion: 3 })).body).toMatchObject({
+      code: 'stale-state',
+      params: { is: 'requested', version: 0 },
+    });
     await place(visit, { date: '2027-03-09' });
-    expect((await place(visit, { expectedVersion: 1, date: '2027-03-09' })).body).toMatchObject({ code: 'stale-state', params: { is: 'booked', version: 1 } });
+    expect((await place(visit, { expectedVersion: 1, date: '2027-03-09' })).body).toMatchObject({
+      code: 'stale-state',
+      params: { is: 'booked', version: 1 },
+    });
   });
 
   it('finds no room in a full window, and is told the next ones', async () => {
     for (let n = 0; n < 3; n += 1) await book(world, await newLot(), { date: '2027-03-10', label: 'noon' });
     const answer = await place(await request(), { date: '2027-03-10', label: 'noon' });
-    expect(answer.body).toMatchObject({ code: 'window-full', params: { why: 'full', offers: [{ isTakeable: true }, {}, {}] } });
+    expect(answer.body).toMatchObject({
+      code: 'window-full',
+      params: { why: 'full', offers: [{ isTakeable: true }, {}, {}] },
+    });
   });
 });
 
@@ -112,14 +137,25 @@ describe('a visit moves', () => {
   it('stays ready when it was', async () => {
     const visit = await book(world, await newLot(), { date: '2027-03-11' });
     await VisitModel.update({ state: 'ready', readyAt: server.clock.now() }, { where: { id: visit.id } });
-    expect((await move(visit, { date: '2027-03-11', label: 'noon' })).body).toMatchObject({ state: 'ready', upSince: server.clock.now().toISOString() });
+    expect((await move(visit, { date: '2027-03-11', label: 'noon' })).body).toMatchObject({
+      state: 'ready',
+      upSince: server.clock.now().toISOString(),
+    });
   });
 
   it('a request changes its wish only, and nobody’s calendar', async () => {
     const visit = await request();
     const answer = await move(visit, { date: '2027-03-15', label: 'late' });
-    expect(answer.body).toMatchObject({ state: 'requested', version: 1, inspector: null, window: { date: '2027-03-15', label: 'late' } });
-    expect(await lastEventOf(visit.id)).toMatchObject({ kind: 'visit-moved', payload: { isBooked: false, visit: { calendarSequence: 0 } } });
+    expect(answer.body).toMatchObject({
+      state: 'requested',
+      version: 1,
+      inspector: null,
+      window: { date: '2027-03-15', label: 'late' },
+    });
+    expect(await lastEventOf(visit.id)).toMatchObject({
+      kind: 'visit-moved',
+      payload: { isBooked: false, visit: { calendarSequence: 0 } },
+    });
   });
 
   it('to another inspector by the desk; the one before is told', async () => {
@@ -127,19 +163,31 @@ describe('a visit moves', () => {
     const body = { date: '2027-03-15', label: 'early', inspectorId: world.people.inspector.id };
     const answer = await move(visit, body, 'desk');
     expect(answer.body).toMatchObject({ inspector: { name: 'Noor Haverty' }, version: 1 });
-    expect(await lastEventOf(visit.id)).toMatchObject({ payload: { visit: { formerInspectorId: world.people.secondInspector.id, calendarSequence: 0 } } });
-    expect((await move(answer.body, { ...body, label: 'mid' })).body).toMatchObject({ code: 'bad-input', fields: { inspectorId: 'desk-places' } });
+    expect(await lastEventOf(visit.id)).toMatchObject({
+      payload: { visit: { formerInspectorId: world.people.secondInspector.id, calendarSequence: 0 } },
+    });
+    expect((await move(answer.body, { ...body, label: 'mid' })).body).toMatchObject({
+      code: 'bad-input',
+      fields: { inspectorId: 'desk-places' },
+    });
   });
 
   it('stays with its inspector where that can be', async () => {
     const visit = await book(world, await newLot(), { date: '2027-03-15', label: 'noon' });
-    const moved = await move(visit, { date: '2027-03-15', label: 'noon', inspectorId: world.people.inspector.id }, 'desk');
+    const moved = await move(
+      visit,
+      { date: '2027-03-15', label: 'noon', inspectorId: world.people.inspector.id },
+      'desk',
+    );
     expect((await move(moved.body, { date: '2027-03-15', label: 'late' })).body.inspector.name).toBe('Noor Haverty');
   });
 
   it('nowhere when it is there already', async () => {
     const visit = await book(world, await newLot(), { date: '2027-03-16' });
-    expect((await move(visit, { date: '2027-03-16', label: 'early' })).body).toMatchObject({ code: 'bad-input', fields: { label: 'same-window' } });
+    expect((await move(visit, { date: '2027-03-16', label: 'early' })).body).toMatchObject({
+      code: 'bad-input',
+      fields: { label: 'same-window' },
+    });
   });
 
   it('by the rules of asking for the requesting side, freely for the desk', async () => {
@@ -154,13 +202,18 @@ describe('a visit moves', () => {
     expect((await move(visit, { date: '2027-03-16', label: 'noon' }, 'plumber')).body.code).toBe('not-allowed');
     await LotModel.update({ mayPlumberRequest: true }, { where: { id: visit.lotId } });
     expect((await move(visit, { date: '2027-03-16', label: 'noon' }, 'plumber')).status).toBe(200);
-    for (const by of ['helper', 'inspector', 'builderOwner'] as const) expect((await move(visit, {}, by)).body.code).toBe('not-allowed');
-    for (const by of ['otherSuperintendent', 'otherDesk'] as const) expect((await move(visit, {}, by)).body.code).toBe('not-found');
+    for (const by of ['helper', 'inspector', 'builderOwner'] as const)
+      expect((await move(visit, {}, by)).body.code).toBe('not-allowed');
+    for (const by of ['otherSuperintendent', 'otherDesk'] as const)
+      expect((await move(visit, {}, by)).body.code).toBe('not-found');
   });
 
   it('not once it is underway or over', async () => {
     const visit = await book(world, await newLot(), { date: '2027-03-17' });
-    await VisitModel.update({ state: 'underway', begunAt: new Date(testNow), begunFrom: 'booked' }, { where: { id: visit.id } });
+    await VisitModel.update(
+      { state: 'underway', begunAt: new Date(testNow), begunFrom: 'booked' },
+      { where: { id: visit.id } },
+    );
     expect((await move(visit, {})).body).toMatchObject({ code: 'stale-state', params: { is: 'underway' } });
     await VisitModel.update({ state: 'closed' }, { where: { id: visit.id } });
     expect((await move(visit, {}, 'desk')).body).toMatchObject({ code: 'stale-state', params: { is: 'closed' } });

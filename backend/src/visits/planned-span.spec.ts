@@ -36,7 +36,9 @@ describe('the first free inspector', () => {
       inspectorId: 'ben',
       planned: span('07:30', '08:00'),
     });
-    expect(firstFreeSeat(window, [ann, ben], [busy('ann', '07:00', '09:00'), busy('ben', '08:00', '08:30')], 60, [])).toBeNull();
+    expect(
+      firstFreeSeat(window, [ann, ben], [busy('ann', '07:00', '09:00'), busy('ben', '08:00', '08:30')], 60, []),
+    ).toBeNull();
   });
 
   it('never is one who belongs to the lot’s builder or plumber', () => {
@@ -48,7 +50,14 @@ describe('the first free inspector', () => {
 
   it('is found for several lots one after the other, or for none of them', () => {
     const six = Array.from({ length: 6 }, () => ['builder', 'plumber']);
-    expect(seatAll(window, [ann, ben], [], 30, six)?.map(({ inspectorId }) => inspectorId)).toEqual(['ann', 'ann', 'ann', 'ben', 'ben', 'ben']);
+    expect(seatAll(window, [ann, ben], [], 30, six)?.map(({ inspectorId }) => inspectorId)).toEqual([
+      'ann',
+      'ann',
+      'ann',
+      'ben',
+      'ben',
+      'ben',
+    ]);
     expect(seatAll(window, [ann, ben], [], 30, [...six, ['builder', null]])).toBeNull();
   });
 });

@@ -41,7 +41,11 @@ export function firstFreeSeat(
 ): Seat | null {
   for (const candidate of candidates) {
     if (candidate.organizationIds.some((id) => partyIds.includes(id))) continue;
-    const planned = earliestGap(window, busy.filter((span) => span.inspectorId === candidate.id), minutes);
+    const planned = earliestGap(
+      window,
+      busy.filter((span) => span.inspectorId === candidate.id),
+      minutes,
+    );
     if (planned) return { inspectorId: candidate.id, planned };
   }
   return null;

@@ -9,5 +9,8 @@ export function readerIdsOf(actor: Actor, organizationId: string | undefined): s
 
 /** The actor as a member of these organizations only: what is on them there. */
 export function actorIn(actor: Actor, readerIds: readonly string[]): Actor {
-  return { ...actor, memberships: actor.memberships.filter((membership) => readerIds.includes(membership.organizationId)) };
+  return {
+    ...actor,
+    memberships: actor.memberships.filter((membership) => readerIds.includes(membership.organizationId)),
+  };
 }

@@ -54,7 +54,8 @@ export class RequestVisits {
     const refusal = refusalOf(facts, asked.stage, asked.ruleCard.content);
     if (refusal) refuse(refusal.code, refusal.params);
     const window = await this.booking.lockWindow(asked.department.id, wish.date, wish.label, false);
-    if (!isForVisit(window, wish.stageCode, facts.some(isRetestOf))) refuse('window-unknown', { label: wish.label }, { label: 'not-for-this-visit' });
+    if (!isForVisit(window, wish.stageCode, facts.some(isRetestOf)))
+      refuse('window-unknown', { label: wish.label }, { label: 'not-for-this-visit' });
     const seats = await this.seatsFor(asked, window);
     const ids: string[] = [];
     for (const [index, lot] of facts.entries()) {
@@ -65,7 +66,10 @@ export class RequestVisits {
   }
 
   /** Null where the desk will place them; even then nobody asks for a window that is full. */
-  private async seatsFor({ department, ruleCard, stage, records }: AskedLots, window: DayWindow): Promise<TakenSeat[] | null> {
+  private async seatsFor(
+    { department, ruleCard, stage, records }: AskedLots,
+    window: DayWindow,
+  ): Promise<TakenSeat[] | null> {
     const minutes = (stageOf(window.ruleCard, stage.code) ?? stage).minutesPerVisit;
     const wish = { departmentId: department.id, window, minutes, lots: records };
     if (ruleCard.content.asking.booking === 'self') return this.booking.takeSeats(wish);

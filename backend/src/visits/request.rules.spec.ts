@@ -4,7 +4,11 @@ import { asking } from '../testing/fixtures/visits.js';
 import { isRetestOf, type LotAsked, refusalOf, unitsOf, unknownUnits } from './request.rules.js';
 
 const content = ruleCardContent();
-const [groundwork, roughIn, final] = content.stages as [(typeof content.stages)[0], (typeof content.stages)[0], (typeof content.stages)[0]];
+const [groundwork, roughIn, final] = content.stages as [
+  (typeof content.stages)[0],
+  (typeof content.stages)[0],
+  (typeof content.stages)[0],
+];
 const lot = (overrides: Partial<LotAsked> = {}): LotAsked => ({
   id: 'a',
   number: '1',
@@ -40,40 +44,70 @@ describe('what refuses a request', () => {
 
   it('a permit not issued, only where the rule card needs it', () => {
     const lots = [lot(), lot({ number: '2', permitStatus: 'applied' }), lot({ number: '3', permitStatus: 'expired' })];
-    expect(refusalOf(lots, roughIn, content)).toMatchObject({ code: 'permit-not-issued', params: { lots: ['2', '3'] } });
+    expect(refusalOf(lots, roughIn, content)).toMatchObject({
+      code: 'permit-not-issued',
+      params: { lots: ['2', '3'] },
+    });
     expect(refusalOf(lots, roughIn, ruleCardContent({ asking: asking({ isPermitNeeded: false }) }))).toBeNull();
   });
 
   it('open corrections of this stage and these units, counted over all lots', () => {
-    const lots = [lot({ corrections: [correction(), correction()] }), lot({ number: '2', corrections: [correction()] })];
-    expect(refusalOf(lots, roughIn, content)).toMatchObject({ code: 'corrections-open', params: { count: 3, lots: ['1', '2'] } });
+    const lots = [
+      lot({ corrections: [correction(), correction()] }),
+      lot({ number: '2', corrections: [correction()] }),
+    ];
+    expect(refusalOf(lots, roughIn, content)).toMatchObject({
+      code: 'corrections-open',
+      params: { count: 3, lots: ['1', '2'] },
+    });
     expect(refusalOf([lot({ corrections: [correction({ stageCode: 'groundwork' })] })], roughIn, content)).toBeNull();
-    expect(refusalOf([lot({ units: [1, 2], unitsAsked: [2], corrections: [correction()] })], roughIn, content)).toBeNull();
+    expect(
+      refusalOf([lot({ units: [1, 2], unitsAsked: [2], corrections: [correction()] })], roughIn, content),
+    ).toBeNull();
   });
 
   it('before the last stage also what had to be fixed before final, of whatever stage', () => {
     const corrections = [correction({ severity: 'fix-before-final' })];
-    expect(refusalOf([lot({ corrections })], final, content)).toMatchObject({ code: 'corrections-open', params: { count: 1 } });
+    expect(refusalOf([lot({ corrections })], final, content)).toMatchObject({
+      code: 'corrections-open',
+      params: { count: 1 },
+    });
     expect(refusalOf([lot({ corrections: [correction()] })], final, content)).toBeNull();
     expect(refusalOf([lot({ corrections })], groundwork, content)).toBeNull();
   });
 
   it('a stage that has passed, for all units or for one that is asked for', () => {
-    expect(refusalOf([lot({ passedUnits: [1] })], roughIn, content)).toMatchObject({ code: 'stage-passed', params: { lots: ['1'] } });
-    expect(refusalOf([lot({ units: [1, 2], unitsAsked: [1, 2], passedUnits: [2] })], roughIn, content)?.code).toBe('stage-passed');
+    expect(refusalOf([lot({ passedUnits: [1] })], roughIn, content)).toMatchObject({
+      code: 'stage-passed',
+      params: { lots: ['1'] },
+    });
+    expect(refusalOf([lot({ units: [1, 2], unitsAsked: [1, 2], passedUnits: [2] })], roughIn, content)?.code).toBe(
+      'stage-passed',
+    );
     expect(refusalOf([lot({ units: [1, 2], passedUnits: [2] })], roughIn, content)).toBeNull();
   });
 
   it('a visit that is open on one of the units', () => {
-    expect(refusalOf([lot({ openVisitUnits: [1] })], roughIn, content)).toMatchObject({ code: 'open-visit-exists', params: { lots: ['1'] } });
+    expect(refusalOf([lot({ openVisitUnits: [1] })], roughIn, content)).toMatchObject({
+      code: 'open-visit-exists',
+      params: { lots: ['1'] },
+    });
     expect(refusalOf([lot({ units: [1, 2], unitsAsked: [2], openVisitUnits: [1] })], roughIn, content)).toBeNull();
   });
 
   it('tells the permit before corrections, corrections before the rest', () => {
-    const all = lot({ permitStatus: 'applied', corrections: [correction()], passedUnits: [1], openVisitUnits: [1], unitsAsked: [1] });
+    const all = lot({
+      permitStatus: 'applied',
+      corrections: [correction()],
+      passedUnits: [1],
+      openVisitUnits: [1],
+      unitsAsked: [1],
+    });
     expect(refusalOf([all], roughIn, content)?.code).toBe('permit-not-issued');
     expect(refusalOf([{ ...all, permitStatus: 'issued' }], roughIn, content)?.code).toBe('corrections-open');
-    expect(refusalOf([{ ...all, permitStatus: 'issued', corrections: [] }], roughIn, content)?.code).toBe('stage-passed');
+    expect(refusalOf([{ ...all, permitStatus: 'issued', corrections: [] }], roughIn, content)?.code).toBe(
+      'stage-passed',
+    );
   });
 });
 

@@ -23,7 +23,9 @@ export interface Refusal {
 
 /** The units a request is for: those asked, or all that have not passed this stage. */
 export function unitsOf(lot: LotAsked): number[] {
-  return [...new Set(lot.unitsAsked ?? lot.units.filter((unit) => !lot.passedUnits.includes(unit)))].sort((a, b) => a - b);
+  return [...new Set(lot.unitsAsked ?? lot.units.filter((unit) => !lot.passedUnits.includes(unit)))].sort(
+    (a, b) => a - b,
+  );
 }
 
 /** Units asked for that the lot does not have. */
@@ -35,7 +37,11 @@ export function unknownUnits(lot: LotAsked): number[] {
  * Why these lots cannot have a visit of this stage, the first reason that applies, with every lot it applies to; null when they can.
  * In the order a person is told: the permit, corrections, a stage already passed, a visit already open.
  */
-export function refusalOf(lots: readonly LotAsked[], stage: Stage, content: Pick<RuleCardContent, 'asking' | 'stages'>): Refusal | null {
+export function refusalOf(
+  lots: readonly LotAsked[],
+  stage: Stage,
+  content: Pick<RuleCardContent, 'asking' | 'stages'>,
+): Refusal | null {
   const isLast = content.stages.every(({ order }) => order <= stage.order);
   const checks: Array<[ErrorCode, (lot: LotAsked) => number]> = [
     ['permit-not-issued', (lot) => Number(content.asking.isPermitNeeded && lot.permitStatus !== 'issued')],
@@ -61,7 +67,9 @@ export function isRetestOf(lot: LotAsked): boolean {
 function correctionsInTheWay(lot: LotAsked, stageCode: string, isLast: boolean): number {
   const units = unitsOf(lot);
   return lot.corrections.filter(
-    (each) => units.includes(each.unitNumber) && (each.stageCode === stageCode || (isLast && each.severity === 'fix-before-final')),
+    (each) =>
+      units.includes(each.unitNumber) &&
+      (each.stageCode === stageCode || (isLast && each.severity === 'fix-before-final')),
   ).length;
 }
 

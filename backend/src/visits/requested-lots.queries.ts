@@ -23,7 +23,9 @@ export class RequestedLotsQueries {
 
   /** Several lots at once, nothing locked. Whether somebody may read them is the caller's to ask. */
   async listLots(lotIds: readonly string[]): Promise<LotRecord[]> {
-    return this.select(`SELECT ${lotColumns} FROM lots l WHERE l.id = ANY (ARRAY[:lotIds]::uuid[])`, { lotIds: [...lotIds] });
+    return this.select(`SELECT ${lotColumns} FROM lots l WHERE l.id = ANY (ARRAY[:lotIds]::uuid[])`, {
+      lotIds: [...lotIds],
+    });
   }
 
   /** Corrections that still have to be fixed; notes ask for nothing. */

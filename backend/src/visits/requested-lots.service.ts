@@ -47,13 +47,21 @@ export class RequestedLots {
    * The lots, their one department and the stage. `isLocking`: inside a unit of work, to ask for a visit of them. Throws `not-found` for a lot the actor may not read,
    * `not-allowed` and `may-not-request`, `lot-without-department`, `no-rule-card`, `too-many-lots`, `stage-unknown`.
    */
-  async getAsked(actor: Actor, wishes: readonly LotWish[], stageCode: string, { isForCaller = false, isLocking = false } = {}): Promise<AskedLots> {
+  async getAsked(
+    actor: Actor,
+    wishes: readonly LotWish[],
+    stageCode: string,
+    { isForCaller = false, isLocking = false } = {},
+  ): Promise<AskedLots> {
     const ids = wishes.map(({ lotId }) => lotId);
     const records = isLocking ? await this.lots.lockLotsFor(actor, ids) : await this.readLots(actor, ids);
     const twice = ids.findIndex((id, index) => ids.indexOf(id) !== index);
     if (twice >= 0) refuse('bad-input', {}, { [`lots.${twice}.lotId`]: 'named-twice' });
     const department = await this.departmentOf(records);
-    const ruleCard = await this.ruleCards.getRuleCardInForce(department.id, localDateOf(this.clock.now(), department.zone));
+    const ruleCard = await this.ruleCards.getRuleCardInForce(
+      department.id,
+      localDateOf(this.clock.now(), department.zone),
+    );
     const side = requireSide(actor, records, ruleCard, isForCaller);
     const most = ruleCard.content.asking.lotsPerRequest;
     if (records.length > most) refuse('too-many-lots', { most, asked: records.length });
@@ -75,7 +83,9 @@ export class RequestedLots {
       permitStatus,
       unitsAsked: wishes[index]?.unitNumbers,
       units: units.get(id) ?? [],
-      passedUnits: states.filter((each) => each.lotId === id && hasPassed(each.state)).map(({ unitNumber }) => unitNumber),
+      passedUnits: states
+        .filter((each) => each.lotId === id && hasPassed(each.state))
+        .map(({ unitNumber }) => unitNumber),
       openVisitUnits: unitsIn(openVisits, id),
       failedUnits: unitsIn(failed, id),
       corrections: corrections.filter(({ lotId }) => lotId === id),
@@ -93,15 +103,22 @@ export class RequestedLots {
   private async departmentOf(records: readonly LotRecord[]): Promise<DepartmentRecord> {
     const without = records.filter(({ departmentId }) => departmentId === null);
     const [id, ...others] = [...new Set(records.map(({ departmentId }) => departmentId))];
-    if (id === null || id === undefined || without.length > 0) return refuse('lot-without-department', { lots: without.map(({ number }) => number) });
+    if (id === null || id === undefined || without.length > 0)
+      return refuse('lot-without-department', { lots: without.map(({ number }) => number) });
     if (others.length > 0) refuse('bad-input', {}, { lots: 'of-different-departments' });
     return this.departments.getDepartment(id);
   }
 }
 
 /** The one side all these lots are asked for by. */
-function requireSide(actor: Actor, records: readonly LotRecord[], ruleCard: RuleCardVersion, isForCaller: boolean): AskedLots['side'] {
-  const refused = (code: 'not-allowed' | 'may-not-request') => refuse(code, { lots: records.map(({ number }) => number) });
+function requireSide(
+  actor: Actor,
+  records: readonly LotRecord[],
+  ruleCard: RuleCardVersion,
+  isForCaller: boolean,
+): AskedLots['side'] {
+  const refused = (code: 'not-allowed' | 'may-not-request') =>
+    refuse(code, { lots: records.map(({ number }) => number) });
   const sides = new Set(records.map((lot) => requestingSideOf(actor, lot, isForCaller)));
   const [side] = sides;
   if (side === undefined || side === null || sides.has(null)) return refused('not-allowed');

@@ -9,11 +9,23 @@ import { mayMove, type VisitFacts } from './visits.policy.js';
 /** A visit's row as the policy looks at it. */
 export function factsOfVisit(visit: VisitModel): VisitFacts {
   const { state, requestedBy, requestingSide, inspectorId, begunBy, begunAt } = visit;
-  return { state, requestedBy, requestingSide, inspectorId, begunBy, begunAt, windowStartAt: spanOf(visit.window).startAt };
+  return {
+    state,
+    requestedBy,
+    requestingSide,
+    inspectorId,
+    begunBy,
+    begunAt,
+    windowStartAt: spanOf(visit.window).startAt,
+  };
 }
 
 /** Throws `not-allowed` when this reader of the lot is none of those who make this move. */
-export function requireMove(actor: Actor, move: VisitMove, { visit, lot }: { visit: VisitModel; lot: LotParties }): void {
+export function requireMove(
+  actor: Actor,
+  move: VisitMove,
+  { visit, lot }: { visit: VisitModel; lot: LotParties },
+): void {
   if (!mayMove(actor, move, factsOfVisit(visit), lot)) refuse('not-allowed', { move });
 }
 

@@ -79,10 +79,20 @@ function asksOf(row: VisitRow, rules: readonly TestRule[], tests: readonly TestO
   return row.unitNumbers.flatMap((unitNumber) =>
     (row.stage?.systems ?? []).map((system) => {
       const test = tests.find(
-        (each) => each.lotId === row.lotId && each.stageCode === row.stageCode && each.unitNumber === unitNumber && each.system === system,
+        (each) =>
+          each.lotId === row.lotId &&
+          each.stageCode === row.stageCode &&
+          each.unitNumber === unitNumber &&
+          each.system === system,
       );
       const rule = rules.find((each) => each.stageCode === row.stageCode && each.system === system);
-      return { unitNumber, system, method: test?.method ?? null, minimumPsi: minimumPsiOf(rule, test), levelFt: levelFtOf(rule, test) };
+      return {
+        unitNumber,
+        system,
+        method: test?.method ?? null,
+        minimumPsi: minimumPsiOf(rule, test),
+        levelFt: levelFtOf(rule, test),
+      };
     }),
   );
 }

@@ -72,13 +72,25 @@ export class Runs {
 
 function departmentOf(actor: Actor, departmentId: string | undefined): string {
   if (departmentId !== undefined) return isMember(actor, departmentId) ? departmentId : refuse('not-found');
-  const own = actor.memberships.filter(({ kind }) => kind === 'department').map((membership) => membership.organizationId);
-  return own.find((id) => hasRole(actor, id, 'inspector')) ?? own.find((id) => hasRole(actor, id, 'desk')) ?? own[0] ?? refuse('not-found');
+  const own = actor.memberships
+    .filter(({ kind }) => kind === 'department')
+    .map((membership) => membership.organizationId);
+  return (
+    own.find((id) => hasRole(actor, id, 'inspector')) ??
+    own.find((id) => hasRole(actor, id, 'desk')) ??
+    own[0] ??
+    refuse('not-found')
+  );
 }
 
 /** Everyone who can be sent, with or without visits; and who has visits but left since. */
-function boardOf(inspectors: ReadonlyArray<Omit<BoardInspector, 'visits'>>, visits: readonly VisitSummary[]): BoardInspector[] {
-  const left = visits.flatMap(({ inspector }) => (inspector && !inspectors.some(({ id }) => id === inspector.id) ? [inspector] : []));
+function boardOf(
+  inspectors: ReadonlyArray<Omit<BoardInspector, 'visits'>>,
+  visits: readonly VisitSummary[],
+): BoardInspector[] {
+  const left = visits.flatMap(({ inspector }) =>
+    inspector && !inspectors.some(({ id }) => id === inspector.id) ? [inspector] : [],
+  );
   const former = left.filter(({ id }, index) => left.findIndex((other) => other.id === id) === index);
   return [...inspectors, ...former].map(({ id, name, phone }) => ({
     id,

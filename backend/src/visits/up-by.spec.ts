@@ -12,7 +12,9 @@ describe('when a test must be up', () => {
     ['America/New_York', '2027-03-03', '2027-03-03T12:30:00Z', '2027-03-03T12:00:00.000Z'],
     ['America/Los_Angeles', '2027-03-15', '2027-03-15T14:30:00Z', '2027-03-15T14:00:00.000Z'],
   ])('is 7 am of the window’s day in %s', (zone, date, startAt, expected) => {
-    expect(upByOf(clockTime('07:00'), tested, { date, startAt: new Date(startAt) }, zone)?.toISOString()).toBe(expected);
+    expect(upByOf(clockTime('07:00'), tested, { date, startAt: new Date(startAt) }, zone)?.toISOString()).toBe(
+      expected,
+    );
   });
 
   it('is real hours before the window, over a change of clocks too', () => {

@@ -38,14 +38,21 @@ export class VisitEvents {
   /** A request that waits for the desk. One that books at once is told as booked. */
   async requested(visit: VisitModel, by: LedgerActor): Promise<void> {
     await this.logRequest(visit, by);
-    if (visit.state === 'requested') await this.outbox.add('visit-requested', subjectOf(visit, by), { visit: await this.factsOf(visit) });
+    if (visit.state === 'requested')
+      await this.outbox.add('visit-requested', subjectOf(visit, by), { visit: await this.factsOf(visit) });
     else await this.booked(visit, by);
   }
 
   async booked(visit: VisitModel, by: LedgerActor): Promise<void> {
     const facts = await this.factsOf(visit);
     const { startAt, endAt } = facts;
-    const payload = { visitId: visit.id, stageCode: visit.stageCode, startAt, endAt, inspectorName: facts.inspectorName ?? '' };
+    const payload = {
+      visitId: visit.id,
+      stageCode: visit.stageCode,
+      startAt,
+      endAt,
+      inspectorName: facts.inspectorName ?? '',
+    };
     await this.ledger.appendToLot(visit.lotId, 'visit-booked', payload, by);
     await this.outbox.add('visit-booked', subjectOf(visit, by), { visit: facts });
   }
@@ -64,7 +71,11 @@ export class VisitEvents {
 
   async withdrawn(visit: VisitModel, reason: string, wasBooked: boolean, by: LedgerActor): Promise<void> {
     await this.ledger.appendToLot(visit.lotId, 'visit-withdrawn', { visitId: visit.id, reason }, by);
-    await this.outbox.add('visit-withdrawn', subjectOf(visit, by), { visit: await this.factsOf(visit), reason, wasBooked });
+    await this.outbox.add('visit-withdrawn', subjectOf(visit, by), {
+      visit: await this.factsOf(visit),
+      reason,
+      wasBooked,
+    });
   }
 
   async declined(visit: VisitModel, reason: string, by: LedgerActor): Promise<void> {

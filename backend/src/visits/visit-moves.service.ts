@@ -60,13 +60,21 @@ export class VisitMoves {
    */
   async apply(visit: VisitModel, move: VisitMove, { expectedVersion, changes = {} }: MoveOptions): Promise<VisitModel> {
     const to = this.requireCurrent(visit, move, expectedVersion);
-    const values = { ...consequencesOf(move, visit.state, to, this.clock.now()), ...changes, state: to, version: visit.version + 1 };
+    const values = {
+      ...consequencesOf(move, visit.state, to, this.clock.now()),
+      ...changes,
+      state: to,
+      version: visit.version + 1,
+    };
     const calendarSequence = nextCalendarSequence(visit, {
       state: to,
       window: values.window ?? visit.window,
       hasFirstPlace: values.hasFirstPlace ?? visit.hasFirstPlace,
     });
-    const [count] = await this.visits.update({ ...values, calendarSequence }, { where: { id: visit.id, version: visit.version } });
+    const [count] = await this.visits.update(
+      { ...values, calendarSequence },
+      { where: { id: visit.id, version: visit.version } },
+    );
     if (count === 0) refuseStale((await this.visits.findByPk(visit.id)) ?? visit);
     visit.set({ ...values, calendarSequence });
     await this.afterChange(visit);
@@ -82,7 +90,8 @@ export class VisitMoves {
 
   /** What every change of a visit brings with it: the plumbing state of its units, and the pages that look at its lot. */
   async afterChange(visit: VisitModel): Promise<void> {
-    for (const unitNumber of visit.unitNumbers) await this.clearances.recompute(visit.lotId, unitNumber, visit.stageCode);
+    for (const unitNumber of visit.unitNumbers)
+      await this.clearances.recompute(visit.lotId, unitNumber, visit.stageCode);
     this.changes.lot(visit.lotId, 'visits', 'lot');
   }
 }

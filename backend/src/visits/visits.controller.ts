@@ -1,6 +1,12 @@
 import { Controller } from '@nestjs/common';
 import type { RouteInput } from '@holdwater/shared-types/common/route.js';
-import { listLotVisits, listRequests, readOffers, readVisit, requestVisits } from '@holdwater/shared-types/visits/visit.contract.js';
+import {
+  listLotVisits,
+  listRequests,
+  readOffers,
+  readVisit,
+  requestVisits,
+} from '@holdwater/shared-types/visits/visit.contract.js';
 import { signedIn } from '../common/access/access.js';
 import type { Actor } from '../common/access/actor.js';
 import { CurrentActor } from '../common/access/current-actor.js';

@@ -2,14 +2,26 @@ import type { MemberRole } from '@holdwater/shared-types/accounts/roles.js';
 import { nextMoves, type VisitMove, visitMoves, type VisitState } from '@holdwater/shared-types/visits/visit.states.js';
 import { describe, expect, it } from 'vitest';
 import type { Actor } from '../common/access/actor.js';
-import { canReadRun, canWorkRequests, isTimely, mayMove, movesFor, requestingSideOf, type VisitFacts } from './visits.policy.js';
+import {
+  canReadRun,
+  canWorkRequests,
+  isTimely,
+  mayMove,
+  movesFor,
+  requestingSideOf,
+  type VisitFacts,
+} from './visits.policy.js';
 
 const lot = { builderId: 'builder', plumberId: 'plumber', departmentId: 'department', mayPlumberRequest: false };
 const openLot = { ...lot, mayPlumberRequest: true };
 const kinds = { builder: 'builder', plumber: 'plumber', department: 'department', stranger: 'department' } as const;
 
 function actor(personId: string, ...places: Array<[keyof typeof kinds, MemberRole]>): Actor {
-  const memberships = places.map(([organizationId, role]) => ({ organizationId, kind: kinds[organizationId], roles: [role] }));
+  const memberships = places.map(([organizationId, role]) => ({
+    organizationId,
+    kind: kinds[organizationId],
+    roles: [role],
+  }));
   return { personId, sessionId: 's', name: personId, isOperator: false, memberships };
 }
 
@@ -37,7 +49,8 @@ const visit = (overrides: Partial<VisitFacts> = {}): VisitFacts => ({
   windowStartAt,
   ...overrides,
 });
-const made = (who: Actor, facts = visit(), parties = lot) => visitMoves.filter((move) => mayMove(who, move, facts, parties));
+const made = (who: Actor, facts = visit(), parties = lot) =>
+  visitMoves.filter((move) => mayMove(who, move, facts, parties));
 
 // the table "Who may" of the definitions, written out again
 describe('who makes a move', () => {
@@ -72,13 +85,22 @@ describe('who makes a move', () => {
 
   it('one person may be desk and inspector', () => {
     expect(made(small, visit({ inspectorId: 'small' }))).toEqual([
-      'place', 'decline', 'move', 'find-not-up', 'begin', 'undo-begin', 'close', 'free-closure', 'not-reached',
+      'place',
+      'decline',
+      'move',
+      'find-not-up',
+      'begin',
+      'undo-begin',
+      'close',
+      'free-closure',
+      'not-reached',
     ]);
   });
 });
 
 describe('the moves shown', () => {
-  const shown = (who: Actor, state: VisitState, now = before, facts: Partial<VisitFacts> = {}) => movesFor(who, visit({ state, ...facts }), lot, now);
+  const shown = (who: Actor, state: VisitState, now = before, facts: Partial<VisitFacts> = {}) =>
+    movesFor(who, visit({ state, ...facts }), lot, now);
 
   it('are of the state and in time', () => {
     expect(shown(desk, 'requested')).toEqual(['place', 'decline', 'move']);
@@ -119,7 +141,12 @@ describe('the moves shown', () => {
 describe('asking and reading', () => {
   it('is asked for by a side, for a caller by the desk alone', () => {
     expect([della, ruben, desk, helper, owner, noor].map((who) => requestingSideOf(who, lot, false))).toEqual([
-      'builder', 'plumber', 'desk', null, null, null,
+      'builder',
+      'plumber',
+      'desk',
+      null,
+      null,
+      null,
     ]);
     expect([della, ruben, desk].map((who) => requestingSideOf(who, lot, true))).toEqual([null, null, 'desk']);
   });
@@ -130,6 +157,11 @@ describe('asking and reading', () => {
     expect(canReadRun(desk, 'department', 'gil')).toBe(true);
     expect(canReadRun(stranger, 'department', 'stranger')).toBe(false);
     expect(canReadRun(della, 'department', 'della')).toBe(false);
-    expect([desk, noor, stranger, della].map((who) => canWorkRequests(who, 'department'))).toEqual([true, false, false, false]);
+    expect([desk, noor, stranger, della].map((who) => canWorkRequests(who, 'department'))).toEqual([
+      true,
+      false,
+      false,
+      false,
+    ]);
   });
 });

@@ -7,7 +7,13 @@ import {
   type VisitState,
 } from '@holdwater/shared-types/visits/visit.states.js';
 import { type Actor, hasRole } from '../common/access/actor.js';
-import { isDeskOf, isImpartialInspectorOf, isPlumberOf, isSuperintendentOf, type LotParties } from '../lots/lots.policy.js';
+import {
+  isDeskOf,
+  isImpartialInspectorOf,
+  isPlumberOf,
+  isSuperintendentOf,
+  type LotParties,
+} from '../lots/lots.policy.js';
 
 /** What of a visit the policy looks at. */
 export interface VisitFacts {
@@ -24,7 +30,11 @@ export interface VisitFacts {
  * The requesting side: superintendents of the builder; plumbers where the lot allows it, or who requested it; the desk for a caller.
  * `lot.departmentId` is the visit's own department.
  */
-export function isRequestingSide(actor: Actor, visit: Pick<VisitFacts, 'requestedBy' | 'requestingSide'>, lot: LotParties): boolean {
+export function isRequestingSide(
+  actor: Actor,
+  visit: Pick<VisitFacts, 'requestedBy' | 'requestingSide'>,
+  lot: LotParties,
+): boolean {
   if (isSuperintendentOf(actor, lot)) return true;
   if (isPlumberOf(actor, lot) && (lot.mayPlumberRequest || visit.requestedBy === actor.personId)) return true;
   return visit.requestingSide === 'desk' && isDeskOf(actor, lot);
@@ -57,12 +67,17 @@ export function isTimely(move: VisitMove, visit: VisitFacts, actor: Actor, now: 
 /** The moves a reader may make now. `isTested` false: the stage asks for no test, so there is none to say up. */
 export function movesFor(actor: Actor, visit: VisitFacts, lot: LotParties, now: Date, isTested = true): VisitMove[] {
   return nextMoves(visit.state).filter(
-    (move) => (isTested || move !== 'say-test-up') && mayMove(actor, move, visit, lot) && isTimely(move, visit, actor, now),
+    (move) =>
+      (isTested || move !== 'say-test-up') && mayMove(actor, move, visit, lot) && isTimely(move, visit, actor, now),
   );
 }
 
 /** Which side a request is made for; null for whoever may not ask at all. A caller is spoken for by the desk alone. */
-export function requestingSideOf(actor: Actor, lot: LotParties, isForCaller: boolean): 'builder' | 'plumber' | 'desk' | null {
+export function requestingSideOf(
+  actor: Actor,
+  lot: LotParties,
+  isForCaller: boolean,
+): 'builder' | 'plumber' | 'desk' | null {
   if (isForCaller) return isDeskOf(actor, lot) ? 'desk' : null;
   if (isSuperintendentOf(actor, lot)) return 'builder';
   if (isPlumberOf(actor, lot)) return 'plumber';

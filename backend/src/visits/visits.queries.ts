@@ -40,7 +40,11 @@ export class VisitsQueries {
   /** Visits of these organizations' lots from one day to another, in whatever state, by time. */
   async listInSpan(organizationIds: readonly string[], { fromDate, toDate }: DaySpan): Promise<VisitRow[]> {
     const where = `v.window_date BETWEEN :fromDate AND :toDate AND ${isVisitReadable}`;
-    return this.select(where, 'lower(v."window"), lower(v.planned), v.id', { readerIds: [...organizationIds], fromDate, toDate });
+    return this.select(where, 'lower(v."window"), lower(v.planned), v.id', {
+      readerIds: [...organizationIds],
+      fromDate,
+      toDate,
+    });
   }
 
   /** An inspector's visits of a day in planned order: those to come, underway and done. */
@@ -51,12 +55,19 @@ export class VisitsQueries {
 
   /** Every visit of a department's day that an inspector has or had, in planned order. */
   async listDay(departmentId: string, date: string): Promise<VisitRow[]> {
-    return this.select(`v.department_id = :departmentId AND ${ofDay}`, 'lower(v.planned), v.id', { departmentId, date });
+    return this.select(`v.department_id = :departmentId AND ${ofDay}`, 'lower(v.planned), v.id', {
+      departmentId,
+      date,
+    });
   }
 
   /** Booked visits whose windows start between two instants: those a deadline may have passed for. */
   async listBookedStarting(fromAt: Date, toAt: Date): Promise<VisitRow[]> {
-    return this.select(`v.state = 'booked' AND lower(v."window") BETWEEN :fromAt AND :toAt`, 'lower(v."window"), v.id', { fromAt, toAt });
+    return this.select(
+      `v.state = 'booked' AND lower(v."window") BETWEEN :fromAt AND :toAt`,
+      'lower(v."window"), v.id',
+      { fromAt, toAt },
+    );
   }
 
   /** Planned visits of these organizations' lots, by time: what a test or an inspector is waited for at. */
@@ -76,7 +87,10 @@ export class VisitsQueries {
   }
 
   private async select(where: string, order: string, replacements: Record<string, unknown>): Promise<VisitRow[]> {
-    return this.sequelize.query<VisitRow>(`${visitRowSql} WHERE ${where} ORDER BY ${order}`, { replacements, type: QueryTypes.SELECT });
+    return this.sequelize.query<VisitRow>(`${visitRowSql} WHERE ${where} ORDER BY ${order}`, {
+      replacements,
+      type: QueryTypes.SELECT,
+    });
   }
 }
 

@@ -91,7 +91,13 @@ export class WaitingQueries {
     );
   }
 
-  private async select<Row extends object>(sql: string, { readerIds, ...others }: { readerIds: readonly string[]; since?: string }): Promise<Row[]> {
-    return this.sequelize.query<Row>(sql, { replacements: { readerIds: [...readerIds], ...others }, type: QueryTypes.SELECT });
+  private async select<Row extends object>(
+    sql: string,
+    { readerIds, ...others }: { readerIds: readonly string[]; since?: string },
+  ): Promise<Row[]> {
+    return this.sequelize.query<Row>(sql, {
+      replacements: { readerIds: [...readerIds], ...others },
+      type: QueryTypes.SELECT,
+    });
   }
 }

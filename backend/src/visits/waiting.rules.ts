@@ -13,31 +13,77 @@ export function itemsOfVisit(row: VisitRow, actor: Actor, now: Date): WaitingIte
   const lot = partiesOfRow(row);
   const base = { ...whereOfRow(row), visitId: row.id, zone: row.zone };
   if (row.state === 'requested') {
-    return [{ ...base, kind: 'request-to-place', isOnYou: isDeskOf(actor, lot), waitsOn: row.departmentName, count: 1, ...timed(row.windowStartAt, now) }];
+    return [
+      {
+        ...base,
+        kind: 'request-to-place',
+        isOnYou: isDeskOf(actor, lot),
+        waitsOn: row.departmentName,
+        count: 1,
+        ...timed(row.windowStartAt, now),
+      },
+    ];
   }
   if (row.state === 'underway') {
     const isOnYou = row.inspectorId === actor.personId;
-    return [{ ...base, kind: 'visit-underway', isOnYou, waitsOn: row.inspectorName ?? row.departmentName, count: 1, ...timed(row.windowEndAt, now) }];
+    return [
+      {
+        ...base,
+        kind: 'visit-underway',
+        isOnYou,
+        waitsOn: row.inspectorName ?? row.departmentName,
+        count: 1,
+        ...timed(row.windowEndAt, now),
+      },
+    ];
   }
   const missing = row.unitNumbers.length * (row.stage?.systems.length ?? 0) - (row.standing?.length ?? 0);
   if (row.state !== 'booked' || (row.stage?.systems.length ?? 0) === 0) return [];
   const waitsOn = row.plumberName ?? row.builderName;
-  return [{ ...base, kind: 'test-not-up', isOnYou: isPlumberOf(actor, lot), waitsOn, count: Math.max(missing, 0), ...timed(upByOfRow(row), now) }];
+  return [
+    {
+      ...base,
+      kind: 'test-not-up',
+      isOnYou: isPlumberOf(actor, lot),
+      waitsOn,
+      count: Math.max(missing, 0),
+      ...timed(upByOfRow(row), now),
+    },
+  ];
 }
 
 /** Open corrections wait on the plumber, fixed ones on the inspector: of the visit that comes, where one does. */
-export function itemsOfCorrections(found: WaitingCorrections, coming: VisitRow | null, actor: Actor, now: Date): WaitingItem[] {
+export function itemsOfCorrections(
+  found: WaitingCorrections,
+  coming: VisitRow | null,
+  actor: Actor,
+  now: Date,
+): WaitingItem[] {
   const base = { ...whereOf(found), visitId: coming?.id ?? null, zone: found.zone };
   const isComing = coming?.inspectorId === actor.personId;
   const items: WaitingItem[] = [];
   if (found.open > 0) {
     const waitsOn = found.plumberName ?? found.builderName;
-    items.push({ ...base, kind: 'correction-to-fix', isOnYou: isPlumberOf(actor, found), waitsOn, count: found.open, ...untimed });
+    items.push({
+      ...base,
+      kind: 'correction-to-fix',
+      isOnYou: isPlumberOf(actor, found),
+      waitsOn,
+      count: found.open,
+      ...untimed,
+    });
   }
   if (found.fixed > 0) {
     const isOnYou = isImpartialInspectorOf(actor, found) && (isComing || !coming?.inspectorId);
     const waitsOn = coming?.inspectorName ?? found.departmentName ?? '';
-    items.push({ ...base, kind: 'correction-to-accept', isOnYou, waitsOn, count: found.fixed, ...timed(coming?.windowStartAt ?? null, now) });
+    items.push({
+      ...base,
+      kind: 'correction-to-accept',
+      isOnYou,
+      waitsOn,
+      count: found.fixed,
+      ...timed(coming?.windowStartAt ?? null, now),
+    });
   }
   return items;
 }
@@ -45,7 +91,16 @@ export function itemsOfCorrections(found: WaitingCorrections, coming: VisitRow |
 /** Whoever may ask for a window is waited for; the desk asks only for a caller. */
 export function itemOfMissingWindow(found: WithoutWindow, actor: Actor): WaitingItem {
   const isOnYou = canRequestVisit(actor, found) && !isDeskOf(actor, found);
-  return { ...whereOf(found), kind: 'no-window', isOnYou, waitsOn: found.builderName, visitId: null, count: 1, zone: found.zone, ...untimed };
+  return {
+    ...whereOf(found),
+    kind: 'no-window',
+    isOnYou,
+    waitsOn: found.builderName,
+    visitId: null,
+    count: 1,
+    zone: found.zone,
+    ...untimed,
+  };
 }
 
 /** To the one asked a lot that it has not joined is a number and nothing it could open. */
@@ -70,7 +125,9 @@ export function inOrder(items: readonly WaitingItem[]): WaitingItem[] {
   const rank = ({ isOnYou }: WaitingItem) => Number(!isOnYou);
   const time = ({ by }: WaitingItem) => (by === null ? Number.MAX_SAFE_INTEGER : Date.parse(by));
   const lot = ({ tractName, lotNumber }: WaitingItem) => `${tractName ?? ''} ${lotNumber ?? ''}`;
-  return [...items].sort((a, b) => rank(a) - rank(b) || time(a) - time(b) || lot(a).localeCompare(lot(b), 'en', { numeric: true }));
+  return [...items].sort(
+    (a, b) => rank(a) - rank(b) || time(a) - time(b) || lot(a).localeCompare(lot(b), 'en', { numeric: true }),
+  );
 }
 
 const untimed = { by: null, isPastTime: false } as const;

@@ -25,7 +25,8 @@ export class Waiting {
     const actor = actorIn(reader, readerIds);
     const now = this.clock.now();
     const open = await this.visits.listOpen(readerIds);
-    const comingTo = (lotId: string, stageCode: string) => open.find((row) => row.lotId === lotId && row.stageCode === stageCode) ?? null;
+    const comingTo = (lotId: string, stageCode: string) =>
+      open.find((row) => row.lotId === lotId && row.stageCode === stageCode) ?? null;
     const corrections = await this.queries.listCorrections(readerIds);
     const withoutWindow = await this.queries.listWithoutWindow(readerIds, sinceOf(now));
     const consents = await this.queries.listConsents(readerIds);

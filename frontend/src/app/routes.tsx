@@ -1,12 +1,10 @@
 import { lazy, type ComponentType, type LazyExoticComponent, type ReactNode } from 'react';
 import type { RouteObject } from 'react-router-dom';
+import { Gate } from './gate';
 import { Landing } from './landing';
-import { AppLayout } from './layout/app-layout';
-import { OpenLayout } from './layout/open-layout';
 import { NotFoundPage } from './not-found-page';
 import { RouteError } from './route-error';
 import type { RouteHandle } from './route-handle';
-import { SignedIn } from './signed-in';
 
 type Page = ComponentType<Record<never, never>>;
 
@@ -16,6 +14,8 @@ function page<Name extends string>(name: Name, load: () => Promise<Record<Name, 
   return <Lazy />;
 }
 
+const frame = page('Frame', () => import('./layout/frame'));
+const openLayout = page('OpenLayout', () => import('./layout/open-layout'));
 const signIn = page('SignInPage', () => import('../features/accounts/pages/sign-in-page'));
 const link = page('LinkPage', () => import('../features/accounts/pages/link-page'));
 const people = page('PeoplePage', () => import('../features/accounts/pages/people-page'));
@@ -41,8 +41,10 @@ const ledger = page('LedgerPage', () => import('../features/operations/pages/led
 
 const task: RouteHandle = { isTask: true };
 
-/** Pages for people who are signed in. */
-const signedInRoutes: RouteObject[] = [
+const open: RouteHandle = { isOpen: true };
+
+/** Pages inside a frame. All but the open ones are for people who are signed in. */
+const framedRoutes: RouteObject[] = [
   { path: '/', element: <Landing /> },
   { path: '/calendar', element: calendar },
   { path: '/requests', element: requests },
@@ -64,13 +66,9 @@ const signedInRoutes: RouteObject[] = [
   { path: '/operations/organizations', element: organizations },
   { path: '/operations/deliveries', element: deliveries },
   { path: '/operations/ledger', element: ledger },
-];
-
-/** Pages for anyone: with the whole frame for those signed in, with a plain one for the others. */
-const openRoutes: RouteObject[] = [
-  { path: '/rule-cards', element: ruleCard },
-  { path: '/rule-cards/:ruleCardId', element: ruleCard },
-  { path: '*', element: <NotFoundPage /> },
+  { path: '/rule-cards', element: ruleCard, handle: open },
+  { path: '/rule-cards/:ruleCardId', element: ruleCard, handle: open },
+  { path: '*', element: <NotFoundPage />, handle: open },
 ];
 
 export const routes: RouteObject[] = [
@@ -80,14 +78,9 @@ export const routes: RouteObject[] = [
       { path: '/sign-in', element: signIn },
       { path: '/link/:kind', element: link },
       {
-        element: (
-          <SignedIn>
-            <AppLayout />
-          </SignedIn>
-        ),
-        children: [{ errorElement: <RouteError />, children: signedInRoutes }],
+        element: <Gate frame={frame} openFrame={openLayout} />,
+        children: [{ errorElement: <RouteError />, children: framedRoutes }],
       },
-      { element: <OpenLayout />, children: [{ errorElement: <RouteError />, children: openRoutes }] },
     ],
   },
 ];

@@ -2,24 +2,25 @@ import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Navigate, useLocation } from 'react-router-dom';
 import { Act } from '../components/act';
-import { Lines } from '../components/lines';
 import { Plain } from '../components/plain';
 import { useErrorWords } from '../lib/errors';
 import { useSession } from '../lib/session-context';
+import { BlankSheet } from './blank-sheet';
 
-/** Shows its children to somebody signed in; others sign in first and come back to the page they asked for. */
-export function SignedIn({ children }: { children: ReactNode }): ReactNode {
+export interface SignedInProps {
+  children: ReactNode;
+  /** What others see of a page that anyone may read; without it they sign in first and come back to the page they asked for. */
+  otherwise?: ReactNode;
+}
+
+/** Shows its children to somebody signed in. */
+export function SignedIn({ children, otherwise }: SignedInProps): ReactNode {
   const { state } = useSession();
   const { pathname, search } = useLocation();
   if (state.kind === 'signed-in') return children;
   if (state.kind === 'unknown') return <SessionUnknown error={state.error} />;
-  if (state.kind === 'starting') {
-    return (
-      <main className="sheet">
-        <Lines />
-      </main>
-    );
-  }
+  if (state.kind === 'starting') return <BlankSheet />;
+  if (otherwise !== undefined) return otherwise;
   // Whoever just left goes to a plain sign-in; a deep link waits for whoever comes.
   const to = `${pathname}${search}`;
   return <Navigate replace to={state.hasLeft || to === '/' ? '/sign-in' : `/sign-in?to=${encodeURIComponent(to)}`} />;

@@ -28,6 +28,9 @@ export interface SlipProps {
   className?: string;
   /** Where the calendar puts it. */
   style?: CSSProperties;
+  /** For a grid walked by arrow keys: one slip is in the tab order. */
+  tabIndex?: number;
+  'aria-label'?: string;
 }
 
 const closedStates: readonly MarkName[] = ['pass', 'fail', 'not-ready', 'no-access', 'withdrawn', 'declined', 'freed'];
@@ -37,16 +40,17 @@ export function Slip(props: SlipProps): ReactNode {
   const { state, form = 'desk', isChosen, isPast, to, onOpen, className = '', style } = props;
   const shape = ['slip', state, form, isChosen ? 'chosen' : '', isPast ? 'past' : '', className];
   const outer = { className: shape.filter(Boolean).join(' '), style };
+  const named = { tabIndex: props.tabIndex, 'aria-label': props['aria-label'] };
   if (to !== undefined) {
     return (
-      <Link to={to} {...outer}>
+      <Link to={to} {...outer} {...named}>
         <SlipInside {...props} />
       </Link>
     );
   }
   if (onOpen) {
     return (
-      <button type="button" onClick={onOpen} aria-pressed={isChosen} {...outer}>
+      <button type="button" onClick={onOpen} aria-pressed={isChosen} {...outer} {...named}>
         <SlipInside {...props} />
       </button>
     );

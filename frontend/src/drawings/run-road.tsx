@@ -42,13 +42,23 @@ export interface RunRoadProps {
   onOpen?: (id: string) => void;
   /** px; the road grows beyond it when its stops need more. */
   minHeight?: number;
+  /** Where no miles are known the edge measures hours: every mile above is then an hour from `fromHour` on. */
+  clock?: RoadClock;
+}
+
+export interface RoadClock {
+  /** The hour of the day at the head of the road. */
+  readonly fromHour: number;
+  /** Read aloud in place of the miles. */
+  readonly name: string;
+  readonly here: string;
 }
 
 const roadX = 54;
 
 /** One inspector's day as a road drawn to scale: miles ticked, stops hung on it, windows bracketed, the arrow where you are. */
 export function RunRoad(props: RunRoadProps): ReactNode {
-  const { miles, drivenMiles, stops, windows = [], asides = [], endWords, onOpen, minHeight = 440 } = props;
+  const { miles, drivenMiles, stops, windows = [], asides = [], endWords, onOpen, minHeight = 440, clock } = props;
   const { t } = useTranslation('marks');
   const places = stops.map((stop) => ({
     atMile: stop.atMile,
@@ -62,10 +72,14 @@ export function RunRoad(props: RunRoadProps): ReactNode {
       className="road"
       style={{ height: layout.height }}
       role="group"
-      aria-label={t('road.name', { miles: miles.toFixed(1) })}
+      aria-label={clock?.name ?? t('road.name', { miles: miles.toFixed(1) })}
     >
       <svg width="210" height={layout.height} viewBox={`0 0 210 ${layout.height}`} aria-hidden="true">
-        <MileRule layout={layout} miles={miles} />
+        {clock ? (
+          <HourRule layout={layout} hours={miles} fromHour={clock.fromHour} />
+        ) : (
+          <MileRule layout={layout} miles={miles} />
+        )}
         <Tarmac layout={layout} miles={miles} driven={drivenMiles} />
         {stops.map((stop, index) => (
           <Leader key={stop.id} stop={stop} roadY={layout.yOfMile(stop.atMile)} y={layout.stops[index] ?? 0} />
@@ -75,7 +89,7 @@ export function RunRoad(props: RunRoadProps): ReactNode {
           <path d={`M${roadX + 8} ${layout.yOfMile(miles)}h52`} stroke="var(--ink)" strokeWidth="1.2" />
         ) : null}
       </svg>
-      <span className="hidden-words">{t('road.here', { miles: drivenMiles.toFixed(1) })}</span>
+      <span className="hidden-words">{clock?.here ?? t('road.here', { miles: drivenMiles.toFixed(1) })}</span>
       <ol>
         {stops.map((stop, index) => (
           <li key={stop.id} style={{ top: (layout.stops[index] ?? 0) - (stop.detail ? 19 : 12) }}>
@@ -121,6 +135,28 @@ function MileRule({ layout, miles }: { layout: RoadLayout; miles: number }): Rea
       <text className="s12 mid" x="20" y={layout.yOfMile(miles) + 20}>
         {t('road.miles')}
       </text>
+    </>
+  );
+}
+
+/** The day's own rule: its hours, a tick every quarter. */
+function HourRule({ layout, hours, fromHour }: { layout: RoadLayout; hours: number; fromHour: number }): ReactNode {
+  const quarters = Array.from({ length: Math.floor(hours * 4) + 1 }, (_, quarter) => quarter / 4);
+  const whole = quarters.filter((hour) => Number.isInteger(hour));
+  const ticks = quarters.map((hour) => `M0 ${layout.yOfMile(hour)}h${Number.isInteger(hour) ? 16 : 8}`);
+  return (
+    <>
+      <path
+        d={`M.6 ${layout.top}V${layout.yOfMile(hours)}${ticks.join('')}`}
+        fill="none"
+        stroke="var(--ink)"
+        strokeWidth="1.2"
+      />
+      {whole.map((hour) => (
+        <text key={hour} className="m s12 mid" x="20" y={layout.yOfMile(hour) + 4.5}>
+          {((fromHour + hour + 11) % 12) + 1}
+        </text>
+      ))}
     </>
   );
 }

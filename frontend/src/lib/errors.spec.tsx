@@ -24,6 +24,16 @@ describe('the words of an error', () => {
     expect(wordsOf(error)?.next).toContain('2 min');
   });
 
+  it('say what it is now, and which days are open', () => {
+    const stale = wordsOf(new ApiError('stale-state', { status: 409, params: { is: 'ready', version: 4 } }));
+    expect(stale?.safe).toContain('It is now: test up.');
+    // A state nobody has words for is left out, not printed as code.
+    const odd = wordsOf(new ApiError('stale-state', { status: 409, params: { is: 'some-code' } }));
+    expect(odd?.safe).toBe('Nothing of yours was saved over it.');
+    const late = wordsOf(new ApiError('cut-off-passed', { status: 409, params: { firstDate: '2026-04-16' } }));
+    expect(late?.next).toContain('Thu, Apr 16');
+  });
+
   it('are Spanish to a Spanish reader', async () => {
     await i18next.changeLanguage('es');
     expect(wordsOf(new ApiError('offline', { status: 0 }))?.title).toBe('Sin señal');

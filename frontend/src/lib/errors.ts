@@ -35,11 +35,12 @@ function valueWords(value: unknown, zone: string, locale: Locale): unknown {
 
 /** The words of an error, or null for none: what happened, what is safe, what to do next. */
 export function useErrorWords(error: unknown): ErrorWords | null {
-  const { t } = useTranslation('errors');
+  const { t, i18n } = useTranslation('errors');
   const locale = useLocale();
+  const markWord = (mark: string): string | null => (i18n.exists(`marks.${mark}`) ? t(`marks.${mark}`) : null);
   if (error === null || error === undefined) return null;
   const fault = isApiError(error) ? error : new ApiError('unknown', { status: 0 });
-  const params = { ...errorParams(fault.params, locale), ...finerParams(fault, locale) };
+  const params = { ...errorParams(fault.params, locale), ...finerParams(fault, locale, markWord) };
   return {
     title: t(`${fault.code}.title`, params),
     safe: t(`${fault.code}.safe`, params),
@@ -49,13 +50,32 @@ export function useErrorWords(error: unknown): ErrorWords | null {
   };
 }
 
-/** Some refusals have finer words when they name a number: how many tries are left, how long to wait. */
-function finerParams({ code, params }: ApiError, locale: Locale): Record<string, unknown> {
-  const triesLeft = params['triesLeft'];
-  if (code === 'sign-in-failed' && typeof triesLeft === 'number') return { context: 'triesLeft', count: triesLeft };
-  const seconds = params['retryAfterSeconds'];
-  if (typeof seconds === 'number') return { context: 'wait', wait: durationWords(Math.ceil(seconds / 60), locale) };
-  return {};
+/** The value that gives a refusal finer words, `errors:<code>.safe_named`: how many tries are left, which day is the first. */
+const namedBy: Partial<Record<ApiErrorCode, string>> = {
+  'sign-in-failed': 'triesLeft',
+  'sign-in-throttled': 'retryAfterSeconds',
+  'stale-state': 'is',
+  'too-many-lots': 'most',
+  'cut-off-passed': 'firstDate',
+  'beyond-horizon': 'lastDate',
+  'reading-out-of-gauge': 'rangePsi',
+  'correction-unfixed': 'number',
+};
+
+function finerParams(
+  { code, params }: ApiError,
+  locale: Locale,
+  markWord: (mark: string) => string | null,
+): Record<string, unknown> {
+  const name = namedBy[code];
+  const value = name === undefined ? undefined : params[name];
+  if (value === undefined || value === null) return {};
+  if (code === 'sign-in-failed') return { context: 'named', count: value };
+  if (code === 'sign-in-throttled')
+    return { context: 'named', wait: durationWords(Math.ceil(Number(value) / 60), locale) };
+  if (code !== 'stale-state') return { context: 'named' };
+  const word = markWord(String(value));
+  return word === null ? {} : { context: 'named', is: word };
 }
 
 /** Words of one field's fault, by the code the contract gives (`required`, `too-long`); an unknown one says it is not right. */

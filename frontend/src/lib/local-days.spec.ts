@@ -9,6 +9,7 @@ import {
   nextWeekdayAfter,
   twoWorkWeeksOf,
   weekdayOf,
+  workingMondayOf,
 } from './local-days';
 
 // Weekdays and leap days from any printed calendar; changes of clocks by 15 U.S.C. 260a.
@@ -23,6 +24,8 @@ describe('days', () => {
   it('know their week', () => {
     expect(weekdayOf('2026-04-15')).toBe(3);
     expect(mondayOf('2026-04-19')).toBe('2026-04-13');
+    expect(workingMondayOf('2026-04-19')).toBe('2026-04-20');
+    expect(workingMondayOf('2026-04-17')).toBe('2026-04-13');
     expect(nextWeekdayAfter('2026-04-17')).toBe('2026-04-20');
     const weeks = twoWorkWeeksOf('2026-04-15');
     expect(weeks).toHaveLength(10);

@@ -38,6 +38,11 @@ export function mondayOf(date: string): string {
   return addDays(date, 1 - weekdayOf(date));
 }
 
+/** The Monday of the working week that matters on a date: on a weekend the coming one. */
+export function workingMondayOf(date: string): string {
+  return weekdayOf(date) > lastWorkingWeekday ? addDays(mondayOf(date), 7) : mondayOf(date);
+}
+
 /** Monday to Friday of the week of `date`. */
 export function workWeekOf(date: string): string[] {
   const monday = mondayOf(date);

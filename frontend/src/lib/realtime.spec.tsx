@@ -1,10 +1,12 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { renderHook, waitFor } from '@testing-library/react';
 import type { ReactNode } from 'react';
-import { beforeEach, describe, expect, it, vi } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { setAccessToken } from './access-token';
 import { createQueryClient } from './query-client';
 import { startRealtime, useLotLive } from './realtime';
+import { personOf, sessionOf } from './testing/people';
+import { stubApi } from './testing/stub-api';
 
 type Listener = (data?: unknown) => void;
 
@@ -25,8 +27,9 @@ class Line {
     this.listeners.get(event)?.forEach((listener) => listener(data));
   }
 
-  emit(event: string, data: unknown): void {
+  emit(event: string, data: unknown, answered?: () => void): void {
     this.said.push([event, data]);
+    answered?.();
   }
 
   connect(): void {
@@ -71,6 +74,15 @@ describe('a lot that is looked at', () => {
     expect(line.said).toEqual([['lot:watch', { lotId: 'lot-17' }]]);
     second.unmount();
     expect(line.said.at(-1)).toEqual(['lot:unwatch', { lotId: 'lot-17' }]);
+    stop();
+  });
+
+  it('has its thread read again once the server has let the page in', () => {
+    const { look, stale, stop, forget } = setUp();
+    line.hear('connect');
+    forget();
+    look('lot-17');
+    expect(stale()).toEqual(['["lot","lot-17","thread"]']);
     stop();
   });
 
@@ -121,4 +133,27 @@ it('hangs up when nobody is signed in any more, and is up again with the next pe
   expect(line.active).toBe(true);
   stop();
   expect(line.active).toBe(false);
+});
+
+describe('a line that is refused', () => {
+  afterEach(() => vi.useRealTimers());
+
+  it('is tried again with a new token when the token was refused, and with the same when the server was busy', async () => {
+    vi.useFakeTimers();
+    const { stop } = setUp();
+    const sent = stubApi({ 'POST /api/auth/refresh': () => ({ data: sessionOf(personOf(), 'renewed') }) });
+    line.active = false;
+    line.hear('connect_error', new Error('busy'));
+    await vi.advanceTimersByTimeAsync(2_000);
+    expect(line.active).toBe(true);
+    expect(sent).toEqual([]);
+    line.active = false;
+    line.hear('connect_error', new Error('signed-out'));
+    await vi.advanceTimersByTimeAsync(3_999);
+    expect(sent).toEqual([]);
+    await vi.advanceTimersByTimeAsync(1);
+    await vi.waitFor(() => expect(line.active).toBe(true));
+    expect(sent).toHaveLength(1);
+    stop();
+  });
 });

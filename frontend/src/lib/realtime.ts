@@ -16,6 +16,10 @@ interface Changed {
 const watchers = new Map<string, number>();
 let socket: Socket | null = null;
 
+/** First wait before another try to connect, ms; doubled each time up to the longest. */
+const firstWaitMs = 2_000;
+const longestWaitMs = 60_000;
+
 /** Connects while somebody is signed in; ends with the returned function. */
 export function startRealtime(queryClient: QueryClient): () => void {
   const connection = io({
@@ -26,18 +30,19 @@ export function startRealtime(queryClient: QueryClient): () => void {
   socket = connection;
   let hasBeenConnected = false;
   connection.on('connect', () => {
-    watchers.forEach((_, lotId) => connection.emit('lot:watch', { lotId }));
+    watchers.forEach((_, lotId) => askToWatch(connection, queryClient, lotId));
     // What changed while the line was down was told to nobody.
     if (hasBeenConnected) invalidateAll(queryClient, everythingLive());
     hasBeenConnected = true;
   });
   connection.on('changed', ({ lotId, topics }: Changed) => invalidateAll(queryClient, staleOnLot(lotId, topics)));
   personTopics.forEach((topic) => connection.on(topic, () => invalidateAll(queryClient, staleForPerson(topic))));
-  renewWhenRefused(connection);
+  const stopTrying = tryAgainWhenRefused(connection);
   const stopListening = onAccessToken((token) => (token === null ? connection.disconnect() : connectOnce(connection)));
   if (getAccessToken() !== null) connection.connect();
   return () => {
     stopListening();
+    stopTrying();
     connection.disconnect();
     if (socket === connection) socket = null;
   };
@@ -47,22 +52,39 @@ function connectOnce(connection: Socket): void {
   if (!connection.active) connection.connect();
 }
 
-/** A server that refuses the token or ends the connection for good does not let socket.io try again by itself. */
-function renewWhenRefused(connection: Socket): void {
+/** Watches, and once the server has let the page in reads the thread again: what was written in between was told to nobody. */
+function askToWatch(connection: Socket, queryClient: QueryClient, lotId: string): void {
+  connection.emit('lot:watch', { lotId }, () => invalidateAll(queryClient, [queryKeys.lotPart(lotId, 'thread')]));
+}
+
+/**
+ * A server that refuses, or ends the connection itself, leaves the next try to us: with a new token where it is the token's fault, always
+ * after a wait. A session that is over ends by the refused refresh.
+ */
+function tryAgainWhenRefused(connection: Socket): () => void {
+  let waitMs = firstWaitMs;
+  let timer: number | undefined;
+  const later = (act: () => void): void => {
+    window.clearTimeout(timer);
+    timer = window.setTimeout(() => (getAccessToken() === null ? undefined : act()), waitMs);
+    waitMs = Math.min(waitMs * 2, longestWaitMs);
+  };
   const renew = (): void => {
-    if (getAccessToken() === null) return;
     refreshAccess().then(
       () => connectOnce(connection),
-      // Signed out, or no signal: the first ends the session, the second is tried again with the next token.
-      () => undefined,
+      () => later(renew),
     );
   };
-  connection.on('connect_error', () => {
-    if (!connection.active) renew();
+  connection.on('connect', () => {
+    waitMs = firstWaitMs;
+  });
+  connection.on('connect_error', (error: Error) => {
+    if (!connection.active) later(error.message === 'signed-out' ? renew : () => connectOnce(connection));
   });
   connection.on('disconnect', (reason) => {
-    if (reason === 'io server disconnect') renew();
+    if (reason === 'io server disconnect') later(renew);
   });
+  return () => window.clearTimeout(timer);
 }
 
 function everythingLive(): QueryKey[] {
@@ -74,10 +96,10 @@ function invalidateAll(queryClient: QueryClient, keys: readonly QueryKey[]): voi
 }
 
 /** Tells the server that this page looks at a lot; the returned function takes it back. */
-export function watchLot(lotId: string): () => void {
+export function watchLot(queryClient: QueryClient, lotId: string): () => void {
   const before = watchers.get(lotId) ?? 0;
   watchers.set(lotId, before + 1);
-  if (before === 0 && socket?.connected) socket.emit('lot:watch', { lotId });
+  if (before === 0 && socket?.connected) askToWatch(socket, queryClient, lotId);
   return () => {
     const left = (watchers.get(lotId) ?? 1) - 1;
     if (left > 0) {
@@ -92,12 +114,5 @@ export function watchLot(lotId: string): () => void {
 /** Keeps everything shown of a lot fresh while the component is on the page. */
 export function useLotLive(lotId: string | undefined): void {
   const queryClient = useQueryClient();
-  useEffect(() => {
-    if (lotId === undefined) return undefined;
-    const stop = watchLot(lotId);
-    // Between the first read and the server's room there is a gap in which a change would be missed.
-    const catchUp = (): void => invalidateAll(queryClient, [queryKeys.lotPart(lotId, 'thread')]);
-    catchUp();
-    return stop;
-  }, [lotId, queryClient]);
+  useEffect(() => (lotId === undefined ? undefined : watchLot(queryClient, lotId)), [lotId, queryClient]);
 }

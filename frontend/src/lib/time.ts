@@ -1,7 +1,6 @@
 import type { Locale } from '@holdwater/shared-types/common/locale.js';
 import { useMemo } from 'react';
 import { useLocale } from './i18n';
-import { daysBetween, localDateOf } from './local-days';
 
 /** The reader's locale for Intl: the trade is in the States. */
 const tags: Record<Locale, string> = { en: 'en-US', es: 'es-US' };
@@ -54,7 +53,9 @@ export function weekdayWords(date: string, locale: Locale, width: 'short' | 'lon
 
 /** "Wed, Apr 15" of an instant, on the wall calendar of a zone. */
 export function dayWords(instant: string | Date, zone: string, locale: Locale): string {
-  return dateWords(localDateOf(instant, zone), locale);
+  return formatOf(locale, { weekday: 'short', month: 'short', day: 'numeric', timeZone: zone }).format(
+    new Date(instant),
+  );
 }
 
 /** "9:00 am" on the wall clock of a zone. */
@@ -90,7 +91,8 @@ export function zoneWords(zone: string, locale: Locale, at: string | Date = new 
 
 /** "today", "tomorrow", "yesterday"; null for any other day. */
 export function nearDayWords(date: string, today: string, locale: Locale): string | null {
-  const days = daysBetween(today, date);
+  // Days without a zone are all 24 h long.
+  const days = (noonOf(date).getTime() - noonOf(today).getTime()) / 86_400_000;
   if (Math.abs(days) > 1) return null;
   return new Intl.RelativeTimeFormat(tags[locale], { numeric: 'auto' }).format(days, 'day');
 }

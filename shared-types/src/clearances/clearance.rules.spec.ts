@@ -26,20 +26,48 @@ describe('state of plumbing, from its facts', () => {
     ['the test is up for a visit', { ...nothing, isHoldStanding: true, openVisit: 'ready' }, 'awaiting-visit'],
     ['the inspector is there', { ...nothing, isHoldStanding: true, openVisit: 'underway' }, 'awaiting-visit'],
     ['a correction is open', { ...nothing, corrections: [open] }, 'corrections-open'],
-    ['a correction is open before final', { ...nothing, corrections: [{ ...open, severity: 'fix-before-final' }] }, 'corrections-open'],
-    ['a correction is open though a visit is ready', { ...nothing, corrections: [open], openVisit: 'ready' }, 'corrections-open'],
-    ['a correction is fixed and no visit comes', { ...nothing, corrections: [fixed], isHoldStanding: true }, 'corrections-open'],
-    ['a correction is fixed and a visit comes', { ...nothing, corrections: [fixed], openVisit: 'ready' }, 'awaiting-visit'],
+    [
+      'a correction is open before final',
+      { ...nothing, corrections: [{ ...open, severity: 'fix-before-final' }] },
+      'corrections-open',
+    ],
+    [
+      'a correction is open though a visit is ready',
+      { ...nothing, corrections: [open], openVisit: 'ready' },
+      'corrections-open',
+    ],
+    [
+      'a correction is fixed and no visit comes',
+      { ...nothing, corrections: [fixed], isHoldStanding: true },
+      'corrections-open',
+    ],
+    [
+      'a correction is fixed and a visit comes',
+      { ...nothing, corrections: [fixed], openVisit: 'ready' },
+      'awaiting-visit',
+    ],
     ['a note alone is open', { ...nothing, corrections: [{ state: 'open', severity: 'note' }] }, 'not-tested'],
     ['all passed', passed, 'clear'],
-    ['all passed and the corrections were accepted', { ...passed, corrections: [{ ...open, state: 'accepted' }] }, 'clear'],
-    ['all passed, with a correction for the final left open', { ...passed, corrections: [{ ...open, severity: 'fix-before-final' }] }, 'clear'],
+    [
+      'all passed and the corrections were accepted',
+      { ...passed, corrections: [{ ...open, state: 'accepted' }] },
+      'clear',
+    ],
+    [
+      'all passed, with a correction for the final left open',
+      { ...passed, corrections: [{ ...open, severity: 'fix-before-final' }] },
+      'clear',
+    ],
     ['all passed and something would be buried', { ...passed, putBackBeforeCover: 1 }, 'put-back-due'],
     ['all passed and a fee is due', { ...passed, hasFeeDue: true }, 'put-back-due'],
     ['all passed but a correction waits on the inspector', { ...passed, corrections: [fixed] }, 'corrections-open'],
     ['all passed and the next test stands already', { ...passed, isHoldStanding: true, openVisit: 'ready' }, 'clear'],
     ['it was revoked', { ...passed, isRevoked: true }, 'not-tested'],
-    ['it was revoked while something would be buried', { ...passed, isRevoked: true, putBackBeforeCover: 2 }, 'not-tested'],
+    [
+      'it was revoked while something would be buried',
+      { ...passed, isRevoked: true, putBackBeforeCover: 2 },
+      'not-tested',
+    ],
     ['it was revoked with a test standing', { ...passed, isRevoked: true, isHoldStanding: true }, 'under-test'],
     ['it was revoked with a correction open', { ...passed, isRevoked: true, corrections: [open] }, 'corrections-open'],
   ])('when %s', (_, facts, state) => {
@@ -59,13 +87,21 @@ describe('state of plumbing, from its facts', () => {
   });
 
   it('keeps the pinned order', () => {
-    expect(clearStates).toEqual(['clear', 'put-back-due', 'corrections-open', 'awaiting-visit', 'under-test', 'not-tested']);
+    expect(clearStates).toEqual([
+      'clear',
+      'put-back-due',
+      'corrections-open',
+      'awaiting-visit',
+      'under-test',
+      'not-tested',
+    ]);
   });
 });
 
 describe('what a method leaves behind', () => {
   it('is to be put back before cover, whatever it is', () => {
-    for (const items of Object.values(buriedByMethod)) for (const item of items) expect(takeDownItems[item]).toBe('before-cover');
+    for (const items of Object.values(buriedByMethod))
+      for (const item of items) expect(takeDownItems[item]).toBe('before-cover');
   });
 
   it('is nothing where the water stands to the roof and nothing was cut', () => {

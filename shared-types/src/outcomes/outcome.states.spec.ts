@@ -9,7 +9,8 @@ describe('the outcome of a visit, as the definitions pin it', () => {
     [['fail', 'not-seen'] as const, false, 'fail', null],
     [['pass', 'not-seen'] as const, false, 'fail', 'not-seen'],
     [['not-seen'] as const, true, 'fail', null],
-    [[] as const, false, 'fail', 'not-seen'],
+    [[] as const, false, 'pass', null],
+    [[] as const, true, 'fail', null],
   ])('%j, work failed %s: %s %s', (answers, hasWorkFailed, kind, reason) => {
     expect(outcomeOf(answers, hasWorkFailed)).toEqual({ kind, reason });
   });

@@ -101,7 +101,7 @@ export const sorrelBenchLots: readonly DemoLot[] = [
     rough(1, 'morning', { ...attic, up: 'dwv', result: undefined, fixesBefore: 1, ...noors }),
   ], { hazards: 'Open stairwell on the second floor' }),
   sorrel(18, 'twoFloorsLaundryUp', [groundwork(-27)], { standing: { system: 'dwv', method: 'attic-cut', day: -1 } }),
-  sorrel(19, 'twoFloorsLaundryUp', [groundwork(-26)]),
+  sorrel(19, 'twoFloorsLaundryUp', [], { permit: 'applied' }),
   sorrel(20, 'twoFloorsLaundryUp', [groundwork(-25), rough(-1, 'midday', { up: 'none', result: { kind: 'not-ready', reason: 'not-up' } })]),
   sorrel(21, 'twoFloorsLaundryUp', [groundwork(-24), rough(-5, 'morning', { result: fail(hanger) })]),
   sorrel(22, 'twoFloorsLaundryUp', [groundwork(-23), rough(0, 'morning', { ...attic, ...noors, result: undefined })]),
@@ -110,10 +110,12 @@ export const sorrelBenchLots: readonly DemoLot[] = [
   sorrel(25, 'twoFloorsLaundryUp', [groundwork(-18), rough(2, 'morning', { up: 'none', result: undefined })]),
   sorrel(26, 'twoFloorsLaundryUp', [groundwork(-13), rough(-8, 'morning', { up: 'none', ends: { kind: 'withdrawn', why: 'Rain since noon' } })]),
   sorrel(27, 'slab', [groundwork(0, 'early', noors)]),
-  sorrel(28, 'twoFloorsLaundryUp', [groundwork(-9, 'early', { result: { kind: 'no-access', reason: 'locked' } })], { permit: 'applied' }),
+  sorrel(28, 'twoFloorsLaundryUp', [groundwork(-9, 'early', { result: { kind: 'no-access', reason: 'locked' } })]),
 ];
 
 const vennickRough = (day: number, window: string, more: Partial<DemoVisitPlan> = {}) => rough(day, window, { psi: [164, 162], ...more });
+/** Vennick wants a standpipe on groundwork. */
+const slab = (day: number, window: string, more: Partial<DemoVisitPlan> = {}) => groundwork(day, window, { method: 'standpipe', ...more });
 const mill = (number: number, visits: DemoVisitPlan[], more: Partial<DemoLot> = {}): DemoLot => ({
   number: String(number),
   address: `${10 + number} Rushlight Street`,
@@ -126,16 +128,16 @@ const mill = (number: number, visits: DemoVisitPlan[], more: Partial<DemoLot> = 
 
 /** Millpond: Penmarrow Builders under Vennick County, whose desk places every request. */
 export const millpondLots: readonly DemoLot[] = [
-  mill(51, [groundwork(-40, 'morning'), vennickRough(-12, 'morning')]),
-  mill(52, [groundwork(-38, 'afternoon'), vennickRough(1, 'morning', { up: 'early', result: undefined })]),
-  mill(53, [groundwork(-36, 'morning'), vennickRough(-10, 'afternoon', { result: fail(drip, hanger) }), vennickRough(-4, 'morning', { fixesBefore: 2 })]),
-  mill(54, [groundwork(-34, 'morning'), vennickRough(0, 'morning', { result: undefined })]),
-  mill(55, [groundwork(-32, 'morning'), vennickRough(3, 'morning', { isUnplaced: true, up: 'none', result: undefined })]),
-  mill(56, [groundwork(-30, 'afternoon'), vennickRough(3, 'afternoon', { isUnplaced: true, up: 'none', result: undefined })]),
-  mill(57, [groundwork(-28, 'morning'), vennickRough(-3, 'morning', { up: 'none', ends: { kind: 'declined', why: 'Framing is not passed yet' } })]),
-  mill(58, [groundwork(-26, 'morning')]),
-  mill(59, [groundwork(-6, 'morning')]),
-  mill(60, [groundwork(2, 'morning', { isUnplaced: true, up: 'none', result: undefined })]),
+  mill(51, [slab(-40, 'morning'), vennickRough(-12, 'morning')]),
+  mill(52, [slab(-38, 'afternoon'), vennickRough(1, 'morning', { up: 'early', result: undefined })]),
+  mill(53, [slab(-36, 'morning'), vennickRough(-10, 'afternoon', { result: fail(drip, hanger) }), vennickRough(-4, 'morning', { fixesBefore: 2 })]),
+  mill(54, [slab(-34, 'morning'), vennickRough(0, 'morning', { result: undefined })]),
+  mill(55, [slab(-32, 'morning'), vennickRough(3, 'morning', { isUnplaced: true, up: 'none', result: undefined })]),
+  mill(56, [slab(-30, 'afternoon'), vennickRough(3, 'afternoon', { isUnplaced: true, up: 'none', result: undefined })]),
+  mill(57, [slab(-28, 'morning'), vennickRough(-3, 'morning', { up: 'none', ends: { kind: 'declined', why: 'Framing is not passed yet' } })]),
+  mill(58, [slab(-26, 'morning')]),
+  mill(59, [slab(-6, 'morning')]),
+  mill(60, [slab(2, 'morning', { isUnplaced: true, up: 'none', result: undefined })]),
   mill(61, []),
   mill(62, [], { permit: 'applied' }),
 ];

@@ -13,6 +13,7 @@ import {
   withdrawVisit,
   type VisitSummary,
 } from '@holdwater/shared-types/visits/visit.contract.js';
+import { Temporal } from 'temporal-polyfill';
 import type { DemoClient } from './demo-client.js';
 import type { DemoDays } from './demo-days.js';
 import type { DemoStage } from './demo-stage.js';
@@ -36,7 +37,7 @@ export interface DemoVisitPlan {
   /** `all`: said up in the morning; `early`: said up the evening before; `dwv`: water is missing; `none`. */
   up: 'all' | 'early' | 'dwv' | 'none';
   result?:
-    | { kind: 'pass'; lookedAtLess?: number }
+    | { kind: 'pass' }
     | { kind: 'fail'; corrections: DemoCorrection[] }
     | Extract<OutcomeResult, { kind: 'not-ready' | 'no-access' }>;
   ends?: { kind: 'withdrawn' | 'declined'; why: string };
@@ -106,7 +107,7 @@ export class DemoVisitStory {
 
   private async request(date: string): Promise<void> {
     const { visits } = await this.client.call(requestVisits, this.people.superintendent, {
-      body: { lots: [{ lotId: this.lot.lotId, unitNumbers: this.lot.units }], stageCode: this.plan.stage, date, label: this.plan.window },
+      body: { lots: [{ lotId: this.lot.lotId, unitNumbers: this.lot.units }], stageCode: this.plan.stage, date, label: this.labelOn(date) },
     });
     this.visit = visits[0] ?? null;
     if (this.visit?.state === 'requested' && !this.plan.isUnplaced && this.plan.ends?.kind !== 'declined') {
@@ -121,7 +122,7 @@ export class DemoVisitStory {
     const visit = this.known();
     this.visit = await this.client.call(placeVisit, this.people.desk, {
       params: { visitId: visit.id },
-      body: { expectedVersion: visit.version, date, label: this.plan.window },
+      body: { expectedVersion: visit.version, date, label: this.labelOn(date) },
     });
     this.planArrival();
   }
@@ -131,13 +132,19 @@ export class DemoVisitStory {
     if (!this.plan.inspector || visit.inspector?.id === this.personIdOf(this.plan.inspector)) return;
     this.visit = await this.client.call(moveVisit, this.people.desk, {
       params: { visitId: visit.id },
-      body: { expectedVersion: visit.version, date, label: this.plan.window, inspectorId: this.personIdOf(this.plan.inspector) },
+      body: { expectedVersion: visit.version, date, label: this.labelOn(date), inspectorId: this.personIdOf(this.plan.inspector) },
     });
+  }
+
+  /** Some windows are Monday to Thursday only; on another day the visit comes in the morning. */
+  private labelOn(date: string): string {
+    const isShortDay = Temporal.PlainDate.from(date).dayOfWeek > 4;
+    return isShortDay && ['midday', 'afternoon'].includes(this.plan.window) ? 'morning' : this.plan.window;
   }
 
   private planArrival(): void {
     const start = Date.parse(this.known().plannedStartAt ?? this.known().window.startAt);
-    if (!this.plan.result) return;
+    if (!this.plan.result || this.plan.ends) return;
     this.stage.at(new Date(start + 60_000), () => this.begin());
     this.stage.at(new Date(start + 14 * 60_000), () => this.close());
   }
@@ -226,7 +233,7 @@ export class DemoVisitStory {
           ...(system === 'water' && { needle: 'stayed' as const, pressurePsi: (this.plan.psi ?? [118, 116])[1] }),
         })),
       ),
-      lookedAt: ['permit-on-site', 'hangers', 'slope', 'cleanouts', 'trap-arms', 'sleeves'],
+      lookedAt: this.lookedAt(),
       corrections: corrections.map((each) => ({
         clientId: randomUUID(),
         unitNumber: 1,
@@ -236,6 +243,13 @@ export class DemoVisitStory {
       accepted: this.fixed,
       reopened: [],
     };
+  }
+
+  /** At a pass every point of the work is looked at; at a fail the inspector leaves some for the next time. */
+  private lookedAt(): string[] {
+    const below = ['permit-on-site', 'hangers', 'slope', 'cleanouts', 'trap-arms', 'sleeves'];
+    const isBelowSlab = this.plan.stage === 'groundwork' || this.plan.stage === 'under-slab';
+    return isBelowSlab || this.plan.result?.kind === 'fail' ? below : [...below, 'nail-plates', 'framing'];
   }
 
   private async fix(): Promise<void> {

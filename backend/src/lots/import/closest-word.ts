@@ -2,9 +2,13 @@
 export function closestWord(given: string, words: readonly string[]): string | null {
   const wanted = given.trim().toLowerCase();
   if (wanted === '' || wanted.length > 60) return null;
-  const ranked = words.map((word) => ({ word, edits: editDistance(wanted, word.toLowerCase()) })).sort((a, b) => a.edits - b.edits);
+  const ranked = words
+    .map((word) => ({ word, edits: editDistance(wanted, word.toLowerCase()) }))
+    .sort((a, b) => a.edits - b.edits);
   const [best] = ranked;
-  return best && best.edits <= Math.max(1, Math.floor(Math.max(wanted.length, best.word.length) / 3)) ? best.word : null;
+  return best && best.edits <= Math.max(1, Math.floor(Math.max(wanted.length, best.word.length) / 3))
+    ? best.word
+    : null;
 }
 
 /** How many letters must be added, left out or replaced to make one word the other (Levenshtein 1966). */

@@ -18,7 +18,13 @@ describe('reading CSV', () => {
     ['tabs', 'number\taddress\n1\tA\n2\tB'],
     ['spaces around', ' number , address \n 1 , A \n 2 , B '],
   ])('takes %s', (_, csv) => {
-    expect(linesOf(csv)).toEqual({ head: ['number', 'address'], lines: [[2, '1', 'A'], [3, '2', 'B']] });
+    expect(linesOf(csv)).toEqual({
+      head: ['number', 'address'],
+      lines: [
+        [2, '1', 'A'],
+        [3, '2', 'B'],
+      ],
+    });
   });
 
   it('keeps commas in an address whichever way cells are parted', () => {

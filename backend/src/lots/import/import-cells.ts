@@ -13,7 +13,9 @@ export interface CellFault {
 /** A cell read, or its fault. */
 export type Cell<T> = { readonly value: T; readonly fault?: undefined } | { readonly fault: CellFault };
 
-const faultOf = (code: string, suggestion: string | null = null): { fault: CellFault } => ({ fault: { code, suggestion } });
+const faultOf = (code: string, suggestion: string | null = null): { fault: CellFault } => ({
+  fault: { code, suggestion },
+});
 
 /** Text by the same rule as the form has. */
 export function textCell(cell: string, schema: z.ZodType<string>): Cell<string> {
@@ -32,9 +34,12 @@ export function phoneCell(cell: string): Cell<string | null> {
 
 export function degreesCell(cell: string, of: 'latitude' | 'longitude'): Cell<number | null> {
   if (cell === '') return { value: null };
-  if (!/^[+-]?\d+(\.\d+)?$/.test(cell)) return faultOf('not-a-number', /^[+-]?\d+,\d+$/.test(cell) ? cell.replace(',', '.') : null);
+  if (!/^[+-]?\d+(\.\d+)?$/.test(cell))
+    return faultOf('not-a-number', /^[+-]?\d+,\d+$/.test(cell) ? cell.replace(',', '.') : null);
   const degrees = Number(cell);
-  return (of === 'latitude' ? latitude : longitude).safeParse(degrees).success ? { value: degrees } : faultOf('out-of-range');
+  return (of === 'latitude' ? latitude : longitude).safeParse(degrees).success
+    ? { value: degrees }
+    : faultOf('out-of-range');
 }
 
 export function permitStatusCell(cell: string): Cell<LotRecord['permitStatus']> {
@@ -54,7 +59,8 @@ export function unitsCell(cell: string): Cell<number> {
 /** A zone is the department's, not the lot's: naming it checks that the file was meant for this department. */
 export function zoneCell(cell: string, departmentZone: string | null): Cell<null> {
   if (cell === '') return { value: null };
-  if (!zone.safeParse(cell).success) return faultOf('no-such-zone', closestWord(cell, Intl.supportedValuesOf('timeZone')) ?? departmentZone);
+  if (!zone.safeParse(cell).success)
+    return faultOf('no-such-zone', closestWord(cell, Intl.supportedValuesOf('timeZone')) ?? departmentZone);
   const isOwn = departmentZone === null || canonicalZone(cell) === canonicalZone(departmentZone);
   return isOwn ? { value: null } : faultOf('zone-differs', departmentZone);
 }

@@ -31,8 +31,10 @@ export function readHead(head: readonly string[]): { columns: Array<ImportColumn
   head.forEach((written, index) => {
     const column = columns[index] ?? null;
     const fault = { line: 1, column: written, value: written };
-    if (written !== '' && column === null) faults.push({ ...fault, code: 'unknown-column', suggestion: suggestionFor(written) });
-    else if (column !== null && columns.indexOf(column) < index) faults.push({ ...fault, code: 'column-twice', suggestion: null });
+    if (written !== '' && column === null)
+      faults.push({ ...fault, code: 'unknown-column', suggestion: suggestionFor(written) });
+    else if (column !== null && columns.indexOf(column) < index)
+      faults.push({ ...fault, code: 'column-twice', suggestion: null });
   });
   const missing = required.filter((column) => !columns.includes(column));
   faults.push(...missing.map((column) => ({ line: 1, column, code: 'missing-column', value: null, suggestion: null })));
@@ -49,5 +51,8 @@ function suggestionFor(written: string): string | null {
 
 /** `Permit Number` is `permit_number`. */
 function plain(written: string): string {
-  return written.trim().toLowerCase().replaceAll(/[\s-]+/g, '_');
+  return written
+    .trim()
+    .toLowerCase()
+    .replaceAll(/[\s-]+/g, '_');
 }

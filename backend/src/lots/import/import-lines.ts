@@ -2,7 +2,16 @@ import { line } from '@holdwater/shared-types/common/fields.js';
 import type { ImportFault } from '@holdwater/shared-types/lots/lot-import.contract.js';
 import type { LotDraft } from '../add-lots.service.js';
 import type { CsvLine } from './csv-table.js';
-import { type Cell, degreesCell, optionalTextCell, permitStatusCell, phoneCell, textCell, unitsCell, zoneCell } from './import-cells.js';
+import {
+  type Cell,
+  degreesCell,
+  optionalTextCell,
+  permitStatusCell,
+  phoneCell,
+  textCell,
+  unitsCell,
+  zoneCell,
+} from './import-cells.js';
 import type { ImportColumn } from './import-head.js';
 
 export interface ReadLine {
@@ -32,7 +41,13 @@ class LineReader {
   }
 
   refuse(column: string | null, code: string, value: string, suggestion: string | null = null): void {
-    this.faults.push({ line: this.csvLine.line, column, code, value: value === '' ? null : value.slice(0, 200), suggestion });
+    this.faults.push({
+      line: this.csvLine.line,
+      column,
+      code,
+      value: value === '' ? null : value.slice(0, 200),
+      suggestion,
+    });
   }
 
   /** A cell beyond the head, or under an empty head, belongs nowhere: most often a comma in an address without quotes. */
@@ -44,7 +59,11 @@ class LineReader {
 }
 
 /** Reads every line by itself; what lines are to each other and to what stands already is looked at afterwards. */
-export function readLines(lines: readonly CsvLine[], columns: ReadonlyArray<ImportColumn | null>, departmentZone: string | null) {
+export function readLines(
+  lines: readonly CsvLine[],
+  columns: ReadonlyArray<ImportColumn | null>,
+  departmentZone: string | null,
+) {
   const faults: ImportFault[] = [];
   const read: ReadLine[] = [];
   for (const csvLine of lines) {

@@ -23,7 +23,13 @@ interface Checked {
 
 export const mostLots = 2000;
 
-const wholeFile = (code: string, value: string | null): ImportFault => ({ line: 0, column: null, code, value, suggestion: null });
+const wholeFile = (code: string, value: string | null): ImportFault => ({
+  line: 0,
+  column: null,
+  code,
+  value,
+  suggestion: null,
+});
 
 /** Adds many lots from CSV: all of them, or none and a report of every fault. */
 @Injectable()
@@ -55,7 +61,8 @@ export class ImportLotsService {
     const { columns, faults: headFaults } = readHead(table.head);
     if (headFaults.length > 0) return { lines: [], faults: headFaults };
     if (table.lines.length === 0) return { lines: [], faults: [wholeFile('empty', null)] };
-    if (table.lines.length > mostLots) return { lines: [], faults: [wholeFile('too-many-lines', String(table.lines.length))] };
+    if (table.lines.length > mostLots)
+      return { lines: [], faults: [wholeFile('too-many-lines', String(table.lines.length))] };
     const department = given.departmentId ? await this.departments.findDepartment(given.departmentId) : null;
     const { read, faults } = readLines(table.lines, columns, department?.zone ?? null);
     const all = [...faults, ...(await this.repeated(read, given))];

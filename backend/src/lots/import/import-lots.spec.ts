@@ -21,13 +21,25 @@ async function countLots(): Promise<number> {
   return (rows as Array<{ count: number }>)[0]?.count ?? 0;
 }
 const send = (csv: string, extra: object = {}, person: WorldPerson = 'superintendent') =>
-  world.as(person).post('/api/lots/import', { builderId: world.organizations.builder.id, tractId: world.tract.id, csv, isTrial: false, ...extra });
+  world.as(person).post('/api/lots/import', {
+    builderId: world.organizations.builder.id,
+    tractId: world.tract.id,
+    csv,
+    isTrial: false,
+    ...extra,
+  });
 const faultsOf = async (csv: string, extra: object = {}) => {
   const { status, body } = await send(csv, extra);
   expect(status).toBe(200);
   expect(body.isImported).toBe(false);
   expect(await countLots()).toBe(standing);
-  return (body.faults as ImportFault[]).map(({ line, column, code, value, suggestion }) => [line, column, code, value, suggestion]);
+  return (body.faults as ImportFault[]).map(({ line, column, code, value, suggestion }) => [
+    line,
+    column,
+    code,
+    value,
+    suggestion,
+  ]);
 };
 
 describe('importing lots', () => {
@@ -46,24 +58,38 @@ describe('importing lots', () => {
     expect(lot).toMatchObject({
       ...{ number: '41', latitude: 39.7, longitude: -104.9 },
       permit: { number: 'P-27-41', status: 'issued', holder: 'Dunlatch Plumbing' },
-      units: [{ number: 1, label: '1' }, { number: 2, label: '2' }],
+      units: [
+        { number: 1, label: '1' },
+        { number: 2, label: '2' },
+      ],
       access: { gateCode: '4471', contactName: 'Site office', contactPhone: '555-0119', hazards: 'open trench' },
-      parties: [{ status: 'attached' }, { kind: 'plumber', status: 'pending' }, { kind: 'department', status: 'pending' }],
+      parties: [
+        { status: 'attached' },
+        { kind: 'plumber', status: 'pending' },
+        { kind: 'department', status: 'pending' },
+      ],
     });
     expect((await world.as('superintendent').get(`/api/lots/${second.id}`)).body).toMatchObject({
       ...{ address: '42 Tern Court, rear', latitude: null },
       access: { hazards: '=cmd()' },
       permit: { number: null, status: 'not-applied', holder: null },
     });
-    const [events] = await server.db.query(`SELECT payload FROM outbox_events WHERE kind = 'consent-asked' ORDER BY position`);
-    expect(events).toMatchObject([{ payload: { kind: 'plumber', lotCount: 2 } }, { payload: { kind: 'department', lotCount: 2 } }]);
+    const [events] = await server.db.query(
+      `SELECT payload FROM outbox_events WHERE kind = 'consent-asked' ORDER BY position`,
+    );
+    expect(events).toMatchObject([
+      { payload: { kind: 'plumber', lotCount: 2 } },
+      { payload: { kind: 'department', lotCount: 2 } },
+    ]);
   });
 
   it('tells of a trial what an import would, and writes nothing', async () => {
     const { body } = await send('number,address\n51,51 Tern Court', { isTrial: true });
     expect(body).toEqual({ isImported: false, lots: 1, faults: [] });
     expect(await countLots()).toBe(standing);
-    const [rows] = await server.db.query(`SELECT 1 FROM idempotent_answers WHERE route LIKE '%import%' AND answer ->> 'lots' = '1'`);
+    const [rows] = await server.db.query(
+      `SELECT 1 FROM idempotent_answers WHERE route LIKE '%import%' AND answer ->> 'lots' = '1'`,
+    );
     expect(rows).toEqual([]);
   });
 
@@ -112,7 +138,9 @@ describe('importing lots', () => {
       [4, 'zone', 'no-such-zone', 'America/Denvr', 'America/Denver'],
       [5, 'zone', 'no-such-zone', 'Mountain', 'America/Denver'],
     ]);
-    expect(await faultsOf('number,address,zone\n71,a,Nowhere/Atall')).toEqual([[2, 'zone', 'no-such-zone', 'Nowhere/Atall', null]]);
+    expect(await faultsOf('number,address,zone\n71,a,Nowhere/Atall')).toEqual([
+      [2, 'zone', 'no-such-zone', 'Nowhere/Atall', null],
+    ]);
   });
 
   it('finds a number twice in the file, and one the tract has', async () => {
@@ -137,8 +165,8 @@ describe('importing lots', () => {
     expect(await faultsOf('number,address\n')).toEqual([[0, null, 'empty', null, null]]);
     expect(await faultsOf('number,address\n1,"a')).toMatchObject([[2, null, 'quote-not-closed', null, null]]);
     expect(await faultsOf('number,address\n91,a\u0000b\n92,M\uFFFDrz')).toMatchObject([
-      [2, 'address', 'not-text', 'a\uFFFDb'],
-      [3, 'address', 'not-text', 'M\uFFFDrz'],
+      [2, 'address', 'not-text', 'a\uFFFDb', null],
+      [3, 'address', 'not-text', 'M\uFFFDrz', null],
     ]);
     const many = Array.from({ length: 2001 }, (_, n) => `${n + 1000},${n} Long Road`).join('\n');
     expect(await faultsOf(`number,address\n${many}`)).toEqual([[0, null, 'too-many-lines', '2001', null]]);

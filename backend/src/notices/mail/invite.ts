@@ -45,5 +45,6 @@ export function inviteOf({ facts, summary, description, location, url, organizer
       },
     ],
   });
-  return calendar.toString();
+  // schemes are written in lower case (RFC 3986 3.1); the library writes this one in capitals, and some readers take it literally
+  return calendar.toString().replaceAll(':MAILTO:', ':mailto:');
 }

@@ -23,7 +23,7 @@ export function AppLayout(): ReactNode {
   useFocusOnMove(main);
   const isBare = isPhone && isTask;
   return (
-    <div className={isBare ? 'sheet bare' : 'sheet'}>
+    <div className={isBare ? 'sheet framed bare' : 'sheet framed'}>
       <SheetTitle />
       <a className="skip btn" href="#page">
         {t('skip')}

@@ -5,28 +5,22 @@ import { Act } from '../../components/act';
 import { BrandMark } from '../../components/brand-mark';
 import { DoneLine } from '../../components/done-line';
 import { Lines } from '../../components/lines';
-import { useSession } from '../../lib/session-context';
-import { SessionUnknown } from '../signed-in';
-import { AppLayout } from './app-layout';
+import { Themed } from '../themed';
 import { LanguageChoice } from './language-choice';
 
-/** The frame of pages that anyone may read. Somebody signed in keeps the whole frame. */
+/** The frame of pages that anyone may read, for those who are not signed in. */
 export function OpenLayout(): ReactNode {
-  const { state } = useSession();
   const { t } = useTranslation('app');
   const { pathname } = useLocation();
-  if (state.kind === 'signed-in') return <AppLayout />;
-  if (state.kind === 'starting') return <main className="sheet" />;
-  if (state.kind === 'unknown') return <SessionUnknown error={state.error} />;
   return (
-    <div className="sheet open">
+    <div className="sheet framed open">
       <a className="skip btn" href="#page">
         {t('skip')}
       </a>
       <header className="top">
         <Link className="brand" to="/sign-in">
           <BrandMark size={26} />
-          <span>Holdwater</span>
+          <span className="brand-word">Holdwater</span>
         </Link>
         <nav className="nav" aria-label={t('sheetsName')}>
           <ul>
@@ -47,9 +41,11 @@ export function OpenLayout(): ReactNode {
         </div>
       </header>
       <main id="page" tabIndex={-1}>
-        <Suspense fallback={<Lines />}>
-          <Outlet />
-        </Suspense>
+        <Themed>
+          <Suspense fallback={<Lines />}>
+            <Outlet />
+          </Suspense>
+        </Themed>
       </main>
       <DoneLine />
     </div>

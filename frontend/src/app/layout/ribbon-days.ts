@@ -85,6 +85,7 @@ function isNotUp(visit: VisitSummary, date: string, today: string): boolean {
 }
 
 function shelvesOf(lane: Lane, day: LaneDay, row: number): RibbonShelf[] {
+  if (isClosed(day)) return [];
   return day.windows.map((window) => ({
     from: hoursOfDay(window.startAt, lane.zone),
     to: hoursOfDay(window.endAt, lane.zone),

@@ -2,7 +2,7 @@ import { useMemo, useState, type ReactNode } from 'react';
 import { useLocation, useNavigate } from 'react-router-dom';
 import { WeekRibbon } from '../../drawings/week-ribbon';
 import { useNow } from '../../lib/clock';
-import { addDays, hoursOfDay, localDateOf, mondayOf, twoWorkWeeksOf } from '../../lib/local-days';
+import { addDays, hoursOfDay, localDateOf, workingMondayOf, twoWorkWeeksOf } from '../../lib/local-days';
 import { useShownDate, useShownSpan } from '../../lib/shown-date';
 import { useTimeWords } from '../../lib/time';
 import { useIsPhone } from '../../lib/use-media';
@@ -22,7 +22,7 @@ export function Ribbon(): ReactNode {
   const span = useShownSpan();
   const [shownDate] = useShownDate();
   const [weeks, setWeeks] = useState({ of: '', moved: 0 });
-  const first = mondayOf(shownDate ?? localDateOf(now, deviceZone));
+  const first = workingMondayOf(shownDate ?? localDateOf(now, deviceZone));
   // Weeks walked count from the date shown; another date starts afresh.
   const moved = weeks.of === first ? weeks.moved : 0;
   const dates = useMemo(() => twoWorkWeeksOf(addDays(first, moved * 7)), [first, moved]);
@@ -57,23 +57,15 @@ function fraction(hour: number, hours: { from: number; to: number }): number | u
   return part >= 0 && part <= 1 ? part : undefined;
 }
 
-/** The range as the locale writes it, the month over the days where it is one month: "Apr" over "13–24". */
+/** The range as the locale writes it, the month over the days where it is one month: "Apr" over "13–24". The place is narrow: no "de". */
 function spanWords(
   from: string,
   to: string,
   range: (from: string, to: string) => string,
 ): { over: string; span: string } {
-  const whole = range(from, to);
-  const days = /\d+\s*–\s*\d+/.exec(whole)?.[0];
-  if (days !== undefined && from.slice(0, 7) === to.slice(0, 7)) {
-    return {
-      over: whole
-        .replace(days, '')
-        .replace(/\bde\b/g, '')
-        .trim(),
-      span: days,
-    };
-  }
+  const whole = range(from, to).replace(/ de (?=\p{L})/gu, ' ');
+  const days = /\d+–\d+/.exec(whole)?.[0];
+  if (days !== undefined) return { over: whole.replace(days, '').trim(), span: days };
   const [first = whole, second = ''] = whole.split('–');
   return { over: `${first.trim()}–`, span: second.trim() };
 }

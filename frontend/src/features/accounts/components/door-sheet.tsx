@@ -14,13 +14,7 @@ export function DoorSheet({ children }: { children: ReactNode }): ReactNode {
   const isPhone = useIsPhone();
   return (
     <div className="sheet door">
-      {isPhone ? null : (
-        <div className="door-picture" aria-hidden="true">
-          <Suspense fallback={null}>
-            <Picture />
-          </Suspense>
-        </div>
-      )}
+      {isPhone ? null : <DoorPicture />}
       <main className="door-block">
         <div className="door-brand">
           <div className="row">
@@ -40,6 +34,17 @@ export function DoorSheet({ children }: { children: ReactNode }): ReactNode {
           </div>
         </div>
       </main>
+      {isPhone ? <DoorPicture isSmall /> : null}
+    </div>
+  );
+}
+
+function DoorPicture({ isSmall = false }: { isSmall?: boolean }): ReactNode {
+  return (
+    <div className="door-picture" aria-hidden="true">
+      <Suspense fallback={null}>
+        <Picture isSmall={isSmall} />
+      </Suspense>
     </div>
   );
 }

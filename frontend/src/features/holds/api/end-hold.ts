@@ -1,0 +1,18 @@
+import { endHold } from '@holdwater/shared-types/holds/hold.contract.js';
+import { call } from '../../../lib/api';
+import { useFieldMutation } from '../../../lib/field-mutation';
+import { staleOnLot } from '../../../lib/live-topics';
+
+export interface HoldEnd {
+  readonly holdId: string;
+  readonly reason: 'taken-down' | 'lost';
+}
+
+/** Plumber: ends a test with its reason; a visit whose tests were up is then booked, not up. */
+export function useEndHold(lotId: string) {
+  return useFieldMutation({
+    mutationFn: ({ holdId, reason }: HoldEnd, { clientId, madeAt }, options) =>
+      call(endHold, { params: { holdId }, body: { reason, clientId, madeAt } }, options),
+    invalidates: () => staleOnLot(lotId, ['holds', 'visits']),
+  });
+}

@@ -1,0 +1,169 @@
+import { useId, type ReactNode } from 'react';
+import { useTranslation } from 'react-i18next';
+import { Choice } from '../../../components/choice';
+import { Field } from '../../../components/field';
+import { Icon } from '../../../components/icon';
+import { Numeral } from '../../../components/numeral';
+import { Dial } from '../../../drawings/dial';
+import { useIsPhone } from '../../../lib/use-media';
+import { parseNumber, stepValue, type Instrument, type ReadingCheck, type ReadingDraft } from '../typed-reading';
+import { useFaultWords } from '../use-fault-words';
+
+export interface ReadingEntryProps {
+  instrument: Instrument;
+  /** What the temperature is of. */
+  temperatureOf: 'air' | 'water';
+  draft: ReadingDraft;
+  check: ReadingCheck;
+  /** Where the steppers start while nothing is typed. */
+  stepFrom: number;
+  /** The picture over the entry of a level. */
+  picture: ReactNode;
+  onChange: (draft: ReadingDraft) => void;
+}
+
+/** A reading as it is typed: the dial follows, steppers go half a mark. */
+export function ReadingEntry(props: ReadingEntryProps): ReactNode {
+  const { instrument, temperatureOf, draft, check, picture, onChange } = props;
+  const { t } = useTranslation('holds');
+  const words = useFaultWords();
+  return (
+    <div className="reading-entry">
+      {instrument.isLevel ? picture : <DialAndValve {...props} />}
+      <ValueEntry {...props} />
+      <div className="fields two">
+        <Field
+          label={t(`reading.temperature.${temperatureOf}`)}
+          labelPlace="inside"
+          unit="°F"
+          isNumeral
+          isOptional
+          autoComplete="off"
+          value={draft.temperatureF}
+          error={words(check.faults.temperatureF)}
+          onChange={(event) => onChange({ ...draft, temperatureF: event.target.value })}
+        />
+        <Field
+          label={t('reading.note')}
+          labelPlace="inside"
+          isOptional
+          maxLength={500}
+          autoComplete="off"
+          value={draft.note}
+          onChange={(event) => onChange({ ...draft, note: event.target.value })}
+        />
+      </div>
+    </div>
+  );
+}
+
+function DialAndValve({ instrument, draft, check, onChange }: ReadingEntryProps): ReactNode {
+  const { t } = useTranslation('holds');
+  const isPhone = useIsPhone();
+  const words = useFaultWords();
+  const typed = parseNumber(draft.value);
+  const { rangePsi, increment, minimumPsi, ceilingPsi } = instrument;
+  return (
+    <div className="dial-and-valve">
+      {rangePsi === null ? (
+        <p className="s mid no-dial">{t('reading.noDial')}</p>
+      ) : (
+        <Dial
+          max={rangePsi}
+          unit="psi"
+          increment={increment}
+          value={typed === null || typed > rangePsi ? null : typed}
+          minimum={minimumPsi ?? 0}
+          limit={ceilingPsi}
+          size={isPhone ? 180 : 220}
+        />
+      )}
+      <div className="beside">
+        <Choice
+          label={t('reading.valve')}
+          isLabelShown
+          stacked
+          wide
+          size="lg"
+          options={[
+            { value: 'open', label: t('reading.open'), icon: 'valve-open' },
+            { value: 'shut', label: t('reading.shut'), icon: 'valve-shut' },
+          ]}
+          value={draft.valve}
+          onChange={(valve) => onChange({ ...draft, valve })}
+        />
+        {check.faults.valve === undefined ? null : <p className="field-error">{words(check.faults.valve)}</p>}
+        {rangePsi === null ? null : (
+          <p className="s mid">
+            <Numeral text={t('reading.gauge', { range: rangePsi, increment })} />
+          </p>
+        )}
+      </div>
+    </div>
+  );
+}
+
+function ValueEntry({ instrument, draft, check, stepFrom, onChange }: ReadingEntryProps): ReactNode {
+  const { t } = useTranslation('holds');
+  const words = useFaultWords();
+  const id = useId();
+  const unit = instrument.isLevel ? 'in' : 'psi';
+  const step = (steps: 1 | -1): void =>
+    onChange({ ...draft, value: stepValue(draft.value, steps, instrument.increment, stepFrom) });
+  const { meant } = check;
+  return (
+    <div className="value-entry">
+      <button
+        type="button"
+        className="btn stepper"
+        aria-label={t('reading.stepDown')}
+        aria-controls={id}
+        onClick={() => step(-1)}
+      >
+        −½
+      </button>
+      <Field
+        id={id}
+        label={t(instrument.isLevel ? 'reading.level' : 'reading.pressure')}
+        unit={unit}
+        isNumeral
+        isEntry
+        autoComplete="off"
+        value={draft.value}
+        error={
+          check.faults.value === 'above-gauge-range'
+            ? t('reading.aboveRange', { range: instrument.rangePsi ?? 0 })
+            : words(check.faults.value)
+        }
+        fix={
+          meant === null
+            ? undefined
+            : {
+                word: t('reading.useMeant', { meant }),
+                onUse: () => onChange({ ...draft, value: String(meant) }),
+              }
+        }
+        onChange={(event) => onChange({ ...draft, value: event.target.value })}
+      />
+      <button
+        type="button"
+        className="btn stepper"
+        aria-label={t('reading.stepUp')}
+        aria-controls={id}
+        onClick={() => step(1)}
+      >
+        +½
+      </button>
+    </div>
+  );
+}
+
+/** What stands behind a level: how far down the rim it is read, beside the sign for a water surface. */
+export function LevelNote({ text }: { text: string }): ReactNode {
+  return (
+    <p className="row s mid">
+      <Icon name="down" size={18} />
+      <Numeral text={text} />
+    </p>
+  );
+}
