@@ -45,7 +45,7 @@ export const errorCatalogue = {
   'beyond-horizon': 409,
   'too-many-lots': 400,
   'permit-not-issued': 409,
-  'may-not-request': 409,
+  'may-not-request': 403,
   'open-visit-exists': 409,
   'corrections-open': 409,
   'stage-unknown': 400,

@@ -1,4 +1,5 @@
 import { useMemo, useState, type ReactNode } from 'react';
+import { useTranslation } from 'react-i18next';
 import { useLocation, useNavigate } from 'react-router-dom';
 import { WeekRibbon } from '../../drawings/week-ribbon';
 import { useNow } from '../../lib/clock';
@@ -16,6 +17,7 @@ const deviceZone = Intl.DateTimeFormat().resolvedOptions().timeZone;
 
 /** The two working weeks over every page, and the only date control. */
 export function Ribbon(): ReactNode {
+  const { t } = useTranslation('app');
   const words = useTimeWords();
   const isPhone = useIsPhone();
   const now = useNow();
@@ -34,17 +36,19 @@ export function Ribbon(): ReactNode {
   const [from, to] = [dates[0] ?? first, dates[9] ?? first];
   const range = spanWords(from, to, words.dateRange);
   return (
-    <WeekRibbon
-      form={isPhone ? 'phone' : 'desk'}
-      days={ribbonDays({ dates, calendar, span: span ?? dayOf(shownDate), today, labelOf: words.date })}
-      hours={hours}
-      nowFraction={fraction(hoursOfDay(now, zone), hours)}
-      over={range.over}
-      span={range.span}
-      end={<WaitingEnd />}
-      onPick={pick}
-      onMove={(by) => setWeeks({ of: first, moved: moved + by })}
-    />
+    <nav aria-label={t('weeksName')}>
+      <WeekRibbon
+        form={isPhone ? 'phone' : 'desk'}
+        days={ribbonDays({ dates, calendar, span: span ?? dayOf(shownDate), today, labelOf: words.date })}
+        hours={hours}
+        nowFraction={fraction(hoursOfDay(now, zone), hours)}
+        over={range.over}
+        span={range.span}
+        end={<WaitingEnd />}
+        onPick={pick}
+        onMove={(by) => setWeeks({ of: first, moved: moved + by })}
+      />
+    </nav>
   );
 }
 

@@ -1,4 +1,4 @@
-import { useState, type ReactNode } from 'react';
+import { useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
 import { Act } from '../../../components/act';
@@ -6,6 +6,7 @@ import { Cell, Cells } from '../../../components/cells';
 import { Mark } from '../../../components/mark';
 import { Numeral } from '../../../components/numeral';
 import { Question } from '../../../components/question';
+import { isApiError } from '../../../lib/api-error';
 import { localName, useLocale } from '../../../lib/i18n';
 import { Failed } from '../../../lib/query-state';
 import { useTimeWords } from '../../../lib/time';
@@ -111,6 +112,7 @@ function BeginAct({ stop: { visit }, now }: { stop: RunStop; now: Date }): React
   const words = useTimeWords();
   const navigate = useNavigate();
   const [isAsking, setIsAsking] = useState(false);
+  const statement = useRef<{ clientId: string; madeAt: string } | null>(null);
   const beginning = useBeginVisit(() => void navigate(`/visits/${visit.id}/outcome`));
   if (visit.state === 'underway' || visit.state === 'closed') {
     return (
@@ -122,13 +124,18 @@ function BeginAct({ stop: { visit }, now }: { stop: RunStop; now: Date }): React
   const block = beginBlock(visit, now.getTime());
   const opensAt = words.clock(visit.window.startAt, visit.zone);
   const isEarly = Date.parse(visit.window.startAt) > now.getTime();
-  const begin = (): void =>
-    beginning.mutate({
-      visitId: visit.id,
-      expectedVersion: visit.version,
-      clientId: crypto.randomUUID(),
-      madeAt: new Date().toISOString(),
-    });
+  const begin = (): void => {
+    // Pressed again after a lost answer it is the same statement, made when it was first made.
+    statement.current ??= { clientId: crypto.randomUUID(), madeAt: new Date().toISOString() };
+    beginning.mutate(
+      { visitId: visit.id, expectedVersion: visit.version, ...statement.current },
+      {
+        onError: (error) => {
+          if (!isApiError(error) || !error.isUndecided) statement.current = null;
+        },
+      },
+    );
+  };
   return (
     <>
       <Act

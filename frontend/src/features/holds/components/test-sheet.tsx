@@ -1,0 +1,135 @@
+import type { ReactNode } from 'react';
+import { useTranslation } from 'react-i18next';
+import { TaskFoot } from '../../../components/task-head';
+import { Panel } from '../../../components/panel';
+import { Plain } from '../../../components/plain';
+import { Failed } from '../../../lib/query-state';
+import { lastCounted } from '../standing-tests';
+import { ownLevelFt } from '../test-setup';
+import { parseNumber } from '../typed-reading';
+import { useTestSheet, type TestSheetInput, type TestSheetState } from '../use-test-sheet';
+import { EndTest } from './end-test';
+import { LevelPicture } from './level-picture';
+import { NoLongerUp } from './no-longer-up';
+import { ReadingEntry } from './reading-entry';
+import { StandingFacts } from './standing-facts';
+import { TestActs } from './test-acts';
+import { TestCautions } from './test-cautions';
+import { TestSetupForm } from './test-setup-form';
+
+/** One system of one unit: put it up, read it, say it is up. */
+export function TestSheet(input: TestSheetInput): ReactNode {
+  const { lot, visit, ruleCard, rule, part, hold } = input;
+  const { t } = useTranslation(['holds', 'common']);
+  const sheet = useTestSheet(input);
+  const nextOrdinal = ordinalAfter(input);
+  const name = t('testName', {
+    system: t(`common.systems.${part.system}`),
+    test: t('common.test', { ordinal: hold?.ordinal ?? nextOrdinal }),
+  });
+  if (!sheet.maySave) return <NotYours isStanding={hold !== null} name={name} />;
+  const cautions = (
+    <TestCautions
+      system={part.system}
+      medium={sheet.medium}
+      instrument={sheet.instrument}
+      isValveShut={sheet.isValveShut}
+      isOverLimit={sheet.check.isOverLimit}
+    />
+  );
+  return (
+    <>
+      {sheet.check.isOverLimit ? cautions : null}
+      <div className="test-sheet">
+        <div>
+          {hold === null ? (
+            <TestSetupForm
+              rule={rule}
+              ruleCard={ruleCard}
+              house={sheet.house}
+              title={name}
+              draft={sheet.setup}
+              faults={sheet.setupFaults}
+              onChange={sheet.setSetup}
+            />
+          ) : (
+            <StandingFacts hold={hold} name={name} zone={lot.zone} ruleCardVersion={ruleCard.version} />
+          )}
+        </div>
+        <div>
+          {hold !== null || sheet.setup.medium !== null ? (
+            <Panel title={t('reading.title')}>
+              <Entry input={input} sheet={sheet} />
+            </Panel>
+          ) : null}
+          {sheet.check.isOverLimit ? null : <div className="panel-body">{cautions}</div>}
+          {hold !== null && lot.abilities.canTest ? (
+            <div className="panel-body">
+              <EndTest lotId={lot.id} hold={hold} name={name} isUp={visit?.state === 'ready'} />
+            </div>
+          ) : null}
+        </div>
+      </div>
+      {sheet.error === null ? null : <Failed error={sheet.error} level={2} />}
+      <TaskFoot>
+        {visit?.moves.includes('no-longer-up') ? <NoLongerUp visit={visit} /> : null}
+        <TestActs
+          up={sheet.up}
+          cannotSave={useCannotSave(sheet)}
+          isStarting={hold === null}
+          busy={sheet.busy}
+          onSave={() => (sheet.trySetup() ? sheet.save() : undefined)}
+          onUp={() => (sheet.trySetup() ? sheet.sayUp() : undefined)}
+        />
+      </TaskFoot>
+    </>
+  );
+}
+
+function ordinalAfter({ holds, part, rule }: TestSheetInput): number {
+  const own = holds.filter(
+    (one) => one.unitNumber === part.unitNumber && one.system === part.system && one.stageCode === rule.stageCode,
+  );
+  return Math.max(0, ...own.map(({ ordinal }) => ordinal)) + 1;
+}
+
+/** Why the reading cannot be saved yet. A set-up with holes can be pressed: it then shows where they are. */
+function useCannotSave({ isUntyped, check, medium }: TestSheetState): string | null {
+  const { t } = useTranslation('holds');
+  if (medium === null) return t('why.no-method');
+  if (isUntyped) return t('why.no-reading');
+  if (check.faults.valve !== undefined) return t('why.valve-missing');
+  return check.reading === null ? t('why.fault') : null;
+}
+
+function NotYours({ isStanding, name }: { isStanding: boolean; name: string }): ReactNode {
+  const { t } = useTranslation('holds');
+  const which = isStanding ? 'notYours' : 'noTest';
+  return (
+    <Plain kind="empty" title={t(`${which}.title`, { name })}>
+      {t(`${which}.text`)}
+    </Plain>
+  );
+}
+
+function Entry({ input, sheet }: { input: TestSheetInput; sheet: TestSheetState }): ReactNode {
+  const { hold } = input;
+  const { instrument, medium } = sheet;
+  const counted = hold === null ? null : lastCounted(hold);
+  const last = instrument.isLevel ? counted?.levelIn : counted?.pressurePsi;
+  const method = hold?.method ?? sheet.setup.method;
+  const level = hold === null ? parseNumber(sheet.setup.fillLevelFt) : hold.fillLevelFt;
+  return (
+    <ReadingEntry
+      instrument={instrument}
+      temperatureOf={medium === 'air' ? 'air' : 'water'}
+      draft={sheet.draft}
+      check={sheet.check}
+      stepFrom={last ?? instrument.minimumPsi ?? 0}
+      picture={
+        <LevelPicture house={sheet.house} method={method} fillLevelFt={level ?? ownLevelFt(method, sheet.house)} />
+      }
+      onChange={sheet.setDraft}
+    />
+  );
+}

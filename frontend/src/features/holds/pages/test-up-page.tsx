@@ -1,0 +1,42 @@
+import { useQuery } from '@tanstack/react-query';
+import type { ReactNode } from 'react';
+import { useTranslation } from 'react-i18next';
+import { useParams } from 'react-router-dom';
+import { TaskHead } from '../../../components/task-head';
+import { QueryState } from '../../../lib/query-state';
+import { useLotLive } from '../../../lib/realtime';
+import { holdsQuery } from '../api/holds';
+import { testedLotQuery } from '../api/tested-lot';
+import { testedVisitsQuery } from '../api/tested-visits';
+import { LotTests } from '../components/lot-tests';
+import '../holds.css';
+
+/** Put the test up: one lot, one system at a time. */
+export function TestUpPage(): ReactNode {
+  const { lotId = '' } = useParams();
+  useLotLive(lotId);
+  const lot = useQuery(testedLotQuery(lotId));
+  const holds = useQuery(holdsQuery(lotId));
+  const visits = useQuery(testedVisitsQuery(lotId));
+  return (
+    <>
+      {lot.data === undefined ? <BareHead lotId={lotId} /> : null}
+      <QueryState query={lot}>
+        {(detail) => (
+          <QueryState query={holds}>
+            {(tests) => (
+              <QueryState query={visits}>
+                {(known) => <LotTests lot={detail} holds={tests.items} visits={known.items} />}
+              </QueryState>
+            )}
+          </QueryState>
+        )}
+      </QueryState>
+    </>
+  );
+}
+
+function BareHead({ lotId }: { lotId: string }): ReactNode {
+  const { t } = useTranslation('holds');
+  return <TaskHead backTo={`/lots/${lotId}`} label={t('page.label')} title={t('page.bareTitle')} />;
+}
