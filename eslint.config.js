@@ -13,9 +13,21 @@ const zones = [
     from: later(name).map((each) => `./backend/src/${each}/!(*.model|*.queries).ts`),
     message: 'Modules are imported in one direction only: see architecture in DEVELOPERS.md.',
   })),
-  { target: './backend/src/common', from: serverOrder.map((name) => `./backend/src/${name}`), message: 'common knows no domain word.' },
-  { target: './shared-types/src', from: ['./backend', './frontend', './fake-services'], message: 'shared-types stands alone.' },
-  { target: './frontend/src/{theme,drawings,components,lib}', from: './frontend/src/{features,app}', message: 'Shared pieces know no page.' },
+  {
+    target: './backend/src/common',
+    from: serverOrder.map((name) => `./backend/src/${name}`),
+    message: 'common knows no domain word.',
+  },
+  {
+    target: './shared-types/src',
+    from: ['./backend', './frontend', './fake-services'],
+    message: 'shared-types stands alone.',
+  },
+  {
+    target: './frontend/src/{theme,drawings,components,lib}',
+    from: './frontend/src/{features,app}',
+    message: 'Shared pieces know no page.',
+  },
 ];
 
 export default tseslint.config(
@@ -25,15 +37,24 @@ export default tseslint.config(
     extends: [...tseslint.configs.recommendedTypeChecked],
     languageOptions: { parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname } },
     plugins: { 'import-x': importX },
-    settings: { 'import-x/resolver': { node: { extensions: ['.ts', '.tsx', '.js'] } }, 'import-x/extensions': ['.ts', '.tsx'] },
+    settings: {
+      'import-x/resolver': { node: { extensions: ['.ts', '.tsx', '.js'] } },
+      'import-x/extensions': ['.ts', '.tsx'],
+    },
     rules: {
       '@typescript-eslint/no-explicit-any': 'error',
       '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
       '@typescript-eslint/no-floating-promises': 'error',
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_', caughtErrorsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', varsIgnorePattern: '^_', caughtErrorsIgnorePattern: '^_' },
+      ],
       '@typescript-eslint/require-await': 'off',
       'import-x/no-restricted-paths': ['error', { zones }],
-      'no-restricted-properties': ['error', { object: 'process', property: 'env', message: 'Only config/ reads the environment.' }],
+      'no-restricted-properties': [
+        'error',
+        { object: 'process', property: 'env', message: 'Only config/ reads the environment.' },
+      ],
       'max-lines': ['error', { max: 320, skipBlankLines: true, skipComments: true }],
       'no-warning-comments': ['error', { terms: ['todo', 'fixme'] }],
     },

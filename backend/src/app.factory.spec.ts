@@ -18,6 +18,11 @@ describe('the server', () => {
   });
 
   it('has no route that declares no access', () => {
-    expect(server.get(AccessCheck).routes().filter((route) => route.access === null)).toEqual([]);
+    expect(
+      server
+        .get(AccessCheck)
+        .routes()
+        .filter((route) => route.access === null),
+    ).toEqual([]);
   });
 });

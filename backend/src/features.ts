@@ -14,4 +14,18 @@ import { NoticesModule } from './notices/notices.module.js';
 import { OperationsModule } from './operations/operations.module.js';
 
 /** The modules with domain words, in the order their imports may go. */
-export const features: Type[] = [AccountsModule, DepartmentsModule, LotsModule, PlansModule, ClearancesModule, VisitsModule, HoldsModule, OutcomesModule, ThreadsModule, NoticesModule, LedgerReadingModule, RealtimeModule, OperationsModule];
+export const features: Type[] = [
+  AccountsModule,
+  DepartmentsModule,
+  LotsModule,
+  PlansModule,
+  ClearancesModule,
+  VisitsModule,
+  HoldsModule,
+  OutcomesModule,
+  ThreadsModule,
+  NoticesModule,
+  LedgerReadingModule,
+  RealtimeModule,
+  OperationsModule,
+];

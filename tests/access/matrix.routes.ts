@@ -15,7 +15,13 @@ const own = [
   'departmentOwner',
 ] as const satisfies readonly WorldPerson[];
 const inspectors = ['inspector', 'secondInspector'] as const satisfies readonly WorldPerson[];
-const talkers = ['superintendent', 'plumber', 'helper', 'desk', ...inspectors] as const satisfies readonly WorldPerson[];
+const talkers = [
+  'superintendent',
+  'plumber',
+  'helper',
+  'desk',
+  ...inspectors,
+] as const satisfies readonly WorldPerson[];
 
 export interface MatrixRow {
   /** Who is let through; the rest get 404 or 403. `anyone` needs no sign-in, `signed-in` is everybody with one. */
@@ -47,13 +53,19 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
   'POST /api/auth/sign-in-link': { may: 'anyone', body: () => ({ email: 'nobody@example.test' }) },
   'POST /api/auth/sign-in-link/use': { may: 'anyone', body: () => ({ token: 'x'.repeat(43) }) },
   'POST /api/auth/password-reset': { may: 'anyone', body: () => ({ email: 'nobody@example.test' }) },
-  'POST /api/auth/password-reset/use': { may: 'anyone', body: () => ({ token: 'x'.repeat(43), password: 'a long new one, really' }) },
+  'POST /api/auth/password-reset/use': {
+    may: 'anyone',
+    body: () => ({ token: 'x'.repeat(43), password: 'a long new one, really' }),
+  },
   'POST /api/auth/invitation': { may: 'anyone', body: () => ({ token: 'x'.repeat(43) }) },
   'POST /api/auth/invitation/accept': { may: 'anyone', body: () => ({ token: 'x'.repeat(43) }) },
 
   'GET /api/me': { may: 'signed-in' },
   'PATCH /api/me': { may: 'signed-in', body: () => ({ units: 'us' }) },
-  'POST /api/me/password': { may: 'signed-in', body: () => ({ currentPassword: 'not it', password: 'a long new one, really' }) },
+  'POST /api/me/password': {
+    may: 'signed-in',
+    body: () => ({ currentPassword: 'not it', password: 'a long new one, really' }),
+  },
   'GET /api/organizations': { may: 'signed-in' },
   'GET /api/departments': { may: 'signed-in' },
   'GET /api/departments/:departmentId': { may: 'signed-in', path: (t) => `/api/departments/${t.departmentId}` },
@@ -73,9 +85,20 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
   'POST /api/calc/dial': { may: 'signed-in' },
   'POST /api/calc/notice': { may: 'signed-in' },
 
-  'POST /api/organizations': { may: ['operator'], body: () => ({ name: randomUUID(), kind: 'builder', ownerEmail: `${randomUUID()}@example.test`, ownerName: 'New Owner' }) },
+  'POST /api/organizations': {
+    may: ['operator'],
+    body: () => ({
+      name: randomUUID(),
+      kind: 'builder',
+      ownerEmail: `${randomUUID()}@example.test`,
+      ownerName: 'New Owner',
+    }),
+  },
   'GET /api/operations/deliveries': { may: ['operator'] },
-  'POST /api/operations/deliveries/:deliveryId/retry': { may: ['operator'], path: (t) => `/api/operations/deliveries/${t.deliveryId}/retry` },
+  'POST /api/operations/deliveries/:deliveryId/retry': {
+    may: ['operator'],
+    path: (t) => `/api/operations/deliveries/${t.deliveryId}/retry`,
+  },
   'GET /api/operations/ledger': { may: ['operator'] },
 
   'GET /api/organizations/:organizationId/people': {
@@ -97,33 +120,64 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     body: () => ({ roles: ['superintendent'] }),
   },
 
-  'POST /api/departments/:departmentId/rule-cards': { may: ['desk'], isPublicThing: true, path: (t) => `/api/departments/${t.departmentId}/rule-cards` },
-  'PUT /api/rule-cards/:ruleCardId': { may: ['desk'], path: (t) => `/api/rule-cards/${t.draftId}`, body: (t) => ({ content: t.content }) },
+  'POST /api/departments/:departmentId/rule-cards': {
+    may: ['desk'],
+    isPublicThing: true,
+    path: (t) => `/api/departments/${t.departmentId}/rule-cards`,
+  },
+  'PUT /api/rule-cards/:ruleCardId': {
+    may: ['desk'],
+    path: (t) => `/api/rule-cards/${t.draftId}`,
+    body: (t) => ({ content: t.content }),
+  },
   'POST /api/rule-cards/:ruleCardId/publish': {
     may: ['desk'],
     path: (t) => `/api/rule-cards/${t.draftId}/publish`,
     body: () => ({ effectiveFrom: '2027-12-01' }),
   },
   'POST /api/departments/:departmentId/closures': {
-    may: ['desk'], isPublicThing: true,
+    may: ['desk'],
+    isPublicThing: true,
     path: (t) => `/api/departments/${t.departmentId}/closures`,
     body: () => ({ date: '2027-11-02', from: null, to: null, why: 'Staff day' }),
   },
   'DELETE /api/departments/:departmentId/closures/:closureId': {
-    may: ['desk'], isPublicThing: true,
+    may: ['desk'],
+    isPublicThing: true,
     path: (t) => `/api/departments/${t.departmentId}/closures/${t.closureId}`,
   },
-  'GET /api/departments/:departmentId/requests': { may: ['desk'], path: (t) => `/api/departments/${t.departmentId}/requests` },
-  'GET /api/departments/:departmentId/day': { may: ['desk'], path: (t) => `/api/departments/${t.departmentId}/day?date=2027-03-04` },
-  'GET /api/runs': { may: [...inspectors, 'desk'], path: (t) => `/api/runs?date=2027-03-04&departmentId=${t.departmentId}` },
+  'GET /api/departments/:departmentId/requests': {
+    may: ['desk'],
+    path: (t) => `/api/departments/${t.departmentId}/requests`,
+  },
+  'GET /api/departments/:departmentId/day': {
+    may: ['desk'],
+    path: (t) => `/api/departments/${t.departmentId}/day?date=2027-03-04`,
+  },
+  'GET /api/runs': {
+    may: [...inspectors, 'desk'],
+    path: (t) => `/api/runs?date=2027-03-04&departmentId=${t.departmentId}`,
+  },
 
   'POST /api/tracts': { may: ['superintendent'], body: (t) => ({ builderId: t.builderId, name: randomUUID() }) },
-  'PATCH /api/tracts/:tractId': { may: ['superintendent'], path: (t) => `/api/tracts/${t.tractId}`, body: () => ({ plat: null }) },
+  'PATCH /api/tracts/:tractId': {
+    may: ['superintendent'],
+    path: (t) => `/api/tracts/${t.tractId}`,
+    body: () => ({ plat: null }),
+  },
   'POST /api/lots': {
     may: ['superintendent'],
-    body: (t) => ({ builderId: t.builderId, tractId: t.tractId, number: randomUUID().slice(0, 8), address: '1 Elsewhere Street' }),
+    body: (t) => ({
+      builderId: t.builderId,
+      tractId: t.tractId,
+      number: randomUUID().slice(0, 8),
+      address: '1 Elsewhere Street',
+    }),
   },
-  'POST /api/lots/import': { may: ['superintendent'], body: (t) => ({ builderId: t.builderId, csv: 'number,address\n900,9 Elsewhere Street', isTrial: true }) },
+  'POST /api/lots/import': {
+    may: ['superintendent'],
+    body: (t) => ({ builderId: t.builderId, csv: 'number,address\n900,9 Elsewhere Street', isTrial: true }),
+  },
   'POST /api/consents': {
     may: ['plumber', 'plumberOwner'],
     body: (t) => ({ organizationId: t.plumberId, lotIds: [t.askedLotId], isJoining: true }),
@@ -137,9 +191,17 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
   'GET /api/lots/:lotId/ledger/check': { may: own, path: (t) => `/api/lots/${t.lotId}/ledger/check` },
   'GET /api/visits/:visitId': { may: own, path: (t) => `/api/visits/${t.visitId}` },
   'GET /api/visits/:visitId/outcome': { may: own, path: (t) => `/api/visits/${t.closedVisitId}/outcome` },
-  'POST /api/lots/:lotId/comments': { may: talkers, path: (t) => `/api/lots/${t.lotId}/comments`, body: () => ({ ...write(), text: 'hello' }) },
+  'POST /api/lots/:lotId/comments': {
+    may: talkers,
+    path: (t) => `/api/lots/${t.lotId}/comments`,
+    body: () => ({ ...write(), text: 'hello' }),
+  },
 
-  'PATCH /api/lots/:lotId': { may: ['superintendent'], path: (t) => `/api/lots/${t.lotId}`, body: () => ({ address: '12 Elsewhere Street' }) },
+  'PATCH /api/lots/:lotId': {
+    may: ['superintendent'],
+    path: (t) => `/api/lots/${t.lotId}`,
+    body: () => ({ address: '12 Elsewhere Street' }),
+  },
   'PUT /api/lots/:lotId/units/:unitNumber/geometry': {
     may: ['superintendent', 'plumber'],
     path: (t) => `/api/lots/${t.lotId}/units/1/geometry`,
@@ -151,15 +213,34 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     body: (t) => ({ kind: 'plumber', organizationId: t.plumberId }),
   },
 
-  'POST /api/visits/offers': { may: ['superintendent', 'desk'], body: (t) => ({ lots: [{ lotId: t.freeLotId }], stageCode: 'groundwork' }) },
+  'POST /api/visits/offers': {
+    may: ['superintendent', 'desk'],
+    body: (t) => ({ lots: [{ lotId: t.freeLotId }], stageCode: 'groundwork' }),
+  },
   'POST /api/visits': {
     may: ['superintendent', 'desk'],
     body: (t) => ({ lots: [{ lotId: t.freeLotId }], stageCode: 'groundwork', ...day }),
   },
-  'POST /api/visits/:visitId/place': { may: ['desk'], path: (t) => `/api/visits/${t.visitId}/place`, body: () => ({ expectedVersion: 0, ...day }) },
-  'POST /api/visits/:visitId/decline': { may: ['desk'], path: (t) => `/api/visits/${t.visitId}/decline`, body: () => ({ expectedVersion: 0, reason: 'no' }) },
-  'POST /api/visits/:visitId/not-reached': { may: ['desk'], path: (t) => `/api/visits/${t.visitId}/not-reached`, body: () => ({ expectedVersion: 99 }) },
-  'POST /api/visits/:visitId/free': { may: ['desk'], path: (t) => `/api/visits/${t.visitId}/free`, body: () => ({ expectedVersion: 99, reason: 'closed' }) },
+  'POST /api/visits/:visitId/place': {
+    may: ['desk'],
+    path: (t) => `/api/visits/${t.visitId}/place`,
+    body: () => ({ expectedVersion: 0, ...day }),
+  },
+  'POST /api/visits/:visitId/decline': {
+    may: ['desk'],
+    path: (t) => `/api/visits/${t.visitId}/decline`,
+    body: () => ({ expectedVersion: 0, reason: 'no' }),
+  },
+  'POST /api/visits/:visitId/not-reached': {
+    may: ['desk'],
+    path: (t) => `/api/visits/${t.visitId}/not-reached`,
+    body: () => ({ expectedVersion: 99 }),
+  },
+  'POST /api/visits/:visitId/free': {
+    may: ['desk'],
+    path: (t) => `/api/visits/${t.visitId}/free`,
+    body: () => ({ expectedVersion: 99, reason: 'closed' }),
+  },
   'POST /api/visits/:visitId/move': {
     may: ['superintendent', 'desk'],
     path: (t) => `/api/visits/${t.visitId}/move`,
@@ -170,7 +251,11 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     path: (t) => `/api/visits/${t.visitId}/withdraw`,
     body: () => ({ expectedVersion: 99, reason: 'weather' }),
   },
-  'POST /api/visits/:visitId/test-up': { may: ['plumber'], path: (t) => `/api/visits/${t.visitId}/test-up`, body: correctionMove },
+  'POST /api/visits/:visitId/test-up': {
+    may: ['plumber'],
+    path: (t) => `/api/visits/${t.visitId}/test-up`,
+    body: correctionMove,
+  },
   'POST /api/visits/:visitId/no-longer-up': {
     may: ['plumber', ...inspectors],
     path: (t) => `/api/visits/${t.visitId}/no-longer-up`,
@@ -181,7 +266,11 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     path: (t) => `/api/visits/${t.visitId}/begin`,
     body: () => ({ expectedVersion: 99, ...write(), isTakingOver: true }),
   },
-  'POST /api/visits/:visitId/undo-begin': { may: inspectors, path: (t) => `/api/visits/${t.visitId}/undo-begin`, body: () => ({ expectedVersion: 99 }) },
+  'POST /api/visits/:visitId/undo-begin': {
+    may: inspectors,
+    path: (t) => `/api/visits/${t.visitId}/undo-begin`,
+    body: () => ({ expectedVersion: 99 }),
+  },
   'POST /api/visits/:visitId/outcome': {
     may: inspectors,
     path: (t) => `/api/visits/${t.visitId}/outcome`,
@@ -207,15 +296,27 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     path: (t) => `/api/holds/${t.holdId}/readings`,
     body: () => ({ ...write(), levelIn: 1 }),
   },
-  'POST /api/readings/:readingId/strike': { may: ['plumber'], path: (t) => `/api/readings/${t.readingId}/strike`, body: () => ({ why: 'typed wrong' }) },
-  'POST /api/holds/:holdId/end': { may: ['plumber'], path: (t) => `/api/holds/${t.holdId}/end`, body: () => ({ ...write(), reason: 'taken-down' }) },
+  'POST /api/readings/:readingId/strike': {
+    may: ['plumber'],
+    path: (t) => `/api/readings/${t.readingId}/strike`,
+    body: () => ({ why: 'typed wrong' }),
+  },
+  'POST /api/holds/:holdId/end': {
+    may: ['plumber'],
+    path: (t) => `/api/holds/${t.holdId}/end`,
+    body: () => ({ ...write(), reason: 'taken-down' }),
+  },
 
   'POST /api/corrections/:correctionId/fixed': {
     may: ['plumber'],
     path: (t) => `/api/corrections/${t.correctionId}/fixed`,
     body: () => ({ ...correctionMove(), note: 'done' }),
   },
-  'POST /api/corrections/:correctionId/accept': { may: inspectors, path: (t) => `/api/corrections/${t.correctionId}/accept`, body: correctionMove },
+  'POST /api/corrections/:correctionId/accept': {
+    may: inspectors,
+    path: (t) => `/api/corrections/${t.correctionId}/accept`,
+    body: correctionMove,
+  },
   'POST /api/corrections/:correctionId/reopen': {
     may: inspectors,
     path: (t) => `/api/corrections/${t.correctionId}/reopen`,
@@ -227,4 +328,3 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
   // last: it ends the sessions the others use
   'POST /api/auth/sign-out-everywhere': { may: 'signed-in' },
 };
-

@@ -26,11 +26,16 @@ export async function makeThings(server: TestApp, world: World) {
   const closedVisitId = await makeClosedVisit(world, closedLot.id);
   const correctionId = await makeCorrection(world, closedLot.id, closedVisitId);
   await makeConsent(server, world, askedLot.id);
-  const invitation = await post(world, 'builderOwner', `/api/organizations/${world.organizations.builder.id}/invitations`, {
-    email: 'invited@example.test',
-    name: 'Invited',
-    roles: ['superintendent'],
-  });
+  const invitation = await post(
+    world,
+    'builderOwner',
+    `/api/organizations/${world.organizations.builder.id}/invitations`,
+    {
+      email: 'invited@example.test',
+      name: 'Invited',
+      roles: ['superintendent'],
+    },
+  );
   const draft = await post(world, 'desk', `/api/departments/${world.organizations.department.id}/rule-cards`, {});
   const closure = await post(world, 'desk', `/api/departments/${world.organizations.department.id}/closures`, {
     date: '2027-12-07',
@@ -157,7 +162,14 @@ async function makeConsent(server: TestApp, world: World, lotId: string): Promis
 
 async function makeGivenUpDelivery(): Promise<string> {
   const at = new Date('2027-02-25T17:00:00Z');
-  const event = await OutboxEventModel.create({ id: randomUUID(), kind: 'comment', payload: {}, at, processedAt: at, nextAttemptAt: at });
+  const event = await OutboxEventModel.create({
+    id: randomUUID(),
+    kind: 'comment',
+    payload: {},
+    at,
+    processedAt: at,
+    nextAttemptAt: at,
+  });
   const delivery = await DeliveryModel.create({
     id: randomUUID(),
     eventId: event.id,

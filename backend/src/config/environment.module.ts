@@ -8,6 +8,10 @@ export const ENVIRONMENT = Symbol('environment');
 @Module({})
 export class EnvironmentModule {
   static of(environment: Environment): DynamicModule {
-    return { module: EnvironmentModule, providers: [{ provide: ENVIRONMENT, useValue: environment }], exports: [ENVIRONMENT] };
+    return {
+      module: EnvironmentModule,
+      providers: [{ provide: ENVIRONMENT, useValue: environment }],
+      exports: [ENVIRONMENT],
+    };
   }
 }

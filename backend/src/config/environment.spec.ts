@@ -28,6 +28,8 @@ describe('the environment', () => {
 
   it('refuses a short secret and one role for schema and server', () => {
     expect(() => readEnvironment({ ...whole, JWT_SECRET: 'short' })).toThrowError(/JWT_SECRET needs 32/);
-    expect(() => readEnvironment({ ...whole, DATABASE_MIGRATION_URL: whole.DATABASE_URL })).toThrowError(/another role/);
+    expect(() => readEnvironment({ ...whole, DATABASE_MIGRATION_URL: whole.DATABASE_URL })).toThrowError(
+      /another role/,
+    );
   });
 });

@@ -36,7 +36,9 @@ export class EnvironmentError extends Error {}
 export function readEnvironment(variables: Record<string, string | undefined>): Environment {
   const given = Object.fromEntries(Object.entries(variables).filter(([, value]) => value !== ''));
   const parsed = environmentSchema.safeParse(given);
-  const faults = parsed.success ? [] : parsed.error.issues.map((issue) => faultOf(String(issue.path[0]), issue.message, given));
+  const faults = parsed.success
+    ? []
+    : parsed.error.issues.map((issue) => faultOf(String(issue.path[0]), issue.message, given));
   if (parsed.success) faults.push(...productionFaults(parsed.data));
   if (faults.length > 0) {
     throw new EnvironmentError(
@@ -53,5 +55,7 @@ function faultOf(name: string, message: string, given: Record<string, string | u
 function productionFaults(environment: Environment): string[] {
   if (environment.HOLDWATER_MODE !== 'production' || environment.DATABASE_MIGRATION_URL === undefined) return [];
   const isOneRole = new URL(environment.DATABASE_URL).username === new URL(environment.DATABASE_MIGRATION_URL).username;
-  return isOneRole ? ['DATABASE_URL must use another role than DATABASE_MIGRATION_URL: the server may not own the ledger'] : [];
+  return isOneRole
+    ? ['DATABASE_URL must use another role than DATABASE_MIGRATION_URL: the server may not own the ledger']
+    : [];
 }

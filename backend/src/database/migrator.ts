@@ -28,7 +28,10 @@ export async function rollBack(ownerUrl: string, steps: number): Promise<void> {
 
 /** Names of the steps a database has not had yet. */
 export async function pendingMigrations(db: Sequelize): Promise<string[]> {
-  const rows = await db.query<{ name: string }>('SELECT name FROM schema_steps', { raw: true, type: 'SELECT' as never });
+  const rows = await db.query<{ name: string }>('SELECT name FROM schema_steps', {
+    raw: true,
+    type: 'SELECT' as never,
+  });
   const done = new Set((rows as Array<{ name: string }>).map((row) => row.name));
   return migrations.map((step) => step.name).filter((name) => !done.has(name));
 }

@@ -17,5 +17,7 @@ export interface HashedEntry {
 
 /** SHA-256 over the canonical JSON (RFC 8785) of an entry, the hash before it included. */
 export function hashOf(entry: HashedEntry): string {
-  return createHash('sha256').update(canonicalize(entry) ?? '').digest('hex');
+  return createHash('sha256')
+    .update(canonicalize(entry) ?? '')
+    .digest('hex');
 }

@@ -5,5 +5,10 @@ import { LedgerQueries } from './ledger.queries.js';
 import { LedgerVerifier } from './ledger.verifier.js';
 
 /** Reading and checking the ledger; writing it is `LedgerModule`, which everything uses. */
-@Module({ imports: [LotsModule], controllers: [LedgerController], providers: [LedgerQueries, LedgerVerifier], exports: [LedgerVerifier] })
+@Module({
+  imports: [LotsModule],
+  controllers: [LedgerController],
+  providers: [LedgerQueries, LedgerVerifier],
+  exports: [LedgerVerifier],
+})
 export class LedgerReadingModule {}

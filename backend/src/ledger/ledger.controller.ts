@@ -25,7 +25,10 @@ export class LedgerController {
   }
 
   @ContractRoute(verifyLotLedger, signedIn('lots.canReadLot'))
-  async verify(@CurrentActor() actor: Actor, @Input() input: RouteInput<typeof verifyLotLedger>): Promise<ChainVerdict> {
+  async verify(
+    @CurrentActor() actor: Actor,
+    @Input() input: RouteInput<typeof verifyLotLedger>,
+  ): Promise<ChainVerdict> {
     const lot = await this.lots.getLotFor(actor, input.params.lotId);
     return this.verifier.verify(`lot:${lot.id}`);
   }

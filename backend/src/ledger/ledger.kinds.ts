@@ -30,14 +30,27 @@ export interface LedgerPayloads {
   'visit-freed': { visitId: string; reason: string };
   'visit-not-reached': { visitId: string };
   'test-started': { holdId: string; system: string; ordinal: number; method: string; unitNumber: number };
-  'reading-added': { holdId: string; system: string; readingId: string; pressurePsi: number | null; levelIn: number | null; gaugeValve: string | null; madeAt: string };
+  'reading-added': {
+    holdId: string;
+    system: string;
+    readingId: string;
+    pressurePsi: number | null;
+    levelIn: number | null;
+    gaugeValve: string | null;
+    madeAt: string;
+  };
   'reading-struck': { holdId: string; readingId: string; why: string };
   'test-ended': { holdId: string; system: string; ordinal: number; reason: string };
   'test-up': { visitId: string; readingIds: string[]; madeAt: string };
   'no-longer-up': { visitId: string };
   'visit-begun': { visitId: string; takenOver: boolean };
   'visit-begin-undone': { visitId: string };
-  outcome: { visitId: string; kind: string; reason: string | null; systems: Array<{ unitNumber: number; system: string; answer: string }> };
+  outcome: {
+    visitId: string;
+    kind: string;
+    reason: string | null;
+    systems: Array<{ unitNumber: number; system: string; answer: string }>;
+  };
   'correction-opened': { correctionId: string; number: number; subject: string; severity: string };
   'correction-fixed': { correctionId: string; number: number };
   'correction-accepted': { correctionId: string; number: number };

@@ -31,10 +31,13 @@ export class LedgerQueries {
   }
 
   private async countOfLot(lotId: string): Promise<number> {
-    const [row] = await this.sequelize.query<{ count: number }>('SELECT count(*)::int AS count FROM ledger_entries WHERE lot_id = :lotId', {
-      replacements: { lotId },
-      type: QueryTypes.SELECT,
-    });
+    const [row] = await this.sequelize.query<{ count: number }>(
+      'SELECT count(*)::int AS count FROM ledger_entries WHERE lot_id = :lotId',
+      {
+        replacements: { lotId },
+        type: QueryTypes.SELECT,
+      },
+    );
     return row?.count ?? 0;
   }
 }

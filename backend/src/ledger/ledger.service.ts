@@ -34,7 +34,12 @@ export class Ledger {
     private readonly unitOfWork: UnitOfWork,
   ) {}
 
-  async appendToLot<K extends keyof LedgerPayloads>(lotId: string, kind: K, payload: LedgerPayloads[K], actor: LedgerActor | null): Promise<number> {
+  async appendToLot<K extends keyof LedgerPayloads>(
+    lotId: string,
+    kind: K,
+    payload: LedgerPayloads[K],
+    actor: LedgerActor | null,
+  ): Promise<number> {
     const sequence = await this.append(`lot:${lotId}`, lotId, kind, payload, actor);
     this.changes.lot(lotId, 'ledger');
     return sequence;
@@ -49,7 +54,13 @@ export class Ledger {
     return this.append(scope, null, kind, payload, actor);
   }
 
-  private async append(scope: string, lotId: string | null, kind: string, payload: object, actor: LedgerActor | null): Promise<number> {
+  private async append(
+    scope: string,
+    lotId: string | null,
+    kind: string,
+    payload: object,
+    actor: LedgerActor | null,
+  ): Promise<number> {
     return this.unitOfWork.run(async () => {
       const head = await this.lockHead(scope);
       const at = this.clock.now();
@@ -76,10 +87,13 @@ export class Ledger {
       'INSERT INTO ledger_heads (scope, sequence, hash) VALUES (:scope, 0, :hash) ON CONFLICT (scope) DO NOTHING',
       { replacements: { scope, hash: genesisHash }, type: QueryTypes.INSERT },
     );
-    const [head] = await this.sequelize.query<Head>('SELECT sequence, hash FROM ledger_heads WHERE scope = :scope FOR UPDATE', {
-      replacements: { scope },
-      type: QueryTypes.SELECT,
-    });
+    const [head] = await this.sequelize.query<Head>(
+      'SELECT sequence, hash FROM ledger_heads WHERE scope = :scope FOR UPDATE',
+      {
+        replacements: { scope },
+        type: QueryTypes.SELECT,
+      },
+    );
     return head ?? { sequence: 0, hash: genesisHash };
   }
 

@@ -51,7 +51,9 @@ describe('the ledger', () => {
 
   it('points at the entry that was altered', async () => {
     for (const text of ['a', 'b', 'c']) await say(3, text);
-    await unguarded(`UPDATE ledger_entries SET payload = '{"commentId":"forged"}' WHERE lot_id = $1 AND sequence = 2`, [world.lots[3].id]);
+    await unguarded(`UPDATE ledger_entries SET payload = '{"commentId":"forged"}' WHERE lot_id = $1 AND sequence = 2`, [
+      world.lots[3].id,
+    ]);
     expect((await check(3)).body).toMatchObject({ isWhole: false, firstBroken: 2 });
   });
 

@@ -36,7 +36,8 @@ export class LedgerVerifier {
     for (;;) {
       const rows = await this.read(scope, sequence);
       for (const row of rows) {
-        if (!fits(scope, row, sequence + 1, previousHash)) return { isWhole: false, entries: sequence, firstBroken: sequence + 1 };
+        if (!fits(scope, row, sequence + 1, previousHash))
+          return { isWhole: false, entries: sequence, firstBroken: sequence + 1 };
         sequence = row.sequence;
         previousHash = row.hash;
       }
@@ -47,7 +48,11 @@ export class LedgerVerifier {
   }
 
   /** Every chain there is; answers those that are broken. */
-  async verifyAll(): Promise<{ chains: number; entries: number; broken: Array<{ scope: string; firstBroken: number }> }> {
+  async verifyAll(): Promise<{
+    chains: number;
+    entries: number;
+    broken: Array<{ scope: string; firstBroken: number }>;
+  }> {
     const scopes = await this.sequelize.query<{ scope: string }>(
       'SELECT scope FROM ledger_heads UNION SELECT DISTINCT scope FROM ledger_entries ORDER BY scope',
       { type: QueryTypes.SELECT },
@@ -81,5 +86,9 @@ export class LedgerVerifier {
 
 function fits(scope: string, row: EntryRow, sequence: number, previousHash: string): boolean {
   const { hash, at, ...rest } = row;
-  return row.sequence === sequence && row.previousHash === previousHash && hashOf({ scope, ...rest, at: at.toISOString() }) === hash;
+  return (
+    row.sequence === sequence &&
+    row.previousHash === previousHash &&
+    hashOf({ scope, ...rest, at: at.toISOString() }) === hash
+  );
 }

@@ -2,7 +2,14 @@ import { noticeKinds } from '@holdwater/shared-types/notices/notice.contract.js'
 import { describe, expect, it } from 'vitest';
 import { noticeRules, recipientsOf } from './notice.rules.js';
 
-const people = { superintendents: ['della'], plumbers: ['ruben', 'ida'], inspector: ['noor'], desk: ['wes'], opener: ['noor'], asked: ['ida'] };
+const people = {
+  superintendents: ['della'],
+  plumbers: ['ruben', 'ida'],
+  inspector: ['noor'],
+  desk: ['wes'],
+  opener: ['noor'],
+  asked: ['ida'],
+};
 
 describe('who is told of what', () => {
   it('has a rule for every kind of notice', () => {
@@ -28,7 +35,8 @@ describe('who is told of what', () => {
   it('tells nobody of their own act where no calendar is concerned', () => {
     for (const kind of noticeKinds) {
       if (noticeRules[kind].calendar) continue;
-      for (const id of ['della', 'ruben', 'noor', 'wes']) expect(recipientsOf(kind, people, id, false).has(id)).toBe(false);
+      for (const id of ['della', 'ruben', 'noor', 'wes'])
+        expect(recipientsOf(kind, people, id, false).has(id)).toBe(false);
     }
   });
 });

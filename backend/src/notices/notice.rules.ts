@@ -20,12 +20,36 @@ export interface NoticeRule {
  */
 export const noticeRules: Readonly<Record<NoticeKind, NoticeRule>> = {
   'visit-requested': { page: ['desk', 'superintendents', 'plumbers'], email: ['desk'] },
-  'visit-booked': { page: ['superintendents', 'plumbers', 'inspector', 'desk'], email: ['superintendents', 'plumbers', 'inspector'], calendar: 'request' },
-  'visit-moved': { page: ['superintendents', 'plumbers', 'inspector', 'desk'], email: ['superintendents', 'plumbers', 'inspector'], calendar: 'request' },
-  'visit-withdrawn': { page: ['superintendents', 'plumbers', 'inspector', 'desk'], email: ['superintendents', 'plumbers', 'inspector'], calendar: 'cancel' },
-  'visit-declined': { page: ['superintendents', 'plumbers'], email: ['superintendents', 'plumbers'], calendar: 'cancel' },
-  'visit-freed': { page: ['superintendents', 'plumbers', 'inspector', 'desk'], email: ['superintendents', 'plumbers', 'inspector'], calendar: 'cancel' },
-  'visit-not-reached': { page: ['superintendents', 'plumbers', 'inspector'], email: ['superintendents', 'plumbers', 'inspector'], calendar: 'cancel' },
+  'visit-booked': {
+    page: ['superintendents', 'plumbers', 'inspector', 'desk'],
+    email: ['superintendents', 'plumbers', 'inspector'],
+    calendar: 'request',
+  },
+  'visit-moved': {
+    page: ['superintendents', 'plumbers', 'inspector', 'desk'],
+    email: ['superintendents', 'plumbers', 'inspector'],
+    calendar: 'request',
+  },
+  'visit-withdrawn': {
+    page: ['superintendents', 'plumbers', 'inspector', 'desk'],
+    email: ['superintendents', 'plumbers', 'inspector'],
+    calendar: 'cancel',
+  },
+  'visit-declined': {
+    page: ['superintendents', 'plumbers'],
+    email: ['superintendents', 'plumbers'],
+    calendar: 'cancel',
+  },
+  'visit-freed': {
+    page: ['superintendents', 'plumbers', 'inspector', 'desk'],
+    email: ['superintendents', 'plumbers', 'inspector'],
+    calendar: 'cancel',
+  },
+  'visit-not-reached': {
+    page: ['superintendents', 'plumbers', 'inspector'],
+    email: ['superintendents', 'plumbers', 'inspector'],
+    calendar: 'cancel',
+  },
   'test-up': { page: ['superintendents', 'inspector'], email: [] },
   'no-longer-up': { page: ['superintendents', 'inspector', 'plumbers'], email: [] },
   'visit-underway': { page: ['superintendents', 'plumbers'], email: [] },
@@ -38,7 +62,10 @@ export const noticeRules: Readonly<Record<NoticeKind, NoticeRule>> = {
   'consent-asked': { page: ['asked'], email: ['asked'] },
   'consent-given': { page: ['superintendents'], email: [] },
   'consent-refused': { page: ['superintendents'], email: ['superintendents'] },
-  'rule-card-published': { page: ['superintendents', 'plumbers', 'inspector', 'desk'], email: ['superintendents', 'plumbers'] },
+  'rule-card-published': {
+    page: ['superintendents', 'plumbers', 'inspector', 'desk'],
+    email: ['superintendents', 'plumbers'],
+  },
 };
 
 export interface Channels {

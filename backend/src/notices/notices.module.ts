@@ -18,7 +18,17 @@ import { OutboxWorker } from './outbox-worker.service.js';
 @Module({
   imports: [SequelizeModule.forFeature([OutboxEventModel, NoticeModel, DeliveryModel])],
   controllers: [NoticesController],
-  providers: [Audiences, DeliveryWorker, EventFactsQueries, ExpandEvent, Mailer, Notices, OutboxWake, OutboxWorker, StillConcerned],
+  providers: [
+    Audiences,
+    DeliveryWorker,
+    EventFactsQueries,
+    ExpandEvent,
+    Mailer,
+    Notices,
+    OutboxWake,
+    OutboxWorker,
+    StillConcerned,
+  ],
   exports: [OutboxWorker],
 })
 export class NoticesModule {}

@@ -30,7 +30,11 @@ export class Notices {
       { replacements: { personId: actor.personId, at, id, take: limit + 1 }, type: QueryTypes.SELECT },
     );
     const page = toPage(rows, limit, (row) => [row.at.toISOString(), row.id]);
-    const items = page.items.map((row): Notice => ({ ...row, at: row.at.toISOString(), readAt: row.readAt?.toISOString() ?? null }));
+    const items = page.items.map((row): Notice => ({
+      ...row,
+      at: row.at.toISOString(),
+      readAt: row.readAt?.toISOString() ?? null,
+    }));
     return { items, nextCursor: page.nextCursor, unread: await this.countUnread(actor) };
   }
 
@@ -40,7 +44,10 @@ export class Notices {
       await this.sequelize.query(
         `UPDATE notices SET read_at = :now WHERE person_id = :personId AND read_at IS NULL
          ${ids ? 'AND id = ANY (ARRAY[:ids]::uuid[])' : ''}`,
-        { replacements: { personId: actor.personId, now: this.clock.now(), ids: ids ? [...ids] : [] }, type: QueryTypes.UPDATE },
+        {
+          replacements: { personId: actor.personId, now: this.clock.now(), ids: ids ? [...ids] : [] },
+          type: QueryTypes.UPDATE,
+        },
       );
       return { done: true } as const;
     });

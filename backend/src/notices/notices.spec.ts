@@ -50,13 +50,14 @@ describe('notices of a visit', () => {
     expect(answer.body).toMatchObject({ visits: [{ state: 'booked' }] });
     return answer.body.visits[0] as { id: string; version: number; window: { startAt: string; endAt: string } };
   };
-  const mailsOf = async (person: string) => (await mailbox.messages({ to: `${person}@example.test` })).filter(({ calendars }) => calendars.length > 0);
+  const mailsOf = (person: string) =>
+    mailbox.messages({ to: `${person}@example.test` }).filter(({ calendars }) => calendars.length > 0);
 
   it('invites all three parties once, moves the same entry, and takes it away', async () => {
     const visit = await request(0, '2027-03-04', 'mid');
     await drain();
     for (const person of ['superintendent', 'plumber']) {
-      const [mail, ...more] = await mailsOf(person);
+      const [mail, ...more] = mailsOf(person);
       expect(more).toEqual([]);
       const [part] = mail?.calendars ?? [];
       // RFC 5546 and RFC 6047: the method stands in the content type too
@@ -75,23 +76,27 @@ describe('notices of a visit', () => {
       expect(part?.text).toMatch(/DTSTAMP:\d{8}T\d{6}Z/);
       for (const line of (part?.text ?? '').split(/\r?\n/)) expect(Buffer.byteLength(line)).toBeLessThanOrEqual(75);
     }
-    const first = readInvite((await mailsOf('plumber'))[0]?.calendars[0]?.text ?? '');
+    const first = readInvite(mailsOf('plumber')[0]?.calendars[0]?.text ?? '');
 
-    const moved = await world.as('superintendent').post(`/api/visits/${visit.id}/move`, { expectedVersion: visit.version, date: '2027-03-08', label: 'early' });
+    const moved = await world
+      .as('superintendent')
+      .post(`/api/visits/${visit.id}/move`, { expectedVersion: visit.version, date: '2027-03-08', label: 'early' });
     expect(moved.status).toBe(200);
     await drain();
-    const second = readInvite((await mailsOf('plumber'))[0]?.calendars[0]?.text ?? '');
+    const second = readInvite(mailsOf('plumber')[0]?.calendars[0]?.text ?? '');
     expect(second.uid).toBe(first.uid);
     expect(second.sequence).toBeGreaterThan(first.sequence);
     expect(second.start).toBe(moved.body.window.startAt);
 
-    const withdrawn = await world.as('superintendent').post(`/api/visits/${visit.id}/withdraw`, { expectedVersion: moved.body.version, reason: 'weather' });
+    const withdrawn = await world
+      .as('superintendent')
+      .post(`/api/visits/${visit.id}/withdraw`, { expectedVersion: moved.body.version, reason: 'weather' });
     expect(withdrawn.status).toBe(200);
     await drain();
-    const last = readInvite((await mailsOf('plumber'))[0]?.calendars[0]?.text ?? '');
+    const last = readInvite(mailsOf('plumber')[0]?.calendars[0]?.text ?? '');
     expect(last).toMatchObject({ method: 'CANCEL', status: 'CANCELLED', uid: first.uid });
     expect(last.sequence).toBeGreaterThan(second.sequence);
-    expect(await mailsOf('plumber')).toHaveLength(3);
+    expect(mailsOf('plumber')).toHaveLength(3);
   });
 
   it('sends once, in order, after the mail server was away', async () => {
@@ -99,16 +104,20 @@ describe('notices of a visit', () => {
     mailbox.setScenario({ mode: 'temporary-failure' });
     const visit = await request(1, '2027-03-09', 'mid');
     await drain();
-    const moved = await world.as('superintendent').post(`/api/visits/${visit.id}/move`, { expectedVersion: visit.version, date: '2027-03-10', label: 'mid' });
+    const moved = await world
+      .as('superintendent')
+      .post(`/api/visits/${visit.id}/move`, { expectedVersion: visit.version, date: '2027-03-10', label: 'mid' });
     expect(moved.status).toBe(200);
     await drain();
-    expect(await mailsOf('plumber')).toEqual([]);
+    expect(mailsOf('plumber')).toEqual([]);
     mailbox.setScenario({ mode: 'accept' });
     for (let tries = 0; tries < 8; tries += 1) {
       server.clock.advance(2);
       await drain();
     }
-    const invites = (await mailsOf('plumber')).map(({ calendars }) => readInvite(calendars[0]?.text ?? '')).reverse();
+    const invites = mailsOf('plumber')
+      .map(({ calendars }) => readInvite(calendars[0]?.text ?? ''))
+      .reverse();
     expect(invites).toHaveLength(2);
     expect(invites[0]?.sequence).toBeLessThan(invites[1]?.sequence ?? 0);
     expect(invites[0]?.start).toBe(visit.window.startAt);
@@ -118,11 +127,15 @@ describe('notices of a visit', () => {
     await mailbox.clear();
     await request(2, '2027-03-09', 'late');
     // the first server never drains: another one on the same database, started later, does
-    other = await startTestApp({ database: server.database, environment: { SMTP_URL: mailbox.smtpUrl }, now: server.clock.now().toISOString() });
+    other = await startTestApp({
+      database: server.database,
+      environment: { SMTP_URL: mailbox.smtpUrl },
+      now: server.clock.now().toISOString(),
+    });
     await Promise.all([other.get(OutboxWorker).drain(), drain()]);
     await Promise.all([other.get(OutboxWorker).drain(), drain()]);
-    expect(await mailsOf('plumber')).toHaveLength(1);
-    expect(await mailsOf('superintendent')).toHaveLength(1);
+    expect(mailsOf('plumber')).toHaveLength(1);
+    expect(mailsOf('superintendent')).toHaveLength(1);
   });
 
   it('shows notices on the page to those told, as unread until read', async () => {
@@ -149,7 +162,7 @@ describe('notices of a visit', () => {
     mailbox.setScenario({ mode: 'accept' });
     await world.as('operator').post(`/api/operations/deliveries/${pile.items[0].id}/retry`);
     await drain();
-    expect(await mailsOf('plumber')).toHaveLength(1);
+    expect(mailsOf('plumber')).toHaveLength(1);
   });
 
   it('tells a lot whose words carry signs of markup without making any', async () => {
@@ -157,7 +170,7 @@ describe('notices of a visit', () => {
     await server.db.query(`UPDATE lots SET address = '<b>12</b> & Co' WHERE id = '${world.lots[4].id}'`);
     await request(4, '2027-03-11', 'noon');
     await drain();
-    const [mail] = await mailsOf('plumber');
+    const [mail] = mailsOf('plumber');
     expect(mail?.html).toContain('&lt;b&gt;12&lt;/b&gt; &amp; Co');
     expect(mail?.text).toContain('<b>12</b> & Co');
   });

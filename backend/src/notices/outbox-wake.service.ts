@@ -59,7 +59,10 @@ export class OutboxWake implements OnApplicationBootstrap, OnApplicationShutdown
   wake(): void {
     if (!this.isOpen) return;
     if (this.isWorker) this.drain();
-    else void this.boss.send(outboxQueue, {}).catch((error: unknown) => this.logger.warn({ err: error }, 'wake was not sent'));
+    else
+      void this.boss
+        .send(outboxQueue, {})
+        .catch((error: unknown) => this.logger.warn({ err: error }, 'wake was not sent'));
   }
 
   @Interval(sweepMs)
@@ -68,6 +71,8 @@ export class OutboxWake implements OnApplicationBootstrap, OnApplicationShutdown
   }
 
   private drain(): void {
-    void this.worker.drain().catch((error: unknown) => this.logger.warn({ err: error }, 'the outbox waits for the database'));
+    void this.worker
+      .drain()
+      .catch((error: unknown) => this.logger.warn({ err: error }, 'the outbox waits for the database'));
   }
 }

@@ -28,7 +28,11 @@ export class Outbox {
     private readonly emitter: EventEmitter2,
   ) {}
 
-  async add<K extends keyof OutboxPayloads>(kind: K, subject: OutboxSubject, payload: OutboxPayloads[K]): Promise<void> {
+  async add<K extends keyof OutboxPayloads>(
+    kind: K,
+    subject: OutboxSubject,
+    payload: OutboxPayloads[K],
+  ): Promise<void> {
     await this.unitOfWork.run(async () => {
       const at = this.clock.now();
       await this.events.create({

@@ -3,7 +3,11 @@ import type { ServedRoute } from './openapi.js';
 const entities: Record<string, string> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;' };
 const escape = (text: string) => text.replaceAll(/[&<>"]/g, (sign) => entities[sign] ?? sign);
 
-const who: Record<ServedRoute['access']['kind'], string> = { anyone: 'anyone', 'signed-in': 'signed in', operator: 'operator' };
+const who: Record<ServedRoute['access']['kind'], string> = {
+  anyone: 'anyone',
+  'signed-in': 'signed in',
+  operator: 'operator',
+};
 
 const style = `
   body{margin:0;background:#ECEEEB;color:#1C1A22;font:400 14px/20px "IBM Plex Sans",system-ui,sans-serif}

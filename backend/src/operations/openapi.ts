@@ -29,7 +29,9 @@ export class OpenApi {
       const prototype = Object.getPrototypeOf(instance) as Record<string, object>;
       return this.scanner.getAllMethodNames(prototype).flatMap((name) => servedBy(prototype[name]));
     });
-    return served.sort((a, b) => a.contract.path.localeCompare(b.contract.path) || a.contract.method.localeCompare(b.contract.method));
+    return served.sort(
+      (a, b) => a.contract.path.localeCompare(b.contract.path) || a.contract.method.localeCompare(b.contract.method),
+    );
   }
 
   /** The document; made once. */
@@ -39,7 +41,8 @@ export class OpenApi {
       info: {
         title: 'Holdwater',
         version: '1',
-        description: 'The shared calendar and lot file of builder, plumber and building department. Writes may carry an Idempotency-Key.',
+        description:
+          'The shared calendar and lot file of builder, plumber and building department. Writes may carry an Idempotency-Key.',
       },
       paths: this.paths(),
       components: {
@@ -85,7 +88,10 @@ function operationOf({ contract, access }: ServedRoute): Json {
 
 function parametersOf(schema: z.ZodType | undefined, place: 'path' | 'query'): Json[] {
   if (!schema) return [];
-  const { properties = {}, required = [] } = schemaOf(schema, 'input') as { properties?: Record<string, Json>; required?: string[] };
+  const { properties = {}, required = [] } = schemaOf(schema, 'input') as {
+    properties?: Record<string, Json>;
+    required?: string[];
+  };
   return Object.entries(properties).map(([name, each]) => ({
     name,
     in: place,
@@ -99,6 +105,10 @@ function json(schema: Json): Json {
 }
 
 function schemaOf(schema: z.ZodType, io: 'input' | 'output'): Json {
-  const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, { io, unrepresentable: 'any', target: 'draft-2020-12' });
-  return rest as Json;
+  const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, {
+    io,
+    unrepresentable: 'any',
+    target: 'draft-2020-12',
+  });
+  return rest;
 }

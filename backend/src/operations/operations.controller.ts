@@ -1,6 +1,12 @@
 import { Controller, Get, Header, HttpStatus, Res, SetMetadata } from '@nestjs/common';
 import type { RouteInput } from '@holdwater/shared-types/common/route.js';
-import { health, listDeliveries, ready, retryDelivery, verifyLedger } from '@holdwater/shared-types/operations/operations.contract.js';
+import {
+  health,
+  listDeliveries,
+  ready,
+  retryDelivery,
+  verifyLedger,
+} from '@holdwater/shared-types/operations/operations.contract.js';
 import type { Response } from 'express';
 import { ACCESS, anyone, operatorOnly } from '../common/access/access.js';
 import { Input } from '../common/contract/contract-input.js';

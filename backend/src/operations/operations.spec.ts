@@ -21,7 +21,9 @@ describe('operations', () => {
   it('describes every contract it serves, and every reference in the description leads somewhere', async () => {
     const document = (await world.nobody().get('/api/openapi.json')).body;
     expect(document.openapi).toBe('3.1.0');
-    const operations = Object.values<object>(document.paths).flatMap((path) => Object.values<{ operationId: string }>(path as never));
+    const operations = Object.values<object>(document.paths).flatMap((path) =>
+      Object.values<{ operationId: string }>(path as never),
+    );
     expect(operations).toHaveLength(server.get(OpenApi).routes().length);
     expect(new Set(operations.map(({ operationId }) => operationId)).size).toBe(operations.length);
     const references = JSON.stringify(document).match(/"\$ref":"#\/components[^"]+"/g) ?? [];
@@ -39,7 +41,8 @@ describe('operations', () => {
   it('shows deliveries and the ledger to the operator alone', async () => {
     for (const path of ['/api/operations/deliveries', '/api/operations/ledger']) {
       expect((await world.as('operator').get(path)).status).toBe(200);
-      for (const person of ['builderOwner', 'desk', 'superintendent'] as const) expect((await world.as(person).get(path)).status).toBe(404);
+      for (const person of ['builderOwner', 'desk', 'superintendent'] as const)
+        expect((await world.as(person).get(path)).status).toBe(404);
       expect((await world.nobody().get(path)).status).toBe(401);
     }
   });

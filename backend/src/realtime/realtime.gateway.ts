@@ -8,7 +8,7 @@ import {
   WebSocketGateway,
   WebSocketServer,
 } from '@nestjs/websockets';
-import type { Server, Socket } from 'socket.io';
+import type { DefaultEventsMap, Server, Socket } from 'socket.io';
 import { z } from 'zod';
 import { Authentication } from '../accounts/sessions/authentication.service.js';
 import { type Actor, organizationIds } from '../common/access/actor.js';
@@ -16,7 +16,7 @@ import { LOT_CHANGED, type LotChange, PERSON_TOLD, type PersonTold } from '../co
 import { LotsQueries } from '../lots/lots.queries.js';
 import { canReadLot } from '../lots/lots.policy.js';
 
-type Known = Socket & { data: { actor: Actor } };
+type Known = Socket<DefaultEventsMap, DefaultEventsMap, DefaultEventsMap, { actor: Actor }>;
 
 const lotRequest = z.object({ lotId: z.uuid() });
 /** How often open sockets are asked again whether they still may. */
@@ -75,7 +75,7 @@ export class RealtimeGateway implements OnGatewayInit<Server> {
   /** A session that ended, a person disabled, a right lost: out within a minute, or at once where the lot itself changed hands. */
   @Interval(recheckMs)
   async recheck(): Promise<void> {
-    const sockets = [...(this.server?.sockets.sockets.values() ?? [])] as Known[];
+    const sockets = [...(this.server?.sockets.sockets.values() ?? [])] as unknown as Known[];
     for (const socket of sockets) {
       const actor = await this.authentication.findActor(socket.data.actor);
       if (actor === null) socket.disconnect(true);
@@ -93,7 +93,7 @@ export class RealtimeGateway implements OnGatewayInit<Server> {
         next(new Error('signed-out'));
         return;
       }
-      (socket as Known).data.actor = actor;
+      (socket as unknown as Known).data.actor = actor;
       await socket.join([personRoom(actor.personId), ...organizationIds(actor).map(organizationRoom)]);
       next();
     } catch {
@@ -116,7 +116,7 @@ export class RealtimeGateway implements OnGatewayInit<Server> {
     if (ids.size === 0) return;
     const lot = await this.lots.partiesOf(lotId);
     for (const id of ids) {
-      const socket = this.server.sockets.sockets.get(id) as Known | undefined;
+      const socket = this.server.sockets.sockets.get(id) as unknown as Known | undefined;
       if (socket && !canReadLot(socket.data.actor, lot)) await socket.leave(lotRoom(lotId));
     }
   }

@@ -39,7 +39,11 @@ describe('two servers on one database', () => {
     return { socket, answer: (await socket.emitWithAck('lot:watch', { lotId })) as { ok: boolean } };
   };
   const comment = (server: TestApp, lotId: string) =>
-    callerOf(server.url, world.tokenOf('helper')).post(`/api/lots/${lotId}/comments`, { clientId: randomUUID(), madeAt: testNow, text: 'here' });
+    callerOf(server.url, world.tokenOf('helper')).post(`/api/lots/${lotId}/comments`, {
+      clientId: randomUUID(),
+      madeAt: testNow,
+      text: 'here',
+    });
   const next = (socket: Socket, event: string) => new Promise<unknown>((resolve) => socket.once(event, resolve));
 
   it('tells on one what was written on the other', async () => {
@@ -80,7 +84,11 @@ describe('two servers on one database', () => {
     socket.on('changed', (change) => heard.push(change));
     const { socket: insider } = await watching(one, 'inspector', lotId);
     const told = next(insider, 'changed');
-    await callerOf(one.url, world.tokenOf('inspector')).post(`/api/lots/${lotId}/comments`, { clientId: randomUUID(), madeAt: testNow, text: 'still' });
+    await callerOf(one.url, world.tokenOf('inspector')).post(`/api/lots/${lotId}/comments`, {
+      clientId: randomUUID(),
+      madeAt: testNow,
+      text: 'still',
+    });
     await told;
     await socket.emitWithAck('lot:unwatch', { lotId });
     expect(heard).toEqual([]);
@@ -97,7 +105,10 @@ describe('two servers on one database', () => {
     socket.disconnect();
     const { socket: back } = await watching(two, 'desk', lotId);
     const heardOfThread = new Promise<string>((resolve) => {
-      back.on('changed', (change: { lotId: string; topics: string[] }) => change.topics.includes('thread') && resolve(change.lotId));
+      back.on(
+        'changed',
+        (change: { lotId: string; topics: string[] }) => change.topics.includes('thread') && resolve(change.lotId),
+      );
     });
     await comment(one, lotId);
     expect(await heardOfThread).toBe(lotId);

@@ -20,7 +20,7 @@ export class SocketAdapter extends IoAdapter {
       ...options,
       maxHttpBufferSize: 16_384,
       serveClient: false,
-    } as ServerOptions) as Server;
+    } as ServerOptions);
     server.adapter(createAdapter(this.pool, { errorHandler: () => undefined }));
     return server;
   }

@@ -13,7 +13,8 @@ const appRole = 'holdwater_test_app';
 /** A role that may create databases and roles; `npm test` starts a cluster and sets it. */
 export function adminUrl(): string {
   const url = process.env.TEST_DATABASE_ADMIN_URL;
-  if (!url) throw new Error('TEST_DATABASE_ADMIN_URL is not set: run the tests by npm test, which starts a database for them.');
+  if (!url)
+    throw new Error('TEST_DATABASE_ADMIN_URL is not set: run the tests by npm test, which starts a database for them.');
   return url;
 }
 

@@ -20,7 +20,10 @@ export class CommentSubjects {
 
   /** Throws `not-found` when the lot has no such thing. */
   async check(lotId: string, on: { kind: SubjectKind; id: string }): Promise<void> {
-    const found = await this.sequelize.query(existsSql[on.kind], { replacements: { id: on.id, lotId }, type: QueryTypes.SELECT });
+    const found = await this.sequelize.query(existsSql[on.kind], {
+      replacements: { id: on.id, lotId },
+      type: QueryTypes.SELECT,
+    });
     if (found.length === 0) refuse('not-found');
   }
 }

@@ -55,8 +55,14 @@ describe("a lot's thread", () => {
 
   it('refuses empty words, words past the limit, and ten megabytes, and writes nothing', async () => {
     const before = (await world.as('plumber').get(`${path}?limit=200`)).body.items.length;
-    expect((await world.as('plumber').post(path, said('   '))).body).toMatchObject({ code: 'bad-input', fields: { text: 'required' } });
-    expect((await world.as('plumber').post(path, said('x'.repeat(4001)))).body).toMatchObject({ code: 'bad-input', fields: { text: 'too-long' } });
+    expect((await world.as('plumber').post(path, said('   '))).body).toMatchObject({
+      code: 'bad-input',
+      fields: { text: 'required' },
+    });
+    expect((await world.as('plumber').post(path, said('x'.repeat(4001)))).body).toMatchObject({
+      code: 'bad-input',
+      fields: { text: 'too-long' },
+    });
     const huge = await world.as('plumber').post(path, said('x'.repeat(10_000_000)));
     expect([huge.status, huge.body.code]).toEqual([413, 'too-large']);
     expect((await world.as('plumber').get(`${path}?limit=200`)).body.items).toHaveLength(before);

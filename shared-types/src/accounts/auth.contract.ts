@@ -31,7 +31,13 @@ export const refreshSession = route({
   answer: session,
 });
 
-export const signOut = route({ method: 'POST', path: '/api/auth/sign-out', summary: 'End this session', status: 200, answer: done });
+export const signOut = route({
+  method: 'POST',
+  path: '/api/auth/sign-out',
+  summary: 'End this session',
+  status: 200,
+  answer: done,
+});
 
 export const signOutEverywhere = route({
   method: 'POST',

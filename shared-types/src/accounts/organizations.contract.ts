@@ -100,6 +100,9 @@ export const changeMember = route({
   summary: 'Owner: change roles, or disable a person here, which takes effect at once',
   status: 200,
   params: z.object({ organizationId: id, personId: id }),
-  body: z.strictObject({ roles: z.array(memberRole).min(1, 'required').max(6).optional(), isDisabled: z.boolean().optional() }),
+  body: z.strictObject({
+    roles: z.array(memberRole).min(1, 'required').max(6).optional(),
+    isDisabled: z.boolean().optional(),
+  }),
   answer: member,
 });

@@ -3,7 +3,12 @@ import { id } from '../common/fields.js';
 import { locale } from '../common/locale.js';
 import { memberRole, organizationKind } from './roles.js';
 
-export const organizationBrief = z.object({ id, name: z.string(), kind: organizationKind, phone: z.string().nullable() });
+export const organizationBrief = z.object({
+  id,
+  name: z.string(),
+  kind: organizationKind,
+  phone: z.string().nullable(),
+});
 export type OrganizationBrief = z.infer<typeof organizationBrief>;
 
 export const personBrief = z.object({ id, name: z.string(), phone: z.string().nullable() });

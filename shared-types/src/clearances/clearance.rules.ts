@@ -1,7 +1,14 @@
 import type { VisitState } from '../visits/visit.states.js';
 import type { CorrectionState, Severity } from '../outcomes/correction.states.js';
 
-export const clearStates = ['clear', 'put-back-due', 'corrections-open', 'awaiting-visit', 'under-test', 'not-tested'] as const;
+export const clearStates = [
+  'clear',
+  'put-back-due',
+  'corrections-open',
+  'awaiting-visit',
+  'under-test',
+  'not-tested',
+] as const;
 export type ClearState = (typeof clearStates)[number];
 
 export interface ClearFacts {

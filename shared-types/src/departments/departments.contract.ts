@@ -27,7 +27,13 @@ export const ruleCard = ruleCardBrief.extend({
 });
 export type RuleCard = z.infer<typeof ruleCard>;
 
-export const closure = z.object({ id, date: localDate, from: clockTime.nullable(), to: clockTime.nullable(), why: z.string() });
+export const closure = z.object({
+  id,
+  date: localDate,
+  from: clockTime.nullable(),
+  to: clockTime.nullable(),
+  why: z.string(),
+});
 export type Closure = z.infer<typeof closure>;
 
 export const department = z.object({
@@ -131,7 +137,10 @@ export const addClosure = route({
   body: z
     .strictObject({ date: localDate, from: clockTime.nullable(), to: clockTime.nullable(), why: line(120) })
     .refine((c) => (c.from === null) === (c.to === null), { message: 'both-or-neither', path: ['to'] })
-    .refine((c) => c.from === null || c.to === null || c.to > c.from, { message: 'ends-before-it-starts', path: ['to'] }),
+    .refine((c) => c.from === null || c.to === null || c.to > c.from, {
+      message: 'ends-before-it-starts',
+      path: ['to'],
+    }),
   answer: closure,
 });
 

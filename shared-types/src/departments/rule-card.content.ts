@@ -76,7 +76,11 @@ export const askingWindow = z
 export const asking = z.strictObject({
   windows: z.array(askingWindow).min(1, 'no-window').max(20),
   workingDays: z.array(z.number().int().min(1).max(7)).min(1).max(7),
-  holidays: z.strictObject({ federal: z.boolean(), adds: z.array(localDate).max(60), drops: z.array(localDate).max(60) }),
+  holidays: z.strictObject({
+    federal: z.boolean(),
+    adds: z.array(localDate).max(60),
+    drops: z.array(localDate).max(60),
+  }),
   cutoff: clockTime,
   workingDaysAhead: z.number().int().min(0).max(60),
   horizonWorkingDays: z.number().int().min(1).max(260),
@@ -145,7 +149,8 @@ export const ruleCardContent = z
     });
     const labels = content.asking.windows.map((window) => window.label);
     labels.forEach((label, w) => {
-      if (labels.indexOf(label) !== w) ctx.addIssue({ code: 'custom', message: 'named-twice', path: ['asking', 'windows', w, 'label'] });
+      if (labels.indexOf(label) !== w)
+        ctx.addIssue({ code: 'custom', message: 'named-twice', path: ['asking', 'windows', w, 'label'] });
     });
   });
 export type RuleCardContent = z.infer<typeof ruleCardContent>;

@@ -4,7 +4,10 @@ import { route } from '../common/route.js';
 import { gaugeValves, holdEndReasons, holdStates, media, methods, systems } from './hold.states.js';
 
 /** A pressure gauge, or for DWV a tape: the smallest mark on it. */
-export const gauge = z.strictObject({ rangePsi: z.number().positive().max(1000), incrementPsi: z.number().positive().max(50) });
+export const gauge = z.strictObject({
+  rangePsi: z.number().positive().max(1000),
+  incrementPsi: z.number().positive().max(50),
+});
 export const tape = z.strictObject({ incrementIn: z.number().positive().max(12) });
 
 /**
@@ -72,7 +75,8 @@ export const listHolds = route({
 export const startHold = route({
   method: 'POST',
   path: '/api/lots/:lotId/holds',
-  summary: 'Plumber: start a test with its first reading; an earlier one still standing is superseded only when asked for',
+  summary:
+    'Plumber: start a test with its first reading; an earlier one still standing is superseded only when asked for',
   status: 201,
   params: z.object({ lotId: id }),
   body: z.strictObject({

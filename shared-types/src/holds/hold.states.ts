@@ -13,7 +13,15 @@ export type GaugeValve = (typeof gaugeValves)[number];
 export const media = ['water', 'water-topped-with-air', 'air'] as const;
 export type Medium = (typeof media)[number];
 
-export const dwvMethods = ['stack-to-roof', 'attic-cut', 'laundry-box', 'laundry-riser', 'standpipe', 'sectional', 'air'] as const;
+export const dwvMethods = [
+  'stack-to-roof',
+  'attic-cut',
+  'laundry-box',
+  'laundry-riser',
+  'standpipe',
+  'sectional',
+  'air',
+] as const;
 export type DwvMethod = (typeof dwvMethods)[number];
 /** Water lines have one way to be tested: pumped up against a gauge. The medium says with what. */
 export const waterMethods = ['gauge'] as const;

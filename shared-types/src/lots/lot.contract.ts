@@ -52,7 +52,13 @@ export const lotUnit = z.object({
 });
 export type LotUnit = z.infer<typeof lotUnit>;
 
-export const nextVisit = z.object({ id, state: z.enum(visitStates), startAt: instant, endAt: instant, zone: z.string() });
+export const nextVisit = z.object({
+  id,
+  state: z.enum(visitStates),
+  startAt: instant,
+  endAt: instant,
+  zone: z.string(),
+});
 
 export const lotSummary = z.object({
   id,
@@ -138,7 +144,13 @@ export const searchLots = route({
   query: z.object({ q: z.string().trim().min(1).max(100) }),
   answer: z.object({
     items: z.array(
-      z.object({ id, number: z.string(), tractName: z.string().nullable(), address: z.string(), permitNumber: z.string().nullable() }),
+      z.object({
+        id,
+        number: z.string(),
+        tractName: z.string().nullable(),
+        address: z.string(),
+        permitNumber: z.string().nullable(),
+      }),
     ),
   }),
 });
@@ -152,7 +164,11 @@ export const createLot = route({
     builderId: id,
     tractId: id.nullable().optional(),
     ...lotFields,
-    units: z.array(z.strictObject({ label: line(40) })).min(1).max(12).optional(),
+    units: z
+      .array(z.strictObject({ label: line(40) }))
+      .min(1)
+      .max(12)
+      .optional(),
     access: lotAccess.optional(),
     plumberId: id.nullable().optional(),
     departmentId: id.nullable().optional(),
@@ -160,7 +176,14 @@ export const createLot = route({
   answer: lotDetail,
 });
 
-export const readLot = route({ method: 'GET', path: '/api/lots/:lotId', summary: 'A lot', status: 200, params: lotParams, answer: lotDetail });
+export const readLot = route({
+  method: 'GET',
+  path: '/api/lots/:lotId',
+  summary: 'A lot',
+  status: 200,
+  params: lotParams,
+  answer: lotDetail,
+});
 
 export const updateLot = route({
   method: 'PATCH',
@@ -226,6 +249,11 @@ export const answerConsents = route({
   path: '/api/consents',
   summary: 'Join lots or refuse to, several at once',
   status: 200,
-  body: z.strictObject({ organizationId: id, lotIds: z.array(id).min(1).max(200), isJoining: z.boolean(), why: words(500).optional() }),
+  body: z.strictObject({
+    organizationId: id,
+    lotIds: z.array(id).min(1).max(200),
+    isJoining: z.boolean(),
+    why: words(500).optional(),
+  }),
   answer: done,
 });

@@ -11,7 +11,15 @@ export const plat = z.strictObject({
   /** Clockwise degrees from the drawing's up to north. */
   northDegrees: z.number().min(0).max(360),
   parcels: z.array(z.strictObject({ lotNumber: z.string().max(20), points: z.array(point).min(3).max(60) })).max(500),
-  roads: z.array(z.strictObject({ name: z.string().max(80), points: z.array(point).min(2).max(60), widthFt: z.number().positive().max(200) })).max(60),
+  roads: z
+    .array(
+      z.strictObject({
+        name: z.string().max(80),
+        points: z.array(point).min(2).max(60),
+        widthFt: z.number().positive().max(200),
+      }),
+    )
+    .max(60),
 });
 export type PlatDrawing = z.infer<typeof plat>;
 

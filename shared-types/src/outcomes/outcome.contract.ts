@@ -91,7 +91,13 @@ export const outcome = z.object({
       note: z.string().nullable(),
     }),
   ),
-  work: z.array(z.object({ pointCode: z.string(), label: z.object({ en: z.string(), es: z.string().optional() }), isLookedAt: z.boolean() })),
+  work: z.array(
+    z.object({
+      pointCode: z.string(),
+      label: z.object({ en: z.string(), es: z.string().optional() }),
+      isLookedAt: z.boolean(),
+    }),
+  ),
 });
 export type Outcome = z.infer<typeof outcome>;
 
@@ -136,7 +142,12 @@ export const listCorrections = route({
   path: '/api/corrections',
   summary: 'Corrections of the lots the reader may see',
   status: 200,
-  query: z.object({ ...pageQuery, state: z.enum(correctionStates).optional(), lotId: id.optional(), organizationId: id.optional() }),
+  query: z.object({
+    ...pageQuery,
+    state: z.enum(correctionStates).optional(),
+    lotId: id.optional(),
+    organizationId: id.optional(),
+  }),
   answer: pageOf(correction),
 });
 

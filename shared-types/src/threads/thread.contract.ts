@@ -39,7 +39,10 @@ export const writeComment = route({
   body: z.strictObject({
     ...fieldWrite,
     text: z.string().trim().min(1, 'required').max(commentLimit, 'too-long'),
-    on: z.strictObject({ kind: z.enum(commentSubjects), id }).nullable().optional(),
+    on: z
+      .strictObject({ kind: z.enum(commentSubjects), id })
+      .nullable()
+      .optional(),
   }),
   answer: comment,
 });

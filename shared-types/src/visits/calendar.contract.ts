@@ -34,7 +34,13 @@ export const readCalendar = route({
   summary: 'Days, windows and visits from one date to another, of the departments the reader has to do with',
   status: 200,
   query: z.object({ from: localDate, to: localDate, organizationId: id.optional() }),
-  answer: z.object({ now: instant, zone: z.string(), today: localDate, lanes: z.array(calendarLane), visits: z.array(visitSummary) }),
+  answer: z.object({
+    now: instant,
+    zone: z.string(),
+    today: localDate,
+    lanes: z.array(calendarLane),
+    visits: z.array(visitSummary),
+  }),
 });
 
 /** What a person has to do, or waits for another to do. */
@@ -87,7 +93,13 @@ export const runStop = z.object({
   longitude: z.number().nullable(),
   /** What the rule card asks of each system, for the inspector: a minimum, never the forecast. */
   asks: z.array(
-    z.object({ unitNumber: z.number().int(), system: z.enum(['dwv', 'water']), method: z.string().nullable(), minimumPsi: z.number().nullable(), levelFt: z.number().nullable() }),
+    z.object({
+      unitNumber: z.number().int(),
+      system: z.enum(['dwv', 'water']),
+      method: z.string().nullable(),
+      minimumPsi: z.number().nullable(),
+      levelFt: z.number().nullable(),
+    }),
   ),
 });
 
@@ -118,7 +130,9 @@ export const readDayBoard = route({
     now: instant,
     zone: z.string(),
     day: calendarDay,
-    inspectors: z.array(z.object({ id, name: z.string(), phone: z.string().nullable(), visits: z.array(visitSummary) })),
+    inspectors: z.array(
+      z.object({ id, name: z.string(), phone: z.string().nullable(), visits: z.array(visitSummary) }),
+    ),
     requests: z.array(visitSummary),
   }),
 });

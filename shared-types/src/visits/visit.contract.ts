@@ -65,7 +65,10 @@ export const offeredWindow = visitWindow.extend({
 });
 export type OfferedWindow = z.infer<typeof offeredWindow>;
 
-export const requestedLot = z.strictObject({ lotId: id, unitNumbers: z.array(z.number().int().min(1).max(12)).min(1).max(12).optional() });
+export const requestedLot = z.strictObject({
+  lotId: id,
+  unitNumbers: z.array(z.number().int().min(1).max(12)).min(1).max(12).optional(),
+});
 
 export const readOffers = route({
   method: 'POST',
@@ -109,7 +112,14 @@ export const requestVisits = route({
   answer: z.object({ visits: z.array(visitSummary) }),
 });
 
-export const readVisit = route({ method: 'GET', path: '/api/visits/:visitId', summary: 'A visit', status: 200, params: visitParams, answer: visitSummary });
+export const readVisit = route({
+  method: 'GET',
+  path: '/api/visits/:visitId',
+  summary: 'A visit',
+  status: 200,
+  params: visitParams,
+  answer: visitSummary,
+});
 
 export const listLotVisits = route({
   method: 'GET',
@@ -175,7 +185,14 @@ export const sayTestUp = route({
   summary: 'Plumber: the systems are standing for the booked window; readings may come in the same act',
   status: 200,
   params: visitParams,
-  body: z.strictObject({ ...asked, ...fieldWrite, readings: z.array(z.strictObject({ holdId: id, ...readingFields })).max(24).optional() }),
+  body: z.strictObject({
+    ...asked,
+    ...fieldWrite,
+    readings: z
+      .array(z.strictObject({ holdId: id, ...readingFields }))
+      .max(24)
+      .optional(),
+  }),
   answer: visitSummary,
 });
 

@@ -37,7 +37,11 @@ describe('the table of visit moves', () => {
   });
 
   it('lets a move keep the state from requested, booked and ready only', () => {
-    expect(visitStates.filter((state) => stateAfter(state, 'move') === state)).toEqual(['requested', 'booked', 'ready']);
+    expect(visitStates.filter((state) => stateAfter(state, 'move') === state)).toEqual([
+      'requested',
+      'booked',
+      'ready',
+    ]);
   });
 
   it('has no dead state: every state is reached, and ended states have no way out', () => {

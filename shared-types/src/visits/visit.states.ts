@@ -2,7 +2,16 @@
  * The states of a visit and every move between them, as `definitions.md` pins them. Both sides read this table: the server refuses what
  * is not in it, the page offers what is.
  */
-export const visitStates = ['requested', 'booked', 'ready', 'underway', 'closed', 'declined', 'withdrawn', 'freed'] as const;
+export const visitStates = [
+  'requested',
+  'booked',
+  'ready',
+  'underway',
+  'closed',
+  'declined',
+  'withdrawn',
+  'freed',
+] as const;
 export type VisitState = (typeof visitStates)[number];
 
 /** A visit that still takes a place: one per lot, unit set and stage. */

@@ -30,7 +30,9 @@ export class AccessCheck implements OnApplicationBootstrap {
       if (!instance || !metatype) return [];
       const prototype = Object.getPrototypeOf(instance) as object;
       const base = (Reflect.getMetadata(PATH_METADATA, metatype) as string | undefined) ?? '';
-      return this.scanner.getAllMethodNames(prototype).flatMap((name) => this.routeOf(prototype, name, base, metatype.name));
+      return this.scanner
+        .getAllMethodNames(prototype)
+        .flatMap((name) => this.routeOf(prototype, name, base, metatype.name));
     });
   }
 
@@ -41,6 +43,8 @@ export class AccessCheck implements OnApplicationBootstrap {
     if (path === undefined) return [];
     const method = RequestMethod[Reflect.getMetadata(METHOD_METADATA, handler) as number] ?? 'ALL';
     const access = (Reflect.getMetadata(ACCESS, handler) as Access | undefined) ?? null;
-    return [{ method, path: `/${[base, path].join('/')}`.replaceAll(/\/+/g, '/'), handler: `${controller}.${name}`, access }];
+    return [
+      { method, path: `/${[base, path].join('/')}`.replaceAll(/\/+/g, '/'), handler: `${controller}.${name}`, access },
+    ];
   }
 }

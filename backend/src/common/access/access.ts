@@ -3,9 +3,7 @@
  * a reader finds it; missing and forbidden look alike (404).
  */
 export type Access =
-  | { readonly kind: 'anyone' }
-  | { readonly kind: 'signed-in'; readonly policy: string }
-  | { readonly kind: 'operator' };
+  { readonly kind: 'anyone' } | { readonly kind: 'signed-in'; readonly policy: string } | { readonly kind: 'operator' };
 
 /** No sign-in asked for: only for sign-in itself, health and `/api/public/`. */
 export const anyone: Access = { kind: 'anyone' };

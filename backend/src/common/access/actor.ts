@@ -23,7 +23,8 @@ export function isMember(actor: Actor, organizationId: string | null): boolean {
 /** Whether the actor has one of these roles in an organization. */
 export function hasRole(actor: Actor, organizationId: string | null, ...roles: MemberRole[]): boolean {
   return actor.memberships.some(
-    (membership) => membership.organizationId === organizationId && membership.roles.some((role) => roles.includes(role)),
+    (membership) =>
+      membership.organizationId === organizationId && membership.roles.some((role) => roles.includes(role)),
   );
 }
 

@@ -17,6 +17,7 @@ export class ContractInterceptor implements NestInterceptor {
 /** A fault here is ours, not the reader's: it must not look like bad input. */
 function answerOf(contract: RouteContract, answer: unknown): unknown {
   const parsed = contract.answer.safeParse(answer);
-  if (!parsed.success) throw new Error(`${contract.method} ${contract.path} answered against its contract: ${parsed.error.message}`);
+  if (!parsed.success)
+    throw new Error(`${contract.method} ${contract.path} answered against its contract: ${parsed.error.message}`);
   return parsed.data;
 }

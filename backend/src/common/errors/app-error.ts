@@ -15,6 +15,10 @@ export class AppError extends Error {
 }
 
 /** Refuses with a code of the catalogue. */
-export function refuse(code: ErrorCode, params: Record<string, unknown> = {}, fields: Record<string, string> = {}): never {
+export function refuse(
+  code: ErrorCode,
+  params: Record<string, unknown> = {},
+  fields: Record<string, string> = {},
+): never {
   throw new AppError(code, params, fields);
 }

@@ -23,7 +23,20 @@ const constraintCodes = {
 } as const;
 
 /** SQLSTATEs that mean: the database is away or overloaded, try again. */
-const awayStates = ['57P01', '57P02', '57P03', '53300', '08000', '08003', '08006', '08001', '57014', '55P03', 'ECONNREFUSED', 'ECONNRESET'];
+const awayStates = [
+  '57P01',
+  '57P02',
+  '57P03',
+  '53300',
+  '08000',
+  '08003',
+  '08006',
+  '08001',
+  '57014',
+  '55P03',
+  'ECONNREFUSED',
+  'ECONNRESET',
+];
 
 /** Turns whatever was thrown into the one error body. `entry` is what a person tells support. */
 export function errorBodyOf(error: unknown, entry: string): { status: number; body: ErrorBody } {
@@ -89,7 +102,7 @@ function httpErrorOf(error: HttpException): AppError {
 function databaseFaultOf(error: unknown): DatabaseFault | null {
   if (typeof error !== 'object' || error === null) return null;
   const inner = 'original' in error ? error.original : 'parent' in error ? error.parent : error;
-  return typeof inner === 'object' && inner !== null ? (inner) : null;
+  return typeof inner === 'object' && inner !== null ? inner : null;
 }
 
 /** The SQLSTATE behind an error of the database, or null. */
@@ -100,7 +113,8 @@ export function sqlStateOf(error: unknown): string | null {
 function isAway(error: unknown, fault: DatabaseFault | null): boolean {
   const name = error instanceof Error ? error.name : '';
   const isConnection = name.startsWith('SequelizeConnection') || name === 'SequelizeHostNotReachableError';
-  const isTerminated = error instanceof Error && /Connection terminated|Client has encountered a connection error/.test(error.message);
+  const isTerminated =
+    error instanceof Error && /Connection terminated|Client has encountered a connection error/.test(error.message);
   return isConnection || isTerminated || (fault?.code !== undefined && awayStates.includes(fault.code));
 }
 

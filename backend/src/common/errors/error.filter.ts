@@ -15,7 +15,8 @@ export class ErrorFilter implements ExceptionFilter {
     const { status, body } = errorBodyOf(error, (request.id ?? '').slice(0, 8));
     if (status >= 500) this.logger.error({ err: error, entry: body.entry }, 'request failed');
     if (response.headersSent) return;
-    if (body.code === 'sign-in-throttled') response.setHeader('Retry-After', `${(body.params?.retryAfterSeconds as number | undefined) ?? 60}`);
+    if (body.code === 'sign-in-throttled')
+      response.setHeader('Retry-After', `${(body.params?.retryAfterSeconds as number | undefined) ?? 60}`);
     response.status(status).json(body);
   }
 }

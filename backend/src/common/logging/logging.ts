@@ -11,7 +11,9 @@ export function loggingParams(environment: Environment): Params {
     pinoHttp: {
       level: environment.LOG_LEVEL,
       genReqId: () => randomUUID(),
-      autoLogging: { ignore: (request: IncomingMessage) => request.url === '/api/health' || request.url === '/api/ready' },
+      autoLogging: {
+        ignore: (request: IncomingMessage) => request.url === '/api/health' || request.url === '/api/ready',
+      },
       redact: {
         paths: [
           'req.headers.authorization',

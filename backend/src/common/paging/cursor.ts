@@ -9,7 +9,10 @@ export function toCursor(keys: readonly (string | number)[]): string {
 export function fromCursor(cursor: string, count: number): Array<string | number> {
   try {
     const keys: unknown = JSON.parse(Buffer.from(cursor, 'base64url').toString('utf8'));
-    const isKeys = Array.isArray(keys) && keys.length === count && keys.every((key) => typeof key === 'string' || typeof key === 'number');
+    const isKeys =
+      Array.isArray(keys) &&
+      keys.length === count &&
+      keys.every((key) => typeof key === 'string' || typeof key === 'number');
     if (isKeys) return keys;
   } catch {
     // falls through to the refusal: a cursor is ours or it is nothing

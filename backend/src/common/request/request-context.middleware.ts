@@ -7,7 +7,10 @@ const keyPattern = /^[A-Za-z0-9_-]{8,100}$/;
 /** Opens the context of a request: its id, the client's clock, the idempotency key. */
 export function openRequestContext(request: Request & { id?: string }, _response: Response, next: NextFunction): void {
   const requestId = request.id ?? randomUUID();
-  requestContext.run({ requestId, actor: null, clockOffsetMs: offsetOf(request), idempotency: idempotencyOf(request) }, next);
+  requestContext.run(
+    { requestId, actor: null, clockOffsetMs: offsetOf(request), idempotency: idempotencyOf(request) },
+    next,
+  );
 }
 
 function offsetOf(request: Request): number {
@@ -18,6 +21,8 @@ function offsetOf(request: Request): number {
 function idempotencyOf(request: Request) {
   const key = request.get('idempotency-key');
   if (key === undefined || !keyPattern.test(key) || request.method === 'GET') return null;
-  const bodyHash = createHash('sha256').update(JSON.stringify(request.body ?? null)).digest('hex');
+  const bodyHash = createHash('sha256')
+    .update(JSON.stringify(request.body ?? null))
+    .digest('hex');
   return { route: `${request.method} ${request.path}`, key, bodyHash };
 }

@@ -9,9 +9,15 @@ export class DemoClient {
   ) {}
 
   /** Calls a route as a demo person; throws with the server's words when it refuses. */
-  async call<const R extends RouteContract>(contract: R, personKey: string, input: RouteCall<R>): Promise<RouteAnswer<R>> {
+  async call<const R extends RouteContract>(
+    contract: R,
+    personKey: string,
+    input: RouteCall<R>,
+  ): Promise<RouteAnswer<R>> {
     const parts = input as { params?: Record<string, string>; query?: Record<string, string>; body?: unknown };
-    const path = contract.path.replaceAll(/:(\w+)/g, (_whole, name: string) => encodeURIComponent(String(parts.params?.[name])));
+    const path = contract.path.replaceAll(/:(\w+)/g, (_whole, name: string) =>
+      encodeURIComponent(String(parts.params?.[name])),
+    );
     const query = parts.query ? `?${new URLSearchParams(parts.query).toString()}` : '';
     const answer = await fetch(`${this.url}${path}${query}`, {
       method: contract.method,

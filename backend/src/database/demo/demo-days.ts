@@ -16,7 +16,7 @@ export class DemoDays {
   /** The date `offset` working days from today: 0 is today, -1 the working day before, 1 the next. */
   workingDate(offset: number): string {
     let date = this.today;
-    for (let left = Math.abs(offset); left > 0; ) {
+    for (let left = Math.abs(offset); left > 0;) {
       date = date.add({ days: Math.sign(offset) });
       if (this.isWorking(date)) left -= 1;
     }
@@ -26,7 +26,7 @@ export class DemoDays {
   /** The working day `count` before a date. */
   before(date: string, count: number): string {
     let day = Temporal.PlainDate.from(date);
-    for (let left = count; left > 0; ) {
+    for (let left = count; left > 0;) {
       day = day.subtract({ days: 1 });
       if (this.isWorking(day)) left -= 1;
     }
@@ -34,7 +34,10 @@ export class DemoDays {
   }
 
   instant(date: string, time: string): Date {
-    const zoned = Temporal.PlainDate.from(date).toZonedDateTime({ timeZone: this.zone, plainTime: Temporal.PlainTime.from(time) });
+    const zoned = Temporal.PlainDate.from(date).toZonedDateTime({
+      timeZone: this.zone,
+      plainTime: Temporal.PlainTime.from(time),
+    });
     return new Date(zoned.epochMilliseconds);
   }
 

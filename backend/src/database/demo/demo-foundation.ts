@@ -28,7 +28,12 @@ export async function layFoundation(db: Sequelize, since: Date, present: Date): 
   const ruleCards: DemoFoundation['ruleCards'] = new Map();
   for (const department of demoDepartments) {
     const id = known(organizationIds, department.key);
-    await DepartmentModel.create({ id, zone: department.zone, elevationFt: department.elevationFt, isOutside: department.isOutside });
+    await DepartmentModel.create({
+      id,
+      zone: department.zone,
+      elevationFt: department.elevationFt,
+      isOutside: department.isOutside,
+    });
     if (!department.ruleCard) continue;
     const content = openToday(department.ruleCard.content, department.zone, present);
     ruleCards.set(department.key, { workingDays: content.asking.workingDays });
@@ -89,14 +94,29 @@ async function makePeople(organizationIds: Map<string, string>, at: Date, presen
 }
 
 /** The demo has a day's run whatever today is: a department that would be off today works today. */
-function openToday<T extends (typeof demoDepartments)[number]['ruleCard']>(content: NonNullable<T>['content'], zone: string, present: Date) {
+function openToday<T extends (typeof demoDepartments)[number]['ruleCard']>(
+  content: NonNullable<T>['content'],
+  zone: string,
+  present: Date,
+) {
   const local = new Intl.DateTimeFormat('en-CA', { timeZone: zone, dateStyle: 'short' }).format(present);
   const weekday = new Date(`${local}T12:00:00Z`).getUTCDay() || 7;
-  const workingDays = content.asking.workingDays.includes(weekday) ? content.asking.workingDays : [...content.asking.workingDays, weekday];
-  return { ...content, asking: { ...content.asking, workingDays, holidays: { ...content.asking.holidays, drops: [local] } } };
+  const workingDays = content.asking.workingDays.includes(weekday)
+    ? content.asking.workingDays
+    : [...content.asking.workingDays, weekday];
+  return {
+    ...content,
+    asking: { ...content.asking, workingDays, holidays: { ...content.asking.holidays, drops: [local] } },
+  };
 }
 
-async function publish(db: Sequelize, departmentId: string, version: number, content: object, since: Date): Promise<void> {
+async function publish(
+  db: Sequelize,
+  departmentId: string,
+  version: number,
+  content: object,
+  since: Date,
+): Promise<void> {
   await db.query(
     `INSERT INTO rule_cards (id, department_id, version, state, content, effective, created_at, published_at)
      VALUES (:id, :departmentId, :version, 'published', :content, daterange(:from, NULL), :since, :since)`,

@@ -1,4 +1,8 @@
-import { houseGeometry, type HouseGeometry, type HouseGeometryGiven } from '@holdwater/shared-types/hydraulics/house-geometry.js';
+import {
+  houseGeometry,
+  type HouseGeometry,
+  type HouseGeometryGiven,
+} from '@holdwater/shared-types/hydraulics/house-geometry.js';
 
 const sch40 = (nominalIn: 1.5 | 2 | 3 | 4, bottomFt: number, topFt: number, lengthFt: number) => ({
   nominalIn,
@@ -66,7 +70,11 @@ const slab = house({
 });
 
 /** One floor over a crawl space. */
-const crawlSpace = house({ ...slab, lowestFittingFt: -3.5, plugs: [{ name: 'building drain', elevationFt: -3.8, ratedPsi: 13, nominalIn: 3 }] });
+const crawlSpace = house({
+  ...slab,
+  lowestFittingFt: -3.5,
+  plugs: [{ name: 'building drain', elevationFt: -3.8, ratedPsi: 13, nominalIn: 3 }],
+});
 
 /** Three floors. */
 const threeFloors = house({

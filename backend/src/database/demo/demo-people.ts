@@ -41,7 +41,14 @@ const person = (
   roles: MemberRole[],
   phone: string,
   locale: 'en' | 'es' = 'en',
-): DemoPerson => ({ key, name, email: `${key}@${organization}.example.test`, phone, locale, memberships: [{ organization, roles }] });
+): DemoPerson => ({
+  key,
+  name,
+  email: `${key}@${organization}.example.test`,
+  phone,
+  locale,
+  memberships: [{ organization, roles }],
+});
 
 export const demoPeople: readonly DemoPerson[] = [
   person('della', 'Della Arkwright', 'odderly', ['superintendent'], '555-0142'),
@@ -92,7 +99,12 @@ export function demoSignIns(): DemoSignIn[] {
     const base = { email: each.email, password: demoPassword };
     if (each.isOperator) return [{ ...base, role: 'operator', organization: installationName, key: each.key }];
     return each.memberships.flatMap((membership) =>
-      membership.roles.map((role) => ({ ...base, role, organization: named.get(membership.organization) ?? '', key: each.key })),
+      membership.roles.map((role) => ({
+        ...base,
+        role,
+        organization: named.get(membership.organization) ?? '',
+        key: each.key,
+      })),
     );
   });
   const rank = (key: string) => (firstOfRole.includes(key) ? firstOfRole.indexOf(key) : firstOfRole.length);

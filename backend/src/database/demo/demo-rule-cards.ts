@@ -4,7 +4,10 @@ import type { DemoOrganizationKey } from './demo-people.js';
 type Window = RuleCardContent['asking']['windows'][number];
 
 const work: Stage['work'] = [
-  { code: 'permit-on-site', label: { en: 'Permit and approved plans on site', es: 'Permiso y planos aprobados en la obra' } },
+  {
+    code: 'permit-on-site',
+    label: { en: 'Permit and approved plans on site', es: 'Permiso y planos aprobados en la obra' },
+  },
   { code: 'nail-plates', label: { en: 'Nail plates', es: 'Placas protectoras' } },
   { code: 'hangers', label: { en: 'Hangers and supports', es: 'Colgadores y soportes' } },
   { code: 'slope', label: { en: 'Slope', es: 'Pendiente' } },
@@ -23,11 +26,32 @@ const frequent: RuleCardContent['corrections']['frequent'] = [
 ];
 
 const sections: RuleCardContent['corrections']['sections'] = [
-  { section: '7-204', says: { en: 'Joints are tight under the test of the rule card', es: 'Las uniones no gotean bajo la prueba de la tarjeta de reglas' } },
-  { section: '5-118', says: { en: 'Pipes near the face of framing are shielded', es: 'Los tubos cerca de la cara de la estructura van protegidos' } },
-  { section: '5-131', says: { en: 'Pipes are held at the listed spacing', es: 'Los tubos van sujetos a la distancia indicada' } },
-  { section: '7-210', says: { en: 'Fittings turn in the direction of flow', es: 'Las conexiones giran en el sentido del flujo' } },
-  { section: '7-115', says: { en: 'Drains fall evenly to the stack', es: 'Los desagües bajan parejo hacia la bajante' } },
+  {
+    section: '7-204',
+    says: {
+      en: 'Joints are tight under the test of the rule card',
+      es: 'Las uniones no gotean bajo la prueba de la tarjeta de reglas',
+    },
+  },
+  {
+    section: '5-118',
+    says: {
+      en: 'Pipes near the face of framing are shielded',
+      es: 'Los tubos cerca de la cara de la estructura van protegidos',
+    },
+  },
+  {
+    section: '5-131',
+    says: { en: 'Pipes are held at the listed spacing', es: 'Los tubos van sujetos a la distancia indicada' },
+  },
+  {
+    section: '7-210',
+    says: { en: 'Fittings turn in the direction of flow', es: 'Las conexiones giran en el sentido del flujo' },
+  },
+  {
+    section: '7-115',
+    says: { en: 'Drains fall evenly to the stack', es: 'Los desagües bajan parejo hacia la bajante' },
+  },
 ];
 
 const stage = (
@@ -46,10 +70,18 @@ const stage = (
   systems,
   covers,
   minutesPerVisit,
-  work: code === 'groundwork' || code === 'under-slab' ? work.filter((point) => !['nail-plates', 'framing'].includes(point.code)) : work,
+  work:
+    code === 'groundwork' || code === 'under-slab'
+      ? work.filter((point) => !['nail-plates', 'framing'].includes(point.code))
+      : work,
 });
 
-const dwv = (stageCode: string, acceptedMethods: TestRule['acceptedMethods'], headRule: TestRule['headRule'], standMinutes: number | null): TestRule => ({
+const dwv = (
+  stageCode: string,
+  acceptedMethods: TestRule['acceptedMethods'],
+  headRule: TestRule['headRule'],
+  standMinutes: number | null,
+): TestRule => ({
   stageCode,
   system: 'dwv',
   acceptedMethods,
@@ -79,7 +111,13 @@ const water = (stageCode: string, pressures: TestRule['pressures'], standMinutes
   ],
 });
 
-const window = (label: string, start: string, end: string, days: number[], room: number): Window => ({ label, start, end, days, room });
+const window = (label: string, start: string, end: string, days: number[], room: number): Window => ({
+  label,
+  start,
+  end,
+  days,
+  room,
+});
 const monToThu = [1, 2, 3, 4];
 
 const tallowmere: RuleCardContent = {
@@ -91,7 +129,14 @@ const tallowmere: RuleCardContent = {
   tests: [
     dwv('groundwork', ['standpipe', 'stack-to-roof'], { kind: 'fill-level', feet: null }, null),
     dwv('rough-in', ['attic-cut', 'stack-to-roof', 'laundry-box'], { kind: 'fill-level', feet: null }, null),
-    water('rough-in', [{ medium: 'water', minimumPsi: 100, preferredPsi: 120 }, { medium: 'air', minimumPsi: 50, preferredPsi: 60 }], null),
+    water(
+      'rough-in',
+      [
+        { medium: 'water', minimumPsi: 100, preferredPsi: 120 },
+        { medium: 'air', minimumPsi: 50, preferredPsi: 60 },
+      ],
+      null,
+    ),
   ],
   asking: {
     windows: [
@@ -111,7 +156,13 @@ const tallowmere: RuleCardContent = {
     isPermitNeeded: true,
     reinspectionWindows: null,
   },
-  readiness: { upBy: { kind: 'clock-time', time: '07:00' }, reminderHoursBefore: [14, 2], whenNotUp: 'goes-to-standby', isExtensionAllowed: true, standbyOfferMinutes: 30 },
+  readiness: {
+    upBy: { kind: 'clock-time', time: '07:00' },
+    reminderHoursBefore: [14, 2],
+    whenNotUp: 'goes-to-standby',
+    isExtensionAllowed: true,
+    standbyOfferMinutes: 30,
+  },
   fees: [
     { event: 're-inspection', firstFree: 1, cents: 6500, payer: 'plumber', isPaidBeforeNext: false },
     { event: 'not-ready', firstFree: 1, cents: 6500, payer: 'builder', isPaidBeforeNext: true },
@@ -158,7 +209,14 @@ const ashquill: RuleCardContent = {
   tests: [
     dwv('under-slab', ['standpipe'], { kind: 'above-highest-fitting', feet: 5 }, 15),
     dwv('rough', ['laundry-riser', 'laundry-box', 'stack-to-roof'], { kind: 'above-highest-fitting', feet: 5 }, 15),
-    water('rough', [{ medium: 'water', minimumPsi: 80, preferredPsi: null }, { medium: 'water-topped-with-air', minimumPsi: 80, preferredPsi: 90 }], 15),
+    water(
+      'rough',
+      [
+        { medium: 'water', minimumPsi: 80, preferredPsi: null },
+        { medium: 'water-topped-with-air', minimumPsi: 80, preferredPsi: 90 },
+      ],
+      15,
+    ),
   ],
   asking: {
     ...tallowmere.asking,
@@ -181,8 +239,26 @@ export interface DemoDepartment {
 
 /** Three departments that differ in nearly everything, and one that is not on Holdwater. */
 export const demoDepartments: readonly DemoDepartment[] = [
-  { key: 'tallowmere', zone: 'America/Denver', elevationFt: 4400, isOutside: false, ruleCard: { version: 6, content: tallowmere } },
-  { key: 'vennick', zone: 'America/Denver', elevationFt: 5900, isOutside: false, ruleCard: { version: 11, content: vennick } },
-  { key: 'ashquill', zone: 'America/Los_Angeles', elevationFt: 210, isOutside: false, ruleCard: { version: 2, content: ashquill } },
+  {
+    key: 'tallowmere',
+    zone: 'America/Denver',
+    elevationFt: 4400,
+    isOutside: false,
+    ruleCard: { version: 6, content: tallowmere },
+  },
+  {
+    key: 'vennick',
+    zone: 'America/Denver',
+    elevationFt: 5900,
+    isOutside: false,
+    ruleCard: { version: 11, content: vennick },
+  },
+  {
+    key: 'ashquill',
+    zone: 'America/Los_Angeles',
+    elevationFt: 210,
+    isOutside: false,
+    ruleCard: { version: 2, content: ashquill },
+  },
   { key: 'corrow', zone: 'America/Denver', elevationFt: 5100, isOutside: true, ruleCard: null },
 ];

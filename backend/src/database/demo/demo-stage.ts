@@ -28,7 +28,10 @@ export class DemoStage {
   async play(): Promise<number> {
     let played = 0;
     for (;;) {
-      const next = this.acts.reduce<Act | null>((first, act) => (first === null || isBefore(act, first) ? act : first), null);
+      const next = this.acts.reduce<Act | null>(
+        (first, act) => (first === null || isBefore(act, first) ? act : first),
+        null,
+      );
       if (next === null || next.at > this.present.getTime()) return played;
       this.acts = this.acts.filter((act) => act !== next);
       this.clock.set(new Date(next.at));

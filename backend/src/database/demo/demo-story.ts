@@ -64,7 +64,12 @@ const tracts: readonly DemoTract[] = [
 const daysAhead: Record<string, number> = { tallowmere: 1, vennick: 2, ashquill: 1, corrow: 1 };
 
 /** Puts every lot's story on the stage. */
-export async function tellStory(client: DemoClient, stage: DemoStage, foundation: DemoFoundation, present: Date): Promise<void> {
+export async function tellStory(
+  client: DemoClient,
+  stage: DemoStage,
+  foundation: DemoFoundation,
+  present: Date,
+): Promise<void> {
   for (const tract of tracts) {
     const ids = await makeTract(client, foundation, tract);
     const department = demoDepartments.find((each) => each.key === tract.department);
@@ -94,12 +99,17 @@ function tellLot(telling: LotTelling): void {
   const people = { superintendent: tract.superintendent, plumber: lot.plumber, desk: tract.desk, inspectors };
   const state = { lotId, units: Array.from({ length: lot.units ?? 1 }, (_, i) => i + 1), openCorrections: [] };
   for (const plan of lot.visits) {
-    new DemoVisitStory(client, stage, days, people, state, plan, daysAhead[tract.department] ?? 1, spread, (key) => foundation.personId(key)).tell();
+    new DemoVisitStory(client, stage, days, people, state, plan, daysAhead[tract.department] ?? 1, spread, (key) =>
+      foundation.personId(key),
+    ).tell();
   }
   if (lot.standing) tellStanding(telling, lot.standing);
 }
 
-function tellStanding({ client, stage, days, lot, lotId, spread }: LotTelling, standing: NonNullable<DemoLot['standing']>): void {
+function tellStanding(
+  { client, stage, days, lot, lotId, spread }: LotTelling,
+  standing: NonNullable<DemoLot['standing']>,
+): void {
   const at = new Date(days.instant(days.workingDate(standing.day), '16:10').getTime() + spread * 60_000);
   stage.at(at, async () => {
     const write = () => ({ clientId: randomUUID(), madeAt: stage.now().toISOString() });
@@ -129,7 +139,12 @@ function tellThread(client: DemoClient, stage: DemoStage, days: DemoDays, lotId:
       });
     });
   say(-3, '15:10', 'ruben', 'New tee, solvent set overnight before filling. Dry at 24 ft.');
-  say(-2, '17:02', 'noor', 'I will open the gauge valve first. Please leave the riser on the cut until I have seen the level.');
+  say(
+    -2,
+    '17:02',
+    'noor',
+    'I will open the gauge valve first. Please leave the riser on the cut until I have seen the level.',
+  );
   say(-1, '07:24', 'ruben', 'Riser stays. Ladder to the attic is tied off at the hall.');
 }
 

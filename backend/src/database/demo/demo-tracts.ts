@@ -20,7 +20,11 @@ export interface DemoTract {
 }
 
 /** Adds the lots as the superintendent does and has the others join; answers the id of each lot by its number. */
-export async function makeTract(client: DemoClient, foundation: DemoFoundation, tract: DemoTract): Promise<Map<string, string>> {
+export async function makeTract(
+  client: DemoClient,
+  foundation: DemoFoundation,
+  tract: DemoTract,
+): Promise<Map<string, string>> {
   const builderId = foundation.organizationId(tract.builder);
   const made = tract.name
     ? await client.call(createTract, tract.superintendent, { body: { builderId, name: tract.name, plat: tract.plat } })
@@ -42,7 +46,9 @@ async function makeLot(
   builderId: string,
   tractId: string | null,
 ): Promise<string> {
-  const units = Array.from({ length: lot.units ?? 1 }, (_, i) => ({ label: (lot.units ?? 1) > 1 ? `Unit ${i + 1}` : 'House' }));
+  const units = Array.from({ length: lot.units ?? 1 }, (_, i) => ({
+    label: (lot.units ?? 1) > 1 ? `Unit ${i + 1}` : 'House',
+  }));
   const added = await client.call(createLot, tract.superintendent, {
     body: {
       builderId,
@@ -58,7 +64,12 @@ async function makeLot(
       },
       mayPlumberRequest: index % 3 === 0,
       units,
-      access: { gateCode: lot.gateCode ?? null, contactName: 'Site trailer', contactPhone: '555-0145', hazards: lot.hazards ?? null },
+      access: {
+        gateCode: lot.gateCode ?? null,
+        contactName: 'Site trailer',
+        contactPhone: '555-0145',
+        hazards: lot.hazards ?? null,
+      },
       plumberId: foundation.organizationId(plumberOrganization(lot.plumber)),
       departmentId: foundation.organizationId(tract.department),
     },
@@ -72,12 +83,20 @@ async function makeLot(
   return added.id;
 }
 
-async function joinAll(client: DemoClient, foundation: DemoFoundation, tract: DemoTract, ids: Map<string, string>): Promise<void> {
+async function joinAll(
+  client: DemoClient,
+  foundation: DemoFoundation,
+  tract: DemoTract,
+  ids: Map<string, string>,
+): Promise<void> {
   const join = (person: string, organization: DemoOrganizationKey, lotIds: string[]) =>
     lotIds.length === 0
       ? Promise.resolve(null)
-      : client.call(answerConsents, person, { body: { organizationId: foundation.organizationId(organization), lotIds, isJoining: true } });
-  const lotIdsOf = (plumber: string) => tract.lots.filter((lot) => lot.plumber === plumber).map((lot) => ids.get(lot.number) ?? '');
+      : client.call(answerConsents, person, {
+          body: { organizationId: foundation.organizationId(organization), lotIds, isJoining: true },
+        });
+  const lotIdsOf = (plumber: string) =>
+    tract.lots.filter((lot) => lot.plumber === plumber).map((lot) => ids.get(lot.number) ?? '');
   for (const plumber of new Set(tract.lots.map((lot) => lot.plumber))) {
     await join(plumber, plumberOrganization(plumber), lotIdsOf(plumber));
   }

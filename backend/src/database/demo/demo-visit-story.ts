@@ -107,7 +107,12 @@ export class DemoVisitStory {
 
   private async request(date: string): Promise<void> {
     const { visits } = await this.client.call(requestVisits, this.people.superintendent, {
-      body: { lots: [{ lotId: this.lot.lotId, unitNumbers: this.lot.units }], stageCode: this.plan.stage, date, label: this.labelOn(date) },
+      body: {
+        lots: [{ lotId: this.lot.lotId, unitNumbers: this.lot.units }],
+        stageCode: this.plan.stage,
+        date,
+        label: this.labelOn(date),
+      },
     });
     this.visit = visits[0] ?? null;
     if (this.visit?.state === 'requested' && !this.plan.isUnplaced && this.plan.ends?.kind !== 'declined') {
@@ -132,7 +137,12 @@ export class DemoVisitStory {
     if (!this.plan.inspector || visit.inspector?.id === this.personIdOf(this.plan.inspector)) return;
     this.visit = await this.client.call(moveVisit, this.people.desk, {
       params: { visitId: visit.id },
-      body: { expectedVersion: visit.version, date, label: this.labelOn(date), inspectorId: this.personIdOf(this.plan.inspector) },
+      body: {
+        expectedVersion: visit.version,
+        date,
+        label: this.labelOn(date),
+        inspectorId: this.personIdOf(this.plan.inspector),
+      },
     });
   }
 
@@ -172,7 +182,10 @@ export class DemoVisitStory {
         medium: isWater ? (this.plan.medium ?? 'water') : this.plan.method === 'air' ? 'air' : 'water',
         isSuperseding: true,
         ...(isWater
-          ? { gauge: { rangePsi: 200, incrementPsi: 1 }, ceilingPsi: (this.plan.medium ?? 'water') === 'water' ? 180 : 80 }
+          ? {
+              gauge: { rangePsi: 200, incrementPsi: 1 },
+              ceilingPsi: (this.plan.medium ?? 'water') === 'water' ? 180 : 80,
+            }
           : { tape: { incrementIn: 0.25 }, fillLevelFt: this.plan.levelFt ?? 21 }),
         firstReading: this.reading(system, 0),
       },
@@ -181,14 +194,22 @@ export class DemoVisitStory {
 
   private async readAgain(which: 0 | 1): Promise<void> {
     for (const hold of this.holds) {
-      await this.client.call(addReading, this.people.plumber, { params: { holdId: hold.id }, body: this.reading(hold.system, which) });
+      await this.client.call(addReading, this.people.plumber, {
+        params: { holdId: hold.id },
+        body: this.reading(hold.system, which),
+      });
     }
   }
 
   private reading(system: 'dwv' | 'water', which: 0 | 1) {
     const temperatureF = which === 0 ? 61 : 48;
     if (system === 'dwv') return { ...this.write(), levelIn: 0, temperatureF };
-    return { ...this.write(), pressurePsi: (this.plan.psi ?? [118, 116])[which], gaugeValve: 'open' as const, temperatureF };
+    return {
+      ...this.write(),
+      pressurePsi: (this.plan.psi ?? [118, 116])[which],
+      gaugeValve: 'open' as const,
+      temperatureF,
+    };
   }
 
   private async sayUp(): Promise<void> {
@@ -214,15 +235,20 @@ export class DemoVisitStory {
       body: { expectedVersion: visit.version, ...this.write(), result: this.result() },
     });
     this.visit = answer.visit;
-    this.lot.openCorrections = answer.corrections.filter((each) => each.state === 'open').map(({ id, version }) => ({ id, version }));
-    if (this.plan.result?.kind === 'pass') this.stage.at(new Date(this.stage.now().getTime() + 45 * 60_000), () => this.takeDown());
+    this.lot.openCorrections = answer.corrections
+      .filter((each) => each.state === 'open')
+      .map(({ id, version }) => ({ id, version }));
+    if (this.plan.result?.kind === 'pass')
+      this.stage.at(new Date(this.stage.now().getTime() + 45 * 60_000), () => this.takeDown());
   }
 
   private result(): OutcomeResult {
     const result = this.plan.result;
     if (result?.kind === 'not-ready' || result?.kind === 'no-access') return result;
     const corrections = result?.kind === 'fail' ? result.corrections : [];
-    const failed = new Set(corrections.filter((each) => each.severity === 'fix-before-cover').map((each) => each.subject));
+    const failed = new Set(
+      corrections.filter((each) => each.severity === 'fix-before-cover').map((each) => each.subject),
+    );
     return {
       kind: 'seen',
       systems: this.lot.units.flatMap((unitNumber) =>
@@ -256,7 +282,11 @@ export class DemoVisitStory {
     for (const correction of this.lot.openCorrections) {
       await this.client.call(fixCorrection, this.people.plumber, {
         params: { correctionId: correction.id },
-        body: { expectedVersion: correction.version, ...this.write(), note: 'Cut out, new fitting glued in, dry overnight.' },
+        body: {
+          expectedVersion: correction.version,
+          ...this.write(),
+          note: 'Cut out, new fitting glued in, dry overnight.',
+        },
       });
       this.fixed.push(correction.id);
     }
@@ -267,7 +297,10 @@ export class DemoVisitStory {
     const visit = this.known();
     const params = { visitId: visit.id };
     if (end?.kind === 'declined') {
-      await this.client.call(declineVisit, this.people.desk, { params, body: { expectedVersion: visit.version, reason: end.why } });
+      await this.client.call(declineVisit, this.people.desk, {
+        params,
+        body: { expectedVersion: visit.version, reason: end.why },
+      });
     } else if (end) {
       await this.client.call(withdrawVisit, this.people.superintendent, {
         params,
@@ -278,7 +311,10 @@ export class DemoVisitStory {
 
   private async takeDown(): Promise<void> {
     for (const hold of this.holds.filter((each) => each.system === 'dwv')) {
-      await this.client.call(endHold, this.people.plumber, { params: { holdId: hold.id }, body: { ...this.write(), reason: 'taken-down' } });
+      await this.client.call(endHold, this.people.plumber, {
+        params: { holdId: hold.id },
+        body: { ...this.write(), reason: 'taken-down' },
+      });
     }
   }
 

@@ -11,7 +11,9 @@ joinTransactionsByContext();
 
 const environment = readEnvironment(process.env);
 if (environment.HOLDWATER_MODE !== 'demo' || environment.NODE_ENV === 'production') {
-  console.error('Nothing was changed. Demo data is made only where HOLDWATER_MODE is demo and NODE_ENV is not production.');
+  console.error(
+    'Nothing was changed. Demo data is made only where HOLDWATER_MODE is demo and NODE_ENV is not production.',
+  );
   process.exit(1);
 }
 const ownerUrl = environment.DATABASE_MIGRATION_URL;
@@ -26,9 +28,13 @@ try {
     await emptyDatabase(owner);
     console.log('The database was emptied.');
   }
-  const [found] = await owner.query<{ is_empty: boolean }>('SELECT NOT EXISTS (SELECT 1 FROM persons) AS is_empty', { type: QueryTypes.SELECT });
+  const [found] = await owner.query<{ is_empty: boolean }>('SELECT NOT EXISTS (SELECT 1 FROM persons) AS is_empty', {
+    type: QueryTypes.SELECT,
+  });
   if (found?.is_empty) {
-    console.log('Making the demo: two builders, three plumbers, four departments and some weeks of visits. This takes up to a minute, once.');
+    console.log(
+      'Making the demo: two builders, three plumbers, four departments and some weeks of visits. This takes up to a minute, once.',
+    );
     try {
       const acts = await makeDemo(environment, new Date());
       console.log(`The demo is there: ${acts} acts told.`);

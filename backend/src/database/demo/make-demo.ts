@@ -23,7 +23,10 @@ const storyDays = 90;
 export async function makeDemo(environment: Environment, present: Date): Promise<number> {
   const since = new Date(present.getTime() - storyDays * 86_400_000);
   const clock = new SettableClock(since);
-  const app = await NestFactory.create(AppModule.of({ ...environment, ROLE: 'web', LOG_LEVEL: 'error', STATIC_DIR: undefined }, clock), appOptions);
+  const app = await NestFactory.create(
+    AppModule.of({ ...environment, ROLE: 'web', LOG_LEVEL: 'error', STATIC_DIR: undefined }, clock),
+    appOptions,
+  );
   furnish(app, { ...environment, STATIC_DIR: undefined });
   try {
     await app.listen(0, '127.0.0.1');
@@ -35,7 +38,11 @@ export async function makeDemo(environment: Environment, present: Date): Promise
 }
 
 async function play(app: INestApplication, clock: SettableClock, since: Date, present: Date): Promise<number> {
-  const foundation = await layFoundation(app.get<Sequelize>(getConnectionToken()), since, new Date(present.getTime() + 60_000));
+  const foundation = await layFoundation(
+    app.get<Sequelize>(getConnectionToken()),
+    since,
+    new Date(present.getTime() + 60_000),
+  );
   const tokens = app.get(AccessTokens);
   const client = new DemoClient((await app.getUrl()).replace('[::1]', '127.0.0.1'), (key) =>
     Promise.resolve(tokens.issue(foundation.personId(key), foundation.sessionId(key)).accessToken),

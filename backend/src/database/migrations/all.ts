@@ -11,4 +11,15 @@ import { requests } from './0010-requests.js';
 import type { Migration } from './migration.js';
 
 /** Every step, in order. */
-export const migrations: readonly Migration[] = [accounts, departments, lots, visits, holds, outcomes, threads, ledger, notices, requests];
+export const migrations: readonly Migration[] = [
+  accounts,
+  departments,
+  lots,
+  visits,
+  holds,
+  outcomes,
+  threads,
+  ledger,
+  notices,
+  requests,
+];

@@ -37,7 +37,7 @@ export class DeliveryWorker {
 
   /** Sends everything that is due now; answers how many were sent. */
   async drain(): Promise<number> {
-    for (let sent = 0; ; ) {
+    for (let sent = 0; ;) {
       const delivery = await this.claim();
       if (delivery === null) return sent;
       if (await this.deliver(delivery)) sent += 1;

@@ -11,7 +11,10 @@ describe('trying a mail again', () => {
   });
 
   it('goes on for most of a day, so that an hour without a mail server loses nothing', () => {
-    const total = Array.from({ length: mostAttempts - 1 }, (_, i) => seconds(i + 1)).reduce((sum, each) => sum + each, 0);
+    const total = Array.from({ length: mostAttempts - 1 }, (_, i) => seconds(i + 1)).reduce(
+      (sum, each) => sum + each,
+      0,
+    );
     expect(total / 3600).toBeGreaterThan(20);
   });
 

@@ -21,7 +21,8 @@ export class Audiences {
 
   private async ofLot(event: OutboxEventModel, lot: LotFacts, visit: VisitFacts | null): Promise<EventAudience> {
     const members = await this.facts.listMembers([lot.builderId, lot.plumberId, lot.departmentId]);
-    const openerId = typeof event.payload.correctionId === 'string' ? await this.facts.findOpenerId(event.payload.correctionId) : null;
+    const openerId =
+      typeof event.payload.correctionId === 'string' ? await this.facts.findOpenerId(event.payload.correctionId) : null;
     const inspectorId = visit?.inspectorId ?? formerInspectorOf(event);
     return {
       people: {
@@ -41,7 +42,9 @@ export class Audiences {
     const asked = members.filter(({ organizationId }) => organizationId === askedId);
     return {
       people: {
-        asked: asked.filter(({ roles }) => roles.some((role) => ['plumber', 'desk', 'owner'].includes(role))).map(({ id }) => id),
+        asked: asked
+          .filter(({ roles }) => roles.some((role) => ['plumber', 'desk', 'owner'].includes(role)))
+          .map(({ id }) => id),
         superintendents: idsOf(members, lot?.builderId ?? null, 'superintendent'),
       },
       byId: byId(members),
@@ -53,7 +56,12 @@ export class Audiences {
     const members = await this.facts.listMembers([...concerned, departmentId]);
     const inRole = (role: string) => members.filter(({ roles }) => roles.includes(role)).map(({ id }) => id);
     return {
-      people: { superintendents: inRole('superintendent'), plumbers: inRole('plumber'), inspector: inRole('inspector'), desk: inRole('desk') },
+      people: {
+        superintendents: inRole('superintendent'),
+        plumbers: inRole('plumber'),
+        inspector: inRole('inspector'),
+        desk: inRole('desk'),
+      },
       byId: byId(members),
     };
   }
@@ -66,7 +74,9 @@ function formerInspectorOf(event: OutboxEventModel): string | null {
 }
 
 function idsOf(members: readonly PersonRow[], organizationId: string | null, role: string): string[] {
-  return members.filter((each) => each.organizationId === organizationId && each.roles.includes(role)).map(({ id }) => id);
+  return members
+    .filter((each) => each.organizationId === organizationId && each.roles.includes(role))
+    .map(({ id }) => id);
 }
 
 /** A person of two organizations is told once, as a member of the first. */

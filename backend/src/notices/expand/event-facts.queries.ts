@@ -81,7 +81,10 @@ export class EventFactsQueries {
   }
 
   async findOpenerId(correctionId: string): Promise<string | null> {
-    const row = await this.one<{ openedBy: string }>('SELECT opened_by AS "openedBy" FROM corrections WHERE id = :correctionId', { correctionId });
+    const row = await this.one<{ openedBy: string }>(
+      'SELECT opened_by AS "openedBy" FROM corrections WHERE id = :correctionId',
+      { correctionId },
+    );
     return row?.openedBy ?? null;
   }
 
@@ -97,12 +100,18 @@ export class EventFactsQueries {
 
   /** Who has, by our own mails, an entry of this visit in their calendar, and the newest sequence of it. */
   async listInvited(visitId: string): Promise<Array<{ personId: string; address: string }>> {
-    return this.sequelize.query(
-      `SELECT DISTINCT ON (address) person_id AS "personId", address, payload -> 'invite' ->> 'method' AS method
+    return this.sequelize
+      .query(
+        `SELECT DISTINCT ON (address) person_id AS "personId", address, payload -> 'invite' ->> 'method' AS method
        FROM deliveries WHERE order_key = :key AND payload -> 'invite' ->> 'method' IS NOT NULL AND state <> 'dropped'
        ORDER BY address, position DESC`,
-      { replacements: { key: visitId }, type: QueryTypes.SELECT },
-    ).then((rows) => (rows as Array<{ personId: string; address: string; method: string }>).filter(({ method }) => method === 'REQUEST'));
+        { replacements: { key: visitId }, type: QueryTypes.SELECT },
+      )
+      .then((rows) =>
+        (rows as Array<{ personId: string; address: string; method: string }>).filter(
+          ({ method }) => method === 'REQUEST',
+        ),
+      );
   }
 
   private async one<Row extends object>(sql: string, replacements: Record<string, unknown>): Promise<Row | null> {

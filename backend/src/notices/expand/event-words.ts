@@ -73,7 +73,14 @@ function visitFacts({ event, lot, visit }: EventSubject): LotMailFacts['visit'] 
   const facts = event.payload.visit as VisitEventFacts | undefined;
   if (!facts) return null;
   const { startAt, endAt, inspectorName, plannedStartAt } = facts;
-  return { startAt, endAt, inspectorName, plannedStartAt, upBy: upBy(startAt, lot, visit), systems: stageOf(visit)?.systems ?? [] };
+  return {
+    startAt,
+    endAt,
+    inspectorName,
+    plannedStartAt,
+    upBy: upBy(startAt, lot, visit),
+    systems: stageOf(visit)?.systems ?? [],
+  };
 }
 
 /** When the tests must be up, by the rule card of the visit; null where nothing is tested. */
@@ -88,8 +95,12 @@ function stageOf(visit: VisitFacts | null) {
   return visit?.content.stages.find(({ code }) => code === visit.stageCode) ?? null;
 }
 
-function roleOf(person: PersonRow, people: Partial<Record<Audience, readonly string[]>>): LotMailFacts['recipientRole'] {
+function roleOf(
+  person: PersonRow,
+  people: Partial<Record<Audience, readonly string[]>>,
+): LotMailFacts['recipientRole'] {
   if (people.inspector?.includes(person.id) || people.opener?.includes(person.id)) return 'inspector';
-  for (const role of ['superintendent', 'plumber', 'desk', 'inspector'] as const) if (person.roles.includes(role)) return role;
+  for (const role of ['superintendent', 'plumber', 'desk', 'inspector'] as const)
+    if (person.roles.includes(role)) return role;
   return 'owner';
 }

@@ -58,11 +58,21 @@ export class ExpandEvent {
   private async expandNotice(event: OutboxEventModel, kind: NoticeKind): Promise<void> {
     const lot = event.lotId ? await this.facts.findLot(event.lotId) : null;
     const visit = event.visitId ? await this.facts.findVisit(event.visitId) : null;
-    const subject: EventSubject = { event, kind, lot, visit, actorName: await this.facts.findPersonName(event.actorId) };
+    const subject: EventSubject = {
+      event,
+      kind,
+      lot,
+      visit,
+      actorName: await this.facts.findPersonName(event.actorId),
+    };
     const audience = await this.audiences.of(event, lot, visit);
     const recipients = recipientsOf(kind, audience.people, event.actorId, lot?.hasOpenVisit ?? false);
     const invited = event.visitId && noticeRules[kind].calendar ? await this.facts.listInvited(event.visitId) : [];
-    const invites = invitesOf(subject, [...recipients].filter(([, channels]) => channels.email).map(([id]) => id), invited);
+    const invites = invitesOf(
+      subject,
+      [...recipients].filter(([, channels]) => channels.email).map(([id]) => id),
+      invited,
+    );
     for (const [personId, channels] of recipients) {
       const person = audience.byId.get(personId);
       if (!person) continue;
@@ -76,12 +86,17 @@ export class ExpandEvent {
 
   /** Somebody who had the entry and is no longer concerned, such as an inspector whose visit went to another: their entry goes. */
   private async cancelFor(subject: EventSubject, left: { personId: string; address: string }): Promise<void> {
-    const [person] = (await this.facts.listMembers([subject.lot?.departmentId ?? null, subject.lot?.builderId ?? null, subject.lot?.plumberId ?? null])).filter(
-      ({ id }) => id === left.personId,
-    );
+    const [person] = (
+      await this.facts.listMembers([
+        subject.lot?.departmentId ?? null,
+        subject.lot?.builderId ?? null,
+        subject.lot?.plumberId ?? null,
+      ])
+    ).filter(({ id }) => id === left.personId);
     if (!person) return;
     const mail = lotMailFacts(subject, person, {}, cancellationOf(subject), 'visit-passed-on');
-    if (mail) await this.deliver(subject.event, { personId: left.personId, address: left.address, noticeId: null }, mail);
+    if (mail)
+      await this.deliver(subject.event, { personId: left.personId, address: left.address, noticeId: null }, mail);
   }
 
   private async notice(subject: EventSubject, personId: string): Promise<string> {

@@ -22,7 +22,8 @@ export interface Invites {
 export function invitesOf(subject: EventSubject, mailedIds: readonly string[], invited: readonly Invited[]): Invites {
   const rule = noticeRules[subject.kind].calendar;
   const none: Invites = { of: () => null, leftBehind: [] };
-  if (!rule || !subject.visit || (subject.kind === 'visit-moved' && subject.event.payload.isBooked === false)) return none;
+  if (!rule || !subject.visit || (subject.kind === 'visit-moved' && subject.event.payload.isBooked === false))
+    return none;
   const has = new Set(invited.map(({ personId }) => personId));
   const leftBehind = invited.filter(({ personId }) => !mailedIds.includes(personId));
   if (rule === 'request') return { of: () => facts(subject, 'REQUEST'), leftBehind };

@@ -29,7 +29,10 @@ export function composeLotMail(facts: LotMailFacts, appUrl: string): MailDraft {
   const values = valuesOf(facts, w);
   const kind = w.kinds[facts.kind];
   const act = facts.lotId
-    ? { words: fill(w.openLot, { number: facts.lotNumber }), url: `${appUrl}${facts.kind === 'consent-asked' ? '/consents' : `/lots/${facts.lotId}`}` }
+    ? {
+        words: fill(w.openLot, { number: facts.lotNumber }),
+        url: `${appUrl}${facts.kind === 'consent-asked' ? '/consents' : `/lots/${facts.lotId}`}`,
+      }
     : { words: w.openPage, url: appUrl };
   return {
     language: facts.locale,
@@ -105,7 +108,11 @@ function cellsOf(facts: LotMailFacts, w: MailWords, values: Record<string, strin
   const where = [facts.tractName, fill(w.lotName, { number: facts.lotNumber })].filter(Boolean).join(', ');
   const cells: MailDraft['cells'] = [];
   if (facts.visit) {
-    cells.push({ label: w.labels.when, value: values.when ?? '', more: new When(facts.locale, facts.zone).zoneName(facts.visit.startAt) });
+    cells.push({
+      label: w.labels.when,
+      value: values.when ?? '',
+      more: new When(facts.locale, facts.zone).zoneName(facts.visit.startAt),
+    });
   }
   if (facts.address) cells.push({ label: w.labels.where, value: facts.address, more: where });
   if (facts.from) cells.push({ label: w.labels.was, value: values.from ?? '' });
@@ -120,13 +127,29 @@ function cellsOf(facts: LotMailFacts, w: MailWords, values: Record<string, strin
 
 function notesOf(facts: LotMailFacts, w: MailWords): string[] {
   const notes = [];
-  if (facts.invite) notes.push(facts.invite.method === 'CANCEL' ? w.calendar.cancel : w.calendar[facts.kind === 'visit-moved' ? 'move' : 'request']);
+  if (facts.invite)
+    notes.push(
+      facts.invite.method === 'CANCEL'
+        ? w.calendar.cancel
+        : w.calendar[facts.kind === 'visit-moved' ? 'move' : 'request'],
+    );
   if (facts.visit?.upBy && comes.includes(facts.kind)) notes.push(w.local);
   return notes;
 }
 
 function footOf(facts: LotMailFacts, w: MailWords): string[] {
-  const because = fill(w.sentBecause, { name: facts.recipientName, organization: facts.organizationName, role: w.roles[facts.recipientRole] });
+  const because = fill(w.sentBecause, {
+    name: facts.recipientName,
+    organization: facts.organizationName,
+    role: w.roles[facts.recipientRole],
+  });
   if (!facts.departmentName) return [because];
-  return [because, fill(w.department, { builder: facts.builderName, department: facts.departmentName, phone: facts.departmentPhone ?? '' })];
+  return [
+    because,
+    fill(w.department, {
+      builder: facts.builderName,
+      department: facts.departmentName,
+      phone: facts.departmentPhone ?? '',
+    }),
+  ];
 }

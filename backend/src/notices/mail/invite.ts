@@ -17,7 +17,16 @@ export interface InviteParts {
  * The calendar file of a visit (RFC 5545, RFC 5546): one event whose UID stays, times in UTC, the recipient as attendee. A cancellation
  * carries STATUS:CANCELLED and the same UID.
  */
-export function inviteOf({ facts, summary, description, location, url, organizer, attendee, stamp }: InviteParts): string {
+export function inviteOf({
+  facts,
+  summary,
+  description,
+  location,
+  url,
+  organizer,
+  attendee,
+  stamp,
+}: InviteParts): string {
   const isCancel = facts.method === 'CANCEL';
   const calendar = ical({
     prodId: { company: 'Holdwater', product: 'Visits', language: 'EN' },

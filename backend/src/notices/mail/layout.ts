@@ -42,15 +42,36 @@ function cellsHtml(cells: MailDraft['cells']): string {
   const cell = ({ label, value, more }: MailDraft['cells'][number]) =>
     `<td width="50%" valign="top" style="padding:8px 12px;border:1px solid #82877F"><span style="font-size:13px">${escapeHtml(label)}</span><br><strong>${escapeHtml(value)}</strong>${more ? `<br>${escapeHtml(more)}` : ''}</td>`;
   const rows: string[] = [];
-  for (let i = 0; i < cells.length; i += 2) rows.push(`<tr>${cells.slice(i, i + 2).map(cell).join('')}</tr>`);
+  for (let i = 0; i < cells.length; i += 2)
+    rows.push(
+      `<tr>${cells
+        .slice(i, i + 2)
+        .map(cell)
+        .join('')}</tr>`,
+    );
   return `<table role="presentation" width="100%" cellspacing="0" cellpadding="0" style="border-collapse:collapse;margin:0 0 18px">${rows.join('')}</table>`;
 }
 
 /** The plain-text twin. */
 export function textOf(mail: MailDraft): string {
   const width = Math.max(...mail.cells.map(({ label }) => label.length), 0) + 2;
-  const cells = mail.cells.flatMap(({ label, value, more }) => [`${label.padEnd(width)}${value}`, ...(more ? [' '.repeat(width) + more] : [])]);
-  return [mail.subject, '', mail.lead, '', ...cells, ...(cells.length > 0 ? [''] : []), `${mail.act.words}:`, mail.act.url, '', ...mail.notes, '', ...mail.foot, ''].join(
-    '\n',
-  );
+  const cells = mail.cells.flatMap(({ label, value, more }) => [
+    `${label.padEnd(width)}${value}`,
+    ...(more ? [' '.repeat(width) + more] : []),
+  ]);
+  return [
+    mail.subject,
+    '',
+    mail.lead,
+    '',
+    ...cells,
+    ...(cells.length > 0 ? [''] : []),
+    `${mail.act.words}:`,
+    mail.act.url,
+    '',
+    ...mail.notes,
+    '',
+    ...mail.foot,
+    '',
+  ].join('\n');
 }

@@ -22,7 +22,14 @@ export interface LotMailFacts {
   builderName: string;
   zone: string;
   stageName: { en: string; es?: string } | null;
-  visit: { startAt: string; endAt: string; inspectorName: string | null; plannedStartAt: string | null; upBy: string | null; systems: string[] } | null;
+  visit: {
+    startAt: string;
+    endAt: string;
+    inspectorName: string | null;
+    plannedStartAt: string | null;
+    upBy: string | null;
+    systems: string[];
+  } | null;
   from: { startAt: string; endAt: string } | null;
   reason: string | null;
   outcome: string | null;

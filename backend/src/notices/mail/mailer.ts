@@ -48,7 +48,11 @@ export class Mailer implements OnModuleDestroy {
   messageOf({ messageId, address, facts }: Outgoing): SendMailOptions {
     const draft =
       facts.type === 'account'
-        ? composeAccountMail(facts, facts.sealedToken && unseal(facts.sealedToken, this.environment.JWT_SECRET), this.environment.APP_URL)
+        ? composeAccountMail(
+            facts,
+            facts.sealedToken && unseal(facts.sealedToken, this.environment.JWT_SECRET),
+            this.environment.APP_URL,
+          )
         : composeLotMail(facts, this.environment.APP_URL);
     const invite = facts.type === 'lot' && facts.invite ? this.calendarOf(facts, draft.lead, address) : null;
     return {
@@ -61,7 +65,11 @@ export class Mailer implements OnModuleDestroy {
       html: htmlOf(draft),
       headers: { 'Auto-Submitted': 'auto-generated' },
       // last in multipart/alternative, with its method in the content type: what makes mail programs offer accept and decline
-      ...(invite && { alternatives: [{ contentType: `text/calendar; charset=utf-8; method=${invite.method}`, content: invite.content }] }),
+      ...(invite && {
+        alternatives: [
+          { contentType: `text/calendar; charset=utf-8; method=${invite.method}`, content: invite.content },
+        ],
+      }),
     };
   }
 

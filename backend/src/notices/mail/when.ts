@@ -30,7 +30,10 @@ export class When {
 
   /** Mountain Time */
   zoneName(instant: string): string {
-    const parts = new Intl.DateTimeFormat(this.tag(), { timeZone: this.zone, timeZoneName: 'longGeneric' }).formatToParts(new Date(instant));
+    const parts = new Intl.DateTimeFormat(this.tag(), {
+      timeZone: this.zone,
+      timeZoneName: 'longGeneric',
+    }).formatToParts(new Date(instant));
     return parts.find(({ type }) => type === 'timeZoneName')?.value ?? this.zone;
   }
 

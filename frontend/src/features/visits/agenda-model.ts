@@ -24,10 +24,7 @@ export interface AgendaClosure {
  * A day as a list: windows in order of time, those that are over or full only where a visit of the reader's stands in them. A visit whose
  * window the rule card no longer has keeps a bracket of its own.
  */
-export function agendaOf(
-  { cells }: CalendarDay,
-  now: Date,
-): { windows: AgendaWindow[]; closed: AgendaClosure[] } {
+export function agendaOf({ cells }: CalendarDay, now: Date): { windows: AgendaWindow[]; closed: AgendaClosure[] } {
   const windows = cells.flatMap(({ lane, day, visits }) => {
     const base = { departmentId: lane.departmentId, zone: lane.zone };
     const known = (day?.windows ?? []).map((window): AgendaWindow => ({

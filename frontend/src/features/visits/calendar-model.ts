@@ -41,7 +41,9 @@ export function shownDates(date: string, weeks: number, calendar: Calendar | und
 }
 
 function isWorked(date: string, calendar: Calendar | undefined): boolean {
-  const hasWindows = calendar?.lanes.some((lane) => lane.days.some((day) => day.date === date && day.windows.length > 0));
+  const hasWindows = calendar?.lanes.some((lane) =>
+    lane.days.some((day) => day.date === date && day.windows.length > 0),
+  );
   return hasWindows === true || (calendar?.visits ?? []).some((visit) => visit.window.date === date && !isGone(visit));
 }
 

@@ -67,7 +67,9 @@ function sameWindow({ window }: VisitSummary, startAt: string, endAt: string): b
 /** Where navigation leads: the coordinates where they are known, else the address in words (RFC 5870 and its common `q`). */
 export function directionsTo({ visit, latitude, longitude }: RunStop): string {
   const words = encodeURIComponent(visit.address);
-  return latitude === null || longitude === null ? `geo:0,0?q=${words}` : `geo:${latitude},${longitude}?q=${latitude},${longitude}`;
+  return latitude === null || longitude === null
+    ? `geo:0,0?q=${words}`
+    : `geo:${latitude},${longitude}?q=${latitude},${longitude}`;
 }
 
 /** Why a visit cannot begin yet: before its window only a test that is up lets it. */

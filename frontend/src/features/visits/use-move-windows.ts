@@ -27,7 +27,8 @@ export function useMoveWindows(visit: VisitSummary): MoveWindows {
   const isDesk = organizationId === visit.departmentId;
   const today = localDateOf(useNow(60_000), visit.zone);
   const { lotId, unitNumbers, stageCode } = visit;
-  const isOther = (window: ChoosableWindow): boolean => window.isTakeable && windowKey(window) !== windowKey(visit.window);
+  const isOther = (window: ChoosableWindow): boolean =>
+    window.isTakeable && windowKey(window) !== windowKey(visit.window);
   const offered = useQuery({
     ...offersQuery({ lots: [{ lotId, unitNumbers }], stageCode }),
     enabled: !isDesk,

@@ -18,7 +18,13 @@ export interface SendRequest {
 }
 
 /** The window is gone: none is chosen until the reader chooses again. */
-const goneCodes: readonly ApiErrorCode[] = ['window-full', 'window-past', 'window-closed', 'window-unknown', 'cut-off-passed'];
+const goneCodes: readonly ApiErrorCode[] = [
+  'window-full',
+  'window-past',
+  'window-closed',
+  'window-unknown',
+  'cut-off-passed',
+];
 
 interface Sending {
   readonly requesting: Requesting;
@@ -74,5 +80,7 @@ function wordsOf(values: RequestWords, hasCaller: boolean, zone: string) {
 
 function focusFault(): void {
   // After the faults are drawn.
-  requestAnimationFrame(() => document.querySelector<HTMLElement>('.side [aria-invalid], .side-page [aria-invalid]')?.focus());
+  requestAnimationFrame(() =>
+    document.querySelector<HTMLElement>('.side [aria-invalid], .side-page [aria-invalid]')?.focus(),
+  );
 }

@@ -10,7 +10,11 @@ export const en: MailWords = {
       lead: '{actor} asks for this window. Place it or decline it; until then nobody is told that it is booked.',
     },
     'visit-booked': { tag: 'Booked', subject: '{lot}: {stage} visit {when}', lead: 'The visit is booked.' },
-    'visit-moved': { tag: 'Moved', subject: '{lot}: {stage} visit moved to {when}', lead: 'The visit was moved from {from} to {when}.' },
+    'visit-moved': {
+      tag: 'Moved',
+      subject: '{lot}: {stage} visit moved to {when}',
+      lead: 'The visit was moved from {from} to {when}.',
+    },
     'visit-withdrawn': {
       tag: 'Withdrawn',
       subject: '{lot}: {stage} visit {when} withdrawn',
@@ -37,17 +41,33 @@ export const en: MailWords = {
       lead: 'The inspector did not get to this lot. It keeps first place for the next window and there is no fee.',
     },
     'test-up': { tag: 'Test up', subject: '{lot}: test up for {when}', lead: '{actor} says the tests are standing.' },
-    'no-longer-up': { tag: 'No longer up', subject: '{lot}: test no longer up', lead: '{actor} says the test is down again.' },
+    'no-longer-up': {
+      tag: 'No longer up',
+      subject: '{lot}: test no longer up',
+      lead: '{actor} says the test is down again.',
+    },
     'visit-underway': { tag: 'Underway', subject: '{lot}: {stage} visit underway', lead: '{actor} is at the lot.' },
     outcome: { tag: 'Outcome', subject: '{lot}: {stage} {outcome}', lead: '{actor} recorded: {outcome}.' },
-    'correction-opened': { tag: 'Correction', subject: '{lot}: correction {number} opened', lead: '{actor} opened correction {number}.' },
+    'correction-opened': {
+      tag: 'Correction',
+      subject: '{lot}: correction {number} opened',
+      lead: '{actor} opened correction {number}.',
+    },
     'correction-fixed': {
       tag: 'Fixed',
       subject: '{lot}: correction {number} fixed',
       lead: '{actor} says correction {number} is fixed. Accept or reopen it.',
     },
-    'correction-reopened': { tag: 'Reopened', subject: '{lot}: correction {number} reopened', lead: '{actor} reopened correction {number}.' },
-    'correction-accepted': { tag: 'Accepted', subject: '{lot}: correction {number} accepted', lead: '{actor} accepted correction {number}.' },
+    'correction-reopened': {
+      tag: 'Reopened',
+      subject: '{lot}: correction {number} reopened',
+      lead: '{actor} reopened correction {number}.',
+    },
+    'correction-accepted': {
+      tag: 'Accepted',
+      subject: '{lot}: correction {number} accepted',
+      lead: '{actor} accepted correction {number}.',
+    },
     comment: { tag: 'Thread', subject: '{lot}: {actor} wrote', lead: '{actor} wrote to the thread.' },
     'consent-asked': {
       tag: 'Asks you to join',
@@ -55,7 +75,11 @@ export const en: MailWords = {
       lead: '{builder} asks {organization} to join this lot. Until you do, you see no more of it than this.',
     },
     'consent-given': { tag: 'Joined', subject: '{lot}: joined', lead: '{actor} joined the lot.' },
-    'consent-refused': { tag: 'Not joined', subject: '{lot}: {actor} does not join', lead: '{actor} does not join the lot. Ask another.' },
+    'consent-refused': {
+      tag: 'Not joined',
+      subject: '{lot}: {actor} does not join',
+      lead: '{actor} does not join the lot. Ask another.',
+    },
     'rule-card-published': {
       tag: 'Rule card',
       subject: 'Rule card {version} is published',
@@ -88,7 +112,8 @@ export const en: MailWords = {
   openLot: 'Open lot {number}',
   openPage: 'Open Holdwater',
   calendar: {
-    request: 'The file attached puts the visit in your own calendar. If it moves, the same entry moves. If it is withdrawn, the entry goes.',
+    request:
+      'The file attached puts the visit in your own calendar. If it moves, the same entry moves. If it is withdrawn, the entry goes.',
     move: 'The entry in your calendar moves with it.',
     cancel: 'The entry in your calendar goes.',
   },

@@ -9,8 +9,16 @@ export const es: MailWords = {
       subject: '{lot}: visita de {stage} solicitada para {when}',
       lead: '{actor} pide este horario. Asígnelo o recházelo; hasta entonces a nadie se le dice que está reservado.',
     },
-    'visit-booked': { tag: 'Reservada', subject: '{lot}: visita de {stage}, {when}', lead: 'La visita está reservada.' },
-    'visit-moved': { tag: 'Cambiada', subject: '{lot}: visita de {stage} pasa a {when}', lead: 'La visita pasó de {from} a {when}.' },
+    'visit-booked': {
+      tag: 'Reservada',
+      subject: '{lot}: visita de {stage}, {when}',
+      lead: 'La visita está reservada.',
+    },
+    'visit-moved': {
+      tag: 'Cambiada',
+      subject: '{lot}: visita de {stage} pasa a {when}',
+      lead: 'La visita pasó de {from} a {when}.',
+    },
     'visit-withdrawn': {
       tag: 'Retirada',
       subject: '{lot}: visita de {stage}, {when}, retirada',
@@ -36,18 +44,42 @@ export const es: MailWords = {
       subject: '{lot}: visita de {stage}, {when}, no alcanzada',
       lead: 'El inspector no llegó a este lote. Conserva el primer lugar para el próximo horario y no hay cargo.',
     },
-    'test-up': { tag: 'Prueba puesta', subject: '{lot}: prueba puesta para {when}', lead: '{actor} dice que las pruebas están puestas.' },
-    'no-longer-up': { tag: 'Ya no puesta', subject: '{lot}: la prueba ya no está puesta', lead: '{actor} dice que la prueba se bajó.' },
-    'visit-underway': { tag: 'En curso', subject: '{lot}: visita de {stage} en curso', lead: '{actor} está en el lote.' },
+    'test-up': {
+      tag: 'Prueba puesta',
+      subject: '{lot}: prueba puesta para {when}',
+      lead: '{actor} dice que las pruebas están puestas.',
+    },
+    'no-longer-up': {
+      tag: 'Ya no puesta',
+      subject: '{lot}: la prueba ya no está puesta',
+      lead: '{actor} dice que la prueba se bajó.',
+    },
+    'visit-underway': {
+      tag: 'En curso',
+      subject: '{lot}: visita de {stage} en curso',
+      lead: '{actor} está en el lote.',
+    },
     outcome: { tag: 'Resultado', subject: '{lot}: {stage}, {outcome}', lead: '{actor} registró: {outcome}.' },
-    'correction-opened': { tag: 'Corrección', subject: '{lot}: corrección {number} abierta', lead: '{actor} abrió la corrección {number}.' },
+    'correction-opened': {
+      tag: 'Corrección',
+      subject: '{lot}: corrección {number} abierta',
+      lead: '{actor} abrió la corrección {number}.',
+    },
     'correction-fixed': {
       tag: 'Arreglada',
       subject: '{lot}: corrección {number} arreglada',
       lead: '{actor} dice que la corrección {number} está arreglada. Acéptela o reábrala.',
     },
-    'correction-reopened': { tag: 'Reabierta', subject: '{lot}: corrección {number} reabierta', lead: '{actor} reabrió la corrección {number}.' },
-    'correction-accepted': { tag: 'Aceptada', subject: '{lot}: corrección {number} aceptada', lead: '{actor} aceptó la corrección {number}.' },
+    'correction-reopened': {
+      tag: 'Reabierta',
+      subject: '{lot}: corrección {number} reabierta',
+      lead: '{actor} reabrió la corrección {number}.',
+    },
+    'correction-accepted': {
+      tag: 'Aceptada',
+      subject: '{lot}: corrección {number} aceptada',
+      lead: '{actor} aceptó la corrección {number}.',
+    },
     comment: { tag: 'Conversación', subject: '{lot}: {actor} escribió', lead: '{actor} escribió en la conversación.' },
     'consent-asked': {
       tag: 'Le pide unirse',
@@ -55,7 +87,11 @@ export const es: MailWords = {
       lead: '{builder} pide a {organization} que se una a este lote. Mientras tanto no verá más que esto.',
     },
     'consent-given': { tag: 'Se unió', subject: '{lot}: se unió', lead: '{actor} se unió al lote.' },
-    'consent-refused': { tag: 'No se une', subject: '{lot}: {actor} no se une', lead: '{actor} no se une al lote. Pida a otro.' },
+    'consent-refused': {
+      tag: 'No se une',
+      subject: '{lot}: {actor} no se une',
+      lead: '{actor} no se une al lote. Pida a otro.',
+    },
     'rule-card-published': {
       tag: 'Tarjeta de reglas',
       subject: 'Se publicó la tarjeta de reglas {version}',
@@ -82,13 +118,20 @@ export const es: MailWords = {
     other: 'otro motivo',
   },
   systems: { dwv: 'DWV (desagüe y ventilación)', water: 'Agua' },
-  roles: { superintendent: 'superintendente', plumber: 'plomero', inspector: 'inspector', desk: 'oficina', owner: 'dueño' },
+  roles: {
+    superintendent: 'superintendente',
+    plumber: 'plomero',
+    inspector: 'inspector',
+    desk: 'oficina',
+    owner: 'dueño',
+  },
   labels: { when: 'Cuándo', where: 'Dónde', inspector: 'Inspector', tests: 'Pruebas', reason: 'Por qué', was: 'Era' },
   notSetYet: 'sin asignar todavía',
   openLot: 'Abrir el lote {number}',
   openPage: 'Abrir Holdwater',
   calendar: {
-    request: 'El archivo adjunto pone la visita en su propio calendario. Si cambia, cambia la misma entrada. Si se retira, la entrada desaparece.',
+    request:
+      'El archivo adjunto pone la visita en su propio calendario. Si cambia, cambia la misma entrada. Si se retira, la entrada desaparece.',
     move: 'La entrada de su calendario cambia con ella.',
     cancel: 'La entrada de su calendario desaparece.',
   },

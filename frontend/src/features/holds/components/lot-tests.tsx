@@ -102,7 +102,7 @@ function StageTests({ lot, holds, visit, ruleCard, stageCode, unitNumber }: Stag
         onChoose={choose}
       />
       <TestSheet
-        key={`${unitNumber}.${system}.${hold?.id ?? 'new'}`}
+        key={`${unitNumber}.${system}`}
         lot={lot}
         holds={holds}
         visit={visit}

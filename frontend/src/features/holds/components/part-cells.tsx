@@ -62,8 +62,9 @@ const markOf: Record<UpState, MarkName> = {
   up: 'ready',
 };
 
-function cellOf({ lot, holds, stageCode, ruleCard }: PartCellsProps, part: TestedPart): SystemCell {
-  const { t } = useTranslation(['holds', 'common']);
+type Words = TFunction<['holds', 'common']>;
+
+function cellOf(t: Words, { lot, holds, stageCode, ruleCard }: PartCellsProps, part: TestedPart): SystemCell {
   const hold = findStanding(holds, part, stageCode);
   const state = upState(hold);
   const mark = state === 'up' && part.system === 'dwv' && hold?.fillLevelFt != null ? 'level' : markOf[state];

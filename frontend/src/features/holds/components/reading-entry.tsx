@@ -2,7 +2,6 @@ import { useId, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Choice } from '../../../components/choice';
 import { Field } from '../../../components/field';
-import { Icon } from '../../../components/icon';
 import { Numeral } from '../../../components/numeral';
 import { Dial } from '../../../drawings/dial';
 import { useIsPhone } from '../../../lib/use-media';
@@ -155,15 +154,5 @@ function ValueEntry({ instrument, draft, check, stepFrom, onChange }: ReadingEnt
         +½
       </button>
     </div>
-  );
-}
-
-/** What stands behind a level: how far down the rim it is read, beside the sign for a water surface. */
-export function LevelNote({ text }: { text: string }): ReactNode {
-  return (
-    <p className="row s mid">
-      <Icon name="down" size={18} />
-      <Numeral text={text} />
-    </p>
   );
 }

@@ -99,7 +99,7 @@ function GaugeTools(props: TestSetupFormProps): ReactNode {
         <Tool {...props} field="ceilingPsi" label={t('setup.ceiling')} unit="psi" isOptional hint={t('setup.ceilingHint')} />
       </div>
       {coarse === null ? null : (
-        <Caution>{t('setup.tooCoarse', { version: ruleCard.version, psi: coarse, count: coarse })}</Caution>
+        <Caution>{t('setup.tooCoarse', { version: ruleCard.version, psi: coarse })}</Caution>
       )}
       {rule.measuredAt === 'highest-outlet' ? <p className="s mid">{t('setup.atHighestOutlet')}</p> : null}
     </>

@@ -22,6 +22,7 @@ export function TestSheet(input: TestSheetInput): ReactNode {
   const { lot, visit, ruleCard, rule, part, hold } = input;
   const { t } = useTranslation(['holds', 'common']);
   const sheet = useTestSheet(input);
+  const cannotSave = useCannotSave(sheet);
   const nextOrdinal = ordinalAfter(input);
   const name = t('testName', {
     system: t(`common.systems.${part.system}`),
@@ -75,7 +76,7 @@ export function TestSheet(input: TestSheetInput): ReactNode {
         {visit?.moves.includes('no-longer-up') ? <NoLongerUp visit={visit} /> : null}
         <TestActs
           up={sheet.up}
-          cannotSave={useCannotSave(sheet)}
+          cannotSave={cannotSave}
           isStarting={hold === null}
           busy={sheet.busy}
           onSave={() => (sheet.trySetup() ? sheet.save() : undefined)}

@@ -51,7 +51,12 @@ export function BoardRule(props: BoardRuleProps): ReactNode {
           );
         })}
         {all.map((hour) => (
-          <span key={hour} className="board-hour xs mid" style={{ left: percent(shareOf(hour, hours)) }} aria-hidden="true">
+          <span
+            key={hour}
+            className="board-hour xs mid"
+            style={{ left: percent(shareOf(hour, hours)) }}
+            aria-hidden="true"
+          >
             <span className="n">{((hour + 11) % 12) + 1}:00</span>
           </span>
         ))}
@@ -60,7 +65,14 @@ export function BoardRule(props: BoardRuleProps): ReactNode {
   );
 }
 
-function RequestVessel({ standing, hours, board, keys, chosenVisitId, onOpenVisit }: BoardRuleProps & { standing: StandingRequest }): ReactNode {
+function RequestVessel({
+  standing,
+  hours,
+  board,
+  keys,
+  chosenVisitId,
+  onOpenVisit,
+}: BoardRuleProps & { standing: StandingRequest }): ReactNode {
   const { t } = useTranslation(['visits', 'common']);
   const words = useTimeWords();
   const locale = useLocale();
@@ -74,7 +86,12 @@ function RequestVessel({ standing, hours, board, keys, chosenVisitId, onOpenVisi
       className="board-request"
       data-item={visit.id}
       data-hour={fromHour}
-      style={{ left: percent(left), width: percent(shareOf(toHour, hours) - left), bottom: 50 + level * requestPx, height: requestPx - 4 }}
+      style={{
+        left: percent(left),
+        width: percent(shareOf(toHour, hours) - left),
+        bottom: 50 + level * requestPx,
+        height: requestPx - 4,
+      }}
     >
       <button
         type="button"

@@ -58,7 +58,15 @@ export function BoardStrip(props: BoardStripProps): ReactNode {
   );
 }
 
-function Vessel({ visit, board, hours, now, keys, chosenVisitId, onOpenVisit }: BoardStripProps & { visit: VisitSummary }): ReactNode {
+function Vessel({
+  visit,
+  board,
+  hours,
+  now,
+  keys,
+  chosenVisitId,
+  onOpenVisit,
+}: BoardStripProps & { visit: VisitSummary }): ReactNode {
   const { t } = useTranslation('common');
   const look = useVisitLook()(visit, now);
   const name = useVisitName()(visit, look.word);

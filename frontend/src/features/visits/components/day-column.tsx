@@ -28,7 +28,11 @@ export function DayColumn(props: DayColumnProps): ReactNode {
   const isToday = day.date === today;
   const title = isToday ? t('cal.todayDay', { day: words.date(day.date) }) : words.date(day.date);
   return (
-    <div className={`cal-day ${isToday ? 'today' : ''} ${day.date < today ? 'past' : ''}`} role="row" aria-label={title}>
+    <div
+      className={`cal-day ${isToday ? 'today' : ''} ${day.date < today ? 'past' : ''}`}
+      role="row"
+      aria-label={title}
+    >
       <div className="cal-day-head" role="rowheader">
         <div className="cal-day-name">
           <Numeral text={title} />

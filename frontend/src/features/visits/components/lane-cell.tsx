@@ -149,7 +149,12 @@ function OwnHours({ cell, date, scale, zone }: LaneCellProps): ReactNode {
   // Both clocks show the same instant; whole hours between zones of the States.
   const offset = hoursOfDay(ahead.startAt, cell.lane.zone) - hoursOn(date, ahead.startAt, zone);
   return Array.from({ length: scale.to - scale.from }, (_, index) => scale.from + index).map((hour) => (
-    <span key={hour} className="cal-own-hour xs mut" style={{ top: (hour - scale.from) * scale.pxPerHour }} aria-hidden="true">
+    <span
+      key={hour}
+      className="cal-own-hour xs mut"
+      style={{ top: (hour - scale.from) * scale.pxPerHour }}
+      aria-hidden="true"
+    >
       <span className="n">{((hour + offset + 11) % 12) + 1}:00</span>
     </span>
   ));

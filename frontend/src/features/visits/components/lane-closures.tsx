@@ -20,7 +20,9 @@ export function LaneClosures({ cell: { day }, date, zone, scale }: LaneClosuresP
   if (!day.isWorkingDay || whole !== undefined) {
     return (
       <div className="cal-closed" style={{ top: 0, bottom: 0 }}>
-        <span>{whole === undefined || whole.why === '' ? t('closed.day') : t('closed.why', { why: why(whole.why) })}</span>
+        <span>
+          {whole === undefined || whole.why === '' ? t('closed.day') : t('closed.why', { why: why(whole.why) })}
+        </span>
       </div>
     );
   }

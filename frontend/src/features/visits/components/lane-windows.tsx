@@ -28,7 +28,11 @@ export function LaneWindows({ cell, date, zone, scale, now, placed }: LaneWindow
     const bottom = (hoursOn(date, window.endAt, zone) - scale.from) * scale.pxPerHour;
     const isCovered = (from: number, to: number): boolean =>
       placed.some((box) => box.topPx < to && box.topPx + box.heightPx > from);
-    const place = !isCovered(top, top + wordPx) ? 'at-top' : !isCovered(bottom - wordPx, bottom) ? 'at-end' : 'hidden-words';
+    const place = !isCovered(top, top + wordPx)
+      ? 'at-top'
+      : !isCovered(bottom - wordPx, bottom)
+        ? 'at-end'
+        : 'hidden-words';
     const say = says === 'over' ? '' : t(`window.${says}`, { count: window.roomLeft });
     const clock = words.window(window.startAt, window.endAt, cell.lane.zone);
     return (

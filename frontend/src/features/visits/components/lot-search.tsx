@@ -79,7 +79,11 @@ function Suggested({ chosen, onAdd }: LotSearchProps): ReactNode {
       <ul className="row wrap">
         {waiting.slice(0, suggestedCount).map((item) => (
           <li key={item.lotId}>
-            <button type="button" className="chip" onClick={() => (item.lotId === null ? undefined : onAdd(item.lotId))}>
+            <button
+              type="button"
+              className="chip"
+              onClick={() => (item.lotId === null ? undefined : onAdd(item.lotId))}
+            >
               <Icon name="plus" size={14} />
               <Numeral text={t('common.lot', { number: item.lotNumber ?? '' })} />
             </button>

@@ -32,7 +32,11 @@ export function MoveForm({ visit, onKeep, onMoved }: MoveFormProps): ReactNode {
   const lot = t('common.lot', { number: visit.lotNumber });
   const moving = useMoveVisit((moved) => {
     const to = words.dayWindow(moved.window.startAt, moved.window.endAt, moved.zone);
-    sayDone({ mark: moved.state === 'requested' ? 'requested' : 'booked', title: t('move.done', { lot, to }), text: t('done.told') });
+    sayDone({
+      mark: moved.state === 'requested' ? 'requested' : 'booked',
+      title: t('move.done', { lot, to }),
+      text: t('done.told'),
+    });
     onMoved();
   });
   const move = ({ date, label }: Pick<ChoosableWindow, 'date' | 'label'>): void =>
@@ -43,7 +47,13 @@ export function MoveForm({ visit, onKeep, onMoved }: MoveFormProps): ReactNode {
         <span className="lab">{t('move.from')}</span>
         <Numeral text={words.dayWindow(visit.window.startAt, visit.window.endAt, visit.zone)} />
       </p>
-      <TakenWindow error={moving.error} zone={visit.zone} actWord={t('move.here')} busy={moving.isPending} onTake={move} />
+      <TakenWindow
+        error={moving.error}
+        zone={visit.zone}
+        actWord={t('move.here')}
+        busy={moving.isPending}
+        onTake={move}
+      />
       <QueryState query={query}>
         {(windows) => {
           const shown = isAll ? windows : windows.slice(0, shownAtFirst);

@@ -32,7 +32,10 @@ export function NotUpList({ visits, now, onOpenVisit }: NotUpListProps): ReactNo
               </button>{' '}
               <StateWord state={look.waits ?? look.mark} word={look.word} tone={look.tone} />
               <div className="s mid">
-                {[visit.plumberName, visit.upBy === null ? null : t('board.by', { at: words.dayClock(visit.upBy, visit.zone) })]
+                {[
+                  visit.plumberName,
+                  visit.upBy === null ? null : t('board.by', { at: words.dayClock(visit.upBy, visit.zone) }),
+                ]
                   .filter((part) => part !== null)
                   .join(', ')}
               </div>

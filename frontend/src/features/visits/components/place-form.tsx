@@ -34,7 +34,9 @@ export function PlaceForm({ visit, date, onPlaced }: PlaceFormProps): ReactNode 
           <Numeral text={t('place.on', { day: words.date(date) })} />
         </h3>
         <p className="s mid">
-          {date === visit.window.date ? t('place.wishedDay') : t('place.otherDay', { day: words.date(visit.window.date) })}
+          {date === visit.window.date
+            ? t('place.wishedDay')
+            : t('place.otherDay', { day: words.date(visit.window.date) })}
         </p>
       </div>
       <QueryState query={board}>
@@ -87,8 +89,21 @@ function PlaceOnDay({
   }
   return (
     <>
-      <TakenWindow error={placing.error} zone={board.zone} actWord={t('place.here')} busy={placing.isPending} onTake={place} />
-      <WindowChoice label={t('place.window')} windows={windows} value={key} zone={board.zone} isOneDay onChoose={setKey} />
+      <TakenWindow
+        error={placing.error}
+        zone={board.zone}
+        actWord={t('place.here')}
+        busy={placing.isPending}
+        onTake={place}
+      />
+      <WindowChoice
+        label={t('place.window')}
+        windows={windows}
+        value={key}
+        zone={board.zone}
+        isOneDay
+        onChoose={setKey}
+      />
       <div className="side-part fields">
         <Field label={t('place.inspector')}>
           {(control) => (

@@ -63,7 +63,12 @@ export function RequestPanel({ requesting, onLots, onStage, onClose }: RequestPa
         ) : null}
         {offers === undefined ? null : (
           <p className="s mid">
-            <Numeral text={t(`req.booking.${offers.booking}`, { department: offers.departmentName, count: offers.lotsPerRequest })} />
+            <Numeral
+              text={t(`req.booking.${offers.booking}`, {
+                department: offers.departmentName,
+                count: offers.lotsPerRequest,
+              })}
+            />
           </p>
         )}
       </div>

@@ -29,9 +29,7 @@ export function VisitActs({ visit, onMove, onEnded }: VisitActsProps): ReactNode
         </Act>
       ) : null}
       {isTesting ? (
-        <Act to={`/lots/${visit.lotId}/test`}>
-          {t(can('say-test-up') ? 'visit.acts.testUp' : 'visit.acts.notUp')}
-        </Act>
+        <Act to={`/lots/${visit.lotId}/test`}>{t(can('say-test-up') ? 'visit.acts.testUp' : 'visit.acts.notUp')}</Act>
       ) : null}
       {can('move') && onMove !== undefined ? <Act onClick={onMove}>{t('visit.acts.move')}</Act> : null}
       {ends.filter(can).map((move) => (

@@ -31,9 +31,7 @@ export function VisitPanel({ visitId, onClose, placeDate, children }: VisitPanel
   return (
     <SidePanel
       label={visit === undefined ? t('visit.label') : (visit.tractName ?? visit.address)}
-      title={
-        visit === undefined ? t('visit.label') : <Numeral text={t('common.lot', { number: visit.lotNumber })} />
-      }
+      title={visit === undefined ? t('visit.label') : <Numeral text={t('common.lot', { number: visit.lotNumber })} />}
       onClose={onClose}
     >
       <QueryState query={query}>

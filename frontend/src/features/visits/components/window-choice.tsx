@@ -49,7 +49,9 @@ export function WindowChoice({ label, windows, value, zone, isOneDay, onChoose }
               </span>
               <span className="s mid">
                 {' '}
-                <Numeral text={window.isTakeable ? t('window.room', { count: window.roomLeft }) : t('window.notTakeable')} />
+                <Numeral
+                  text={window.isTakeable ? t('window.room', { count: window.roomLeft }) : t('window.notTakeable')}
+                />
               </span>
             </span>
             {isOn ? <Icon name="check" size={16} className="t-primer" /> : null}

@@ -51,7 +51,9 @@ function OrganizationCalendar({ organizationId }: { organizationId: string }): R
   const range = twoWorkWeeksOf(workingMondayOf(date));
   const [from, to] = [range[0] ?? date, range.at(-1) ?? date];
   const calendar = useQuery(calendarQuery({ from, to, organizationId }));
-  const covered = isPhone ? [shownDate ?? date, shownDate ?? date] : [from, address.view === 'week' ? (range[4] ?? to) : to];
+  const covered = isPhone
+    ? [shownDate ?? date, shownDate ?? date]
+    : [from, address.view === 'week' ? (range[4] ?? to) : to];
   useCoversDates(covered[0] ?? null, covered[1] ?? null);
   const isRequesting = panel.kind === 'request';
   const requesting = useRequesting(isRequesting ? panel.lotIds : [], isRequesting ? panel.stageCode : null);

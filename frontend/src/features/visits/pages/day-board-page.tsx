@@ -44,11 +44,12 @@ function Board({ departmentId }: { departmentId: string }): ReactNode {
   const picked = panel.kind === 'visit' ? panel.visitId : null;
   const notUp = query.data === undefined ? [] : notUpYet(query.data);
   const waiting = <NotUpList visits={notUp} now={now} onOpenVisit={openVisit} />;
-  const panelOf = picked === null ? null : (
-    <VisitPanel key={picked} visitId={picked} placeDate={date} onClose={close}>
-      {isPhone ? null : waiting}
-    </VisitPanel>
-  );
+  const panelOf =
+    picked === null ? null : (
+      <VisitPanel key={picked} visitId={picked} placeDate={date} onClose={close}>
+        {isPhone ? null : waiting}
+      </VisitPanel>
+    );
   if (isPhone && panelOf !== null) return panelOf;
   const shown = { now, chosenVisitId: picked, onOpenVisit: openVisit };
   return (
@@ -96,8 +97,14 @@ function BoardHead({ date, board, isPhone, now }: BoardHeadProps): ReactNode {
         board === undefined || counts === null
           ? []
           : [
-              { label: t('cal.legend'), value: <Numeral text={t('board.of', { some: counts.visits, all: counts.room })} /> },
-              { label: t('board.upNow'), value: <Numeral text={t('board.of', { some: counts.up, all: counts.open })} /> },
+              {
+                label: t('cal.legend'),
+                value: <Numeral text={t('board.of', { some: counts.visits, all: counts.room })} />,
+              },
+              {
+                label: t('board.upNow'),
+                value: <Numeral text={t('board.of', { some: counts.up, all: counts.open })} />,
+              },
               { label: t('cal.zone'), value: words.zone(board.zone, now) },
             ]
       }

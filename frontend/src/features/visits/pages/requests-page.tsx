@@ -45,9 +45,7 @@ function Requests({ department }: { department: { id: string; name: string } }):
   );
   const zone = items[0]?.zone;
   const side =
-    picked === null ? null : (
-      <VisitPanel key={picked} visitId={picked} placeDate={date ?? undefined} onClose={close} />
-    );
+    picked === null ? null : <VisitPanel key={picked} visitId={picked} placeDate={date ?? undefined} onClose={close} />;
   if (isPhone && side !== null) return side;
   return (
     <div className={side === null ? '' : 'with-side'}>
@@ -68,7 +66,11 @@ function Requests({ department }: { department: { id: string; name: string } }):
             acts={<Act to="/calendar?request=">{t('requests.phonedIn')}</Act>}
           />
         )}
-        <StaleStrip error={query.data === undefined ? null : query.error} readAtMs={query.dataUpdatedAt} zone={zone ?? 'UTC'} />
+        <StaleStrip
+          error={query.data === undefined ? null : query.error}
+          readAtMs={query.dataUpdatedAt}
+          zone={zone ?? 'UTC'}
+        />
         <QueryState query={query} loading={<Lines rows={6} hasVessel />}>
           {({ items: requests }) =>
             requests.length === 0 ? (
