@@ -32,7 +32,7 @@ export async function startStack(): Promise<Stack> {
     ends.unshift(() => maker.close());
     const world = await createWorld(maker);
     for (const person of Object.values(world.people)) await givePassword(maker, person, password);
-    await makeRuleCardsCurrent(maker);
+    await makeRuleCardsCurrent(maker, world);
     const served = await serve({
       DATABASE_URL: database.appUrl,
       JWT_SECRET: secret,
@@ -46,9 +46,15 @@ export async function startStack(): Promise<Stack> {
   }
 }
 
-/** The fixture's rule cards begin on a day of its own present; here the present is the system clock's. */
-async function makeRuleCardsCurrent(maker: TestApp): Promise<void> {
-  await maker.db.query(`UPDATE rule_cards SET effective = daterange('2020-01-01', NULL)`);
+/** The fixture's rule cards begin in 2027, its own present; for the system clock's present the same content rules before that. */
+async function makeRuleCardsCurrent(maker: TestApp, { ruleCard, otherRuleCard }: World): Promise<void> {
+  for (const { departmentId, content } of [ruleCard, otherRuleCard]) {
+    await maker.db.query(
+      `INSERT INTO rule_cards (id, department_id, version, state, content, effective, created_at, published_at)
+       VALUES (:id, :departmentId, 2, 'published', :content, daterange('2020-01-01', '2027-01-01'), now(), now())`,
+      { replacements: { id: randomUUID(), departmentId, content: JSON.stringify(content) } },
+    );
+  }
 }
 
 function callerOf(url: string, world: World): Stack['call'] {

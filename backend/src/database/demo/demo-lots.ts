@@ -179,8 +179,8 @@ export const millpondLots: readonly DemoLot[] = [
     vennickRough(-4, 'morning', { fixesBefore: 2 }),
   ]),
   mill(54, [slab(-34, 'morning'), vennickRough(0, 'morning', { result: undefined })]),
-  mill(55, [slab(-32, 'morning'), vennickRough(3, 'morning', { isUnplaced: true, up: 'none', result: undefined })]),
-  mill(56, [slab(-30, 'afternoon'), vennickRough(3, 'afternoon', { isUnplaced: true, up: 'none', result: undefined })]),
+  mill(55, [slab(-32, 'morning'), vennickRough(2, 'morning', { isUnplaced: true, up: 'none', result: undefined })]),
+  mill(56, [slab(-30, 'afternoon'), vennickRough(2, 'afternoon', { isUnplaced: true, up: 'none', result: undefined })]),
   mill(57, [
     slab(-28, 'morning'),
     vennickRough(-3, 'morning', { up: 'none', ends: { kind: 'declined', why: 'Framing is not passed yet' } }),

@@ -10,7 +10,27 @@ import { Failed } from '../../../lib/query-state';
 import { useContractForm } from '../../../lib/use-contract-form';
 import { useCreateOrganization } from '../api/create-organization';
 
-const empty = { name: '', kind: 'builder' as OrganizationKind, phone: '', ownerName: '', ownerEmail: '' };
+const empty = {
+  name: '',
+  kind: 'builder' as OrganizationKind,
+  phone: '',
+  ownerName: '',
+  ownerEmail: '',
+  zone: '',
+  elevationFt: '',
+};
+
+/** What is sent: only a department has a zone and an elevation, and a telephone is left out when there is none. */
+function bodyOf({ phone, zone, elevationFt, ...rest }: typeof empty) {
+  return {
+    ...rest,
+    ...(phone.trim() !== '' && { phone }),
+    ...(rest.kind === 'department' && {
+      zone: zone.trim(),
+      elevationFt: elevationFt.trim() === '' ? Number.NaN : Number(elevationFt),
+    }),
+  };
+}
 
 /** Adds an organization with its first owner, who is invited by email. */
 export function OrganizationForm(): ReactNode {
@@ -19,8 +39,7 @@ export function OrganizationForm(): ReactNode {
   const adding = useCreateOrganization();
   const submit = (event: FormEvent): void => {
     event.preventDefault();
-    const { phone, ...rest } = form.values;
-    const body = phone.trim() === '' ? rest : { ...rest, phone };
+    const body = bodyOf(form.values);
     if (!form.check(body)) return;
     adding.mutate(body, {
       onError: form.takeError,
@@ -34,7 +53,7 @@ export function OrganizationForm(): ReactNode {
       },
     });
   };
-  const field = (name: 'name' | 'phone' | 'ownerName' | 'ownerEmail') => ({
+  const field = (name: 'name' | 'phone' | 'ownerName' | 'ownerEmail' | 'zone' | 'elevationFt') => ({
     value: form.values[name],
     error: form.faultOf(name),
     autoComplete: 'off',
@@ -52,6 +71,17 @@ export function OrganizationForm(): ReactNode {
         onChange={(kind) => form.set('kind', kind)}
       />
       <Field label={t('organizations.phone')} type="tel" isOptional {...field('phone')} />
+      {form.values.kind === 'department' ? (
+        <>
+          <Field label={t('organizations.zone')} hint={t('organizations.zoneHint')} {...field('zone')} />
+          <Field
+            label={t('organizations.elevation')}
+            inputMode="numeric"
+            unit={t('organizations.feet')}
+            {...field('elevationFt')}
+          />
+        </>
+      ) : null}
       <Field label={t('organizations.ownerName')} maxLength={120} {...field('ownerName')} />
       <Field
         label={t('organizations.ownerEmail')}
