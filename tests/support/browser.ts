@@ -31,8 +31,17 @@ export interface Opened {
 }
 
 /** A browser of one person: own cookies, own storage. */
-export async function openContext(browser: Browser, baseUrl: string, options: BrowserContextOptions = desk): Promise<Opened> {
-  const context = await browser.newContext({ baseURL: baseUrl, locale: 'en-US', timezoneId: 'America/Denver', ...options });
+export async function openContext(
+  browser: Browser,
+  baseUrl: string,
+  options: BrowserContextOptions = desk,
+): Promise<Opened> {
+  const context = await browser.newContext({
+    baseURL: baseUrl,
+    locale: 'en-US',
+    timezoneId: 'America/Denver',
+    ...options,
+  });
   context.setDefaultTimeout(patienceMs);
   context.setDefaultNavigationTimeout(patienceMs);
   const page = await context.newPage();

@@ -13,13 +13,14 @@ const keptDays = 30;
 /** In this order: what refers to others goes first. */
 const statements = [
   `DELETE FROM sign_in_failures WHERE at < :before`,
+  `DELETE FROM idempotent_answers WHERE created_at < :before`,
   `DELETE FROM link_tokens WHERE expires_at < :before`,
   `DELETE FROM refresh_tokens USING sessions s WHERE s.id = session_id AND least(s.expires_at, s.ended_at) < :before`,
   `DELETE FROM sessions WHERE least(expires_at, ended_at) < :before
      AND NOT EXISTS (SELECT 1 FROM refresh_tokens r WHERE r.session_id = sessions.id)`,
 ];
 
-/** Removes failures, links and sessions that are over for good. Doing it twice does nothing more. */
+/** Removes failures, answers kept for repeated requests, links and sessions that are over for good. Doing it twice does nothing more. */
 @Injectable()
 export class AccountsCleanup {
   constructor(

@@ -59,7 +59,12 @@ async function makeRuleCardsCurrent(maker: TestApp, { ruleCard, otherRuleCard }:
 
 function callerOf(url: string, world: World): Stack['call'] {
   const tokens = new Map<WorldPerson, Promise<string>>();
-  const send = async (method: string, path: string, body: object | undefined, token: string | null): Promise<unknown> => {
+  const send = async (
+    method: string,
+    path: string,
+    body: object | undefined,
+    token: string | null,
+  ): Promise<unknown> => {
     const answer = await fetch(`${url}${path}`, {
       method,
       headers: {

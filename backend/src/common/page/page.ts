@@ -15,6 +15,11 @@ export function servePage(app: INestApplication, staticDir: string | undefined, 
     next();
   });
   app.use(securityHeaders(isHttps));
+  // answers are one reader's: no cache on the way or in the browser keeps them (ASVS 5.0 14.3.2)
+  app.use('/api', (_request: Request, response: Response, next: NextFunction) => {
+    response.setHeader('Cache-Control', 'no-store');
+    next();
+  });
   if (staticDir === undefined) return;
   const root = resolve(staticDir);
   const page = readFileSync(join(root, 'index.html'), 'utf8');

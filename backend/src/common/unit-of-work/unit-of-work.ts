@@ -6,7 +6,7 @@ import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
 import { AppError } from '../errors/app-error.js';
 import { sqlStateOf } from '../errors/error-body.js';
-import { currentRequest, type RequestContext } from '../request/request-context.js';
+import { currentRequest, type RequestContext, requestContext } from '../request/request-context.js';
 import { Clock } from '../time/clock.js';
 
 /** Serialization failure and deadlock: the whole work is done again. */
@@ -58,7 +58,7 @@ export class UnitOfWork {
   afterCommit(work: () => void): void {
     const running = this.running.getStore();
     if (running) running.afterCommit.push(work);
-    else work();
+    else requestContext.exit(work);
   }
 
   private async once<T>(work: () => Promise<T>): Promise<T> {
@@ -74,7 +74,10 @@ export class UnitOfWork {
         return answer;
       }),
     );
-    for (const act of running.afterCommit) act();
+    // what it wakes outlives the request and is none of it: inside its context, work would be taken for the request sent again
+    requestContext.exit(() => {
+      for (const act of running.afterCommit) act();
+    });
     return result;
   }
 

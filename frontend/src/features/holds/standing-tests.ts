@@ -72,5 +72,7 @@ export function findOpenVisit(
   unitNumber: number,
 ): VisitSummary | null {
   const isOpen = (visit: VisitSummary): boolean => openVisitStates.some((state) => state === visit.state);
-  return visits.find((one) => isOpen(one) && one.stageCode === stageCode && one.unitNumbers.includes(unitNumber)) ?? null;
+  return (
+    visits.find((one) => isOpen(one) && one.stageCode === stageCode && one.unitNumbers.includes(unitNumber)) ?? null
+  );
 }

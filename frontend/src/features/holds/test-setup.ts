@@ -127,7 +127,11 @@ export function setupFaults(draft: SetupDraft, rule: TestRule): SetupFaults {
   };
 }
 
-function needed(draft: SetupDraft, field: 'incrementIn' | 'rangePsi' | 'incrementPsi' | 'ceilingPsi', most: number): SetupFaults {
+function needed(
+  draft: SetupDraft,
+  field: 'incrementIn' | 'rangePsi' | 'incrementPsi' | 'ceilingPsi',
+  most: number,
+): SetupFaults {
   const typed = draft[field];
   if (typed.trim() === '') return { [field]: 'required' };
   const value = parseNumber(typed);

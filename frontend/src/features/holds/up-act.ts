@@ -5,7 +5,10 @@ import type { ReadingCheck } from './typed-reading';
 
 /** What keeps "test up" from being said. */
 export type WhyNotUp =
-  | { readonly code: 'no-visit' | 'requested' | 'underway' | 'over-limit' | 'no-reading' | 'valve-missing' | 'valve-shut' | 'fault' }
+  | {
+      readonly code:
+        'no-visit' | 'requested' | 'underway' | 'over-limit' | 'no-reading' | 'valve-missing' | 'valve-shut' | 'fault';
+    }
   | { readonly code: 'below'; readonly minimumPsi: number }
   | { readonly code: 'not-up'; readonly parts: readonly TestedPart[] };
 

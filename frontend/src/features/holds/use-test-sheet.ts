@@ -107,7 +107,11 @@ function useSending({ lot, visit, rule, part, hold }: TestSheetInput, typed: Typ
     const given = withReading && hold !== null && reading !== null ? { holdId: hold.id, reading } : undefined;
     await saying.mutateAsync({ visitId: visit.id, expectedVersion: visit.version, reading: given });
     setDraft(emptyReading);
-    sayDone({ mark: 'ready', title: t('done.up', { lot: lot.number }), text: t('done.upTold', { builder: visit.builderName }) });
+    sayDone({
+      mark: 'ready',
+      title: t('done.up', { lot: lot.number }),
+      text: t('done.upTold', { builder: visit.builderName }),
+    });
   };
   const save = async (): Promise<void> => {
     if (reading === null) return;

@@ -25,14 +25,13 @@ export type PlugDraft = Record<'name' | 'elevationFt' | 'ratedPsi' | 'nominalIn'
 export type PipeDraft = Record<'nominalIn' | 'material' | 'bottomFt' | 'topFt' | 'lengthFt', string>;
 
 /** A house as typed: every measure in words until it is saved. */
-export interface HouseDraft extends Record<string, unknown> {
+export interface HouseDraft extends Record<string, unknown>, Readonly<Record<NumberField, string>> {
   floors: readonly FloorDraft[];
   plugs: readonly PlugDraft[];
   pipes: readonly PipeDraft[];
   laundry: Record<'floor' | 'boxOutletFt' | 'branchFt', string>;
   pipeMaterial: string;
   waterPipeMaterials: readonly Material[];
-  numbers: Readonly<Record<NumberField, string>>;
 }
 
 export const newFloor: FloorDraft = { name: '', elevationFt: '' };
@@ -45,6 +44,8 @@ const text = (value: number | null | undefined): string => (value === null || va
 export function draftOf(house: HouseGeometry | null, firstFloor: string): HouseDraft {
   const numbers = Object.fromEntries(numberFields.map((name) => [name, text(house?.[name])])) as Record<NumberField, string>;
   return {
+    ...numbers,
+    cappedVents: text(house?.cappedVents ?? 0),
     floors: house?.floors.map(({ name, elevationFt }) => ({ name, elevationFt: text(elevationFt) })) ?? [
       { name: firstFloor, elevationFt: '0' },
     ],
@@ -70,7 +71,6 @@ export function draftOf(house: HouseGeometry | null, firstFloor: string): HouseD
     },
     pipeMaterial: house?.pipeMaterial ?? '',
     waterPipeMaterials: house?.waterPipeMaterials ?? [],
-    numbers: { ...numbers, cappedVents: text(house?.cappedVents ?? 0) },
   };
 }
 
@@ -84,7 +84,7 @@ const needed = (words: string): number => typed(words) ?? Number.NaN;
 
 /** The house to save, by the contract's fields; it still has to be checked. */
 export function geometryOf(draft: HouseDraft): HouseGeometryGiven {
-  const numbers = Object.fromEntries(numberFields.map((name) => [name, typed(draft.numbers[name])]));
+  const numbers = Object.fromEntries(numberFields.map((name) => [name, typed(draft[name])]));
   const { laundry } = draft;
   return {
     ...numbers,
@@ -123,14 +123,14 @@ export function drawnDraft(draft: HouseDraft): CutawayHouse {
     const elevation = drawable(elevationFt);
     return elevation === null || name.trim().toLowerCase() === 'attic' ? [] : [{ name: name.trim(), elevationFt: elevation }];
   });
-  const { laundry, numbers } = draft;
+  const { laundry } = draft;
   return {
     floors,
-    lowestFittingFt: drawable(numbers.lowestFittingFt),
-    ventTerminalFt: drawable(numbers.ventTerminalFt),
-    atticCutFt: drawable(numbers.atticCutFt),
-    standpipeFt: drawable(numbers.standpipeFt),
-    gaugeFt: drawable(numbers.gaugeFt),
+    lowestFittingFt: drawable(draft.lowestFittingFt),
+    ventTerminalFt: drawable(draft.ventTerminalFt),
+    atticCutFt: drawable(draft.atticCutFt),
+    standpipeFt: drawable(draft.standpipeFt),
+    gaugeFt: drawable(draft.gaugeFt),
     laundry:
       laundry.floor === ''
         ? null

@@ -1,7 +1,11 @@
 import type { RuleCardContent, Stage } from '@holdwater/shared-types/departments/rule-card.content.js';
 import type { System } from '@holdwater/shared-types/holds/hold.states.js';
 import type { Correction, NewCorrection } from '@holdwater/shared-types/outcomes/outcome.contract.js';
-import type { noAccessReasons, notReadyReasons, SystemAnswer } from '@holdwater/shared-types/outcomes/outcome.states.js';
+import type {
+  noAccessReasons,
+  notReadyReasons,
+  SystemAnswer,
+} from '@holdwater/shared-types/outcomes/outcome.states.js';
 import type { VisitSummary } from '@holdwater/shared-types/visits/visit.contract.js';
 import { parseNumber } from '../holds/typed-reading';
 import type { OutcomeToRecord } from './api/record-outcome';
@@ -67,10 +71,11 @@ export function earlierOf(
   corrections: readonly Correction[],
   visit: Pick<VisitSummary, 'stageCode' | 'unitNumbers'>,
 ): Correction[] {
-  return corrections.filter(
+  const own = corrections.filter(
     (one) =>
       one.stageCode === visit.stageCode && visit.unitNumbers.includes(one.unitNumber) && one.state !== 'accepted',
   );
+  return own.sort((a, b) => a.number - b.number);
 }
 
 /** The outcome as it is sent; only for a draft with nothing missing. `isLevel` tells which systems are read with a tape. */

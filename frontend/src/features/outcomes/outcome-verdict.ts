@@ -41,7 +41,9 @@ export function verdictOf(
   const blocked = (why: WhyNotRecord): OutcomeVerdict => ({ kind: null, isNotSeen: false, why, open: counts });
   if (draft.kind !== 'seen') {
     const reason = draft.kind === 'not-ready' ? draft.notReady : draft.noAccess;
-    return reason === null ? blocked({ code: 'reason' }) : { kind: draft.kind, isNotSeen: false, why: null, open: counts };
+    return reason === null
+      ? blocked({ code: 'reason' })
+      : { kind: draft.kind, isNotSeen: false, why: null, open: counts };
   }
   const why = whyNotSeen(draft, subjects, open);
   if (why !== null) return blocked(why);

@@ -6,11 +6,11 @@ import { Act } from '../../../components/act';
 import { Choice } from '../../../components/choice';
 import { sayDone } from '../../../components/done-line';
 import { Field } from '../../../components/field';
-import { ApiError, isApiError } from '../../../lib/api-error';
 import { Failed } from '../../../lib/query-state';
 import { useContractForm } from '../../../lib/use-contract-form';
 import { useEditRuleCard } from '../api/edit-rule-card';
 import { contentOf, draftOf, type WindowDraft } from '../draft-values';
+import { withoutPrefix } from '../without-prefix';
 import { WindowFields } from './window-fields';
 
 const newWindow: WindowDraft = { label: '', start: '08:00', end: '10:00', days: [], room: '4' };
@@ -94,14 +94,4 @@ export function DraftForm({ ruleCard }: { ruleCard: RuleCard }): ReactNode {
       </div>
     </form>
   );
-}
-
-/** The server names fields by their place in the body, the form by their place in what is asked. */
-function withoutPrefix(error: unknown, prefix: string): unknown {
-  if (!isApiError(error)) return error;
-  const fields = Object.entries(error.fields).map(([path, code]): [string, string] => [
-    path.startsWith(prefix) ? path.slice(prefix.length) : path,
-    code,
-  ]);
-  return new ApiError(error.code, { status: error.status, params: error.params, fields: Object.fromEntries(fields) });
 }

@@ -12,11 +12,12 @@ export interface TestDown {
 }
 
 /** Plumber, or the inspector who finds it so: the test is down again. */
-export function useNoLongerUp(lotId: string) {
+export function useNoLongerUp(lotId: string, onDone: () => void) {
   const queryClient = useQueryClient();
   return useFieldMutation<TestDown, VisitSummary>({
     mutationFn: ({ visitId, expectedVersion }, { clientId, madeAt }, options) =>
       call(sayNoLongerUp, { params: { visitId }, body: { expectedVersion, clientId, madeAt } }, options),
+    onDone,
     invalidates: ({ id }) => [queryKeys.visit(id), ...staleOnLot(lotId, ['visits'])],
     onFail: (error) => {
       if (!isApiError(error) || error.status !== 409) return;

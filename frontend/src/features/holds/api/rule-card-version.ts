@@ -1,4 +1,8 @@
-import { readDepartment, readRuleCard, type RuleCard } from '@holdwater/shared-types/departments/departments.contract.js';
+import {
+  readDepartment,
+  readRuleCard,
+  type RuleCard,
+} from '@holdwater/shared-types/departments/departments.contract.js';
 import { queryOptions, skipToken } from '@tanstack/react-query';
 import { call } from '../../../lib/api';
 import { ApiError } from '../../../lib/api-error';

@@ -22,18 +22,11 @@ export function EndTest({ lotId, hold, name, isUp }: EndTestProps): ReactNode {
   const { t } = useTranslation('holds');
   const [isAsking, setIsAsking] = useState(false);
   const [reason, setReason] = useState<HoldEnd['reason']>('taken-down');
-  const ending = useEndHold(lotId);
+  const ending = useEndHold(lotId, (_, end) => {
+    setIsAsking(false);
+    sayDone({ mark: 'test-ended', title: t('end.done', { name }), text: t(`end.reasons.${end.reason}`) });
+  });
   const fault = useErrorWords(ending.error);
-  const end = (): void =>
-    ending.mutate(
-      { holdId: hold.id, reason },
-      {
-        onSuccess: () => {
-          setIsAsking(false);
-          sayDone({ mark: 'test-ended', title: t('end.done', { name }), text: t(`end.reasons.${reason}`) });
-        },
-      },
-    );
   return (
     <>
       <Act kind="text" size="sm" onClick={() => setIsAsking(true)}>
@@ -47,7 +40,7 @@ export function EndTest({ lotId, hold, name, isUp }: EndTestProps): ReactNode {
         busy={ending.isPending}
         error={fault === null ? undefined : `${fault.title}. ${fault.next}`}
         onKeep={() => setIsAsking(false)}
-        onEnd={end}
+        onEnd={() => ending.mutate({ holdId: hold.id, reason })}
       >
         <p>{t(isUp ? 'end.toldUp' : 'end.told')}</p>
         <Choice

@@ -118,11 +118,7 @@ function StageTests({ lot, holds, visit, ruleCard, stageCode, unitNumber }: Stag
 function NothingToTest({ lotId, why }: { lotId: string; why: 'noDepartment' | 'allClear' | 'noTest' }): ReactNode {
   const { t } = useTranslation('holds');
   return (
-    <Plain
-      kind="empty"
-      title={t(`nothing.${why}.title`)}
-      acts={<Act to={`/lots/${lotId}`}>{t('nothing.toLot')}</Act>}
-    >
+    <Plain kind="empty" title={t(`nothing.${why}.title`)} acts={<Act to={`/lots/${lotId}`}>{t('nothing.toLot')}</Act>}>
       {t(`nothing.${why}.text`)}
     </Plain>
   );

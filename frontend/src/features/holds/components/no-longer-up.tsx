@@ -11,18 +11,11 @@ import { useNoLongerUp } from '../api/no-longer-up';
 export function NoLongerUp({ visit }: { visit: VisitSummary }): ReactNode {
   const { t } = useTranslation('holds');
   const [isAsking, setIsAsking] = useState(false);
-  const taking = useNoLongerUp(visit.lotId);
+  const taking = useNoLongerUp(visit.lotId, () => {
+    setIsAsking(false);
+    sayDone({ mark: 'booked', title: t('down.done') });
+  });
   const fault = useErrorWords(taking.error);
-  const take = (): void =>
-    taking.mutate(
-      { visitId: visit.id, expectedVersion: visit.version },
-      {
-        onSuccess: () => {
-          setIsAsking(false);
-          sayDone({ mark: 'booked', title: t('down.done') });
-        },
-      },
-    );
   return (
     <>
       <Act size="lg" onClick={() => setIsAsking(true)}>
@@ -36,7 +29,7 @@ export function NoLongerUp({ visit }: { visit: VisitSummary }): ReactNode {
         busy={taking.isPending}
         error={fault === null ? undefined : `${fault.title}. ${fault.next}`}
         onKeep={() => setIsAsking(false)}
-        onEnd={take}
+        onEnd={() => taking.mutate({ visitId: visit.id, expectedVersion: visit.version })}
       >
         {t('down.told', { builder: visit.builderName, inspector: visit.inspector?.name ?? visit.departmentName })}
       </Question>

@@ -74,9 +74,7 @@ function cellOf(t: Words, { lot, holds, stageCode, ruleCard }: PartCellsProps, p
   function needs(): string {
     const rule = ruleCard.content.tests.find((one) => one.stageCode === stageCode && one.system === part.system);
     const minimums = rule?.pressures.map(({ minimumPsi }) => minimumPsi) ?? [];
-    return minimums.length === 0
-      ? t('cell.notUp')
-      : t('cell.notUpNeeds', { psi: [...new Set(minimums)].join('/') });
+    return minimums.length === 0 ? t('cell.notUp') : t('cell.notUpNeeds', { psi: [...new Set(minimums)].join('/') });
   }
 
   function stands(standing: Hold): string {

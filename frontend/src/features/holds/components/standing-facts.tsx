@@ -70,7 +70,12 @@ function ReadingLine({ hold, reading, zone }: { hold: Hold; reading: Reading; zo
         <Measure value={shown.number} unit={shown.unit} />
       </span>
       <span className="mid grow">
-        {[valve, isTheirs ? t('facts.byRole', { name: reading.byName, role: t(`facts.roles.${reading.byRole}`) }) : reading.byName]
+        {[
+          valve,
+          isTheirs
+            ? t('facts.byRole', { name: reading.byName, role: t(`facts.roles.${reading.byRole}`) })
+            : reading.byName,
+        ]
           .filter(Boolean)
           .join(', ')}
         {reading.isStruck ? `, ${t('facts.struck', { why: reading.struckWhy ?? '' })}` : ''}

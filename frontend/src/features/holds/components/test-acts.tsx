@@ -18,7 +18,8 @@ export interface TestActsProps {
 export function TestActs({ up, cannotSave, isStarting, busy, onUp, onSave }: TestActsProps): ReactNode {
   const { t } = useTranslation('holds');
   const why = useWhyWords();
-  const saveWord = up === null ? (isStarting ? 'acts.start' : 'acts.save') : isStarting ? 'acts.startOnly' : 'acts.saveOnly';
+  const saveWord =
+    up === null ? (isStarting ? 'acts.start' : 'acts.save') : isStarting ? 'acts.startOnly' : 'acts.saveOnly';
   const isUpFirst = up !== null && up.why === null;
   return (
     <>

@@ -69,11 +69,7 @@ export function TestSetupForm(props: TestSetupFormProps): ReactNode {
           />
         ) : null}
         <Fault words={words(faults.medium)} />
-        {draft.medium === null ? null : isLevel ? (
-          <LevelTools {...props} />
-        ) : (
-          <GaugeTools {...props} />
-        )}
+        {draft.medium === null ? null : isLevel ? <LevelTools {...props} /> : <GaugeTools {...props} />}
       </div>
     </Panel>
   );
@@ -96,11 +92,16 @@ function GaugeTools(props: TestSetupFormProps): ReactNode {
       <div className="fields two">
         <Tool {...props} field="rangePsi" label={t('setup.range')} unit="psi" />
         <Tool {...props} field="incrementPsi" label={t('setup.increment')} unit="psi" />
-        <Tool {...props} field="ceilingPsi" label={t('setup.ceiling')} unit="psi" isOptional hint={t('setup.ceilingHint')} />
+        <Tool
+          {...props}
+          field="ceilingPsi"
+          label={t('setup.ceiling')}
+          unit="psi"
+          isOptional
+          hint={t('setup.ceilingHint')}
+        />
       </div>
-      {coarse === null ? null : (
-        <Caution>{t('setup.tooCoarse', { version: ruleCard.version, psi: coarse })}</Caution>
-      )}
+      {coarse === null ? null : <Caution>{t('setup.tooCoarse', { version: ruleCard.version, psi: coarse })}</Caution>}
       {rule.measuredAt === 'highest-outlet' ? <p className="s mid">{t('setup.atHighestOutlet')}</p> : null}
     </>
   );

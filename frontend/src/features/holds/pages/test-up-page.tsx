@@ -5,9 +5,9 @@ import { useParams } from 'react-router-dom';
 import { TaskHead } from '../../../components/task-head';
 import { QueryState } from '../../../lib/query-state';
 import { useLotLive } from '../../../lib/realtime';
-import { holdsQuery } from '../api/holds';
-import { testedLotQuery } from '../api/tested-lot';
-import { testedVisitsQuery } from '../api/tested-visits';
+import { lotQuery } from '../../lots/api/lot';
+import { lotHoldsQuery } from '../../lots/api/lot-holds';
+import { lotVisitsQuery } from '../../lots/api/lot-visits';
 import { LotTests } from '../components/lot-tests';
 import '../holds.css';
 
@@ -15,9 +15,9 @@ import '../holds.css';
 export function TestUpPage(): ReactNode {
   const { lotId = '' } = useParams();
   useLotLive(lotId);
-  const lot = useQuery(testedLotQuery(lotId));
-  const holds = useQuery(holdsQuery(lotId));
-  const visits = useQuery(testedVisitsQuery(lotId));
+  const lot = useQuery(lotQuery(lotId));
+  const holds = useQuery(lotHoldsQuery(lotId));
+  const visits = useQuery(lotVisitsQuery(lotId));
   return (
     <>
       {lot.data === undefined ? <BareHead lotId={lotId} /> : null}

@@ -10,13 +10,18 @@ export interface CorrectionMoveInput {
   readonly expectedVersion: number;
 }
 
+/** Called once the move is done and before what shows it is read anew: what showed the act may then be gone. */
+export type CorrectionDone = (correction: Correction) => void;
+
 /** A move of one correction. After a conflict all that shows it is read anew before the reader decides again. */
 export function useCorrectionMove<Input extends CorrectionMoveInput>(
   send: FieldMutation<Input, Correction>['mutationFn'],
+  onDone: CorrectionDone,
 ) {
   const queryClient = useQueryClient();
   return useFieldMutation<Input, Correction>({
     mutationFn: send,
+    onDone,
     invalidates: ({ lotId }) => staleOnLot(lotId, ['outcomes']),
     onFail: (error) => {
       if (isApiError(error) && error.status === 409) {

@@ -4,7 +4,9 @@ import { useVisitMove, type VisitMoveInput } from '../../visits/api/visit-change
 
 /** Inspector: takes the start back, within a minute. */
 export function useUndoStart() {
-  return useVisitMove(({ visitId, expectedVersion }: VisitMoveInput, options) =>
-    call(undoBegin, { params: { visitId }, body: { expectedVersion } }, options),
+  return useVisitMove(
+    ({ visitId, expectedVersion }: VisitMoveInput, options) =>
+      call(undoBegin, { params: { visitId }, body: { expectedVersion } }, options),
+    () => undefined,
   );
 }

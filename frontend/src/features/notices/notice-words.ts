@@ -1,0 +1,94 @@
+import type { Notice } from '@holdwater/shared-types/notices/notice.contract.js';
+import { useCallback } from 'react';
+import { useTranslation } from 'react-i18next';
+import { isMarkName, type MarkName } from '../../components/mark-names';
+import { localName, useLocale } from '../../lib/i18n';
+import { useTimeWords } from '../../lib/time';
+import { reasonWords } from '../threads/ledger-words';
+
+export interface NoticeWords {
+  /** What happened: "Correction 2 is fixed". */
+  readonly title: string;
+  /** Who, when, why. */
+  readonly text: string;
+  /** "Lot 17, Sorrel Bench" */
+  readonly place: string;
+  readonly mark: MarkName;
+}
+
+const marks: Readonly<Record<Notice['kind'], MarkName>> = {
+  'visit-requested': 'requested',
+  'visit-booked': 'booked',
+  'visit-moved': 'booked',
+  'visit-withdrawn': 'withdrawn',
+  'visit-declined': 'declined',
+  'visit-freed': 'freed',
+  'visit-not-reached': 'requested',
+  'test-up': 'ready',
+  'no-longer-up': 'booked',
+  'visit-underway': 'underway',
+  outcome: 'fail',
+  'correction-opened': 'correction-open',
+  'correction-fixed': 'correction-fixed',
+  'correction-reopened': 'correction-open',
+  'correction-accepted': 'correction-accepted',
+  comment: 'now',
+  'consent-asked': 'waits-on-you',
+  'consent-given': 'sent',
+  'consent-refused': 'declined',
+  'rule-card-published': 'sent',
+};
+
+/** Notices in the reader's language; instants on the wall clock of their department. */
+export function useNoticeWords(): (notice: Notice) => NoticeWords {
+  const { t } = useTranslation(['notices', 'threads', 'marks', 'common', 'holds']);
+  const locale = useLocale();
+  const time = useTimeWords();
+  return useCallback(
+    ({ kind, params }) => {
+      const text = (name: string): string => {
+        const value = params[name];
+        return typeof value === 'string' || typeof value === 'number' ? String(value) : '';
+      };
+      const zone = text('zone') === '' ? Intl.DateTimeFormat().resolvedOptions().timeZone : text('zone');
+      const span = (startAt: string, endAt: string): string =>
+        startAt === '' || endAt === '' ? '' : time.dayWindow(startAt, endAt, zone);
+      const from = spanOf(params['from']);
+      const outcome = text('kind');
+      const words = {
+        actor: text('actorName') === '' ? t('somebody') : text('actorName'),
+        window: span(text('startAt'), text('endAt')),
+        from: span(from.startAt, from.endAt),
+        stage: stageWords(params['stageName'], locale),
+        reason: reasonWords(t, text('reason') === '' ? text('why') : text('reason')),
+        number: text('number'),
+        excerpt: text('excerpt'),
+        version: text('version'),
+        day: text('effectiveFrom') === '' ? '' : time.date(text('effectiveFrom')),
+        outcome: kind === 'outcome' && isMarkName(outcome) ? t(`marks.${outcome}`) : '',
+        count: Number(params['lotCount'] ?? 1),
+      };
+      const lot = text('lotNumber');
+      const place = [lot === '' ? '' : t('common.lot', { number: lot }), text('tractName') || text('address')];
+      return {
+        title: t(`titles.${kind}`, words),
+        text: t(`lines.${kind}`, words),
+        place: place.filter(Boolean).join(', '),
+        mark: kind === 'outcome' && isMarkName(outcome) ? outcome : marks[kind],
+      };
+    },
+    [t, locale, time],
+  );
+}
+
+function spanOf(value: unknown): { startAt: string; endAt: string } {
+  const { startAt, endAt } = typeof value === 'object' && value !== null ? (value as Record<string, unknown>) : {};
+  return { startAt: typeof startAt === 'string' ? startAt : '', endAt: typeof endAt === 'string' ? endAt : '' };
+}
+
+function stageWords(value: unknown, locale: 'en' | 'es'): string {
+  if (typeof value !== 'object' || value === null) return '';
+  const { en, es } = value as { en?: unknown; es?: unknown };
+  if (typeof en !== 'string') return '';
+  return localName({ en, es: typeof es === 'string' ? es : undefined }, locale);
+}

@@ -1,0 +1,23 @@
+import { startMailbox } from '@holdwater/fake-services/mailbox/start-mailbox.js';
+import { it, vi } from 'vitest';
+import { book, listTakeable } from '../support/booking.js';
+import { connectAsOwner } from '../support/owner-connection.js';
+import { seedDatabase } from '../support/seeded-database.js';
+import { useServers } from '../support/use-servers.js';
+const servers = useServers();
+it('x', { timeout: 100000 }, async () => {
+  const mailbox = await startMailbox();
+  const seeded = await seedDatabase();
+  const tables = await connectAsOwner(seeded.database);
+  const server = await servers.start({ ...seeded.environment(mailbox.smtpUrl), LOG_LEVEL: 'debug' });
+  const lotId = seeded.world.lots[0].id;
+  const [w] = await listTakeable(seeded, server.url, lotId);
+  await book(seeded, server.url, lotId, w!);
+  const t = Date.now();
+  await vi.waitFor(async () => { if ((await tables.rows(`SELECT 1 FROM deliveries WHERE state = 'sent'`)).length < 3) throw new Error('no'); }, { timeout: 20000 }).catch((e) => console.log(e));
+  console.log(Date.now() - t, await tables.rows('select kind, processed_at, next_attempt_at, attempts, last_error, is_muted, at from outbox_events'), await tables.rows('select address,state,attempts,last_error,next_attempt_at from deliveries'));
+  console.log(await tables.rows(`select pid, application_name, state, wait_event, left(query,200) q from pg_stat_activity where datname=current_database()`));
+  console.log(server.output().slice(-6000));
+  await tables.close();
+  await mailbox.stop();
+});
