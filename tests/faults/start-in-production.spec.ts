@@ -2,7 +2,7 @@ import { callerOf } from '@holdwater/backend/testing/fixtures/caller.js';
 import { cloneDatabase, type TestDatabase } from '@holdwater/backend/testing/test-database.js';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { environmentOf } from '../support/seeded-database.js';
-import { spawnServer } from '../support/server-process.js';
+import { patienceMs, spawnServer } from '../support/server-process.js';
 import { useServers } from '../support/use-servers.js';
 
 const noMail = 'smtp://127.0.0.1:9';
@@ -10,13 +10,13 @@ const missingIn = (output: string) => [...output.matchAll(/(\w+) is missing/g)].
 const needed = ['PORT', 'APP_URL', 'DATABASE_URL', 'JWT_SECRET', 'SMTP_URL', 'MAIL_FROM'];
 
 describe('a server without its environment', () => {
-  it('does not start, and names every variable that is missing', async () => {
+  it('does not start, and names every variable that is missing', { timeout: patienceMs }, async () => {
     const server = spawnServer({ NODE_ENV: 'production' });
     expect(await server.ended).toBe(1);
     expect(missingIn(server.output())).toEqual([...needed].sort());
   });
 
-  it('names one alone when only that is missing', async () => {
+  it('names one alone when only that is missing', { timeout: patienceMs }, async () => {
     const given = {
       PORT: '0',
       APP_URL: 'http://127.0.0.1:4310',

@@ -1,6 +1,6 @@
 import { type Mailbox, startMailbox } from '@holdwater/fake-services/mailbox/start-mailbox.js';
 import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
-import { book, listTakeable } from '../support/booking.js';
+import { book, listInvited, listTakeable } from '../support/booking.js';
 import { listInvites } from '../support/invites.js';
 import { connectAsOwner, type OwnerConnection } from '../support/owner-connection.js';
 import { seedDatabase, type SeededDatabase } from '../support/seeded-database.js';
@@ -34,7 +34,7 @@ describe('a mail server that is away while visits are booked', () => {
       'SELECT address, state, attempts, last_error AS "lastError" FROM deliveries ORDER BY position',
     );
 
-  it('gets each email once, and in order, when it is back', { timeout: 2 * retryMs }, async () => {
+  it('gets each email once, and in order, when it is back', async () => {
     const port = Number(new URL(mailbox.smtpUrl).port);
     await mailbox.stop();
 
@@ -42,13 +42,11 @@ describe('a mail server that is away while visits are booked', () => {
     const [first, second] = await listTakeable(seeded, server.url, lotId);
     if (!first || !second) throw new Error('no window to take');
     const booked = await book(seeded, server.url, lotId, first);
-    const moved = await seeded
-      .as('superintendent', server.url)
-      .post(`/api/visits/${booked.id}/move`, {
-        expectedVersion: booked.version,
-        date: second.date,
-        label: second.label,
-      });
+    const moved = await seeded.as('superintendent', server.url).post(`/api/visits/${booked.id}/move`, {
+      expectedVersion: booked.version,
+      date: second.date,
+      label: second.label,
+    });
     expect(moved.status).toBe(200);
     // every booking was tried in vain, and the moves wait behind them
     await vi.waitFor(
@@ -76,12 +74,8 @@ describe('a mail server that is away while visits are booked', () => {
     expect(invites).toHaveLength(6);
     expect(new Set(invites.map(({ messageId }) => messageId)).size).toBe(6);
     expect(new Set(invites.map(({ uid }) => uid)).size).toBe(1);
-    const people = [...new Set(invites.map(({ to }) => to))].sort();
-    expect(people).toEqual([
-      expect.stringMatching(/inspector@/),
-      'plumber@example.test',
-      'superintendent@example.test',
-    ]);
+    const people = listInvited(seeded, booked);
+    expect([...new Set(invites.map(({ to }) => to))].sort()).toEqual(people);
     for (const person of people) {
       const [invite, update] = invites.filter(({ to }) => to === person);
       const attendee = `mailto:${person}`;

@@ -35,3 +35,11 @@ export async function book(seeded: SeededDatabase, url: string, lotId: string, w
   if (status !== 201 || visit?.state !== 'booked') throw new Error(`not booked: ${JSON.stringify(body)}`);
   return visit;
 }
+
+/** The addresses of the three who must be at a visit of the first set, sorted. */
+export function listInvited({ world }: SeededDatabase, visit: VisitSummary): string[] {
+  const { superintendent, plumber, ...others } = world.people;
+  const inspector = Object.values(others).find(({ id }) => id === visit.inspector?.id);
+  if (!inspector) throw new Error('the visit has no inspector');
+  return [superintendent, plumber, inspector].map(({ email }) => email).sort();
+}

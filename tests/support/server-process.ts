@@ -6,7 +6,7 @@ import { findFreePort } from './free-port.js';
 const entry = fileURLToPath(new URL('../../backend/dist/main.js', import.meta.url));
 
 /** How long a server may take to come up or to end, ms. Generous: the machine may be busy. */
-const patienceMs = 60_000;
+export const patienceMs = 120_000;
 
 /** A built server as a process of its own. */
 export interface ServerProcess {
@@ -51,11 +51,14 @@ export async function startServer(env: Record<string, string>): Promise<ServerPr
   const port = await findFreePort();
   const url = `http://127.0.0.1:${port}`;
   const server = spawnServer({ PORT: `${port}`, APP_URL: url, ...env }, url);
-  let end: number | string | null = null;
-  void server.ended.then((how) => (end = how));
+  const seen: { end?: number | string } = {};
+  void server.ended.then((how) => (seen.end = how));
   try {
-    await vi.waitUntil(async () => end !== null || (await isReady(url)), { timeout: patienceMs, interval: 100 });
-    if (end !== null) throw new Error(`it ended with ${end}`);
+    await vi.waitUntil(async () => seen.end !== undefined || (await isReady(url)), {
+      timeout: patienceMs,
+      interval: 100,
+    });
+    if (seen.end !== undefined) throw new Error(`it ended with ${seen.end}`);
     return server;
   } catch (error) {
     await server.kill();

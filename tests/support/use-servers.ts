@@ -1,5 +1,5 @@
-import { afterAll, afterEach } from 'vitest';
-import { startServer, type ServerProcess } from './server-process.js';
+import { afterAll, afterEach, vi } from 'vitest';
+import { patienceMs, startServer, type ServerProcess } from './server-process.js';
 
 /** How much of a server's log is shown when a test failed. */
 const shownLines = 60;
@@ -11,6 +11,8 @@ export interface Servers {
 /** The servers of one describe: whatever happens they end with it, and their logs are shown when a test fails. */
 export function useServers(): Servers {
   const started: ServerProcess[] = [];
+  // a test may start or end several processes
+  vi.setConfig({ testTimeout: 3 * patienceMs, hookTimeout: 3 * patienceMs });
   afterEach(({ task }) => {
     if (task.result?.state !== 'fail') return;
     for (const { url, output } of started) console.error(`${url} wrote last:\n${lastLines(output())}`);

@@ -26,7 +26,7 @@ const parts = {
     title: 'page',
     sources: [...commonSources, 'shared-types/src', 'shared-types/package.json', 'frontend'],
     products: ['frontend/dist/index.html'],
-    build: () => runTool('vite', ['build'], path.join(root, 'frontend'), { NODE_ENV: 'production' }),
+    build: () => runTool('vite', ['build', '--logLevel', 'warn'], path.join(root, 'frontend'), { NODE_ENV: 'production' }),
   },
 };
 

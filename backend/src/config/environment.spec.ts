@@ -32,4 +32,15 @@ describe('the environment', () => {
       /another role/,
     );
   });
+
+  it('refuses production without https, but on the machine itself', () => {
+    expect(() => readEnvironment({ ...whole, APP_URL: 'http://holdwater.example.test' })).toThrowError(/https/);
+    expect(readEnvironment({ ...whole, APP_URL: 'http://127.0.0.1:4310' }).HOLDWATER_MODE).toBe('production');
+  });
+
+  it('refuses a demo that others can reach', () => {
+    const demo = { ...whole, HOLDWATER_MODE: 'demo' };
+    expect(() => readEnvironment({ ...demo, HOST: '0.0.0.0' })).toThrowError(/passwords are public/);
+    expect(readEnvironment(demo).HOST).toBe('127.0.0.1');
+  });
 });

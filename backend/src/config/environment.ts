@@ -39,7 +39,7 @@ export function readEnvironment(variables: Record<string, string | undefined>): 
   const faults = parsed.success
     ? []
     : parsed.error.issues.map((issue) => faultOf(String(issue.path[0]), issue.message, given));
-  if (parsed.success) faults.push(...productionFaults(parsed.data));
+  if (parsed.success) faults.push(...modeFaults(parsed.data));
   if (faults.length > 0) {
     throw new EnvironmentError(
       `Holdwater did not start. Nothing was changed. Set these in the environment and start it again:\n${faults.map((fault) => `  ${fault}`).join('\n')}`,
@@ -52,10 +52,27 @@ function faultOf(name: string, message: string, given: Record<string, string | u
   return given[name] === undefined ? `${name} is missing` : `${name} ${message}`;
 }
 
-function productionFaults(environment: Environment): string[] {
-  if (environment.HOLDWATER_MODE !== 'production' || environment.DATABASE_MIGRATION_URL === undefined) return [];
-  const isOneRole = new URL(environment.DATABASE_URL).username === new URL(environment.DATABASE_MIGRATION_URL).username;
-  return isOneRole
-    ? ['DATABASE_URL must use another role than DATABASE_MIGRATION_URL: the server may not own the ledger']
-    : [];
+function modeFaults(environment: Environment): string[] {
+  return environment.HOLDWATER_MODE === 'demo' ? demoFaults(environment) : productionFaults(environment);
+}
+
+/** Everybody knows the passwords of the demo. */
+function demoFaults({ HOST }: Environment): string[] {
+  return isLoopback(HOST) ? [] : ['HOST must be 127.0.0.1 where HOLDWATER_MODE is demo: its passwords are public'];
+}
+
+function productionFaults({ APP_URL, DATABASE_URL, DATABASE_MIGRATION_URL }: Environment): string[] {
+  const faults: string[] = [];
+  const { protocol, hostname } = new URL(APP_URL);
+  if (protocol !== 'https:' && !isLoopback(hostname))
+    faults.push('APP_URL must begin with https: in production: sign-ins would be readable on the way');
+  const isOneRole =
+    DATABASE_MIGRATION_URL !== undefined && new URL(DATABASE_URL).username === new URL(DATABASE_MIGRATION_URL).username;
+  if (isOneRole)
+    faults.push('DATABASE_URL must use another role than DATABASE_MIGRATION_URL: the server may not own the ledger');
+  return faults;
+}
+
+function isLoopback(host: string): boolean {
+  return host === 'localhost' || host === '[::1]' || host === '::1' || /^127(\.\d{1,3}){3}$/.test(host);
 }

@@ -3,6 +3,7 @@ import { SequelizeModule } from '@nestjs/sequelize';
 import type { Environment } from '../config/environment.js';
 import { ENVIRONMENT } from '../config/environment.module.js';
 import { models } from './models.js';
+import { steadyPg } from './steady-pg.js';
 
 /** Longest a statement may take; below the time-out of a request, so that a person gets an answer. */
 const statementTimeoutMs = 15_000;
@@ -13,6 +14,7 @@ const statementTimeoutMs = 15_000;
       inject: [ENVIRONMENT],
       useFactory: (environment: Environment) => ({
         dialect: 'postgres' as const,
+        dialectModule: steadyPg,
         uri: environment.DATABASE_URL,
         models,
         logging: false,

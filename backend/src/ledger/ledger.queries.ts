@@ -3,7 +3,7 @@ import { InjectConnection } from '@nestjs/sequelize';
 import type { LedgerEntry } from '@holdwater/shared-types/ledger/ledger.contract.js';
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
-import { fromCursor, toPage } from '../common/paging/cursor.js';
+import { fromNumberCursor, toPage } from '../common/paging/cursor.js';
 
 interface EntryRow extends Omit<LedgerEntry, 'at'> {
   at: Date;
@@ -15,12 +15,12 @@ export class LedgerQueries {
 
   /** A page of a lot's entries, newest first, and how many there are. */
   async listOfLot(lotId: string, { cursor, limit }: { cursor?: string; limit: number }) {
-    const [before] = cursor ? fromCursor(cursor, 1) : [null];
+    const before = fromNumberCursor(cursor);
     const rows = await this.sequelize.query<EntryRow>(
       `SELECT e.sequence, e.at, e.kind, p.name AS "actorName", e.actor_role AS "actorRole", e.payload, e.hash
        FROM ledger_entries e LEFT JOIN persons p ON p.id = e.actor_id
        WHERE e.lot_id = :lotId AND e.sequence < :before ORDER BY e.sequence DESC LIMIT :take`,
-      { replacements: { lotId, before: Number(before ?? 2_147_483_647), take: limit + 1 }, type: QueryTypes.SELECT },
+      { replacements: { lotId, before: before ?? 2_147_483_647, take: limit + 1 }, type: QueryTypes.SELECT },
     );
     const page = toPage(rows, limit, (row) => [row.sequence]);
     return {

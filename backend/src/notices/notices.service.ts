@@ -4,7 +4,7 @@ import type { Notice } from '@holdwater/shared-types/notices/notice.contract.js'
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
 import type { Actor } from '../common/access/actor.js';
-import { fromCursor, toPage } from '../common/paging/cursor.js';
+import { fromInstantCursor, toPage } from '../common/paging/cursor.js';
 import { Clock } from '../common/time/clock.js';
 import { UnitOfWork } from '../common/unit-of-work/unit-of-work.js';
 
@@ -23,7 +23,7 @@ export class Notices {
   ) {}
 
   async list(actor: Actor, { cursor, limit }: { cursor?: string; limit: number }) {
-    const [at, id] = cursor ? fromCursor(cursor, 2) : [null, null];
+    const [at, id] = fromInstantCursor(cursor);
     const rows = await this.sequelize.query<NoticeRow>(
       `SELECT id, kind, params, lot_id AS "lotId", visit_id AS "visitId", at, read_at AS "readAt" FROM notices
        WHERE person_id = :personId ${cursor ? 'AND (at, id) < (:at::timestamptz, :id::uuid)' : ''} ORDER BY at DESC, id DESC LIMIT :take`,

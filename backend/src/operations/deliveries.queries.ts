@@ -5,7 +5,7 @@ import type { listDeliveries } from '@holdwater/shared-types/operations/operatio
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
 import { refuse } from '../common/errors/app-error.js';
-import { fromCursor, toPage } from '../common/paging/cursor.js';
+import { fromNumberCursor, toPage } from '../common/paging/cursor.js';
 import { Clock } from '../common/time/clock.js';
 import { UnitOfWork } from '../common/unit-of-work/unit-of-work.js';
 
@@ -32,7 +32,7 @@ export class DeliveriesQueries {
   ) {}
 
   async list({ cursor, limit, state }: RouteInput<typeof listDeliveries>['query']) {
-    const [before] = cursor ? fromCursor(cursor, 1) : [null];
+    const before = fromNumberCursor(cursor);
     const states = state ? [state] : ['waiting', 'given-up'];
     const rows = await this.sequelize.query<DeliveryRow>(
       `SELECT id, position, channel, address AS "to", kind, state, attempts, last_error AS "lastError", next_attempt_at AS "nextAttemptAt",

@@ -12,7 +12,14 @@ import type { DefaultEventsMap, Server, Socket } from 'socket.io';
 import { z } from 'zod';
 import { Authentication } from '../accounts/sessions/authentication.service.js';
 import { type Actor, organizationIds } from '../common/access/actor.js';
-import { LOT_CHANGED, type LotChange, PERSON_TOLD, type PersonTold } from '../common/changes/changes.js';
+import {
+  ACCESS_CHANGED,
+  type AccessChange,
+  LOT_CHANGED,
+  type LotChange,
+  PERSON_TOLD,
+  type PersonTold,
+} from '../common/changes/changes.js';
 import { LotsQueries } from '../lots/lots.queries.js';
 import { canReadLot } from '../lots/lots.policy.js';
 
@@ -21,6 +28,9 @@ type Known = Socket<DefaultEventsMap, DefaultEventsMap, DefaultEventsMap, { acto
 const lotRequest = z.object({ lotId: z.uuid() });
 /** How often open sockets are asked again whether they still may. */
 const recheckMs = 60_000;
+/** What server processes tell each other, beside what goes to sockets. */
+const accessElsewhere = 'access';
+const lotElsewhere = 'lot';
 const lotRoom = (lotId: string) => `lot:${lotId}`;
 const personRoom = (personId: string) => `person:${personId}`;
 const organizationRoom = (organizationId: string) => `organization:${organizationId}`;
@@ -40,6 +50,8 @@ export class RealtimeGateway implements OnGatewayInit<Server> {
 
   afterInit(server: Server): void {
     server.use((socket, next) => void this.admit(socket, next));
+    server.on(accessElsewhere, (change: AccessChange) => void this.recheckOf(change).catch(() => undefined));
+    server.on(lotElsewhere, (lotId: string) => void this.evict(lotId).catch(() => undefined));
   }
 
   @SubscribeMessage('lot:watch')
@@ -64,7 +76,9 @@ export class RealtimeGateway implements OnGatewayInit<Server> {
     const lot = await this.lots.partiesOf(lotId);
     const rooms = [lot.builderId, lot.plumberId, lot.departmentId].filter((id) => id !== null).map(organizationRoom);
     this.server?.to(rooms).emit('waiting', {});
-    if (topics.includes('lot')) await this.evict(lotId);
+    if (!topics.includes('lot')) return;
+    this.server?.serverSideEmit(lotElsewhere, lotId);
+    await this.evict(lotId);
   }
 
   @OnEvent(PERSON_TOLD)
@@ -72,17 +86,47 @@ export class RealtimeGateway implements OnGatewayInit<Server> {
     this.server?.to(personRoom(personId)).emit(what, {});
   }
 
-  /** A session that ended, a person disabled, a right lost: out within a minute, or at once where the lot itself changed hands. */
+  /** Somebody's session ended, or what they may changed: their sockets are asked again at once, in every process. */
+  @OnEvent(ACCESS_CHANGED)
+  async accessChanged(change: AccessChange): Promise<void> {
+    this.server?.serverSideEmit(accessElsewhere, change);
+    await this.recheckOf(change);
+  }
+
+  /** The net below what is told at once: whatever was missed is out within a minute, a session that ran out too. */
   @Interval(recheckMs)
   async recheck(): Promise<void> {
-    const sockets = [...(this.server?.sockets.sockets.values() ?? [])] as unknown as Known[];
+    await this.recheckSockets(this.openSockets());
+  }
+
+  private async recheckOf(change: AccessChange): Promise<void> {
+    const isMeant = ({ data: { actor } }: Known) =>
+      'personId' in change ? actor.personId === change.personId : actor.sessionId === change.sessionId;
+    await this.recheckSockets(this.openSockets().filter(isMeant));
+  }
+
+  private openSockets(): Known[] {
+    const sockets: Iterable<unknown> = this.server?.sockets.sockets.values() ?? [];
+    return [...sockets] as Known[];
+  }
+
+  private async recheckSockets(sockets: readonly Known[]): Promise<void> {
     for (const socket of sockets) {
       const actor = await this.authentication.findActor(socket.data.actor);
       if (actor === null) socket.disconnect(true);
-      else socket.data.actor = actor;
+      else await this.renew(socket, actor);
     }
-    const lotIds = new Set(sockets.flatMap((socket) => [...socket.rooms].filter((room) => room.startsWith('lot:'))));
-    for (const room of lotIds) await this.evict(room.slice('lot:'.length));
+    const rooms = new Set(sockets.flatMap((socket) => [...socket.rooms].filter((room) => room.startsWith('lot:'))));
+    for (const room of rooms) await this.evict(room.slice('lot:'.length));
+  }
+
+  /** The rooms of the organizations as they now are. */
+  private async renew(socket: Known, actor: Actor): Promise<void> {
+    socket.data.actor = actor;
+    const rooms = organizationIds(actor).map(organizationRoom);
+    const left = [...socket.rooms].filter((room) => room.startsWith(organizationRoom('')) && !rooms.includes(room));
+    for (const room of left) await socket.leave(room);
+    await socket.join(rooms);
   }
 
   private async admit(socket: Socket, next: (error?: Error) => void): Promise<void> {
@@ -110,7 +154,7 @@ export class RealtimeGateway implements OnGatewayInit<Server> {
     }
   }
 
-  /** Sockets of this process that may no longer read the lot leave its room; the other processes do the same for theirs. */
+  /** Sockets of this process that may no longer read the lot leave its room; the others are told to do the same. */
   private async evict(lotId: string): Promise<void> {
     const ids = this.server?.sockets.adapter.rooms.get(lotRoom(lotId)) ?? new Set<string>();
     if (ids.size === 0) return;

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { io, type Socket } from 'socket.io-client';
-import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, beforeAll, describe, expect, it, vi } from 'vitest';
 import { LotModel } from '../lots/lot.model.js';
 import { callerOf } from '../testing/fixtures/caller.js';
 import { createWorld, type World, type WorldPerson } from '../testing/fixtures/world.js';
@@ -96,6 +96,25 @@ describe('two servers on one database', () => {
     const gone = next(socket, 'disconnect');
     await callerOf(one.url, world.tokenOf('plumber')).post('/api/auth/sign-out-everywhere');
     await one.get(RealtimeGateway).recheck();
+    expect(await gone).toBe('io server disconnect');
+  });
+
+  // ASVS 5.0 7.4.2: whoever is disabled is out at once. `recheck` is not called here: nothing waits for its minute
+  it('puts out at once who is disabled or signs out, whichever server they are on', async () => {
+    const lotId = world.lots[3].id;
+    const { socket, answer } = await watching(two, 'inspector', lotId);
+    expect(answer).toEqual({ ok: true });
+    const people = `/api/organizations/${world.organizations.department.id}/people/${world.people.inspector.id}`;
+    const mayWatch = (ok: boolean) =>
+      vi.waitFor(async () => expect(await socket.emitWithAck('lot:watch', { lotId })).toEqual({ ok }), 20_000);
+    const owner = callerOf(one.url, world.tokenOf('departmentOwner'));
+    expect((await owner.patch(people, { isDisabled: true })).status).toBe(200);
+    await mayWatch(false);
+    expect((await owner.patch(people, { isDisabled: false })).status).toBe(200);
+    await mayWatch(true);
+
+    const gone = next(socket, 'disconnect');
+    await callerOf(one.url, world.tokenOf('inspector')).post('/api/auth/sign-out-everywhere');
     expect(await gone).toBe('io server disconnect');
   });
 

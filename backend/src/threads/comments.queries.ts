@@ -4,7 +4,7 @@ import type { Comment } from '@holdwater/shared-types/threads/thread.contract.js
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
 import { refuse } from '../common/errors/app-error.js';
-import { fromCursor, toPage } from '../common/paging/cursor.js';
+import { fromInstantCursor, toPage } from '../common/paging/cursor.js';
 
 interface CommentRow extends Omit<Comment, 'at' | 'receivedAt' | 'on'> {
   at: Date;
@@ -35,7 +35,7 @@ export class CommentsQueries {
 
   /** A page of a lot's thread, newest first by the time they were made. */
   async listComments(lotId: string, { cursor, limit }: { cursor?: string; limit: number }) {
-    const [at, id] = cursor ? fromCursor(cursor, 2) : [null, null];
+    const [at, id] = fromInstantCursor(cursor);
     const rows = await this.select(
       `${selectSql} WHERE c.lot_id = :lotId ${cursor ? 'AND (c.made_at, c.id) < (:at::timestamptz, :id::uuid)' : ''}
        ORDER BY c.made_at DESC, c.id DESC LIMIT :take`,

@@ -61,17 +61,23 @@ export class Calendars {
     return { now: now.toISOString(), zone, today: localDateOf(now, zone), lanes, visits };
   }
 
-  /** The own departments first, then those of the reader's lots, by name. */
+  /** The own departments first, then those of the reader's lots, the one of most lots first. An outside department has no windows to show. */
   private async departmentsOf(readerIds: readonly string[]): Promise<DepartmentRecord[]> {
-    const found = await this.sequelize.query<{ id: string }>(
-      `SELECT id FROM departments WHERE id = ANY (ARRAY[:readerIds]::uuid[])
-       UNION SELECT department_id FROM lots WHERE department_id IS NOT NULL
-         AND (builder_id = ANY (ARRAY[:readerIds]::uuid[]) OR plumber_id = ANY (ARRAY[:readerIds]::uuid[]))`,
+    const found = await this.sequelize.query<{ id: string; lots: number }>(
+      `SELECT d.id, count(l.id)::int AS lots FROM departments d
+       LEFT JOIN lots l ON l.department_id = d.id
+         AND (l.builder_id = ANY (ARRAY[:readerIds]::uuid[]) OR l.plumber_id = ANY (ARRAY[:readerIds]::uuid[]))
+       WHERE d.id = ANY (ARRAY[:readerIds]::uuid[]) OR l.id IS NOT NULL
+       GROUP BY d.id`,
       { replacements: { readerIds: [...readerIds] }, type: QueryTypes.SELECT },
     );
     const isOther = ({ id }: DepartmentRecord) => Number(!readerIds.includes(id));
     const departments = await this.departments.getDepartments(found.map(({ id }) => id));
-    return [...departments.values()].sort((a, b) => isOther(a) - isOther(b) || a.name.localeCompare(b.name));
+    const lotsOf = new Map(found.map(({ id, lots }) => [id, lots]));
+    const fewerLots = (a: DepartmentRecord, b: DepartmentRecord) => (lotsOf.get(b.id) ?? 0) - (lotsOf.get(a.id) ?? 0);
+    return [...departments.values()]
+      .filter((department) => !department.isOutside || !isOther(department))
+      .sort((a, b) => isOther(a) - isOther(b) || fewerLots(a, b) || a.name.localeCompare(b.name));
   }
 }
 

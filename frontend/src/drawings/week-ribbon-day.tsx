@@ -28,7 +28,8 @@ export function DayDrawing({ day, hours, isPast, nowFraction }: DayDrawingProps)
     ...day.shelves.map((shelf) => (shelf.row ?? 0) + 1),
     ...day.marks.map((m) => (m.row ?? 0) + 1),
   );
-  const topOf = (row = 0): number => (rows === 1 ? 12 : 4 + row * 23);
+  // a third department stands in the second's row: the ribbon is two rows high
+  const topOf = (row = 0): number => (rows === 1 ? 12 : 4 + Math.min(row, 1) * 23);
   const ticks = { '--half': `${50 / (hours.to - hours.from)}%`, '--hour': `${100 / (hours.to - hours.from)}%` };
   return (
     <span className="day-draw" aria-hidden="true">

@@ -12,8 +12,12 @@ export const localDate = z.iso.date();
 /** A clock time of a day's wall clock, 24 h, `07:30`. */
 export const clockTime = z.string().regex(/^([01]\d|2[0-3]):[0-5]\d$/, 'not-a-clock-time');
 
+/** Breaks of lines, tabs and other controls are no part of one line: a name goes into the heads of mails and calendar entries. */
+const asOneLine = (text: string) => text.replaceAll(/\p{Cc}+/gu, ' ');
+
 /** One line a person types. */
-export const line = (longest = 200) => z.string().trim().min(1, 'required').max(longest, 'too-long');
+export const line = (longest = 200) =>
+  z.string().overwrite(asOneLine).trim().min(1, 'required').max(longest, 'too-long');
 
 /** Words a person writes; may be empty only where the caller makes it optional. */
 export const words = (longest = 4000) => z.string().trim().min(1, 'required').max(longest, 'too-long');

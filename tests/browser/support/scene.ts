@@ -20,7 +20,7 @@ export async function takeableWindows(
   as: WorldPerson = 'superintendent',
 ): Promise<OfferedWindow[]> {
   const body = { lots: [{ lotId }], stageCode };
-  const answer = (await stack.call(as, 'POST', '/api/visits/offers', body)) as { windows: OfferedWindow[] };
+  const answer = (await stack.call(as, 'post', '/api/visits/offers', body)) as { windows: OfferedWindow[] };
   return answer.windows.filter(({ isTakeable }) => isTakeable);
 }
 
@@ -33,7 +33,7 @@ export async function request(
   const chosen = window ?? (await takeableWindows(stack, lotId, as))[0];
   if (!chosen) throw new Error('no window can be taken');
   const body = { lots: [{ lotId }], stageCode, date: chosen.date, label: chosen.label };
-  const answer = (await stack.call(as, 'POST', '/api/visits', body)) as { visits: VisitSummary[] };
+  const answer = (await stack.call(as, 'post', '/api/visits', body)) as { visits: VisitSummary[] };
   const [visit] = answer.visits;
   if (!visit) throw new Error('nothing was requested');
   return visit;
@@ -55,15 +55,15 @@ export async function standUp(stack: Stack, lotId: string): Promise<Hold[]> {
   };
   const path = `/api/lots/${lotId}/holds`;
   return [
-    (await stack.call('plumber', 'POST', path, dwv)) as Hold,
-    (await stack.call('plumber', 'POST', path, water)) as Hold,
+    (await stack.call('plumber', 'post', path, dwv)) as Hold,
+    (await stack.call('plumber', 'post', path, water)) as Hold,
   ];
 }
 
 /** One of the moves of a visit, by whoever may make it. */
 export async function move(stack: Stack, as: WorldPerson, visit: VisitSummary, act: string): Promise<VisitSummary> {
   const body = { ...stamp(), expectedVersion: visit.version };
-  return (await stack.call(as, 'POST', `/api/visits/${visit.id}/${act}`, body)) as VisitSummary;
+  return (await stack.call(as, 'post', `/api/visits/${visit.id}/${act}`, body)) as VisitSummary;
 }
 
 /** Which of the department's inspectors was given the visit. */
@@ -100,7 +100,7 @@ export async function makeScene(stack: Stack): Promise<Scene> {
     result: failedDrain({ text: 'Drip at the tee' }),
     note: 'See the tee',
   };
-  const closed = (await stack.call(inspector, 'POST', `/api/visits/${begun.id}/outcome`, outcome)) as {
+  const closed = (await stack.call(inspector, 'post', `/api/visits/${begun.id}/outcome`, outcome)) as {
     visit: VisitSummary;
     corrections: Correction[];
   };
@@ -108,7 +108,7 @@ export async function makeScene(stack: Stack): Promise<Scene> {
   const other = await up(String(third));
   const underway = await move(stack, inspectorOf(stack, other), other, 'begin');
   const booked = await request(stack, String(fourth));
-  await stack.call('plumber', 'POST', `/api/lots/${second}/comments`, {
+  await stack.call('plumber', 'post', `/api/lots/${second}/comments`, {
     ...stamp(),
     text: 'Gauge is at the hose bib.',
   });

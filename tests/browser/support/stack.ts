@@ -1,91 +1,66 @@
-import { randomUUID } from 'node:crypto';
+import { existsSync } from 'node:fs';
+import { fileURLToPath } from 'node:url';
+import { Passwords } from '@holdwater/backend/accounts/passwords/passwords.js';
+import type { World, WorldPerson } from '@holdwater/backend/testing/fixtures/world.js';
 import { startMailbox, type Mailbox } from '@holdwater/fake-services/mailbox/start-mailbox.js';
-import { givePassword } from '@holdwater/backend/testing/fixtures/accounts.js';
-import { createWorld, type World, type WorldPerson } from '@holdwater/backend/testing/fixtures/world.js';
-import { startTestApp, type TestApp } from '@holdwater/backend/testing/test-app.js';
-import { cloneDatabase } from '@holdwater/backend/testing/test-database.js';
-import { serve } from './served.js';
+import { connectAsOwner } from '../../support/owner-connection.js';
+import { seedDatabase, type SeededDatabase } from '../../support/seeded-database.js';
+import { startServer } from '../../support/server-process.js';
 
 export const password = 'gravel pipe lantern 41';
 
-const secret = `of the browser tests ${randomUUID()}`;
+/** Where the built page lies; another place when a run says so. */
+const staticDir = process.env.TEST_STATIC_DIR ?? fileURLToPath(new URL('../../../frontend/dist', import.meta.url));
 
 export interface Stack {
   url: string;
   world: World;
   mailbox: Mailbox;
-  /** Calls the API as one person, signed in by their password; for what a story only presupposes. @throws unless it answers 2xx */
-  call(person: WorldPerson, method: string, path: string, body?: object): Promise<unknown>;
+  /** Calls the API as one person, for what a story only presupposes. @throws unless it answers 2xx */
+  call(person: WorldPerson, method: 'get' | 'post' | 'patch', path: string, body?: object): Promise<unknown>;
   stop(): Promise<void>;
 }
 
-/** Database, mailbox and the built server; organizations, people and lots are rows, their passwords hashed as the accounts do. */
+/** Database, mailbox and the built server with its page; organizations, people and lots are rows, passwords hashed as the accounts do. */
 export async function startStack(): Promise<Stack> {
-  const database = await cloneDatabase();
-  const mailbox = await startMailbox();
-  const ends: Array<() => Promise<unknown>> = [() => mailbox.stop(), () => database.drop()];
+  if (!existsSync(`${staticDir}/index.html`))
+    throw new Error(`no page in ${staticDir}: build it first, as npm test does`);
+  const ends: Array<() => Promise<unknown>> = [];
   const stop = async (): Promise<void> => {
     for (const end of ends) await end();
   };
   try {
-    const maker = await startTestApp({ database, now: new Date().toISOString(), environment: { JWT_SECRET: secret } });
-    ends.unshift(() => maker.close());
-    const world = await createWorld(maker);
-    for (const person of Object.values(world.people)) await givePassword(maker, person, password);
-    await makeRuleCardsCurrent(maker, world);
-    const served = await serve({
-      DATABASE_URL: database.appUrl,
-      JWT_SECRET: secret,
-      SMTP_URL: mailbox.smtpUrl,
-    });
-    ends.unshift(() => served.stop());
-    return { url: served.url, world, mailbox, call: callerOf(served.url, world), stop };
+    const seeded = await seedDatabase();
+    ends.unshift(() => seeded.database.drop());
+    await givePasswords(seeded);
+    const mailbox = await startMailbox();
+    ends.unshift(() => mailbox.stop());
+    const server = await startServer({ ...seeded.environment(mailbox.smtpUrl), ROLE: 'all', STATIC_DIR: staticDir });
+    ends.unshift(() => server.stop());
+    return { url: server.url, world: seeded.world, mailbox, call: callerOf(seeded, server.url), stop };
   } catch (error) {
     await stop();
     throw error;
   }
 }
 
-/** The fixture's rule cards begin in 2027, its own present; for the system clock's present the same content rules before that. */
-async function makeRuleCardsCurrent(maker: TestApp, { ruleCard, otherRuleCard }: World): Promise<void> {
-  for (const { departmentId, content } of [ruleCard, otherRuleCard]) {
-    await maker.db.query(
-      `INSERT INTO rule_cards (id, department_id, version, state, content, effective, created_at, published_at)
-       VALUES (:id, :departmentId, 2, 'published', :content, daterange('2020-01-01', '2027-01-01'), now(), now())`,
-      { replacements: { id: randomUUID(), departmentId, content: JSON.stringify(content) } },
-    );
+/** One hash for all: hashing is slow by purpose. */
+async function givePasswords({ database }: SeededDatabase): Promise<void> {
+  const hash = await new Passwords().hash(password);
+  const owner = await connectAsOwner(database);
+  try {
+    await owner.rows('UPDATE persons SET password_hash = $1', [hash]);
+  } finally {
+    await owner.close();
   }
 }
 
-function callerOf(url: string, world: World): Stack['call'] {
-  const tokens = new Map<WorldPerson, Promise<string>>();
-  const send = async (
-    method: string,
-    path: string,
-    body: object | undefined,
-    token: string | null,
-  ): Promise<unknown> => {
-    const answer = await fetch(`${url}${path}`, {
-      method,
-      headers: {
-        'Content-Type': 'application/json',
-        'Idempotency-Key': randomUUID(),
-        ...(token === null ? {} : { Authorization: `Bearer ${token}` }),
-      },
-      body: body === undefined ? undefined : JSON.stringify(body),
-    });
-    const text = await answer.text();
-    if (!answer.ok) throw new Error(`${method} ${path} answered ${answer.status}: ${text}`);
-    return text === '' ? null : JSON.parse(text);
-  };
-  const signIn = async (person: WorldPerson): Promise<string> => {
-    const body = { email: world.people[person].email, password };
-    const session = (await send('POST', '/api/auth/sign-in', body, null)) as { accessToken: string };
-    return session.accessToken;
-  };
+function callerOf(seeded: SeededDatabase, url: string): Stack['call'] {
   return async (person, method, path, body) => {
-    const token = tokens.get(person) ?? signIn(person);
-    tokens.set(person, token);
-    return send(method, path, body, await token);
+    const caller = seeded.as(person, url);
+    const answer = await (method === 'get' ? caller.get(path) : caller[method](path, body ?? {}));
+    if (answer.status >= 300)
+      throw new Error(`${person} ${method} ${path}: ${answer.status} ${JSON.stringify(answer.body)}`);
+    return answer.body as unknown;
   };
 }

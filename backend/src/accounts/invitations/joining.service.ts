@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
+import { Changes } from '../../common/changes/changes.js';
 import { Clock } from '../../common/time/clock.js';
 import { Ledger } from '../../ledger/ledger.service.js';
 import type { InvitationModel } from '../invitation.model.js';
@@ -15,6 +16,7 @@ export class Joining {
     @InjectModel(PersonModel) private readonly persons: typeof PersonModel,
     private readonly ledger: Ledger,
     private readonly clock: Clock,
+    private readonly changes: Changes,
   ) {}
 
   async join(personId: string, { organizationId, roles }: InvitationModel): Promise<void> {
@@ -27,6 +29,7 @@ export class Joining {
       isDisabled: false,
       createdAt: this.clock.now(),
     });
+    this.changes.access({ personId });
     await this.ledger.appendTo(
       `organization:${organizationId}`,
       'person-joined',

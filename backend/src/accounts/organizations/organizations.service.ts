@@ -44,7 +44,7 @@ export class Organizations {
     const rows = await this.sequelize.query<OrganizationBrief>(
       `SELECT id, name, kind, phone FROM organizations
        WHERE (:kind::text IS NULL OR kind = :kind) AND (:like::text IS NULL OR name ILIKE :like)
-         AND (:afterName::text IS NULL OR (name, id::text) > (:afterName, :afterId))
+         AND (CAST(:afterName AS text) IS NULL OR (name, id::text) > (CAST(:afterName AS text), CAST(:afterId AS text)))
        ORDER BY name, id::text LIMIT :most`,
       { replacements: { kind: kind ?? null, like, afterName, afterId, most: limit + 1 }, type: QueryTypes.SELECT },
     );

@@ -11,6 +11,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
 import { Transaction } from 'sequelize';
 import type { Actor } from '../../common/access/actor.js';
+import { Changes } from '../../common/changes/changes.js';
 import { refuse } from '../../common/errors/app-error.js';
 import { UnitOfWork } from '../../common/unit-of-work/unit-of-work.js';
 import { Ledger } from '../../ledger/ledger.service.js';
@@ -33,6 +34,7 @@ export class OrganizationPeople {
     private readonly invitations: Invitations,
     private readonly ledger: Ledger,
     private readonly unitOfWork: UnitOfWork,
+    private readonly changes: Changes,
   ) {}
 
   /** Invitations are shown to whoever manages them. */
@@ -114,6 +116,7 @@ export class OrganizationPeople {
     )
       refuse('last-owner');
     await membership.update(after);
+    this.changes.access({ personId });
     await this.ledger.appendTo(
       `organization:${organizationId}`,
       'person-changed',

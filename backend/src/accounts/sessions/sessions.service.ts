@@ -3,6 +3,7 @@ import type { Session } from '@holdwater/shared-types/accounts/auth.contract.js'
 import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
 import { Op } from 'sequelize';
+import { Changes } from '../../common/changes/changes.js';
 import { Clock } from '../../common/time/clock.js';
 import { presentMe } from '../accounts.presenter.js';
 import { AccountsQueries } from '../accounts.queries.js';
@@ -33,6 +34,7 @@ export class Sessions {
     @InjectModel(PersonModel) private readonly persons: typeof PersonModel,
     private readonly queries: AccountsQueries,
     private readonly accessTokens: AccessTokens,
+    private readonly changes: Changes,
     private readonly clock: Clock,
   ) {}
 
@@ -70,11 +72,13 @@ export class Sessions {
 
   async end(sessionId: string, endReason: SessionEnd): Promise<void> {
     await this.sessions.update({ endedAt: this.clock.now(), endReason }, { where: { id: sessionId, endedAt: null } });
+    this.changes.access({ sessionId });
   }
 
   async endAllOf(personId: string, endReason: SessionEnd, exceptId: string | null = null): Promise<void> {
     const where = { personId, endedAt: null, ...(exceptId !== null && { id: { [Op.ne]: exceptId } }) };
     await this.sessions.update({ endedAt: this.clock.now(), endReason }, { where });
+    this.changes.access({ personId });
   }
 
   /** Ends the session a refresh token belongs to, if it is one of ours. */

@@ -21,6 +21,11 @@ export interface PersonTold {
 
 export const PERSON_TOLD = 'person.told';
 
+/** What somebody may has changed: a session ended, a membership or its roles are others. */
+export type AccessChange = { readonly personId: string } | { readonly sessionId: string };
+
+export const ACCESS_CHANGED = 'access.changed';
+
 /** Tells, once a change is there to stay, whoever listens inside this process; the sockets carry it on. */
 @Injectable()
 export class Changes {
@@ -31,6 +36,10 @@ export class Changes {
 
   lot(lotId: string, ...topics: ChangeTopic[]): void {
     this.unitOfWork.afterCommit(() => this.events.emit(LOT_CHANGED, { lotId, topics } satisfies LotChange));
+  }
+
+  access(change: AccessChange): void {
+    this.unitOfWork.afterCommit(() => this.events.emit(ACCESS_CHANGED, change));
   }
 
   person(personId: string, what: PersonTold['what']): void {

@@ -6,6 +6,7 @@ import { AppError } from './app-error.js';
 interface DatabaseFault {
   code?: string;
   constraint?: string;
+  table?: string;
 }
 
 /** Constraints that refuse what a person may honestly run into, and what that is called. */
@@ -38,6 +39,15 @@ const awayStates = [
   'ECONNRESET',
 ];
 
+/**
+ * SQLSTATEs of class 22 that only what a person sent can bring about: a sign the database does not keep (NUL, half a surrogate pair), a
+ * number, a day or an id outside of what its column holds.
+ */
+const badInputStates = ['22021', '22P05', '22P02', '22003', '22007', '22008', '22009'];
+
+/** A client's own id names one entry for ever; two requests that bring it at once meet here. */
+const clientIdConstraint = /_client_id_key$/;
+
 /** Turns whatever was thrown into the one error body. `entry` is what a person tells support. */
 export function errorBodyOf(error: unknown, entry: string): { status: number; body: ErrorBody } {
   const known = appErrorOf(error);
@@ -66,8 +76,11 @@ function appErrorOf(error: unknown): AppError {
   if (fault?.constraint !== undefined && fault.constraint in constraintCodes) {
     return new AppError(constraintCodes[fault.constraint as keyof typeof constraintCodes]);
   }
+  if (clientIdConstraint.test(fault?.constraint ?? ''))
+    return new AppError('bad-input', {}, { clientId: 'used-before' });
+  if (fault?.code !== undefined && badInputStates.includes(fault.code)) return new AppError('bad-input');
   if (isAway(error, fault)) return new AppError('busy');
-  return hasType(error, 'entity.too.large') ? new AppError('too-large') : new AppError('internal');
+  return unreadOf(error) ?? new AppError('internal');
 }
 
 /** Where each fault of an input lies, `plugs.0.ratedPsi`, and what it is. */
@@ -86,6 +99,7 @@ export function fieldsOf(error: ZodError): Record<string, string> {
 function httpErrorOf(error: HttpException): AppError {
   switch (error.getStatus()) {
     case 400:
+    case 415:
       return new AppError('bad-input');
     case 401:
       return new AppError('signed-out');
@@ -110,6 +124,11 @@ export function sqlStateOf(error: unknown): string | null {
   return databaseFaultOf(error)?.code ?? null;
 }
 
+/** What the database names of an error: the SQLSTATE, the constraint, the table; empty where it was no error of the database. */
+export function sqlFaultOf(error: unknown): DatabaseFault {
+  return databaseFaultOf(error) ?? {};
+}
+
 function isAway(error: unknown, fault: DatabaseFault | null): boolean {
   const name = error instanceof Error ? error.name : '';
   const isConnection = name.startsWith('SequelizeConnection') || name === 'SequelizeHostNotReachableError';
@@ -118,6 +137,10 @@ function isAway(error: unknown, fault: DatabaseFault | null): boolean {
   return isConnection || isTerminated || (fault?.code !== undefined && awayStates.includes(fault.code));
 }
 
-function hasType(error: unknown, type: string): boolean {
-  return typeof error === 'object' && error !== null && 'type' in error && error.type === type;
+/** What was refused before it reached a route, as a body that cannot be read or a file that is not there; null for anything else. */
+function unreadOf(error: unknown): AppError | null {
+  const status = typeof error === 'object' && error !== null && 'status' in error ? error.status : null;
+  if (status === 413) return new AppError('too-large');
+  if (status === 404) return new AppError('not-found');
+  return typeof status === 'number' && status >= 400 && status < 500 ? new AppError('bad-input') : null;
 }

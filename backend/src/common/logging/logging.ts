@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { IncomingMessage } from 'node:http';
 import { RequestMethod } from '@nestjs/common';
 import type { Params } from 'nestjs-pino';
+import { errorForLog } from './error-for-log.js';
 import type { Environment } from '../../config/environment.js';
 
 /** Structured logs, one line a request, without tokens, cookies or secrets. */
@@ -19,9 +20,13 @@ export function loggingParams(environment: Environment): Params {
           'req.headers.authorization',
           'req.headers.cookie',
           'res.headers["set-cookie"]',
+          'password',
           '*.password',
+          'token',
           '*.token',
+          'accessToken',
           '*.accessToken',
+          'sealedToken',
           '*.sealedToken',
         ],
         censor: '[redacted]',
@@ -33,6 +38,7 @@ export function loggingParams(environment: Environment): Params {
           // what follows a question mark may hold words of a person
           path: request.url.split('?')[0],
         }),
+        err: errorForLog,
         res: (response: { statusCode: number }) => ({ status: response.statusCode }),
       },
     },

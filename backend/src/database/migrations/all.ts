@@ -8,6 +8,7 @@ import { threads } from './0007-threads.js';
 import { ledger } from './0008-ledger.js';
 import { notices } from './0009-notices.js';
 import { requests } from './0010-requests.js';
+import { oneLot } from './0011-one-lot.js';
 import type { Migration } from './migration.js';
 
 /** Every step, in order. */
@@ -22,4 +23,5 @@ export const migrations: readonly Migration[] = [
   ledger,
   notices,
   requests,
+  oneLot,
 ];

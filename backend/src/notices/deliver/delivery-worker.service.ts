@@ -45,7 +45,7 @@ export class DeliveryWorker {
   }
 
   private async deliver(delivery: ClaimedDelivery): Promise<boolean> {
-    if (!(await this.concerned.is(delivery.personId))) {
+    if (!(await this.concerned.is(delivery.personId, lotIdOf(delivery.payload)))) {
       await this.settle(delivery.id, `state = 'dropped'`, {});
       return false;
     }
@@ -93,4 +93,8 @@ export class DeliveryWorker {
       type: QueryTypes.UPDATE,
     });
   }
+}
+
+function lotIdOf(facts: MailFacts): string | null {
+  return facts.type === 'lot' && facts.lotId !== '' ? facts.lotId : null;
 }

@@ -28,14 +28,17 @@ export function findDwvPlan(house: HouseGeometry, method: DwvMethod, rule: TestR
   return parsed.success ? planDwv(parsed.data) : null;
 }
 
-/** What the rule card accepts, and air where it does not, since that is what is asked first on site. */
-export function dwvWays(house: HouseGeometry, rule: TestRule): DwvWay[] {
+/**
+ * What the rule card accepts, and air where it does not, since that is what is asked first on site. Under a slab (`isGroundwork`) the house's
+ * fittings are not there yet, so no plan of the whole house is told.
+ */
+export function dwvWays(house: HouseGeometry, rule: TestRule, isGroundwork: boolean): DwvWay[] {
   const methods = accepted(rule);
   const shown = methods.includes('air') ? methods : [...methods, 'air' as const];
   return shown.map((method) => ({
     method,
     isAccepted: methods.includes(method),
-    plan: findDwvPlan(house, method, rule),
+    plan: isGroundwork ? null : findDwvPlan(house, method, rule),
   }));
 }
 

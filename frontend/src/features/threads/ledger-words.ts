@@ -103,7 +103,7 @@ function systemWords(t: Words, system: string | null): string {
 }
 
 const specials: Readonly<Record<string, (payload: Payload, told: Told) => Values>> = {
-  'lot-changed': (payload, { t }) => {
+  'lot-changed': (payload, { t }): Values => {
     const status = textOf(payload, 'permitStatus');
     if (status !== null) return { variant: 'permit', params: { status: t(`permit.${status}`) } };
     return { params: { fields: fieldWords(t, 'lotFields', textsOf(payload, 'fields')) } };
@@ -115,7 +115,7 @@ const specials: Readonly<Record<string, (payload: Payload, told: Told) => Values
     params: { email: textOf(payload, 'email') ?? '', roles: roleWords(t, payload) },
   }),
   'person-joined': (payload, { t }) => ({ params: { roles: roleWords(t, payload) } }),
-  'person-changed': (payload, { t }) =>
+  'person-changed': (payload, { t }): Values =>
     typeof payload['isDisabled'] === 'boolean'
       ? { variant: payload['isDisabled'] ? 'disabled' : 'enabled', params: {} }
       : { params: { roles: roleWords(t, payload) } },

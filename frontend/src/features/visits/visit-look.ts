@@ -46,14 +46,14 @@ export function isGone({ state }: Pick<VisitSummary, 'state'>): boolean {
 
 /** The mark, word and colour of a visit, wherever it is shown. */
 export function useVisitLook(): (visit: Looked, now: Date) => VisitLook {
-  const { t } = useTranslation(['visits', 'marks', 'common']);
+  const { t } = useTranslation(['visits', 'marks']);
   return useCallback(
     (visit, now) => {
       const mark = visitMark(visit);
       const up = visit.systemsUp.filter(({ isUp }) => isUp).length;
       const share = visit.systemsUp.length === 0 ? 0 : up / visit.systemsUp.length;
       const urgency = upUrgency(visit, now);
-      const missing = missingSystems(visit).map((system) => t(`common.systems.${system}`));
+      const missing = missingSystems(visit).map((system) => t(`word.systems.${system}`));
       const base = { mark, share, word: t(`marks.${mark}`) };
       if (visit.state === 'requested' && visit.hasFirstPlace) return { ...base, word: t('word.firstInLine') };
       if (visit.state !== 'booked') return base;

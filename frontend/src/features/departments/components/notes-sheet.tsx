@@ -30,7 +30,7 @@ export function NotesSheet({ notes, against, version }: NotesSheetProps): ReactN
             {index + 1}
           </span>
           <h2 className="h3" id={`note-${index + 1}-title`}>
-            <span className="hidden-words">{t('noteNumber', { number: index + 1 })} </span>
+            <span className="hidden-words">{t('noteNumber', { number: index + 1 })}</span>{' '}
             {note.title}
           </h2>
           <dl>
@@ -57,7 +57,8 @@ function Row({ row, before, isTwo }: { row: NoteRow; before: NoteRow | undefined
       {isTwo ? <dd>{before ? <Lines row={before} /> : <span className="mut">{t('notThere')}</span>}</dd> : null}
       <dd className={isChanged ? 'cloud' : undefined}>
         {isTwo && !isChanged ? <span className="mut">{t('same')}</span> : <Lines row={row} />}
-        {isChanged ? <span className="hidden-words"> {t('changed')}</span> : null}
+        {isChanged ? ' ' : null}
+        {isChanged ? <span className="hidden-words">{t('changed')}</span> : null}
       </dd>
     </div>
   );

@@ -56,10 +56,9 @@ export function ReadingEntry(props: ReadingEntryProps): ReactNode {
   );
 }
 
-function DialAndValve({ instrument, draft, check, onChange }: ReadingEntryProps): ReactNode {
+function DialAndValve({ instrument, draft, onChange }: ReadingEntryProps): ReactNode {
   const { t } = useTranslation('holds');
   const isPhone = useIsPhone();
-  const words = useFaultWords();
   const typed = parseNumber(draft.value);
   const { rangePsi, increment, minimumPsi, ceilingPsi } = instrument;
   return (
@@ -91,7 +90,6 @@ function DialAndValve({ instrument, draft, check, onChange }: ReadingEntryProps)
           value={draft.valve}
           onChange={(valve) => onChange({ ...draft, valve })}
         />
-        {check.faults.valve === undefined ? null : <p className="field-error">{words(check.faults.valve)}</p>}
         {rangePsi === null ? null : (
           <p className="s mid">
             <Numeral text={t('reading.gauge', { range: rangePsi, increment })} />

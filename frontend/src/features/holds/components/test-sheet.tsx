@@ -38,12 +38,22 @@ export function TestSheet(input: TestSheetInput): ReactNode {
       isOverLimit={sheet.check.isOverLimit}
     />
   );
+  const reading = (
+    <div>
+      {hold !== null || sheet.setup.medium !== null ? (
+        <Panel title={t('reading.title')}>
+          <Entry input={input} sheet={sheet} />
+        </Panel>
+      ) : null}
+      {sheet.check.isOverLimit ? null : <div className="panel-body">{cautions}</div>}
+    </div>
+  );
   return (
     <>
       {sheet.check.isOverLimit ? cautions : null}
       <div className="test-sheet">
-        <div>
-          {hold === null ? (
+        {hold === null ? (
+          <>
             <TestSetupForm
               rule={rule}
               ruleCard={ruleCard}
@@ -53,23 +63,21 @@ export function TestSheet(input: TestSheetInput): ReactNode {
               faults={sheet.setupFaults}
               onChange={sheet.setSetup}
             />
-          ) : (
-            <StandingFacts hold={hold} name={name} zone={lot.zone} ruleCardVersion={ruleCard.version} />
-          )}
-        </div>
-        <div>
-          {hold !== null || sheet.setup.medium !== null ? (
-            <Panel title={t('reading.title')}>
-              <Entry input={input} sheet={sheet} />
-            </Panel>
-          ) : null}
-          {sheet.check.isOverLimit ? null : <div className="panel-body">{cautions}</div>}
-          {hold !== null && lot.abilities.canTest ? (
-            <div className="panel-body">
-              <EndTest lotId={lot.id} hold={hold} name={name} isUp={visit?.state === 'ready'} />
+            {reading}
+          </>
+        ) : (
+          <>
+            {reading}
+            <div>
+              <StandingFacts hold={hold} name={name} zone={lot.zone} ruleCardVersion={ruleCard.version} />
+              {lot.abilities.canTest ? (
+                <div className="panel-body">
+                  <EndTest lotId={lot.id} hold={hold} name={name} isUp={visit?.state === 'ready'} />
+                </div>
+              ) : null}
             </div>
-          ) : null}
-        </div>
+          </>
+        )}
       </div>
       {sheet.error === null ? null : <Failed error={sheet.error} level={2} />}
       <TaskFoot>

@@ -6,6 +6,7 @@ import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Icon } from '../../../components/icon';
 import { Mark } from '../../../components/mark';
+import { Numeral } from '../../../components/numeral';
 import { visitOutcomeQuery } from '../api/visit-outcome';
 import { clearChecks } from '../clear-checks';
 import { findLastClosed, unitState, type LotView } from '../lot-view';
@@ -48,7 +49,9 @@ export function BeforeClear({ lotId, view, visits, holds, corrections }: BeforeC
               {isDone ? <Icon name="check" size={18} className="t-green" title={t('before.done')} /> : <span className="to-do" />}
               {t(`before.${key}`)}
             </span>
-            <span className="s mid n">{total === null ? (isDone ? '' : t('before.atVisit')) : t('before.of', { done, total })}</span>
+            <span className="s mid nw">
+              {total === null ? isDone ? null : t('before.atVisit') : <Numeral text={t('before.of', { done, total })} />}
+            </span>
           </li>
         ))}
         <li className="row b">

@@ -35,7 +35,8 @@ export function Changes({ lotId, zone }: { lotId: string; zone: string }): React
                   </span>
                   <span className="mid" title={entry.actorName ?? undefined}>
                     {initials(entry.actorName)}
-                    <span className="hidden-words"> {entry.actorName}</span>
+                    {' '}
+                    <span className="hidden-words">{entry.actorName}</span>
                   </span>
                 </li>
               ))}

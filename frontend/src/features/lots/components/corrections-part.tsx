@@ -69,11 +69,11 @@ function OneCorrection({ one, zone }: { one: Correction; zone: string }): ReactN
         : t('corrections.openedBy', { name: one.openedBy, day: words.day(one.openedAt, zone) });
   const tone = { open: 't-red', fixed: 't-brass', accepted: 't-green' }[one.state];
   return (
-    <li className="row top">
+    <li className="row at-top">
       <Mark name={`correction-${one.state}`} number={one.number} size={28} />
       <div className="grow">
         <div className="b">
-          <span className="hidden-words">{t('corrections.number', { number: one.number })} </span>
+          <span className="hidden-words">{t('corrections.number', { number: one.number })}</span>{' '}
           {one.text}
         </div>
         <div className="s mid">

@@ -29,7 +29,7 @@ export function CsvField({ csv, onChange }: { csv: string; onChange: (csv: strin
     );
   };
   return (
-    <div className="fields">
+    <div className="fields csv-fields">
       <p>
         {t('import.say')} <SampleLink />
       </p>

@@ -40,7 +40,10 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
   };
   const rule =
     ruleCard.data?.content.tests.find((one) => one.stageCode === view.stage?.code && one.system === view.system) ?? null;
+  const isGroundwork = ruleCard.data?.content.stages.find(({ code }) => code === view.stage?.code)?.covers === 'slab';
   const { abilities } = lot;
+  // The thumb button is for whoever puts tests up; the superintendent's first act on a phone is the request.
+  const hasThumb = isPhone && abilities.canAddReading && !abilities.canDecide && !abilities.canEdit;
   const top = (
     <>
       <TitleState lot={lot} view={view} />
@@ -65,6 +68,7 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
           tests={testsOf(items, view)}
           corrections={known.corrections}
           rule={rule}
+          isGroundwork={isGroundwork}
           zone={zone}
         />
       )}
@@ -78,8 +82,8 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
           tests={testsOf(items, view)}
           systemWord={t(`common.systems.${view.system}`)}
           zone={zone}
-          canAddReading={abilities.canAddReading}
-          canTest={abilities.canTest}
+          canAddReading={abilities.canAddReading && !hasThumb}
+          canTest={abilities.canTest && !hasThumb}
         />
       )}
     </QueryState>
@@ -106,7 +110,7 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
           {abilities.canEdit || abilities.canSetPermit ? <Act to={`/lots/${lot.id}/edit`}>{t('title.edit')}</Act> : null}
         </div>
         {rest}
-        {abilities.canAddReading && !abilities.canDecide ? (
+        {hasThumb ? (
           <div className="thumb">
             <Act kind="first" size="lg" wide to={`/lots/${lot.id}/test`}>
               {t('log.add')}

@@ -3,7 +3,7 @@ import type { Tract } from '@holdwater/shared-types/lots/tract.contract.js';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Choice } from '../../../components/choice';
-import { Field } from '../../../components/field';
+import { Field, type FieldControl } from '../../../components/field';
 import { PhoneHead } from '../../../components/head';
 import { localName, useLocale } from '../../../lib/i18n';
 import { useLotsAddress } from '../use-lots-address';
@@ -25,13 +25,8 @@ export function LotsHead(props: LotsHeadProps): ReactNode {
     <header className="hd">
       <div className="c t">
         <div className="lab">{t('head.tract')}</div>
-        <h1 className="v">{tract?.name ?? t('head.all')}</h1>
+        <TractTitle {...props} />
       </div>
-      {props.tracts.length > 0 ? (
-        <div className="c">
-          <TractChoice {...props} />
-        </div>
-      ) : null}
       {departments.length > 0 ? (
         <div className="c">
           <div className="lab">{t('head.department', { count: departments.length })}</div>
@@ -78,25 +73,44 @@ export function LotsPhoneHead(props: LotsHeadProps & { shown: number }): ReactNo
   );
 }
 
-function TractChoice({ tracts, tract }: LotsHeadProps): ReactNode {
+/** The tract's name as the page's title; with more than one it is chosen there. */
+function TractTitle(props: LotsHeadProps): ReactNode {
+  const { t } = useTranslation('lots');
+  const name = props.tract?.name ?? t('head.all');
+  if (props.tracts.length === 0) return <h1 className="v">{name}</h1>;
+  return (
+    <div className="tract-title">
+      <h1 className="hidden-words">{name}</h1>
+      <TractSelect {...props} aria-label={t('head.choose')} />
+    </div>
+  );
+}
+
+function TractSelect({ tracts, tract, ...control }: LotsHeadProps & Partial<FieldControl> & { 'aria-label'?: string }): ReactNode {
   const { t } = useTranslation('lots');
   const { change } = useLotsAddress();
   return (
+    <select
+      id={control.id}
+      aria-label={control['aria-label']}
+      value={tract?.id ?? 'all'}
+      onChange={(event) => change({ tract: event.target.value, lot: null, stage: null, filter: null })}
+    >
+      {tracts.map(({ id, name }) => (
+        <option key={id} value={id}>
+          {name}
+        </option>
+      ))}
+      <option value="all">{t('head.all')}</option>
+    </select>
+  );
+}
+
+function TractChoice(props: LotsHeadProps): ReactNode {
+  const { t } = useTranslation('lots');
+  return (
     <Field label={t('head.choose')} labelPlace="inside">
-      {(control) => (
-        <select
-          {...control}
-          value={tract?.id ?? 'all'}
-          onChange={(event) => change({ tract: event.target.value, lot: null, stage: null, filter: null })}
-        >
-          {tracts.map(({ id, name }) => (
-            <option key={id} value={id}>
-              {name}
-            </option>
-          ))}
-          <option value="all">{t('head.all')}</option>
-        </select>
-      )}
+      {(control) => <TractSelect {...props} {...control} />}
     </Field>
   );
 }

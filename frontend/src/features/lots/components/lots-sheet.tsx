@@ -6,7 +6,7 @@ import { Plain } from '../../../components/plain';
 import { useSheetWidth } from '../../../components/use-sheet-width';
 import { localName, useLocale } from '../../../lib/i18n';
 import type { ScopedLots } from '../api/lots';
-import { filtered, lotRows, stagesOf, usualStage } from '../lots-model';
+import { filtered, lotRows, stagesOf, usualStage, type LotRow } from '../lots-model';
 import { useLotsAddress } from '../use-lots-address';
 import { ChosenLot } from './chosen-lot';
 import { FilterChips } from './filter-chips';
@@ -21,6 +21,12 @@ export interface LotsSheetProps {
   scoped: ScopedLots;
   waiting: readonly WaitingItem[];
   isWaitingUnknown: boolean;
+}
+
+/** The lot chosen, where a window could be asked for it; null otherwise. */
+function askableId(row: LotRow | null): string | null {
+  if (row === null || row.lot.nextVisit !== null || row.lot.openCorrections > 0 || row.lot.departmentId === null) return null;
+  return row.state === 'clear' || row.state === 'put-back-due' ? null : row.lot.id;
 }
 
 /** Plat beside table, one lot chosen for both. */
@@ -106,7 +112,7 @@ export function LotsSheet({ tracts, tract, scoped, waiting, isWaitingUnknown }: 
       <section className="lots-side" aria-label={t('table.label')}>
         <TableHead shown={rows.length} total={all.length}>
           <AddActs acts={acts} tractId={tract?.id ?? null} />
-          {acts.canRequest ? <RequestAct picked={picked} chosenId={chosen?.lot.id ?? null} stageCode={stage?.code ?? null} /> : null}
+          {acts.canRequest ? <RequestAct picked={picked} chosenId={askableId(chosen)} stageCode={stage?.code ?? null} /> : null}
         </TableHead>
         {table}
       </section>

@@ -85,7 +85,7 @@ function LotCells({ row, hasTracts, isChosen }: { row: LotRow; hasTracts: boolea
         <button type="button" className="lot-pick" aria-pressed={isChosen} title={lot.address}>
           {waiting ? <Mark name={waitingMark(waiting)} title={waitingWords(waiting)} /> : <span className="mk" />}
           <span>
-            <span className="hidden-words">{t('table.lot')} </span>
+            <span className="hidden-words">{t('table.lot')}</span>{' '}
             <span className="n b">{lot.number}</span>
             {hasTracts && lot.tract ? <span className="xs mid row">{lot.tract.name}</span> : null}
           </span>
@@ -110,7 +110,11 @@ function NextVisit({ row: { lot } }: { row: LotRow }): ReactNode {
   const words = useTimeWords();
   if (lot.nextVisit === null) return t('none');
   const { startAt, zone } = lot.nextVisit;
-  return <Numeral text={words.dayClock(startAt, zone)} />;
+  return (
+    <span className="when">
+      <Numeral text={words.dayClock(startAt, zone)} />
+    </span>
+  );
 }
 
 function PhoneLots({ rows, hasTracts }: LotsTableProps): ReactNode {

@@ -6,8 +6,9 @@ import { useTranslation } from 'react-i18next';
 import { useMe } from '../../../app/session';
 import { Caution } from '../../../components/caution';
 import { Numeral } from '../../../components/numeral';
-import { measureWords, readPressure } from '../../../lib/units';
+import { measureWords } from '../../../lib/units';
 import { heaviestPlug } from '../dwv-ways';
+import { markedPressure } from '../reading-words';
 
 export interface SectionCautionsProps {
   /** The test that stands; null for none. */
@@ -28,7 +29,7 @@ export function SectionCautions({ hold, plan, system }: SectionCautionsProps): R
   const isOver =
     ceilingPsi !== null && last?.pressurePsi != null && last.gaugeValve !== 'shut' && last.pressurePsi > ceilingPsi;
   if (isOver) {
-    const limit = measureWords(readPressure(ceilingPsi, hold?.gauge?.incrementPsi ?? 1, units));
+    const limit = measureWords(markedPressure(ceilingPsi, hold?.gauge?.incrementPsi, units));
     return <Caution isOver>{t('cautions.over', { limit })}</Caution>;
   }
   const plug = heaviestPlug(plan);

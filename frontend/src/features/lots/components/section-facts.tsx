@@ -9,8 +9,9 @@ import { useMe } from '../../../app/session';
 import { Cell, Cells } from '../../../components/cells';
 import { Measure } from '../../../components/numeral';
 import { drawHouse } from '../../../drawings/cutaway-house';
-import { height, readPressure } from '../../../lib/units';
+import { height } from '../../../lib/units';
 import { drawnHouseOf } from '../dwv-ways';
+import { markedPressure } from '../reading-words';
 
 export interface SectionFactsProps {
   house: HouseGeometry | null;
@@ -59,7 +60,7 @@ function WaterFacts({ hold, rule }: SectionFactsProps): ReactNode {
   const minimumPsi = hold?.minimumPsi ?? asked?.minimumPsi ?? null;
   const psi = (value: number | null): ReactNode => {
     if (value === null) return t('common.none');
-    const measure = readPressure(value, hold?.gauge?.incrementPsi ?? 1, units);
+    const measure = markedPressure(value, hold?.gauge?.incrementPsi, units);
     return <Measure value={measure.number} unit={measure.unit} />;
   };
   return (

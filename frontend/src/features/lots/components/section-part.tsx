@@ -24,6 +24,8 @@ export interface SectionPartProps {
   tests: readonly Hold[];
   corrections: readonly Correction[];
   rule: TestRule | null;
+  /** Tested before the slab is poured. */
+  isGroundwork: boolean;
   zone: string;
 }
 
@@ -32,14 +34,14 @@ function asDwvMethod(method: Method | undefined): DwvMethod | null {
 }
 
 /** The section through the house as it stands under test, what the test rests on, and what may hurt. */
-export function SectionPart({ lot, view, tests, corrections, rule, zone }: SectionPartProps): ReactNode {
+export function SectionPart({ lot, view, tests, corrections, rule, isGroundwork, zone }: SectionPartProps): ReactNode {
   const { t } = useTranslation(['lots', 'common']);
   const house = lot.units.find(({ number }) => number === view.unitNumber)?.geometry ?? null;
   const hold = tests[0] ?? null;
   const shown = hold?.state === 'standing' ? hold : null;
   const isWater = view.system === 'water';
   const method = isWater ? null : asDwvMethod(shown?.method);
-  const plan = house === null || method === null || rule === null ? null : findDwvPlan(house, method, rule);
+  const plan = house === null || method === null || rule === null || isGroundwork ? null : findDwvPlan(house, method, rule);
   const systems = view.stage?.systems.length ? view.stage.systems : (['dwv', 'water'] as const);
   const pinned = corrections.flatMap((one) =>
     one.place === 'whole-system' || one.unitNumber !== view.unitNumber || one.stageCode !== view.stage?.code
@@ -91,6 +93,7 @@ export function SectionPart({ lot, view, tests, corrections, rule, zone }: Secti
           house={house}
           rule={rule}
           chosen={method}
+          isGroundwork={isGroundwork}
           ruleCard={lot.ruleCard}
         />
       ) : null}

@@ -3,8 +3,8 @@ import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Act } from '../../../components/act';
 import { Choice } from '../../../components/choice';
+import { Mark } from '../../../components/mark';
 import { StateWord } from '../../../components/state-word';
-import { useSheetWidth } from '../../../components/use-sheet-width';
 import { localName, useLocale } from '../../../lib/i18n';
 import { unitState, type LotView } from '../lot-view';
 
@@ -16,7 +16,7 @@ export function TitleNumber({ lot }: { lot: LotDetail }): ReactNode {
       <div className="c">
         <div className="lab">{t('table.lot')}</div>
         <h1 className="lot-number">
-          <span className="hidden-words">{t('table.lot')} </span>
+          <span className="hidden-words">{t('table.lot')}</span>{' '}
           {lot.number}
         </h1>
       </div>
@@ -25,14 +25,12 @@ export function TitleNumber({ lot }: { lot: LotDetail }): ReactNode {
         <div className="b">{lot.tract?.name ?? t('common.none')}</div>
         <div className="lab">{t('title.address')}</div>
         <div className="b">{lot.address}</div>
-      </div>
-      {lot.abilities.canEdit || lot.abilities.canSetPermit ? (
-        <div className="c edit">
+        {lot.abilities.canEdit || lot.abilities.canSetPermit ? (
           <Act size="sm" to={`/lots/${lot.id}/edit`}>
             {t('title.edit')}
           </Act>
-        </div>
-      ) : null}
+        ) : null}
+      </div>
     </header>
   );
 }
@@ -41,7 +39,6 @@ export function TitleNumber({ lot }: { lot: LotDetail }): ReactNode {
 export function TitleState({ lot, view }: { lot: LotDetail; view: LotView }): ReactNode {
   const { t } = useTranslation(['lots', 'marks', 'common']);
   const locale = useLocale();
-  const isPhone = useSheetWidth() === 'phone';
   const { stage, unitNumber } = view;
   if (stage === null) {
     return (
@@ -68,11 +65,13 @@ export function TitleState({ lot, view }: { lot: LotDetail; view: LotView }): Re
           wide
           options={lot.stages.map((one) => ({
             value: one.code,
-            mark: isPhone ? undefined : unitState(one, unitNumber),
             label: (
               <>
                 {localName(one.name, locale)}
-                <span className="xs row">{t(`marks.${unitState(one, unitNumber)}`)}</span>
+                <span className="xs row">
+                  <Mark name={unitState(one, unitNumber)} size={16} />
+                  {t(`marks.${unitState(one, unitNumber)}`)}
+                </span>
               </>
             ),
           }))}

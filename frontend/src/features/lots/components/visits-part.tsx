@@ -3,6 +3,7 @@ import { useQuery, type UseQueryResult } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Mark } from '../../../components/mark';
+import { markTones } from '../../../components/mark-names';
 import { Numeral } from '../../../components/numeral';
 import { Panel } from '../../../components/panel';
 import { useNow } from '../../../lib/clock';
@@ -47,7 +48,7 @@ function OneVisit({ visit }: { visit: VisitSummary }): ReactNode {
   const ended = useEndWords()(visit);
   const { window, zone } = visit;
   return (
-    <li className="row top">
+    <li className="row at-top">
       <Mark name={look.mark} size={24} />
       <div className="grow">
         <div className="b">
@@ -59,7 +60,7 @@ function OneVisit({ visit }: { visit: VisitSummary }): ReactNode {
           {visit.inspector === null ? null : `, ${visit.inspector.name}`}
         </div>
         <div className="s">
-          <span className={`b t-${look.tone ?? 'ink2'}`}>{look.word}</span>
+          <span className={`b t-${look.tone ?? markTones[look.mark]}`}>{look.word}</span>
           {ended === null ? null : <span className="mid">, {ended}</span>}
         </div>
         {visit.state === 'closed' ? <SystemAnswers visit={visit} /> : null}

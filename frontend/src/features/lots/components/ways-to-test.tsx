@@ -16,13 +16,15 @@ export interface WaysToTestProps {
   house: HouseGeometry;
   rule: TestRule;
   chosen: DwvMethod | null;
+  /** Tested before the slab is poured. */
+  isGroundwork: boolean;
   ruleCard: LotDetail['ruleCard'];
 }
 
 /** The methods the rule card accepts, worked out for this very house, and why one does not serve here. */
-export function WaysToTest({ house, rule, chosen, ruleCard }: WaysToTestProps): ReactNode {
+export function WaysToTest({ house, rule, chosen, isGroundwork, ruleCard }: WaysToTestProps): ReactNode {
   const { t } = useTranslation(['lots', 'departments', 'common']);
-  const say = useWayWords(house, chosen);
+  const say = useWayWords(house, chosen, isGroundwork);
   return (
     <div className="ways">
       <div className="spread ways-head">
@@ -34,8 +36,8 @@ export function WaysToTest({ house, rule, chosen, ruleCard }: WaysToTestProps): 
         )}
       </div>
       <ul>
-        {dwvWays(house, rule).map((way) => {
-          const isUsable = way.isAccepted && way.plan?.usable === true;
+        {dwvWays(house, rule, isGroundwork).map((way) => {
+          const isUsable = way.isAccepted && (isGroundwork || way.plan?.usable === true);
           const isRefused = !way.isAccepted || way.plan?.usable === false;
           return (
             <li key={way.method} className="spread">
@@ -56,12 +58,13 @@ export function WaysToTest({ house, rule, chosen, ruleCard }: WaysToTestProps): 
   );
 }
 
-function useWayWords(house: HouseGeometry, chosen: DwvMethod | null): (way: DwvWay) => string {
+function useWayWords(house: HouseGeometry, chosen: DwvMethod | null, isGroundwork: boolean): (way: DwvWay) => string {
   const { t } = useTranslation('lots');
   const { units } = useMe();
   const datumFt = drawHouse(drawnHouseOf(house)).datumFt;
   return ({ method, isAccepted, plan }) => {
     if (!isAccepted) return t('ways.notAccepted');
+    if (isGroundwork) return t(method === chosen ? 'ways.chosenPlain' : 'ways.accepted');
     if (plan === null) return t('ways.notKnown');
     const [reason] = plan.reasons;
     if (reason !== undefined) {

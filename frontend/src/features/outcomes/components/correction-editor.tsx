@@ -1,5 +1,6 @@
 import type { RuleCardContent } from '@holdwater/shared-types/departments/rule-card.content.js';
 import { emptyHouse } from '@holdwater/shared-types/hydraulics/house-geometry.js';
+import type { Hold } from '@holdwater/shared-types/holds/hold.contract.js';
 import type { LotDetail } from '@holdwater/shared-types/lots/lot.contract.js';
 import { severities, type CorrectionSubject } from '@holdwater/shared-types/outcomes/correction.states.js';
 import { newCorrection, type NewCorrection } from '@holdwater/shared-types/outcomes/outcome.contract.js';
@@ -10,6 +11,7 @@ import { Act } from '../../../components/act';
 import { Choice } from '../../../components/choice';
 import { Panel } from '../../../components/panel';
 import { TaskFoot, TaskHead } from '../../../components/task-head';
+import { useIsPhone } from '../../../lib/use-media';
 import { useContractForm } from '../../../lib/use-contract-form';
 import { emptyCorrection, toNewCorrection, type CorrectionDraft } from '../correction-draft';
 import { CorrectionPlace } from './correction-place';
@@ -33,6 +35,8 @@ export interface CorrectionEditorProps {
   rules: RuleCardContent['corrections'];
   others: readonly { readonly number: number; readonly correction: NewCorrection }[];
   number: number;
+  /** The drain test that stands: how the house is drawn. */
+  drains: Hold | null;
   onPut: (correction: NewCorrection, another: EditedCorrection | null) => void;
   onDrop: (clientId: string) => void;
   onLeave: () => void;
@@ -40,10 +44,11 @@ export interface CorrectionEditorProps {
 
 /** One correction: the place on the house, what, how grave, which section. */
 export function CorrectionEditor(props: CorrectionEditorProps): ReactNode {
-  const { edited, visit, lot, rules, others, number, onPut, onDrop, onLeave } = props;
+  const { edited, visit, lot, rules, others, number, drains, onPut, onDrop, onLeave } = props;
   const { t } = useTranslation(['outcomes', 'common']);
   const form = useContractForm<CorrectionDraft>(newCorrection, emptyCorrection(edited));
   const [clientId] = useState(() => edited.given?.clientId ?? crypto.randomUUID());
+  const isPhone = useIsPhone();
   const body = useRef<HTMLDivElement>(null);
   const house = useMemo(
     () => lot.units.find((unit) => unit.number === form.values.unitNumber)?.geometry ?? emptyHouse(),
@@ -72,6 +77,7 @@ export function CorrectionEditor(props: CorrectionEditorProps): ReactNode {
           edited={edited}
           others={others}
           number={number}
+          drains={drains}
           lot={lot}
           visit={visit}
         />
@@ -90,9 +96,11 @@ export function CorrectionEditor(props: CorrectionEditorProps): ReactNode {
         </div>
       </div>
       <TaskFoot>
-        <Act size="lg" kind="text" onClick={onLeave}>
-          {t('common.cancel')}
-        </Act>
+        {isPhone ? null : (
+          <Act size="lg" kind="text" onClick={onLeave}>
+            {t('common.cancel')}
+          </Act>
+        )}
         {edited.given === null ? (
           <Act size="lg" onClick={() => put(true)}>
             {t('correction.another')}

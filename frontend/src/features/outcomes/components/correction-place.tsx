@@ -1,4 +1,6 @@
+import { dwvMethods } from '@holdwater/shared-types/holds/hold.states.js';
 import type { HouseGeometry } from '@holdwater/shared-types/hydraulics/house-geometry.js';
+import type { Hold } from '@holdwater/shared-types/holds/hold.contract.js';
 import type { LotDetail } from '@holdwater/shared-types/lots/lot.contract.js';
 import type { NewCorrection } from '@holdwater/shared-types/outcomes/outcome.contract.js';
 import type { VisitSummary } from '@holdwater/shared-types/visits/visit.contract.js';
@@ -20,12 +22,22 @@ export interface CorrectionPlaceProps {
   edited: EditedCorrection;
   others: readonly { readonly number: number; readonly correction: NewCorrection }[];
   number: number;
+  drains: Hold | null;
   lot: LotDetail;
   visit: VisitSummary;
 }
 
 /** Where: touched on the section, or the whole system; floor and room in words. */
-export function CorrectionPlace({ form, house, edited, others, number, lot, visit }: CorrectionPlaceProps): ReactNode {
+export function CorrectionPlace({
+  form,
+  house,
+  edited,
+  others,
+  number,
+  drains,
+  lot,
+  visit,
+}: CorrectionPlaceProps): ReactNode {
   const { t } = useTranslation(['outcomes', 'marks']);
   const { place, floor, room, unitNumber } = form.values;
   const fault = form.faultOf('place');
@@ -56,8 +68,8 @@ export function CorrectionPlace({ form, house, edited, others, number, lot, visi
       ) : null}
       <Cutaway
         house={house}
-        method={null}
-        fillLevelFt={null}
+        method={dwvMethods.find((one) => one === drains?.method) ?? null}
+        fillLevelFt={drains?.fillLevelFt ?? null}
         view={edited.subject === 'water' ? 'water' : 'dwv'}
         hasLabels={false}
         maxHeight={330}

@@ -57,6 +57,7 @@ export function OutcomeForm(props: OutcomeFormProps): ReactNode {
         lot={lot}
         rules={ruleCard.content.corrections}
         others={numbered}
+        drains={form.holdOf({ unitNumber: edited.unitNumber, system: 'dwv' })}
         number={form.numberOf(edited.given?.clientId ?? null)}
         onPut={put}
         onDrop={(clientId) => {

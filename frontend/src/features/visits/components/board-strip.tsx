@@ -67,7 +67,7 @@ function Vessel({
   chosenVisitId,
   onOpenVisit,
 }: BoardStripProps & { visit: VisitSummary }): ReactNode {
-  const { t } = useTranslation('common');
+  const { t } = useTranslation(['common', 'visits']);
   const look = useVisitLook()(visit, now);
   const name = useVisitName()(visit, look.word);
   const from = hoursOn(board.date, startOf(visit), board.zone);
@@ -105,7 +105,9 @@ function Vessel({
             <Mark name={look.mark} size={28} />
           </span>
         )}
-        <span className={`xs board-word t-${look.tone ?? (isFull ? 'water' : 'ink2')}`}>{look.word}</span>
+        <span className={`xs board-word t-${look.tone ?? (isFull ? 'water' : 'ink2')}`}>
+          {look.mark === 'part-up' ? t('visits.word.partUp') : look.word}
+        </span>
       </button>
     </div>
   );

@@ -32,17 +32,20 @@ export function DayColumn(props: DayColumnProps): ReactNode {
       className={`cal-day ${isToday ? 'today' : ''} ${day.date < today ? 'past' : ''}`}
       role="row"
       aria-label={title}
+      style={{ gridTemplateColumns: `repeat(${day.cells.length}, minmax(0, 1fr))` }}
     >
       <div className="cal-day-head" role="rowheader">
         <div className="cal-day-name">
           <Numeral text={title} />
         </div>
-        {day.cells.map(({ lane }, index) => (
-          <div key={lane.departmentId} className="xs mut">
-            {names[index]}
-            {lane.zone === zone ? null : <div>{words.zone(lane.zone)}</div>}
-          </div>
-        ))}
+        <div className="cal-names">
+          {day.cells.map(({ lane }, index) => (
+            <div key={lane.departmentId} className="xs mut">
+              {names[index]}
+              {lane.zone === zone ? null : <div>{words.zone(lane.zone)}</div>}
+            </div>
+          ))}
+        </div>
       </div>
       {day.cells.map((cell, index) => (
         <LaneCellView

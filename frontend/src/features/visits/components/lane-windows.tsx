@@ -16,7 +16,8 @@ export interface LaneWindowsProps {
   placed: readonly Placed[];
 }
 
-const wordPx = 17;
+/** One line of words, px; "requests closed" may take two. */
+const linePx = 17;
 
 /** The windows of a lane as brackets with open sides, each saying its room. */
 export function LaneWindows({ cell, date, zone, scale, now, placed }: LaneWindowsProps): ReactNode {
@@ -28,6 +29,7 @@ export function LaneWindows({ cell, date, zone, scale, now, placed }: LaneWindow
     const bottom = (hoursOn(date, window.endAt, zone) - scale.from) * scale.pxPerHour;
     const isCovered = (from: number, to: number): boolean =>
       placed.some((box) => box.topPx < to && box.topPx + box.heightPx > from);
+    const wordPx = says === 'shut' ? 2 * linePx : linePx;
     const place = !isCovered(top, top + wordPx)
       ? 'at-top'
       : !isCovered(bottom - wordPx, bottom)

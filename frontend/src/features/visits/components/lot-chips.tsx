@@ -29,7 +29,9 @@ export function LotChips({
               aria-label={t('req.remove', { lot: nameOf(chosen) })}
               onClick={() => onRemove(chosen.id)}
             >
-              <Numeral text={nameOf(chosen)} />
+              <span>
+                <Numeral text={nameOf(chosen)} />
+              </span>
               <Icon name="close" size={14} />
             </button>
           </li>

@@ -85,7 +85,9 @@ function Suggested({ chosen, onAdd }: LotSearchProps): ReactNode {
               onClick={() => (item.lotId === null ? undefined : onAdd(item.lotId))}
             >
               <Icon name="plus" size={14} />
-              <Numeral text={t('common.lot', { number: item.lotNumber ?? '' })} />
+              <span>
+                <Numeral text={t('common.lot', { number: item.lotNumber ?? '' })} />
+              </span>
             </button>
           </li>
         ))}

@@ -32,7 +32,9 @@ export function PhoneBoard({ board, now, onOpenVisit }: DayBoardViewProps): Reac
         <ul className="phone-windows s mid">
           {board.day.windows.map((window) => (
             <li key={window.label} className="spread">
-              <Numeral text={words.window(window.startAt, window.endAt, board.zone)} />
+              <span>
+                <Numeral text={words.window(window.startAt, window.endAt, board.zone)} />
+              </span>
               <span>{window.roomLeft === 0 ? t('window.full') : t('window.room', { count: window.roomLeft })}</span>
             </li>
           ))}

@@ -2,8 +2,6 @@ import { useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
 import { Act } from '../../../components/act';
-import { Cell, Cells } from '../../../components/cells';
-import { Mark } from '../../../components/mark';
 import { Numeral } from '../../../components/numeral';
 import { Question } from '../../../components/question';
 import { isApiError } from '../../../lib/api-error';
@@ -15,8 +13,7 @@ import type { RunStop } from '../api/run';
 import { startOf } from '../calendar-model';
 import { beginBlock, directionsTo } from '../run-model';
 import { EndQuestion } from './end-question';
-import { StopAsks } from './stop-asks';
-import { Phone } from './visit-facts';
+import { StopCells } from './stop-cells';
 
 /** A stop as a title block at the thumb: where, when, what must stand, the gate, the way there, and I am here. */
 export function StopBlock({ stop, isNext, now }: { stop: RunStop; isNext: boolean; now: Date }): ReactNode {
@@ -42,38 +39,9 @@ export function StopBlock({ stop, isNext, now }: { stop: RunStop; isNext: boolea
           </div>
         </div>
       </div>
-      <StopAsks stop={stop} />
-      <Access stop={stop} />
+      <StopCells stop={stop} />
       <StopActs stop={stop} now={now} />
     </section>
-  );
-}
-
-/** Shown on the day only, and only where the server tells it. */
-function Access({ stop: { access } }: { stop: RunStop }): ReactNode {
-  const { t } = useTranslation('visits');
-  if (access === null) return null;
-  const { gateCode, contactName, contactPhone, hazards } = access;
-  if (gateCode === null && contactName === null && contactPhone === null && hazards === null) return null;
-  return (
-    <Cells columns={2}>
-      {gateCode === null ? null : (
-        <Cell label={t('run.gate')}>
-          <span className="n">{gateCode}</span>
-        </Cell>
-      )}
-      {contactName === null && contactPhone === null ? null : (
-        <Cell label={t('run.contact')}>
-          {contactName}
-          <Phone number={contactPhone} />
-        </Cell>
-      )}
-      {hazards === null ? null : (
-        <Cell label={t('run.hazards')} wash="brass" isWide>
-          <Mark name="waits-on-you" size={16} /> {hazards}
-        </Cell>
-      )}
-    </Cells>
   );
 }
 

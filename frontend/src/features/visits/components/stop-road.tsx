@@ -32,7 +32,8 @@ export function StopRoad({ run, now, onOpen }: { run: Run; now: Date; onOpen: (v
           atMile: Math.min(hours.length, Math.max(0, hoursOn(date, startOf(visit), zone) - hours.from)),
           mark: look.mark,
           name: t('common.lot', { number: visit.lotNumber }),
-          place: visit.tractName ?? undefined,
+          // The next stop's place stands in its title block.
+          place: visit.id === next?.visit.id ? undefined : (visit.tractName ?? undefined),
           detail: `${words.clock(startOf(visit), zone)}, ${look.word}`,
           isNext: visit.id === next?.visit.id,
           isStruck: isGone(visit),

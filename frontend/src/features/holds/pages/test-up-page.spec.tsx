@@ -1,0 +1,217 @@
+import { screen, waitFor, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { Route, Routes } from 'react-router-dom';
+import { describe, expect, it } from 'vitest';
+import { personOf } from '../../../lib/testing/people';
+import { renderPage } from '../../../lib/testing/render-page';
+import { refusal, stubApi, type SentRequest } from '../../../lib/testing/stub-api';
+import {
+  answersFor,
+  dwvHold,
+  holdId,
+  holdOf,
+  lotId,
+  lotOf,
+  noAbilities,
+  plumberAbilities,
+  readingOf,
+  visitId,
+  visitOf,
+} from '../testing/tested-lot';
+import { TestUpPage } from './test-up-page';
+
+const me = personOf({}, ['plumber']);
+
+function show(at = `/lots/${lotId}/test?system=water`): void {
+  const page = (
+    <Routes>
+      <Route path="/lots/:lotId/test" element={<TestUpPage />} />
+    </Routes>
+  );
+  renderPage(page, { me, at });
+}
+
+const writes = (sent: readonly SentRequest[]): SentRequest[] => sent.filter(({ method }) => method === 'POST');
+
+describe('a reading of a test that stands', () => {
+  it('goes with "test up" in one act, once the valve is told', async () => {
+    const up = visitOf({ state: 'ready', version: 4, moves: ['no-longer-up'] });
+    const sent = stubApi({
+      ...answersFor({ holds: [dwvHold, holdOf()] }),
+      [`POST /api/visits/${visitId}/test-up`]: () => ({ data: up }),
+    });
+    show();
+    await userEvent.type(await screen.findByLabelText('Gauge reads'), '58.5');
+    expect(screen.getByRole('button', { name: /Save and say test up.*valve open or shut/ })).toHaveAttribute(
+      'aria-disabled',
+      'true',
+    );
+    await userEvent.click(screen.getByRole('radio', { name: 'open' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Save and say test up' }));
+    await waitFor(() => expect(writes(sent)).toHaveLength(1));
+    expect(writes(sent)[0]?.body).toMatchObject({
+      expectedVersion: 3,
+      readings: [{ holdId, pressurePsi: 58.5, gaugeValve: 'open' }],
+    });
+  });
+
+  it('with the valve shut tells of the gauge only and says nothing up; it can be saved', async () => {
+    const sent = stubApi({
+      ...answersFor({ holds: [dwvHold, holdOf()] }),
+      [`POST /api/holds/${holdId}/readings`]: () => ({ data: holdOf() }),
+    });
+    show();
+    await userEvent.type(await screen.findByLabelText('Gauge reads'), '57');
+    await userEvent.click(screen.getByRole('radio', { name: 'shut' }));
+    expect(screen.getByText(/This tells of the gauge only/)).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: /Save and say test up.*valve shut/ })).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Save reading only' }));
+    await waitFor(() => expect(writes(sent)[0]?.body).toMatchObject({ pressurePsi: 57, gaugeValve: 'shut' }));
+  });
+
+  it('over the lowest-rated part shows the red headline alone', async () => {
+    stubApi(answersFor({ holds: [dwvHold, holdOf()] }));
+    show();
+    await userEvent.type(await screen.findByLabelText('Gauge reads'), '81');
+    expect(screen.getByRole('alert')).toHaveTextContent('let it down to 80 psi now');
+    expect(screen.queryByText(/Compressed air/)).not.toBeInTheDocument();
+    expect(screen.getByRole('button', { name: /Save and say test up.*over the limit/ })).toBeInTheDocument();
+  });
+
+  it('beyond the gauge offers what was likely meant', async () => {
+    stubApi(answersFor({ holds: [dwvHold, holdOf()] }));
+    show();
+    await userEvent.type(await screen.findByLabelText('Gauge reads'), '570');
+    await userEvent.click(screen.getByRole('button', { name: 'Did you mean 57? Use it' }));
+    expect(screen.getByLabelText('Gauge reads')).toHaveValue('57');
+  });
+
+  it('is not "up" below the minimum, nor while another system is not', async () => {
+    stubApi(answersFor({ holds: [holdOf({ readings: [readingOf({ pressurePsi: 49.5 })] })] }));
+    show();
+    expect(await screen.findByRole('button', { name: /Say test up.*below 50 psi/ })).toBeInTheDocument();
+    await userEvent.type(screen.getByLabelText('Gauge reads'), '52');
+    await userEvent.click(screen.getByRole('radio', { name: 'open' }));
+    expect(screen.getByRole('button', { name: /Save and say test up.*DWV not up/ })).toBeInTheDocument();
+  });
+
+  it('steps half a mark of the gauge', async () => {
+    stubApi(answersFor({ holds: [dwvHold, holdOf()] }));
+    show();
+    await userEvent.click(await screen.findByRole('button', { name: 'Half a mark more' }));
+    expect(screen.getByLabelText('Gauge reads')).toHaveValue('57');
+    await userEvent.click(screen.getByRole('button', { name: 'Half a mark more' }));
+    expect(screen.getByLabelText('Gauge reads')).toHaveValue('57.5');
+  });
+
+  it('keeps what was typed when it is refused', async () => {
+    stubApi({
+      ...answersFor({ holds: [dwvHold, holdOf()] }),
+      [`POST /api/holds/${holdId}/readings`]: () => refusal('hold-ended'),
+    });
+    show();
+    await userEvent.type(await screen.findByLabelText('Gauge reads'), '57');
+    await userEvent.click(screen.getByRole('radio', { name: 'open' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Save reading only' }));
+    expect(await screen.findByRole('alert')).toBeInTheDocument();
+    expect(screen.getByLabelText('Gauge reads')).toHaveValue('57');
+  });
+});
+
+describe('a test that is started', () => {
+  it('takes a way the rule card accepts, the gauge and the first reading in one act', async () => {
+    const sent = stubApi({ ...answersFor(), [`POST /api/lots/${lotId}/holds`]: () => ({ data: holdOf() }) });
+    show();
+    await userEvent.click(await screen.findByRole('radio', { name: 'air, at least 50 psi' }));
+    expect(screen.getByLabelText(/Lowest-rated part/)).toHaveValue('80');
+    await userEvent.type(screen.getByLabelText('Gauge reads'), '55');
+    await userEvent.click(screen.getByRole('radio', { name: 'open' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Start the test only' }));
+    expect(writes(sent)).toEqual([]);
+    expect(screen.getAllByText('This is needed.')).toHaveLength(2);
+    await userEvent.type(screen.getByLabelText('Gauge goes to'), '100');
+    await userEvent.type(screen.getByLabelText('Smallest mark'), '1');
+    await userEvent.click(screen.getByRole('button', { name: 'Start the test only' }));
+    await waitFor(() =>
+      expect(writes(sent)[0]?.body).toMatchObject({
+        unitNumber: 1,
+        stageCode: 'rough-in',
+        system: 'water',
+        method: 'gauge',
+        medium: 'air',
+        gauge: { rangePsi: 100, incrementPsi: 1 },
+        ceilingPsi: 80,
+        firstReading: { pressurePsi: 55, gaugeValve: 'open' },
+      }),
+    );
+  });
+
+  it('of the drains takes its level from the house', async () => {
+    const sent = stubApi({
+      ...answersFor({ holds: [] }),
+      [`POST /api/lots/${lotId}/holds`]: () => ({ data: dwvHold }),
+    });
+    show(`/lots/${lotId}/test?system=dwv`);
+    await userEvent.click(await screen.findByRole('radio', { name: 'filled to a cut in the attic' }));
+    expect(screen.getByLabelText('Water stands at')).toHaveValue('21');
+    // the plug lies 3 ft under the first floor
+    expect(document.body).toHaveTextContent('24.0 ft above the plug');
+    await userEvent.type(screen.getByLabelText('Smallest mark of the tape'), '0.25');
+    await userEvent.type(screen.getByLabelText('Water below the rim'), '1.5');
+    await userEvent.click(screen.getByRole('button', { name: 'Start the test only' }));
+    await waitFor(() =>
+      expect(writes(sent)[0]?.body).toMatchObject({
+        method: 'attic-cut',
+        medium: 'water',
+        tape: { incrementIn: 0.25 },
+        fillLevelFt: 21,
+        firstReading: { levelIn: 1.5 },
+      }),
+    );
+  });
+});
+
+describe('what the reader may do', () => {
+  it('a helper reads, and is not offered "test up"', async () => {
+    const lot = lotOf({ abilities: { ...noAbilities, canAddReading: true } });
+    stubApi(answersFor({ lot, holds: [dwvHold, holdOf()] }));
+    show();
+    expect(await screen.findByRole('button', { name: /Save reading/ })).toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /test up/i })).not.toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /End/ })).not.toBeInTheDocument();
+  });
+
+  it('a helper is told who starts a test that is not there', async () => {
+    stubApi(answersFor({ lot: lotOf({ abilities: { ...noAbilities, canAddReading: true } }) }));
+    show();
+    expect(await screen.findByRole('heading', { name: /Water, test 1 is not started/ })).toBeInTheDocument();
+    expect(screen.queryByLabelText('Gauge reads')).not.toBeInTheDocument();
+  });
+
+  it('what is up is taken back after a question that says who is told', async () => {
+    const ready = visitOf({ state: 'ready', version: 4, upSince: '2026-04-14T23:08:00Z', moves: ['no-longer-up'] });
+    const sent = stubApi({
+      ...answersFor({ visits: [ready], holds: [dwvHold, holdOf()], lot: lotOf({ abilities: plumberAbilities }) }),
+      [`POST /api/visits/${visitId}/no-longer-up`]: () => ({ data: visitOf({ version: 5 }) }),
+    });
+    show();
+    await userEvent.click(await screen.findByRole('button', { name: 'No longer up' }));
+    const dialog = screen.getByRole('dialog');
+    expect(dialog).toHaveTextContent('Odderly Homes and Noor Haverty are told at once');
+    await userEvent.click(within(dialog).getByRole('button', { name: 'No longer up' }));
+    await waitFor(() => expect(writes(sent)[0]?.body).toMatchObject({ expectedVersion: 4 }));
+  });
+
+  it('a test ends with its reason', async () => {
+    const sent = stubApi({
+      ...answersFor({ holds: [dwvHold, holdOf()] }),
+      [`POST /api/holds/${holdId}/end`]: () => ({ data: holdOf({ state: 'ended' }) }),
+    });
+    show();
+    await userEvent.click(await screen.findByRole('button', { name: 'End Water, test 1' }));
+    const dialog = screen.getByRole('dialog');
+    await userEvent.click(within(dialog).getByRole('radio', { name: /did not hold/ }));
+    await userEvent.click(within(dialog).getByRole('button', { name: 'End the test' }));
+    await waitFor(() => expect(writes(sent)[0]?.body).toMatchObject({ reason: 'lost' }));
+  });
+});
