@@ -35,7 +35,7 @@ export default tseslint.config(
   {
     files: ['**/*.{ts,tsx}'],
     extends: [...tseslint.configs.recommendedTypeChecked],
-    languageOptions: { parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname } },
+    languageOptions: { parserOptions: { projectService: { allowDefaultProject: ['vitest.config.ts'] }, tsconfigRootDir: import.meta.dirname } },
     plugins: { 'import-x': importX },
     settings: {
       'import-x/resolver': { node: { extensions: ['.ts', '.tsx', '.js'] } },

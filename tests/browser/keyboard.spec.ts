@@ -6,9 +6,10 @@ import { see } from './support/acts.js';
 import { openPath, settle } from './support/page-checks.js';
 import { request } from './support/scene.js';
 import { password, startStack, type Stack } from './support/stack.js';
+import { isEveryBrowserTestRun } from './support/gate.js';
 
 /** Nothing in this file presses a pointer. */
-describe('by keyboard alone', { timeout: 240_000 }, () => {
+describe.skipIf(!isEveryBrowserTestRun)('by keyboard alone', { timeout: 240_000 }, () => {
   let stack: Stack;
   let browser: Browser;
   let opened: Opened;

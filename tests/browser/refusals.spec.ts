@@ -8,8 +8,9 @@ import { openAs } from './support/people.js';
 import { request, takeableWindows } from './support/scene.js';
 import { startStack, type Stack } from './support/stack.js';
 import { chooseStage } from './support/story-acts.js';
+import { isEveryBrowserTestRun } from './support/gate.js';
 
-describe('refusals as a person meets them', { timeout: 240_000 }, () => {
+describe.skipIf(!isEveryBrowserTestRun)('refusals as a person meets them', { timeout: 240_000 }, () => {
   let stack: Stack;
   let browser: Browser;
   let opened: Opened | null = null;

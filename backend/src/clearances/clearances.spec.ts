@@ -123,10 +123,11 @@ async function addCorrection(
 ) {
   await insert(
     `INSERT INTO corrections (id, client_id, lot_id, visit_id, unit_number, stage_code, number, subject, point_code, text, place, severity, state, opened_at,
-       opened_by, fixed_at, accepted_at)
+       opened_by, fixed_at, fixed_by, fix_note, accepted_at, accepted_by)
      VALUES (:id, :id, :lotId, :visitId, 1, :stageCode, (SELECT count(*) + 1 FROM corrections WHERE lot_id = :lotId), 'work', :pointCode, 'x', '"whole-system"',
        :severity, :state, :now, :by, CASE WHEN :state = 'open' THEN NULL ELSE CAST(:now AS timestamptz) END,
-       CASE WHEN :state = 'accepted' THEN CAST(:now AS timestamptz) END)`,
+       CASE WHEN :state = 'open' THEN NULL ELSE CAST(:by AS uuid) END, CASE WHEN :state = 'open' THEN NULL ELSE 'Set one' END,
+       CASE WHEN :state = 'accepted' THEN CAST(:now AS timestamptz) END, CASE WHEN :state = 'accepted' THEN CAST(:by AS uuid) END)`,
     { id: randomUUID(), lotId: lot.id, visitId, stageCode, state, severity, pointCode, by: world.people.inspector.id },
   );
 }
@@ -208,7 +209,13 @@ describe('state of plumbing', () => {
     const visitId = await addOutcome({ kind: 'fail', systems: { dwv: 'pass', water: 'fail' } });
     await addCorrection(visitId, 'open');
     expect(await recompute()).toBe('corrections-open');
-    await insert(`UPDATE corrections SET state = 'fixed', fixed_at = :now WHERE lot_id = :lotId`, { lotId: lot.id });
+    await insert(
+      `UPDATE corrections SET state = 'fixed', fixed_at = :now, fixed_by = :by, fix_note = 'Set one' WHERE lot_id = :lotId`,
+      {
+        lotId: lot.id,
+        by: world.people.plumber.id,
+      },
+    );
     expect(await recompute()).toBe('corrections-open');
     const retest = await addVisit('requested');
     expect(await recompute()).toBe('not-tested');

@@ -332,7 +332,13 @@ describe('a request is refused, with nothing written', () => {
       code: 'corrections-open',
       params: { count: 2, lots: [lot.number] },
     });
-    for (const each of [first, second]) await each.update({ state: 'fixed', fixedAt: server.clock.now() });
+    const fixed = {
+      state: 'fixed',
+      fixedAt: server.clock.now(),
+      fixedBy: world.people.plumber.id,
+      fixNote: 'Set one',
+    } as const;
+    for (const each of [first, second]) await each.update(fixed);
     expect(await book(world, lot, { date: '2027-03-17' })).toMatchObject({ isRetest: true, openCorrections: 0 });
   });
 

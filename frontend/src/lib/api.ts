@@ -32,7 +32,7 @@ export async function call<R extends RouteContract>(
   contract: R,
   ...[input, options]: Rest<R>
 ): Promise<RouteAnswer<R>> {
-  const request = requestOf(contract, (input ?? {}) as LooseInput, options ?? {});
+  const request = requestOf(contract, input ?? {}, options ?? {});
   const data = await sendRenewing(contract, request);
   // A fault of ours shows where it is made; a released page does not pay for it.
   return (import.meta.env.DEV ? contract.answer.parse(data) : data) as RouteAnswer<R>;
@@ -55,7 +55,7 @@ export function pathOf(path: string, params: Record<string, unknown>): string {
   return path.replace(/:([A-Za-z]+)/g, (_, name: string) => {
     const value = params[name];
     if (value === undefined || value === null) throw new Error(`${path} needs ${name}`);
-    return encodeURIComponent(String(value));
+    return encodeURIComponent(typeof value === 'string' ? value : JSON.stringify(value));
   });
 }
 

@@ -74,7 +74,7 @@ function finerParams(
   if (code === 'sign-in-throttled')
     return { context: 'named', wait: durationWords(Math.ceil(Number(value) / 60), locale) };
   if (code !== 'stale-state') return { context: 'named' };
-  const word = markWord(String(value));
+  const word = markWord(typeof value === 'string' ? value : '');
   return word === null ? {} : { context: 'named', is: word };
 }
 

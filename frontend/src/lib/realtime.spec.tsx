@@ -42,7 +42,7 @@ class Line {
   }
 }
 
-const made = vi.hoisted(() => ({ line: null as unknown }));
+const made = vi.hoisted((): { line: unknown } => ({ line: null }));
 vi.mock('socket.io-client', () => ({ io: () => made.line }));
 
 let line = new Line();

@@ -87,3 +87,17 @@ export async function write(page: Page, words: string): Promise<void> {
   await page.getByPlaceholder('Write').fill(words);
   await press(page, 'Send');
 }
+
+/** Opens the choice of another window. The panel may be drawn anew while the page is still being read: then the act is pressed again. */
+export async function openMove(page: Page): Promise<void> {
+  const windows = page.getByRole('radiogroup', { name: 'Windows to move to' });
+  for (let presses = 0; presses < 5; presses += 1) {
+    await press(page, 'Move to another window');
+    const isOpen = await windows.waitFor({ timeout: 10_000 }).then(
+      () => true,
+      () => false,
+    );
+    if (isOpen) return;
+  }
+  await windows.waitFor();
+}

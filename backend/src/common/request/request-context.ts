@@ -16,8 +16,3 @@ export const requestContext = new AsyncLocalStorage<RequestContext>();
 export function currentRequest(): RequestContext | null {
   return requestContext.getStore() ?? null;
 }
-
-/** Runs work that is not the request's own, though the request brought it on: without its actor and its idempotency key. */
-export function outsideRequest<T>(work: () => T): T {
-  return requestContext.exit(work);
-}

@@ -1,7 +1,6 @@
 import { listNotices } from '@holdwater/shared-types/notices/notice.contract.js';
 import { readWaiting, type WaitingItem } from '@holdwater/shared-types/visits/calendar.contract.js';
 import { queryOptions, useQuery } from '@tanstack/react-query';
-import { useMemo } from 'react';
 import { call } from '../../lib/api';
 import { queryKeys } from '../../lib/query-keys';
 import { useSession } from '../../lib/session-context';
@@ -40,8 +39,7 @@ const sheetOfKind: Partial<Record<WaitingItem['kind'], SheetId>> = {
 
 /** Counts beside the sheets' words: only what waits on the reader. */
 export function useSheetCounts(): Partial<Record<SheetId, number>> {
-  const waiting = useWaiting();
-  return useMemo(() => countBySheet(waiting), [waiting]);
+  return countBySheet(useWaiting());
 }
 
 export function countBySheet(waiting: readonly WaitingItem[]): Partial<Record<SheetId, number>> {

@@ -9,12 +9,14 @@ import { NamePanel } from './name-panel';
 export function NameMenu({ isPhone = false }: { isPhone?: boolean }): ReactNode {
   const me = useMe();
   const { t } = useTranslation('app');
-  const [isOpen, setIsOpen] = useState(false);
+  // open on the page it was opened on: going elsewhere closes it
+  const [openOn, setOpenOn] = useState<string | null>(null);
   const box = useRef<HTMLDivElement>(null);
   const opener = useRef<HTMLButtonElement>(null);
   const id = useId();
   const { key } = useLocation();
-  useEffect(() => setIsOpen(false), [key]);
+  const isOpen = openOn === key;
+  const setIsOpen = (isOpening: boolean): void => setOpenOn(isOpening ? key : null);
   useDismiss(isOpen, box, () => setIsOpen(false), opener);
   return (
     <div className={isPhone ? 'name-menu phone' : 'cell name-menu'} ref={box}>

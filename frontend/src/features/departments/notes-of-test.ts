@@ -12,7 +12,11 @@ export function dwvNote(test: TestRule | undefined, words: RuleCardWords): Note 
     key: 'dwv',
     title,
     rows: [
-      { key: 'accepted', label: t('rows.accepted'), lines: [test.acceptedMethods.map((m) => t(`methods.${m}`)).join(', ')] },
+      {
+        key: 'accepted',
+        label: t('rows.accepted'),
+        lines: [test.acceptedMethods.map((m) => t(`methods.${m}`)).join(', ')],
+      },
       { key: 'level', label: t('rows.level'), lines: [levelLine(test, words)] },
       standRow(test, words),
       ...(isAirAccepted ? [airRow(test, words)] : []),

@@ -76,7 +76,11 @@ function windowsNote(asking: RuleCardContent['asking'], words: RuleCardWords): N
         ],
       },
       { key: 'horizon', label: t('rows.horizon'), lines: [t('says.horizon', { count: asking.horizonWorkingDays })] },
-      { key: 'permit', label: t('rows.permit'), lines: [t(asking.isPermitNeeded ? 'says.permitNeeded' : 'says.permitNot')] },
+      {
+        key: 'permit',
+        label: t('rows.permit'),
+        lines: [t(asking.isPermitNeeded ? 'says.permitNeeded' : 'says.permitNot')],
+      },
       { key: 'days', label: t('rows.workingDays'), lines: workingDayLines(asking, words) },
       {
         key: 'reinspection',

@@ -55,7 +55,8 @@ export function clearChecks(facts: ClearFacts): ClearCheck[] {
 
 function hasPassed(outcome: Outcome | null, unitNumber: number, system: System): boolean {
   return (
-    outcome?.systems.some((one) => one.unitNumber === unitNumber && one.system === system && one.answer === 'pass') ?? false
+    outcome?.systems.some((one) => one.unitNumber === unitNumber && one.system === system && one.answer === 'pass') ??
+    false
   );
 }
 

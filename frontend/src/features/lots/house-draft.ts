@@ -42,7 +42,10 @@ const text = (value: number | null | undefined): string => (value === null || va
 
 /** A house already known, or the beginning of one: a first floor, which every height is measured from. */
 export function draftOf(house: HouseGeometry | null, firstFloor: string): HouseDraft {
-  const numbers = Object.fromEntries(numberFields.map((name) => [name, text(house?.[name])])) as Record<NumberField, string>;
+  const numbers = Object.fromEntries(numberFields.map((name) => [name, text(house?.[name])])) as Record<
+    NumberField,
+    string
+  >;
   return {
     ...numbers,
     cappedVents: text(house?.cappedVents ?? 0),
@@ -121,7 +124,9 @@ const drawable = (words: string): number | null => {
 export function drawnDraft(draft: HouseDraft): CutawayHouse {
   const floors = draft.floors.flatMap(({ name, elevationFt }) => {
     const elevation = drawable(elevationFt);
-    return elevation === null || name.trim().toLowerCase() === 'attic' ? [] : [{ name: name.trim(), elevationFt: elevation }];
+    return elevation === null || name.trim().toLowerCase() === 'attic'
+      ? []
+      : [{ name: name.trim(), elevationFt: elevation }];
   });
   const { laundry } = draft;
   return {

@@ -16,7 +16,13 @@ const rows: ReadonlyArray<Partial<Record<Column, string>>> = [
     contact_name: 'Della Arkwright',
     contact_phone: '555-0142',
   },
-  { number: '2', address: '404 Sedge Loop', permit_status: 'applied', units: '2', hazards: 'open trench at the street, keep left' },
+  {
+    number: '2',
+    address: '404 Sedge Loop',
+    permit_status: 'applied',
+    units: '2',
+    hazards: 'open trench at the street, keep left',
+  },
 ];
 
 /** A cell by RFC 4180: in quotes where it holds a comma, a quote or a line end. */
@@ -26,6 +32,9 @@ function cell(text: string): string {
 
 /** A list of lots as it is to be: every column, two lots. */
 export function importSample(): string {
-  const lines = [importColumns.join(','), ...rows.map((row) => importColumns.map((column) => cell(row[column] ?? '')).join(','))];
+  const lines = [
+    importColumns.join(','),
+    ...rows.map((row) => importColumns.map((column) => cell(row[column] ?? '')).join(',')),
+  ];
   return `${lines.join('\r\n')}\r\n`;
 }

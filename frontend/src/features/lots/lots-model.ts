@@ -19,7 +19,14 @@ export interface FilterCount {
 }
 
 /** The states listed by themselves, in the order they press. */
-const listedStates = ['corrections-open', 'put-back-due', 'awaiting-visit', 'under-test', 'not-tested', 'clear'] as const;
+const listedStates = [
+  'corrections-open',
+  'put-back-due',
+  'awaiting-visit',
+  'under-test',
+  'not-tested',
+  'clear',
+] as const;
 
 /** The stages any of these lots has, in their departments' order. Two departments may name one code differently: the first is shown. */
 export function stagesOf(lots: readonly LotSummary[]): LotSummary['stages'] {
@@ -69,7 +76,8 @@ export function inOrder(rows: readonly LotRow[]): LotRow[] {
 
 function isShown({ state, waiting, lot }: LotRow, filter: LotFilter): boolean {
   if (filter === 'all') return true;
-  if (filter === 'open') return waiting !== null || lot.nextVisit !== null || (state !== 'clear' && state !== 'not-tested');
+  if (filter === 'open')
+    return waiting !== null || lot.nextVisit !== null || (state !== 'clear' && state !== 'not-tested');
   if (filter === 'you') return waiting?.isOnYou === true;
   if (filter.startsWith('on:')) return waiting !== null && !waiting.isOnYou && `on:${waiting.waitsOn}` === filter;
   return state === filter;
@@ -83,9 +91,7 @@ export function filtered(rows: readonly LotRow[], filter: LotFilter): LotRow[] {
 export function filterCounts(rows: readonly LotRow[]): FilterCount[] {
   const names = [...new Set(rows.flatMap(({ waiting }) => (waiting && !waiting.isOnYou ? [waiting.waitsOn] : [])))];
   const filters: LotFilter[] = ['you', ...names.map((name): LotFilter => `on:${name}`), ...listedStates];
-  return filters
-    .map((filter) => ({ filter, count: filtered(rows, filter).length }))
-    .filter(({ count }) => count > 0);
+  return filters.map((filter) => ({ filter, count: filtered(rows, filter).length })).filter(({ count }) => count > 0);
 }
 
 /** Narrows what stands in the address. */
@@ -97,5 +103,7 @@ export function asFilter(text: string | null): LotFilter {
 
 /** Counts by state, for the legend of the plat. */
 export function stateCounts(rows: readonly LotRow[]): Array<{ state: ClearState; count: number }> {
-  return [...clearStates].reverse().map((state) => ({ state, count: rows.filter((row) => row.state === state).length }));
+  return [...clearStates]
+    .reverse()
+    .map((state) => ({ state, count: rows.filter((row) => row.state === state).length }));
 }

@@ -9,7 +9,8 @@ const usualMarks = { incrementPsi: 1, incrementIn: 0.25 } as const;
 /** What a reading says, to half a mark of what it was read on; null where it says neither pressure nor level. */
 export function measureOf(hold: Hold, reading: Reading, units: 'us' | 'metric'): Measure | null {
   const { pressurePsi, levelIn } = reading;
-  if (pressurePsi !== null) return markedPressure(pressurePsi, hold.gauge?.incrementPsi ?? usualMarks.incrementPsi, units);
+  if (pressurePsi !== null)
+    return markedPressure(pressurePsi, hold.gauge?.incrementPsi ?? usualMarks.incrementPsi, units);
   if (levelIn !== null) return plainly(readLevel(levelIn, hold.tape?.incrementIn ?? usualMarks.incrementIn, units));
   return null;
 }

@@ -18,8 +18,11 @@ export function useWaitingWords(): (item: WaitingItem) => string {
   return useCallback(
     (item) => {
       const who = item.isOnYou ? t('waits.you') : t('waits.other', { name: item.waitsOn });
-      const by = item.by === null || item.zone === null ? '' : t('waits.by', { time: words.dayClock(item.by, item.zone) });
-      return [`${who}: ${t(`waits.kinds.${item.kind}`, { count: item.count })}`, by].filter((one) => one !== '').join(', ');
+      const by =
+        item.by === null || item.zone === null ? '' : t('waits.by', { time: words.dayClock(item.by, item.zone) });
+      return [`${who}: ${t(`waits.kinds.${item.kind}`, { count: item.count })}`, by]
+        .filter((one) => one !== '')
+        .join(', ');
     },
     [t, words],
   );

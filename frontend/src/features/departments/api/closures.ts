@@ -19,8 +19,7 @@ export function useAddClosure(departmentId: string) {
 /** Desk: takes a closure back. */
 export function useRemoveClosure(departmentId: string) {
   return useIdempotentMutation({
-    mutationFn: (closureId: string, options) =>
-      call(removeClosure, { params: { departmentId, closureId } }, options),
+    mutationFn: (closureId: string, options) => call(removeClosure, { params: { departmentId, closureId } }, options),
     invalidates: stale,
   });
 }

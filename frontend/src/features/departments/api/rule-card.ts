@@ -7,7 +7,6 @@ import { queryKeys } from '../../../lib/query-keys';
 export function ruleCardQuery(ruleCardId: string, isPublic = false) {
   return queryOptions({
     queryKey: [...queryKeys.ruleCards, ...(isPublic ? ['public'] : []), ruleCardId],
-    queryFn: ({ signal }) =>
-      call(isPublic ? readPublicRuleCard : readRuleCard, { params: { ruleCardId } }, { signal }),
+    queryFn: ({ signal }) => call(isPublic ? readPublicRuleCard : readRuleCard, { params: { ruleCardId } }, { signal }),
   });
 }

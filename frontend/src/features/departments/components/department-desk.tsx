@@ -56,7 +56,11 @@ export function DepartmentDesk({ departmentId, ruleCardId, part }: DepartmentDes
         return (
           <>
             {abilities.canEditRuleCards ? (
-              <DraftPart departmentId={departmentId} draftId={draft?.id ?? null} isShown={draft !== undefined && draft.id === ruleCardId} />
+              <DraftPart
+                departmentId={departmentId}
+                draftId={draft?.id ?? null}
+                isShown={draft !== undefined && draft.id === ruleCardId}
+              />
             ) : null}
             <Panel title={t('closures.title')}>
               <Closures departmentId={departmentId} closures={closures} today={today} canClose={abilities.canClose} />
@@ -73,7 +77,15 @@ export function DepartmentDesk({ departmentId, ruleCardId, part }: DepartmentDes
   );
 }
 
-function DraftPart({ departmentId, draftId, isShown }: { departmentId: string; draftId: string | null; isShown: boolean }): ReactNode {
+function DraftPart({
+  departmentId,
+  draftId,
+  isShown,
+}: {
+  departmentId: string;
+  draftId: string | null;
+  isShown: boolean;
+}): ReactNode {
   const { t } = useTranslation('departments');
   const navigate = useNavigate();
   const drafting = useDraftRuleCard(departmentId);

@@ -48,7 +48,13 @@ export function DraftForm({ ruleCard }: { ruleCard: RuleCard }): ReactNode {
           faultOf={(name) => faultOf(`windows.${index}.${name}`)}
           onChange={(changed) => change(index, changed)}
           onRemove={
-            values.windows.length > 1 ? () => set('windows', values.windows.filter((_, at) => at !== index)) : undefined
+            values.windows.length > 1
+              ? () =>
+                  set(
+                    'windows',
+                    values.windows.filter((_, at) => at !== index),
+                  )
+              : undefined
           }
         />
       ))}

@@ -30,12 +30,16 @@ export function NotesSheet({ notes, against, version }: NotesSheetProps): ReactN
             {index + 1}
           </span>
           <h2 className="h3" id={`note-${index + 1}-title`}>
-            <span className="hidden-words">{t('noteNumber', { number: index + 1 })}</span>{' '}
-            {note.title}
+            <span className="hidden-words">{t('noteNumber', { number: index + 1 })}</span> {note.title}
           </h2>
           <dl>
             {note.rows.map((row) => (
-              <Row key={row.key} row={row} before={against ? findRow(against.notes, note.key, row.key) : undefined} isTwo={!!against} />
+              <Row
+                key={row.key}
+                row={row}
+                before={against ? findRow(against.notes, note.key, row.key) : undefined}
+                isTwo={!!against}
+              />
             ))}
           </dl>
         </section>

@@ -65,7 +65,12 @@ function Sheet({ ruleCard }: { ruleCard: RuleCard }): ReactNode {
             { label: t('sheet.state'), value: <VersionState card={ruleCard} /> },
             {
               label: t('sheet.from'),
-              value: ruleCard.effectiveFrom === null ? t('versions.noDate') : <Numeral text={words.dateYear(ruleCard.effectiveFrom)} />,
+              value:
+                ruleCard.effectiveFrom === null ? (
+                  t('versions.noDate')
+                ) : (
+                  <Numeral text={words.dateYear(ruleCard.effectiveFrom)} />
+                ),
             },
             { label: t('sheet.zone'), value: words.zone(ruleCard.zone) },
             ...(before && inForce

@@ -6,7 +6,13 @@ import { Numeral } from '../../../components/numeral';
 import { useTimeWords } from '../../../lib/time';
 
 /** The versions of one department's rule card, the newest first. */
-export function VersionList({ ruleCards, chosenId }: { ruleCards: readonly RuleCardBrief[]; chosenId: string | null }): ReactNode {
+export function VersionList({
+  ruleCards,
+  chosenId,
+}: {
+  ruleCards: readonly RuleCardBrief[];
+  chosenId: string | null;
+}): ReactNode {
   const { t } = useTranslation(['departments', 'common']);
   const words = useTimeWords();
   const sorted = [...ruleCards].sort((a, b) => b.version - a.version);
@@ -43,7 +49,13 @@ export function VersionState({ card }: { card: RuleCardBrief }): ReactNode {
 }
 
 /** Every department, with its rule card in a few words. */
-export function DepartmentList({ departments, chosenId }: { departments: readonly Department[]; chosenId: string | null }): ReactNode {
+export function DepartmentList({
+  departments,
+  chosenId,
+}: {
+  departments: readonly Department[];
+  chosenId: string | null;
+}): ReactNode {
   const { t } = useTranslation(['departments', 'common']);
   const words = useTimeWords();
   return (
@@ -51,7 +63,11 @@ export function DepartmentList({ departments, chosenId }: { departments: readonl
       {departments.map((department) => (
         <li key={department.id}>
           <Link
-            to={department.ruleCard === null ? `/rule-cards?department=${department.id}` : `/rule-cards/${department.ruleCard.id}`}
+            to={
+              department.ruleCard === null
+                ? `/rule-cards?department=${department.id}`
+                : `/rule-cards/${department.ruleCard.id}`
+            }
             aria-current={department.id === chosenId ? 'page' : undefined}
           >
             <span className="b">{department.name}</span>

@@ -49,7 +49,9 @@ describe('a rule card', () => {
       </Routes>,
       { me: null, at: '/rule-cards', widthPx: 390 },
     );
-    expect(await screen.findByRole('heading', { level: 1 })).toHaveTextContent('Tallowmere Building Department, rule card 6');
+    expect(await screen.findByRole('heading', { level: 1 })).toHaveTextContent(
+      'Tallowmere Building Department, rule card 6',
+    );
     expect(sent.every(({ path }) => path.startsWith('/api/public/'))).toBe(true);
     expect(screen.queryByRole('button', { name: /Publish|New draft|Close it/ })).not.toBeInTheDocument();
   });
@@ -84,7 +86,10 @@ describe('a rule card', () => {
   });
 
   it('saves the windows as typed, and names a fault at its field', async () => {
-    const sent = stubApi({ ...answers(may), [`PUT /api/rule-cards/${draft.id}`]: () => ({ data: cardOf(7, 'draft') }) });
+    const sent = stubApi({
+      ...answers(may),
+      [`PUT /api/rule-cards/${draft.id}`]: () => ({ data: cardOf(7, 'draft') }),
+    });
     open(`/rule-cards/${draft.id}`);
     const second = await screen.findByRole('group', { name: 'Window 2' });
     const end = within(second).getByLabelText('To');
@@ -106,7 +111,8 @@ describe('a rule card', () => {
   it('is published only after a question, and a refusal stands in it', async () => {
     const sent = stubApi({
       ...answers(may),
-      [`POST /api/rule-cards/${draft.id}/publish`]: () => refusal('rule-card-overlap', { fields: { effectiveFrom: 'taken' } }),
+      [`POST /api/rule-cards/${draft.id}/publish`]: () =>
+        refusal('rule-card-overlap', { fields: { effectiveFrom: 'taken' } }),
     });
     open(`/rule-cards/${draft.id}`);
     await userEvent.click(await screen.findByRole('button', { name: 'Publish rule card 7' }));
@@ -125,7 +131,9 @@ describe('a rule card', () => {
     await userEvent.type(screen.getByLabelText('Day'), '2031-04-16');
     await userEvent.type(screen.getByLabelText('Why'), 'Training');
     await userEvent.click(screen.getByRole('button', { name: 'Close it' }));
-    expect(screen.getByRole('dialog', { name: 'Close Wed, Apr 16, 2031?' })).toHaveTextContent('Open visits inside it are freed');
+    expect(screen.getByRole('dialog', { name: 'Close Wed, Apr 16, 2031?' })).toHaveTextContent(
+      'Open visits inside it are freed',
+    );
     expect(sent.some(({ method }) => method === 'POST')).toBe(false);
   });
 });

@@ -39,9 +39,14 @@ function RuleCards({ isPublic }: { isPublic: boolean }): ReactNode {
         return (
           <div className="rule-cards">
             <nav className="rule-cards-list" aria-label={t('list.name')}>
-              {!isPublic && chosen ? <DepartmentDesk departmentId={chosen.id} part="versions" ruleCardId={shownId} /> : null}
+              {!isPublic && chosen ? (
+                <DepartmentDesk departmentId={chosen.id} part="versions" ruleCardId={shownId} />
+              ) : null}
               <h2 className="h2 list-title">{t(isPublic ? 'list.departments' : 'list.others')}</h2>
-              <DepartmentList departments={isPublic ? items : items.filter(({ id }) => id !== chosen?.id)} chosenId={chosen?.id ?? null} />
+              <DepartmentList
+                departments={isPublic ? items : items.filter(({ id }) => id !== chosen?.id)}
+                chosenId={chosen?.id ?? null}
+              />
               <p className="s mid list-foot">{t('list.anyone')}</p>
             </nav>
             <div className="rule-cards-sheet">

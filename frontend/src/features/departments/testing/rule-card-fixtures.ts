@@ -15,7 +15,13 @@ export const content: RuleCardContent = ruleCardContent.parse({
   ],
   tests: [
     {
-      ...{ ...test, photoWanted, stageCode: 'rough-in', system: 'dwv', acceptedMethods: ['attic-cut', 'stack-to-roof'] },
+      ...{
+        ...test,
+        photoWanted,
+        stageCode: 'rough-in',
+        system: 'dwv',
+        acceptedMethods: ['attic-cut', 'stack-to-roof'],
+      },
       ...{ headRule: { kind: 'fill-level', feet: null }, pressures: [], settleMinutes: 0, levelSeenFrom: ['overflow'] },
     },
     {

@@ -46,11 +46,21 @@ export function BeforeClear({ lotId, view, visits, holds, corrections }: BeforeC
         {checks.map(({ key, isDone, done, total }) => (
           <li key={key} className="spread">
             <span className="row">
-              {isDone ? <Icon name="check" size={18} className="t-green" title={t('before.done')} /> : <span className="to-do" />}
+              {isDone ? (
+                <Icon name="check" size={18} className="t-green" title={t('before.done')} />
+              ) : (
+                <span className="to-do" />
+              )}
               {t(`before.${key}`)}
             </span>
             <span className="s mid nw">
-              {total === null ? isDone ? null : t('before.atVisit') : <Numeral text={t('before.of', { done, total })} />}
+              {total === null ? (
+                isDone ? null : (
+                  t('before.atVisit')
+                )
+              ) : (
+                <Numeral text={t('before.of', { done, total })} />
+              )}
             </span>
           </li>
         ))}

@@ -34,9 +34,7 @@ export function Changes({ lotId, zone }: { lotId: string; zone: string }): React
                     <Numeral text={ledgerWords(entry, zone)} />
                   </span>
                   <span className="mid" title={entry.actorName ?? undefined}>
-                    {initials(entry.actorName)}
-                    {' '}
-                    <span className="hidden-words">{entry.actorName}</span>
+                    {initials(entry.actorName)} <span className="hidden-words">{entry.actorName}</span>
                   </span>
                 </li>
               ))}

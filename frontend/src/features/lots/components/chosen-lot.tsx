@@ -22,7 +22,9 @@ export function ChosenLot({ row, stageName }: { row: LotRow | null; stageName: s
         <div className="lot-number">{lot.number}</div>
       </div>
       <div className="c">
-        <div className="lab">{stageName === '' ? t('table.plumbing') : t('table.plumbingAt', { stage: stageName })}</div>
+        <div className="lab">
+          {stageName === '' ? t('table.plumbing') : t('table.plumbingAt', { stage: stageName })}
+        </div>
         <StateWord state={state} size={24} />
         <div className="s mid">{stands(row)}</div>
       </div>

@@ -31,11 +31,19 @@ export function ConsentGroup({ items }: { items: readonly ConsentRequest[] }): R
   const cannotYet = lotIds.length === 0 ? t('consents.nonePicked') : undefined;
   const answer = (isJoining: boolean): void =>
     answering.mutate(
-      { organizationId: organization.id, lotIds, isJoining, ...(!isJoining && why.trim() !== '' ? { why: why.trim() } : {}) },
+      {
+        organizationId: organization.id,
+        lotIds,
+        isJoining,
+        ...(!isJoining && why.trim() !== '' ? { why: why.trim() } : {}),
+      },
       {
         onSuccess: () => {
           setIsRefusing(false);
-          sayDone({ mark: 'sent', title: t(isJoining ? 'consents.joined' : 'consents.refused', { count: lotIds.length }) });
+          sayDone({
+            mark: 'sent',
+            title: t(isJoining ? 'consents.joined' : 'consents.refused', { count: lotIds.length }),
+          });
         },
       },
     );
@@ -102,7 +110,13 @@ export function ConsentGroup({ items }: { items: readonly ConsentRequest[] }): R
         error={refusal ? `${refusal.title}. ${refusal.safe} ${refusal.next}` : undefined}
       >
         <p>{t('consents.told', { builders })}</p>
-        <Field label={t('consents.why')} isOptional maxLength={500} value={why} onChange={(event) => setWhy(event.target.value)} />
+        <Field
+          label={t('consents.why')}
+          isOptional
+          maxLength={500}
+          value={why}
+          onChange={(event) => setWhy(event.target.value)}
+        />
       </Question>
     </Panel>
   );

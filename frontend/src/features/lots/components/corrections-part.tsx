@@ -63,9 +63,15 @@ function OneCorrection({ one, zone }: { one: Correction; zone: string }): ReactN
   ].filter((part) => part !== null);
   const who =
     one.state === 'accepted'
-      ? t('corrections.acceptedBy', { name: one.acceptedBy ?? '', day: one.acceptedAt === null ? '' : words.day(one.acceptedAt, zone) })
+      ? t('corrections.acceptedBy', {
+          name: one.acceptedBy ?? '',
+          day: one.acceptedAt === null ? '' : words.day(one.acceptedAt, zone),
+        })
       : one.state === 'fixed'
-        ? t('corrections.fixedBy', { name: one.fixedBy ?? '', day: one.fixedAt === null ? '' : words.day(one.fixedAt, zone) })
+        ? t('corrections.fixedBy', {
+            name: one.fixedBy ?? '',
+            day: one.fixedAt === null ? '' : words.day(one.fixedAt, zone),
+          })
         : t('corrections.openedBy', { name: one.openedBy, day: words.day(one.openedAt, zone) });
   const tone = { open: 't-red', fixed: 't-brass', accepted: 't-green' }[one.state];
   return (
@@ -73,8 +79,7 @@ function OneCorrection({ one, zone }: { one: Correction; zone: string }): ReactN
       <Mark name={`correction-${one.state}`} number={one.number} size={28} />
       <div className="grow">
         <div className="b">
-          <span className="hidden-words">{t('corrections.number', { number: one.number })}</span>{' '}
-          {one.text}
+          <span className="hidden-words">{t('corrections.number', { number: one.number })}</span> {one.text}
         </div>
         <div className="s mid">
           {where.join(', ')}

@@ -9,7 +9,13 @@ export interface HouseFieldsProps {
   form: ContractForm<HouseDraft>;
 }
 
-const heights: readonly NumberField[] = ['lowestFittingFt', 'highestFittingFt', 'ventTerminalFt', 'atticCutFt', 'standpipeFt'];
+const heights: readonly NumberField[] = [
+  'lowestFittingFt',
+  'highestFittingFt',
+  'ventTerminalFt',
+  'atticCutFt',
+  'standpipeFt',
+];
 const waterHeights: readonly NumberField[] = ['gaugeFt', 'highestOutletFt', 'waterLowestFittingFt'];
 const pressures: readonly NumberField[] = ['lowestRatedPsi', 'lowestRatedAirPsi', 'supplyPsi'];
 
@@ -40,7 +46,11 @@ export function HeightFields({ form }: HouseFieldsProps): ReactNode {
       <Measured form={form} name="cappedVents" />
       <Field label={t('house.fields.pipeMaterial')} isOptional error={form.faultOf('pipeMaterial')}>
         {(control) => (
-          <select {...control} value={form.values.pipeMaterial} onChange={(event) => form.set('pipeMaterial', event.target.value)}>
+          <select
+            {...control}
+            value={form.values.pipeMaterial}
+            onChange={(event) => form.set('pipeMaterial', event.target.value)}
+          >
             <option value="">{t('house.notKnown')}</option>
             {materials.map((material) => (
               <option key={material} value={material}>
@@ -65,7 +75,11 @@ export function LaundryFields({ form }: HouseFieldsProps): ReactNode {
     <div className="fields two">
       <Field label={t('house.fields.laundryFloor')} error={form.faultOf('laundry.floor')}>
         {(control) => (
-          <select {...control} value={laundry.floor} onChange={(event) => form.set('laundry', { ...laundry, floor: event.target.value })}>
+          <select
+            {...control}
+            value={laundry.floor}
+            onChange={(event) => form.set('laundry', { ...laundry, floor: event.target.value })}
+          >
             <option value="">{t('house.noLaundry')}</option>
             {known.map((name) => (
               <option key={name} value={name}>

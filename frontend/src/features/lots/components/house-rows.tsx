@@ -14,7 +14,11 @@ interface RowsProps<Row extends Readonly<Record<string, string>>> extends HouseF
   rows: readonly Row[];
   empty: Row;
   /** The fields of a row in order, with the unit behind each. */
-  fields: ReadonlyArray<{ name: keyof Row & string; unit?: string; options?: readonly { value: string; word: string }[] }>;
+  fields: ReadonlyArray<{
+    name: keyof Row & string;
+    unit?: string;
+    options?: readonly { value: string; word: string }[];
+  }>;
   onChange: (rows: readonly Row[]) => void;
 }
 

@@ -51,7 +51,10 @@ function FaultRow({ fault }: { fault: ImportFault }): ReactNode {
       <td>
         {words}
         {suggestion === null ? null : (
-          <span className="mid"> {t(code === 'repeated-in-file' ? 'import.firstOn' : 'import.meant', { suggestion })}</span>
+          <span className="mid">
+            {' '}
+            {t(code === 'repeated-in-file' ? 'import.firstOn' : 'import.meant', { suggestion })}
+          </span>
         )}
       </td>
       <td className="n">{value ?? ''}</td>

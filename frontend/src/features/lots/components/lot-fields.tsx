@@ -171,7 +171,12 @@ export function UnitFields({ form: { values, set, faultOf } }: LotFieldsProps): 
                 kind="text"
                 size="sm"
                 aria-label={t('form.removeUnit', { number: index + 1 })}
-                onClick={() => set('units', units.filter((_, at) => at !== index))}
+                onClick={() =>
+                  set(
+                    'units',
+                    units.filter((_, at) => at !== index),
+                  )
+                }
               >
                 {t('form.remove')}
               </Act>

@@ -39,7 +39,8 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
     corrections: corrections.data?.items ?? [],
   };
   const rule =
-    ruleCard.data?.content.tests.find((one) => one.stageCode === view.stage?.code && one.system === view.system) ?? null;
+    ruleCard.data?.content.tests.find((one) => one.stageCode === view.stage?.code && one.system === view.system) ??
+    null;
   const isGroundwork = ruleCard.data?.content.stages.find(({ code }) => code === view.stage?.code)?.covers === 'slab';
   const { abilities } = lot;
   // The thumb button is for whoever puts tests up; the superintendent's first act on a phone is the request.
@@ -107,7 +108,9 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
           <Act icon="notices" to={`/lots/${lot.id}/thread`} wide>
             {t('sheet.thread')}
           </Act>
-          {abilities.canEdit || abilities.canSetPermit ? <Act to={`/lots/${lot.id}/edit`}>{t('title.edit')}</Act> : null}
+          {abilities.canEdit || abilities.canSetPermit ? (
+            <Act to={`/lots/${lot.id}/edit`}>{t('title.edit')}</Act>
+          ) : null}
         </div>
         {rest}
         {hasThumb ? (

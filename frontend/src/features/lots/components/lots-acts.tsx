@@ -53,7 +53,15 @@ export function RequestAct({ picked, chosenId, stageCode }: RequestActProps): Re
   );
 }
 
-export function TableHead({ shown, total, children }: { shown: number; total: number; children: ReactNode }): ReactNode {
+export function TableHead({
+  shown,
+  total,
+  children,
+}: {
+  shown: number;
+  total: number;
+  children: ReactNode;
+}): ReactNode {
   const { t } = useTranslation('lots');
   return (
     <header className="hd">

@@ -19,7 +19,7 @@ export interface LotsHeadProps {
 /** Which tract, whose department, how many lots, and the stage switch. */
 export function LotsHead(props: LotsHeadProps): ReactNode {
   const { t } = useTranslation('lots');
-  const { tract, lots } = props;
+  const { lots } = props;
   const departments = [...new Set(lots.flatMap(({ departmentName }) => departmentName ?? []))];
   return (
     <header className="hd">
@@ -86,7 +86,11 @@ function TractTitle(props: LotsHeadProps): ReactNode {
   );
 }
 
-function TractSelect({ tracts, tract, ...control }: LotsHeadProps & Partial<FieldControl> & { 'aria-label'?: string }): ReactNode {
+function TractSelect({
+  tracts,
+  tract,
+  ...control
+}: LotsHeadProps & Partial<FieldControl> & { 'aria-label'?: string }): ReactNode {
   const { t } = useTranslation('lots');
   const { change } = useLotsAddress();
   return (

@@ -25,7 +25,8 @@ export interface LotsSheetProps {
 
 /** The lot chosen, where a window could be asked for it; null otherwise. */
 function askableId(row: LotRow | null): string | null {
-  if (row === null || row.lot.nextVisit !== null || row.lot.openCorrections > 0 || row.lot.departmentId === null) return null;
+  if (row === null || row.lot.nextVisit !== null || row.lot.openCorrections > 0 || row.lot.departmentId === null)
+    return null;
   return row.state === 'clear' || row.state === 'put-back-due' ? null : row.lot.id;
 }
 
@@ -38,7 +39,8 @@ export function LotsSheet({ tracts, tract, scoped, waiting, isWaitingUnknown }: 
   const acts = useLotActs();
   const [picked, setPicked] = useState<ReadonlySet<string>>(new Set());
   const stages = stagesOf(scoped.lots);
-  const stage = stages.find(({ code }) => code === address.stage) ?? stages.find(({ code }) => code === usualStage(scoped.lots));
+  const stage =
+    stages.find(({ code }) => code === address.stage) ?? stages.find(({ code }) => code === usualStage(scoped.lots));
   const stageName = stage === undefined ? '' : localName(stage.name, locale);
   const all = lotRows(scoped.lots, stage?.code ?? null, waiting);
   const open = filtered(all, address.filter);
@@ -112,7 +114,9 @@ export function LotsSheet({ tracts, tract, scoped, waiting, isWaitingUnknown }: 
       <section className="lots-side" aria-label={t('table.label')}>
         <TableHead shown={rows.length} total={all.length}>
           <AddActs acts={acts} tractId={tract?.id ?? null} />
-          {acts.canRequest ? <RequestAct picked={picked} chosenId={askableId(chosen)} stageCode={stage?.code ?? null} /> : null}
+          {acts.canRequest ? (
+            <RequestAct picked={picked} chosenId={askableId(chosen)} stageCode={stage?.code ?? null} />
+          ) : null}
         </TableHead>
         {table}
       </section>

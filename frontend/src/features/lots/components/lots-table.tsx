@@ -85,8 +85,7 @@ function LotCells({ row, hasTracts, isChosen }: { row: LotRow; hasTracts: boolea
         <button type="button" className="lot-pick" aria-pressed={isChosen} title={lot.address}>
           {waiting ? <Mark name={waitingMark(waiting)} title={waitingWords(waiting)} /> : <span className="mk" />}
           <span>
-            <span className="hidden-words">{t('table.lot')}</span>{' '}
-            <span className="n b">{lot.number}</span>
+            <span className="hidden-words">{t('table.lot')}</span> <span className="n b">{lot.number}</span>
             {hasTracts && lot.tract ? <span className="xs mid row">{lot.tract.name}</span> : null}
           </span>
         </button>

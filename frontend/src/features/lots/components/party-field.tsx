@@ -59,7 +59,8 @@ export function PartyField({ kind, value, onChange, error }: PartyFieldProps): R
             {found.data.items.map((organization) => (
               <li key={organization.id}>
                 <button type="button" onClick={() => onChange(organization)}>
-                  <span className="med">{organization.name}</span> <span className="n s mid">{organization.phone ?? ''}</span>
+                  <span className="med">{organization.name}</span>{' '}
+                  <span className="n s mid">{organization.phone ?? ''}</span>
                 </button>
               </li>
             ))}

@@ -93,7 +93,15 @@ function Legend({ rows, stageName }: Pick<PlatPartProps, 'rows' | 'stageName'>):
                 {pattern ? patterns.defs : null}
                 <rect width="30" height="24" fill={ground} />
                 {pattern ? <rect width="30" height="24" fill={patterns.fill(pattern)} opacity=".6" /> : null}
-                <rect x=".6" y=".6" width="28.8" height="22.8" fill="none" stroke={edge ?? 'var(--ink)'} strokeWidth={edge ? 2 : 1} />
+                <rect
+                  x=".6"
+                  y=".6"
+                  width="28.8"
+                  height="22.8"
+                  fill="none"
+                  stroke={edge ?? 'var(--ink)'}
+                  strokeWidth={edge ? 2 : 1}
+                />
               </svg>
               <Mark name={state} />
               <span className="s">

@@ -44,13 +44,17 @@ export function SectionCautions({ hold, plan, system }: SectionCautionsProps): R
         <Caution>
           {plug === null ? null : (
             <>
-              <Numeral text={t('cautions.plugLoad', { pounds: Math.ceil(plug.forceLbf / forceStepLbf) * forceStepLbf })} />{' '}
+              <Numeral
+                text={t('cautions.plugLoad', { pounds: Math.ceil(plug.forceLbf / forceStepLbf) * forceStepLbf })}
+              />{' '}
             </>
           )}
           {t('cautions.plug')}
         </Caution>
       ) : null}
-      {Array.isArray(bare) && bare.length > 0 ? <Caution>{t('cautions.bare', { floors: bare.join(', ') })}</Caution> : null}
+      {Array.isArray(bare) && bare.length > 0 ? (
+        <Caution>{t('cautions.bare', { floors: bare.join(', ') })}</Caution>
+      ) : null}
       <Caution>{t('common.localCode')}</Caution>
     </div>
   );

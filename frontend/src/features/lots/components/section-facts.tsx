@@ -35,7 +35,9 @@ function DwvFacts({ house, hold, rule, plan }: SectionFactsProps): ReactNode {
   const filled = level === null ? null : height(level - datumFt, units);
   return (
     <Cells columns={4}>
-      <Cell label={t('section.method')}>{hold === null ? t('section.notChosen') : t(`departments.methods.${hold.method}`)}</Cell>
+      <Cell label={t('section.method')}>
+        {hold === null ? t('section.notChosen') : t(`departments.methods.${hold.method}`)}
+      </Cell>
       <Cell label={t('section.fillTo')}>
         {filled === null ? t('common.none') : <Measure value={filled.number} unit={filled.unit} />}
       </Cell>
@@ -65,7 +67,9 @@ function WaterFacts({ hold, rule }: SectionFactsProps): ReactNode {
   };
   return (
     <Cells columns={4}>
-      <Cell label={t('section.medium')}>{hold === null ? t('section.notChosen') : t(`departments.media.${hold.medium}`)}</Cell>
+      <Cell label={t('section.medium')}>
+        {hold === null ? t('section.notChosen') : t(`departments.media.${hold.medium}`)}
+      </Cell>
       <Cell label={t('section.minimum')}>{psi(minimumPsi)}</Cell>
       <Cell label={t('section.ceiling')}>{hold === null ? t('section.notKnown') : psi(hold.ceilingPsi)}</Cell>
       <StandCell rule={rule} />

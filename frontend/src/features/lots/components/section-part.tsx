@@ -41,7 +41,8 @@ export function SectionPart({ lot, view, tests, corrections, rule, isGroundwork,
   const shown = hold?.state === 'standing' ? hold : null;
   const isWater = view.system === 'water';
   const method = isWater ? null : asDwvMethod(shown?.method);
-  const plan = house === null || method === null || rule === null || isGroundwork ? null : findDwvPlan(house, method, rule);
+  const plan =
+    house === null || method === null || rule === null || isGroundwork ? null : findDwvPlan(house, method, rule);
   const systems = view.stage?.systems.length ? view.stage.systems : (['dwv', 'water'] as const);
   const pinned = corrections.flatMap((one) =>
     one.place === 'whole-system' || one.unitNumber !== view.unitNumber || one.stageCode !== view.stage?.code
@@ -89,13 +90,7 @@ export function SectionPart({ lot, view, tests, corrections, rule, isGroundwork,
       )}
       <SectionFacts house={house} hold={shown} rule={rule} plan={plan} system={view.system} />
       {!isWater && house !== null && rule !== null ? (
-        <WaysToTest
-          house={house}
-          rule={rule}
-          chosen={method}
-          isGroundwork={isGroundwork}
-          ruleCard={lot.ruleCard}
-        />
+        <WaysToTest house={house} rule={rule} chosen={method} isGroundwork={isGroundwork} ruleCard={lot.ruleCard} />
       ) : null}
       <SectionCautions hold={shown} plan={plan} system={view.system} />
     </Panel>

@@ -21,7 +21,9 @@ export function StandingLine({ hold, zone }: { hold: Hold | null; zone: string }
   const value = read === undefined ? null : readingWords.value(hold, read);
   const isStanding = hold.state === 'standing';
   const seen =
-    read === undefined ? t('section.notRead') : t('section.lastRead', { value: value ?? '', time: words.dayClock(read.at, zone) });
+    read === undefined
+      ? t('section.notRead')
+      : t('section.lastRead', { value: value ?? '', time: words.dayClock(read.at, zone) });
   return (
     <div className={`standing-line ${isStanding ? 'wash-water' : 'wash-none'}`}>
       <Mark name={isStanding ? (hold.system === 'dwv' ? 'level' : 'ready') : 'test-ended'} size={24} />

@@ -24,7 +24,12 @@ export function TestLog({ lotId, tests, systemWord, zone, canAddReading, canTest
   const { t } = useTranslation(['lots', 'common']);
   const [latest, ...older] = tests;
   const mayRead = canAddReading && latest?.state === 'standing';
-  const act = mayRead || canTest ? <Act size="sm" to={`/lots/${lotId}/test`}>{t(mayRead ? 'log.add' : 'log.start')}</Act> : null;
+  const act =
+    mayRead || canTest ? (
+      <Act size="sm" to={`/lots/${lotId}/test`}>
+        {t(mayRead ? 'log.add' : 'log.start')}
+      </Act>
+    ) : null;
   if (latest === undefined) {
     return (
       <Panel title={t('log.title', { system: systemWord })}>
@@ -101,12 +106,25 @@ function LogTable({ hold, zone }: { hold: Hold; zone: string }): ReactNode {
   );
 }
 
-function ReadingRow({ hold, reading, zone, hasValve }: { hold: Hold; reading: Reading; zone: string; hasValve: boolean }): ReactNode {
+function ReadingRow({
+  hold,
+  reading,
+  zone,
+  hasValve,
+}: {
+  hold: Hold;
+  reading: Reading;
+  zone: string;
+  hasValve: boolean;
+}): ReactNode {
   const { t } = useTranslation(['lots', 'common']);
   const words = useTimeWords();
   const readingWords = useReadingWords();
   const isOver =
-    hold.ceilingPsi !== null && reading.pressurePsi !== null && reading.pressurePsi > hold.ceilingPsi && !reading.isStruck;
+    hold.ceilingPsi !== null &&
+    reading.pressurePsi !== null &&
+    reading.pressurePsi > hold.ceilingPsi &&
+    !reading.isStruck;
   const number = <span className="n b">{readingWords.measure(hold, reading)?.number ?? ''}</span>;
   const isGaugeOnly = reading.gaugeValve === 'shut';
   return (
@@ -126,7 +144,9 @@ function ReadingRow({ hold, reading, zone, hasValve }: { hold: Hold; reading: Re
         {isGaugeOnly ? <span className="s mut row">{t('log.gaugeOnly')}</span> : null}
         {isOver ? <span className="s t-red row">{t('log.over')}</span> : null}
         {reading.note ? <span className="s mid row">{reading.note}</span> : null}
-        {reading.isStruck ? <span className="s t-red row">{t('log.struck', { why: reading.struckWhy ?? '' })}</span> : null}
+        {reading.isStruck ? (
+          <span className="s t-red row">{t('log.struck', { why: reading.struckWhy ?? '' })}</span>
+        ) : null}
       </td>
       <td className="mid">
         {reading.byName}

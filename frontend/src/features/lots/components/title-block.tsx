@@ -16,8 +16,7 @@ export function TitleNumber({ lot }: { lot: LotDetail }): ReactNode {
       <div className="c">
         <div className="lab">{t('table.lot')}</div>
         <h1 className="lot-number">
-          <span className="hidden-words">{t('table.lot')}</span>{' '}
-          {lot.number}
+          <span className="hidden-words">{t('table.lot')}</span> {lot.number}
         </h1>
       </div>
       <div className="c">
@@ -57,7 +56,9 @@ export function TitleState({ lot, view }: { lot: LotDetail; view: LotView }): Re
           <StateWord state={state} size={28} word={state === 'clear' ? t('title.plumbingClear') : undefined} />
         </div>
         {state === 'clear' ? <p className="s mid">{t('title.clearSays')}</p> : null}
-        {lot.openCorrections > 0 ? <p className="s t-red b">{t('stands.openCorrections', { count: lot.openCorrections })}</p> : null}
+        {lot.openCorrections > 0 ? (
+          <p className="s t-red b">{t('stands.openCorrections', { count: lot.openCorrections })}</p>
+        ) : null}
       </div>
       <div className="title-stages">
         <Choice

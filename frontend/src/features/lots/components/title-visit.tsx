@@ -67,7 +67,9 @@ function StandingVisit({ visit }: { visit: VisitSummary }): ReactNode {
           <StateWord state={look.mark} word={look.word} tone={look.tone} />
         </div>
         <div className="h2 visit-when">
-          <Numeral text={near === null ? words.dayWindow(window.startAt, window.endAt, zone) : `${capital(near)}, ${span}`} />
+          <Numeral
+            text={near === null ? words.dayWindow(window.startAt, window.endAt, zone) : `${capital(near)}, ${span}`}
+          />
         </div>
         <div className="s mid">
           {who.length > 0 ? <Numeral text={`${who.join(', ')}. `} /> : null}

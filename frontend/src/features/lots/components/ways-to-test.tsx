@@ -68,7 +68,9 @@ function useWayWords(house: HouseGeometry, chosen: DwvMethod | null, isGroundwor
     if (plan === null) return t('ways.notKnown');
     const [reason] = plan.reasons;
     if (reason !== undefined) {
-      return t(`reasons.${reason.code}`, { short: plan.shortByFt === null ? '' : measureWords(height(plan.shortByFt, units)) });
+      return t(`reasons.${reason.code}`, {
+        short: plan.shortByFt === null ? '' : measureWords(height(plan.shortByFt, units)),
+      });
     }
     if (plan.fillLevelFt === null) return t(method === chosen ? 'ways.chosenPlain' : 'ways.accepted');
     const level = measureWords(height(plan.fillLevelFt - datumFt, units));

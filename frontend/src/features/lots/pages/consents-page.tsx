@@ -22,7 +22,11 @@ export function ConsentsPage(): ReactNode {
       {isPhone ? (
         <PhoneHead label={t('head.label')} title={t('consents.title')} right={<span className="n">{count}</span>} />
       ) : (
-        <Head label={t('head.label')} title={t('consents.title')} cells={[{ label: t('consents.count'), value: count }]} />
+        <Head
+          label={t('head.label')}
+          title={t('consents.title')}
+          cells={[{ label: t('consents.count'), value: count }]}
+        />
       )}
       <QueryState query={consents}>
         {({ items }) =>

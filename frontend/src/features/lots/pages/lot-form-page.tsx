@@ -23,7 +23,17 @@ export function LotFormPage(): ReactNode {
   return lotId === undefined ? <NewLot /> : <KnownLot lotId={lotId} />;
 }
 
-function FormHead({ label, title, backTo, acts }: { label: string; title: string; backTo: string; acts?: ReactNode }): ReactNode {
+function FormHead({
+  label,
+  title,
+  backTo,
+  acts,
+}: {
+  label: string;
+  title: string;
+  backTo: string;
+  acts?: ReactNode;
+}): ReactNode {
   const { t } = useTranslation('common');
   const isPhone = useSheetWidth() === 'phone';
   if (isPhone) {

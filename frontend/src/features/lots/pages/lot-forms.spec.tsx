@@ -98,7 +98,9 @@ describe('a list of lots', () => {
     page();
     await userEvent.type(await screen.findByLabelText('Or paste the list'), 'number,adress');
     await userEvent.click(screen.getByRole('button', { name: 'Try it' }));
-    const rows = within(await screen.findByRole('table')).getAllByRole('row').slice(1);
+    const rows = within(await screen.findByRole('table'))
+      .getAllByRole('row')
+      .slice(1);
     expect(rows.map((row) => row.textContent)).toEqual([
       '1adressNo such column. Did you mean address?adress',
       '3permit_statusChoose one of those offered. Did you mean issued?isued',

@@ -50,18 +50,27 @@ describe('the lot sheet', () => {
     ];
     show({ holds: [holdOf({ readings })], at: '?system=water' });
     const struck = (await screen.findByText('struck: misread')).closest('tr');
-    expect(within(struck ?? document.body).getByText('131').closest('del')).not.toBeNull();
+    expect(
+      within(struck ?? document.body)
+        .getByText('131')
+        .closest('del'),
+    ).not.toBeNull();
   });
 
   it('names the second test the re-test and keeps the first below it', async () => {
     const first = holdOf({ id: uuid(301), state: 'ended', endedAt: '2026-04-12T15:00:00Z', endReason: 'lost' });
     show({ holds: [first, holdOf({ ordinal: 2 })], at: '?system=water' });
     expect(await screen.findByRole('heading', { name: 'Water, test 2 (re-test)' })).toBeInTheDocument();
-    expect(screen.getAllByText((_, part) => part?.tagName === 'SUMMARY' && part.textContent === 'Water, test 1')).toHaveLength(1);
+    expect(
+      screen.getAllByText((_, part) => part?.tagName === 'SUMMARY' && part.textContent === 'Water, test 1'),
+    ).toHaveLength(1);
   });
 
   it('says over the lowest-rated part alone, when the last open reading is', async () => {
-    show({ holds: [holdOf({ readings: [readingOf('2026-04-15T01:00:00Z', { pressurePsi: 130 })] })], at: '?system=water' });
+    show({
+      holds: [holdOf({ readings: [readingOf('2026-04-15T01:00:00Z', { pressurePsi: 130 })] })],
+      at: '?system=water',
+    });
     expect(await screen.findByRole('alert')).toHaveTextContent('let it down to 126 psi now');
     expect(screen.queryByText(/Never tighten/)).not.toBeInTheDocument();
   });
@@ -81,7 +90,9 @@ describe('the lot sheet', () => {
 
   it('does not ask while a correction is open, and says so in the act', async () => {
     show({ abilities: { canRequest: true }, lot: { openCorrections: 1 } });
-    expect(await screen.findByRole('button', { name: /Request a window.*1 open: fix first/ })).toHaveAttribute('aria-disabled');
+    expect(await screen.findByRole('button', { name: /Request a window.*1 open: fix first/ })).toHaveAttribute(
+      'aria-disabled',
+    );
   });
 
   it('shows of a visit the moves the server sends, and no others', async () => {
@@ -97,7 +108,10 @@ describe('the lot sheet', () => {
 
   it('lists corrections, the open ones first, and the way to act only for those who may', async () => {
     show({
-      corrections: [correctionOf({ state: 'accepted' }), correctionOf({ id: uuid(701), number: 2, text: 'No nail plate' })],
+      corrections: [
+        correctionOf({ state: 'accepted' }),
+        correctionOf({ id: uuid(701), number: 2, text: 'No nail plate' }),
+      ],
     });
     const part = await screen.findByRole('region', { name: 'Corrections' });
     const items = await within(part).findAllByRole('listitem');
@@ -107,7 +121,10 @@ describe('the lot sheet', () => {
 
   it('leads on a phone to the thread instead of showing it', async () => {
     show({ widthPx: 390 });
-    expect(await screen.findByRole('link', { name: 'Talk on this lot' })).toHaveAttribute('href', `/lots/${uuid(17)}/thread`);
+    expect(await screen.findByRole('link', { name: 'Talk on this lot' })).toHaveAttribute(
+      'href',
+      `/lots/${uuid(17)}/thread`,
+    );
     expect(screen.getAllByRole('heading', { level: 1 })).toHaveLength(1);
   });
 

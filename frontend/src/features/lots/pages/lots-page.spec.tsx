@@ -21,7 +21,11 @@ const tract = {
     parcels: ['17', '18', '19'].map((lotNumber, index) => ({ lotNumber, points: square(index * 60) })),
   },
 };
-const lots = [lotOf('17', {}, 'clear'), lotOf('18', {}, 'under-test'), lotOf('19', { openCorrections: 1 }, 'corrections-open')];
+const lots = [
+  lotOf('17', {}, 'clear'),
+  lotOf('18', {}, 'under-test'),
+  lotOf('19', { openCorrections: 1 }, 'corrections-open'),
+];
 
 function answers(parts: { plat?: null; lots?: object[]; waiting?: () => StubAnswer } = {}) {
   return {

@@ -16,7 +16,11 @@ const stage = (code: string, order: number, en: string, state: LotSummary['stage
   units: [{ unitNumber: 1, state }],
 });
 
-export function lotOf(number: string, parts: Partial<LotSummary> = {}, state: LotSummary['stages'][number]['state'] = 'not-tested'): LotSummary {
+export function lotOf(
+  number: string,
+  parts: Partial<LotSummary> = {},
+  state: LotSummary['stages'][number]['state'] = 'not-tested',
+): LotSummary {
   return {
     id: uuid(Number(number)),
     number,
@@ -36,7 +40,14 @@ export function lotOf(number: string, parts: Partial<LotSummary> = {}, state: Lo
 }
 
 const noAbilities: LotAbilities = {
-  ...{ canEdit: false, canEditGeometry: false, canSetPermit: false, canAttach: false, canRequest: false, canTest: false },
+  ...{
+    canEdit: false,
+    canEditGeometry: false,
+    canSetPermit: false,
+    canAttach: false,
+    canRequest: false,
+    canTest: false,
+  },
   ...{ canAddReading: false, canSayTestUp: false, canFix: false, canDecide: false, canComment: false },
 };
 
@@ -101,9 +112,20 @@ export function waitingOf(lotNumber: string, parts: Partial<WaitingItem> = {}): 
 
 export function visitOf(parts: Partial<VisitSummary> = {}): VisitSummary {
   return {
-    ...{ id: uuid(500), lotId: uuid(17), lotNumber: '17', tractName: 'Sorrel Bench, phase 2', address: '417 Sedge Loop' },
+    ...{
+      id: uuid(500),
+      lotId: uuid(17),
+      lotNumber: '17',
+      tractName: 'Sorrel Bench, phase 2',
+      address: '417 Sedge Loop',
+    },
     ...{ builderName: odderly.name, plumberName: 'Dunlatch Plumbing', departmentId: tallowmere.id },
-    ...{ departmentName: tallowmere.name, zone: 'America/Denver', stageCode: 'rough-in', stageName: { en: 'Rough-in' } },
+    ...{
+      departmentName: tallowmere.name,
+      zone: 'America/Denver',
+      stageCode: 'rough-in',
+      stageName: { en: 'Rough-in' },
+    },
     ...{ ruleCardVersion: 6, unitNumbers: [1], state: 'booked', version: 3, plannedStartAt: null, plannedEndAt: null },
     window: { date: '2030-04-17', label: 'morning', startAt: '2030-04-17T15:00:00Z', endAt: '2030-04-17T17:00:00Z' },
     ...{ inspector: null, systemsUp: [], upSince: null, upBy: null, outcome: null, endReason: null, endNote: null },

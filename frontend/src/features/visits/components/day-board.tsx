@@ -33,7 +33,6 @@ export function DayBoardView(props: DayBoardViewProps): ReactNode {
         className="board"
         role="grid"
         aria-label={t('board.grid', { day: words.date(board.date) })}
-        ref={keys.ref}
         onKeyDown={keys.onKeyDown}
         onFocus={keys.onFocus}
       >

@@ -43,7 +43,7 @@ export function EndQuestion({ visit, move, onKeep, onEnded }: EndQuestionProps):
   return (
     <Question
       isOpen
-      title={<Numeral text={t(`end.${move}.title`, { lot, when })} />}
+      title={<Numeral text={t(`end.${move}.title`, { lot: t('word.lot', { number: visit.lotNumber }), when })} />}
       keepWord={t(`end.${move}.keep`)}
       endWord={t(`end.${move}.act`)}
       endKind={move === 'not-reached' ? 'first' : 'ending'}

@@ -30,6 +30,7 @@ export function MoveForm({ visit, onKeep, onMoved }: MoveFormProps): ReactNode {
   const [isAll, setIsAll] = useState(false);
   const query = useMoveWindows(visit);
   const lot = t('common.lot', { number: visit.lotNumber });
+  const inline = t('word.lot', { number: visit.lotNumber });
   const moving = useMoveVisit((moved) => {
     const to = words.dayWindow(moved.window.startAt, moved.window.endAt, moved.zone);
     sayDone({
@@ -83,8 +84,11 @@ export function MoveForm({ visit, onKeep, onMoved }: MoveFormProps): ReactNode {
                   <Numeral
                     text={
                       chosen === undefined
-                        ? t('move.act', { lot })
-                        : t('move.actTo', { lot, to: words.dayWindow(chosen.startAt, chosen.endAt, visit.zone) })
+                        ? t('move.act', { lot: inline })
+                        : t('move.actTo', {
+                            lot: inline,
+                            to: words.dayWindow(chosen.startAt, chosen.endAt, visit.zone),
+                          })
                     }
                   />
                 </Act>

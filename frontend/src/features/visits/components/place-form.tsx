@@ -63,6 +63,7 @@ function PlaceOnDay({
   const [inspectorId, setInspectorId] = useState('');
   const chosen = windows.find((window) => windowKey(window) === key && window.isTakeable);
   const lot = t('common.lot', { number: visit.lotNumber });
+  const inline = t('word.lot', { number: visit.lotNumber });
   const placing = usePlaceVisit((placed) => {
     const when = words.dayWindow(placed.window.startAt, placed.window.endAt, placed.zone);
     sayDone({
@@ -131,8 +132,8 @@ function PlaceOnDay({
           <Numeral
             text={
               chosen === undefined
-                ? t('place.act', { lot })
-                : t('place.actAt', { lot, when: words.dayWindow(chosen.startAt, chosen.endAt, board.zone) })
+                ? t('place.act', { lot: inline })
+                : t('place.actAt', { lot: inline, when: words.dayWindow(chosen.startAt, chosen.endAt, board.zone) })
             }
           />
         </Act>

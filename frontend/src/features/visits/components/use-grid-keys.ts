@@ -1,10 +1,9 @@
-import { useRef, useState, type FocusEvent, type KeyboardEvent, type RefObject } from 'react';
+import { useState, type FocusEvent, type KeyboardEvent } from 'react';
 
 export interface GridKeys {
-  readonly ref: RefObject<HTMLDivElement | null>;
   /** One item of the grid is in the tab order: the last that had the focus, else the first. */
   readonly tabIndexOf: (id: string) => 0 | -1;
-  readonly onKeyDown: (event: KeyboardEvent) => void;
+  readonly onKeyDown: (event: KeyboardEvent<HTMLElement>) => void;
   readonly onFocus: (event: FocusEvent) => void;
 }
 
@@ -22,17 +21,15 @@ const rows: Ways = { along: ['ArrowLeft', 'ArrowRight'], across: ['ArrowUp', 'Ar
  * walk a lane and left and right change it where lanes are columns; the other way round where they are rows.
  */
 export function useGridKeys(lanesAre: 'columns' | 'rows', ids: readonly string[]): GridKeys {
-  const ref = useRef<HTMLDivElement>(null);
   const [active, setActive] = useState<string | null>(null);
   const ways = lanesAre === 'columns' ? columns : rows;
   const stop = active !== null && ids.includes(active) ? active : ids[0];
   return {
-    ref,
     tabIndexOf: (id) => (id === stop ? 0 : -1),
     onFocus: (event) => setActive(itemOf(event.target)?.dataset['item'] ?? null),
     onKeyDown: (event) => {
       const from = itemOf(event.target as Element);
-      const to = from === null ? null : stepFrom(from, event.key, ways, ref.current);
+      const to = from === null ? null : stepFrom(from, event.key, ways, event.currentTarget);
       if (to === null) return;
       event.preventDefault();
       to.querySelector<HTMLElement>('button, a')?.focus();
@@ -44,9 +41,9 @@ function itemOf(element: Element): HTMLElement | null {
   return element.closest<HTMLElement>('[data-item]');
 }
 
-function stepFrom(item: HTMLElement, key: string, ways: Ways, grid: HTMLElement | null): HTMLElement | null {
+function stepFrom(item: HTMLElement, key: string, ways: Ways, grid: HTMLElement): HTMLElement | null {
   const lane = item.closest<HTMLElement>('[data-lane]');
-  if (lane === null || grid === null) return null;
+  if (lane === null) return null;
   const along = ways.along.indexOf(key);
   const items = itemsOf(lane);
   if (along >= 0) return items[items.indexOf(item) + (along === 0 ? -1 : 1)] ?? null;

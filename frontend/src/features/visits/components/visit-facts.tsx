@@ -61,7 +61,7 @@ export function VisitFacts({ visit, now }: { visit: VisitSummary; now: Date }): 
             <Numeral text={words.dayClock(visit.neededBy, zone)} />
           </Cell>
         )}
-        <Cell label={t('visit.requestedAt')}>
+        <Cell label={t('visit.requestedAt')} isWide>
           <Numeral text={words.dayClock(visit.requestedAt, zone)} />
         </Cell>
       </Cells>

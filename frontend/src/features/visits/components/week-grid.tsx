@@ -39,7 +39,6 @@ export function WeekGrid({ calendar, days, now, chosenVisitId, offers, onOpenVis
         role="grid"
         aria-label={t('cal.grid', { days: words.dateRange(first, last) })}
         style={{ gridTemplateColumns: `55px repeat(${days.length}, minmax(0, 1fr))` }}
-        ref={keys.ref}
         onKeyDown={keys.onKeyDown}
         onFocus={keys.onFocus}
       >
