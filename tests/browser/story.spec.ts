@@ -10,10 +10,9 @@ import { inspectorOf } from './support/scene.js';
 import { keepShot } from './support/shots.js';
 import { startStack, type Stack } from './support/stack.js';
 import * as acts from './support/story-acts.js';
-import { isEveryBrowserTestRun } from './support/gate.js';
 
 /** One lot, three people in three browsers at once: asked for, moved, tested, failed, fixed, tested again, passed. */
-describe.skipIf(!isEveryBrowserTestRun)('the main job', { timeout: 300_000 }, () => {
+describe('the main job', { timeout: 300_000 }, () => {
   let stack: Stack;
   let browser: Browser;
   const opened: Opened[] = [];

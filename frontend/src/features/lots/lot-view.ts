@@ -14,13 +14,17 @@ export interface LotView {
   readonly show: (set: { stage?: string; unit?: string; system?: System }) => void;
 }
 
-/** What is looked at lives in the address. Without one: the stage the lot is at, its first unit, its first system. */
+/** States in which somebody has to do with a stage now. */
+const statesInPlay: readonly LotStage['state'][] = ['corrections-open', 'awaiting-visit', 'under-test'];
+
+/** What is looked at lives in the address. Without one: the stage in play, else the one the lot is at; its first unit, its first system. */
 export function useLotView(lot: LotDetail): LotView {
   const [search, setSearch] = useSearchParams();
   return useMemo(() => {
     const asked = lot.stages.find(({ code }) => code === search.get('stage'));
     const current = lot.stages.find(({ code }) => code === lot.currentStage) ?? lot.stages[lot.stages.length - 1];
-    const stage = asked ?? current ?? null;
+    const inPlay = lot.stages.find(({ state }) => statesInPlay.includes(state));
+    const stage = asked ?? inPlay ?? current ?? null;
     const systems: readonly System[] = stage?.systems.length ? stage.systems : ['dwv', 'water'];
     const unit = lot.units.find(({ number }) => String(number) === search.get('unit')) ?? lot.units[0];
     return {
