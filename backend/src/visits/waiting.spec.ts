@@ -67,7 +67,12 @@ describe('what waits', () => {
       ['correction-to-accept', false, 'Tallowmere', 1],
     ]);
     expect(brief(await waiting('inspector', lot))).toContainEqual(['correction-to-accept', true, 'Tallowmere', 1]);
-    await first.update({ state: 'fixed', fixedAt: server.clock.now(), fixedBy: world.people.plumber.id, fixNote: 'Set one' });
+    await first.update({
+      state: 'fixed',
+      fixedAt: server.clock.now(),
+      fixedBy: world.people.plumber.id,
+      fixNote: 'Set one',
+    });
     // nothing open any more and no visit coming: a window is missing
     expect(brief(await waiting('superintendent', lot))).toEqual([
       ['no-window', true, 'Odderly Homes', 1],
