@@ -8,11 +8,10 @@ import { signIn } from './support/people.js';
 import { makeScene } from './support/scene.js';
 import { keepShot } from './support/shots.js';
 import { startStack, type Stack } from './support/stack.js';
-import { isEveryBrowserTestRun } from './support/gate.js';
 
 type Visited = { person: WorldPerson | null; paths: string[] };
 
-describe.skipIf(!isEveryBrowserTestRun)('every page, at a phone and at a desk', { timeout: 600_000 }, () => {
+describe('every page, at a phone and at a desk', { timeout: 600_000 }, () => {
   let stack: Stack;
   let browser: Browser;
   let visited: Visited[];

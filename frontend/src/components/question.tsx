@@ -1,5 +1,6 @@
-import { useEffect, useId, useRef, type ReactNode } from 'react';
+import { useEffect, useId, type ReactNode } from 'react';
 import { Act } from './act';
+import { useModal } from './use-modal';
 
 export interface QuestionProps {
   isOpen: boolean;
@@ -24,14 +25,10 @@ export interface QuestionProps {
 export function Question(props: QuestionProps): ReactNode {
   const { isOpen, title, children, keepWord, endWord, onKeep, onEnd, endKind = 'ending', busy, error } = props;
   const id = useId();
-  const dialog = useRef<HTMLDialogElement>(null);
+  const dialog = useModal(isOpen);
   useEffect(() => {
-    const shown = dialog.current;
-    if (!isOpen || !shown) return;
-    shown.showModal();
-    shown.querySelector<HTMLButtonElement>('.acts button')?.focus();
-    return () => shown.close();
-  }, [isOpen]);
+    if (isOpen) dialog.current?.querySelector<HTMLButtonElement>('.acts button')?.focus();
+  }, [isOpen, dialog]);
   if (!isOpen) return null;
   return (
     <dialog

@@ -78,6 +78,22 @@ describe.each(['desk', 'phone'] as const)('WeekRibbon, %s', (form) => {
 });
 
 describe('WeekRibbon at the desk', () => {
+  it('keeps the weekday when Page Down goes a week on', async () => {
+    const week = (from: number): RibbonDay[] =>
+      Array.from({ length: 10 }, (_, index) => ({
+        date: `2026-06-${String(from + index).padStart(2, '0')}`,
+        label: `day ${from + index}`,
+        shelves: [],
+        marks: [],
+        notUp: 0,
+      }));
+    const { rerender } = render(<WeekRibbon days={week(1)} onPick={vi.fn()} onMove={() => rerender(later)} />);
+    const later = <WeekRibbon days={week(6)} onPick={vi.fn()} onMove={vi.fn()} />;
+    screen.getByRole('button', { name: /^day 10,/ }).focus();
+    await userEvent.keyboard('{PageDown}');
+    expect(screen.getByRole('button', { name: /^day 15,/ })).toHaveFocus();
+  });
+
   it('moves a week by its end arrows', async () => {
     const { move } = show();
     await userEvent.click(screen.getByRole('button', { name: 'One week later' }));

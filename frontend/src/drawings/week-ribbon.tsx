@@ -1,7 +1,8 @@
-import { useRef, type KeyboardEvent, type PointerEvent, type ReactNode } from 'react';
+import { useRef, type PointerEvent, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Icon } from '../components/icon';
 import { RibbonColumn } from './week-ribbon-column';
+import { useRibbonKeys } from './use-ribbon-keys';
 import { DayDrawing, SlimDayDrawing } from './week-ribbon-day';
 import type { RibbonDay, WeekRibbonProps } from './week-ribbon.types';
 
@@ -20,6 +21,7 @@ export function WeekRibbon(props: WeekRibbonProps): ReactNode {
   const { days, hours = { from: 7, to: 17 }, nowFraction, form = 'desk', over, span, end, onMove } = props;
   const { t } = useTranslation('marks');
   const drag = useDrag(onMove);
+  const keys = useRibbonKeys(days, onMove);
   const today = days.find((day) => day.isToday)?.date;
   const stop = tabStop(days);
   const isPhone = form === 'phone';
@@ -34,7 +36,7 @@ export function WeekRibbon(props: WeekRibbonProps): ReactNode {
           <Step word={t('ribbon.earlier')} icon="left" onStep={() => onMove(-1)} />
         </>
       )}
-      <div className="ribbon-days" onKeyDown={(event) => walk(event, onMove)} {...drag.handlers}>
+      <div className="ribbon-days" {...keys} {...drag.handlers}>
         {days.map((day, index) => (
           <RibbonColumn
             key={day.date}
@@ -82,19 +84,6 @@ function edgesOf(days: readonly RibbonDay[], index: number): string {
 function tabStop(days: readonly RibbonDay[]): number {
   const covered = days.findIndex((day) => day.isBracketed);
   return Math.max(0, covered >= 0 ? covered : days.findIndex((day) => day.isToday));
-}
-
-function walk(event: KeyboardEvent<HTMLDivElement>, onMove: (weeks: number) => void): void {
-  const buttons = [...event.currentTarget.querySelectorAll<HTMLButtonElement>('button.day')];
-  const at = buttons.findIndex((button) => button === document.activeElement);
-  const targets: Record<string, number> = { ArrowLeft: at - 1, ArrowRight: at + 1, Home: 0, End: buttons.length - 1 };
-  const weeks = { PageUp: -1, PageDown: 1 }[event.key];
-  const target = targets[event.key];
-  if (weeks === undefined && target === undefined) return;
-  event.preventDefault();
-  if (weeks !== undefined) onMove(weeks);
-  else if (target !== undefined && target >= 0 && target < buttons.length) buttons[target]?.focus();
-  else onMove(target === -1 ? -1 : 1);
 }
 
 interface Drag {

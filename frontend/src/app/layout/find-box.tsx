@@ -1,5 +1,5 @@
 import { searchLots } from '@holdwater/shared-types/lots/lot.contract.js';
-import { keepPreviousData, useQuery } from '@tanstack/react-query';
+import { keepPreviousData, queryOptions, useQuery, useQueryClient } from '@tanstack/react-query';
 import { useEffect, useId, useRef, useState, type KeyboardEvent, type ReactNode, type RefObject } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
@@ -11,25 +11,30 @@ import { useShortcut } from '../../lib/shortcuts';
 import { useDebounced } from '../../lib/use-debounced';
 import { FindResults, type Found } from './find-results';
 
+/** Lots of that number, permit or address. */
+const searchQuery = (q: string) =>
+  queryOptions({
+    queryKey: [...queryKeys.search, q],
+    queryFn: ({ signal }) => call(searchLots, { query: { q } }, { signal }),
+  });
+
 interface Finding {
   readonly found: readonly Found[];
   readonly isAsked: boolean;
+  /** Whether what was found is of the words as they stand now, not of those a moment ago. */
+  readonly isCurrent: boolean;
   readonly isLoading: boolean;
   readonly error: unknown;
 }
 
 function useFind(words: string): Finding {
   const asked = useDebounced(words.trim());
-  const search = useQuery({
-    queryKey: [...queryKeys.search, asked],
-    queryFn: ({ signal }) => call(searchLots, { query: { q: asked } }, { signal }),
-    enabled: asked !== '',
-    placeholderData: keepPreviousData,
-  });
+  const search = useQuery({ ...searchQuery(asked), enabled: asked !== '', placeholderData: keepPreviousData });
   const isAsked = words.trim() !== '';
   return {
     found: isAsked ? (search.data?.items ?? []) : [],
     isAsked,
+    isCurrent: asked === words.trim() && search.data !== undefined && !search.isPlaceholderData,
     isLoading: search.isPending,
     error: search.error,
   };
@@ -45,7 +50,8 @@ export function FindBox({ onLeave, isPhone = false }: { onLeave?: () => void; is
   const box = useRef<HTMLDivElement>(null);
   const navigate = useNavigate();
   const id = useId();
-  const { found, isAsked, isLoading, error } = useFind(words);
+  const { found, isAsked, isCurrent, isLoading, error } = useFind(words);
+  const queryClient = useQueryClient();
   const errorWords = useErrorWords(error);
   useShortcut('/', () => input.current?.focus());
   useLeave(box, () => setIsOpen(false));
@@ -57,12 +63,22 @@ export function FindBox({ onLeave, isPhone = false }: { onLeave?: () => void; is
     onLeave?.();
     void navigate(`/lots/${lot.id}`);
   };
+  /** Enter before the answer is there: the first of what these words find, unless they have changed by then. */
+  const openFirst = async (): Promise<void> => {
+    const q = words.trim();
+    if (q === '') return;
+    const { items } = await queryClient.fetchQuery(searchQuery(q));
+    if (input.current?.value.trim() === q) open(items[0]);
+  };
   const press = (event: KeyboardEvent): void => {
     if (event.key === 'ArrowDown' || event.key === 'ArrowUp') {
       event.preventDefault();
       setAt((now) => clamp(now + (event.key === 'ArrowDown' ? 1 : -1), found.length));
-    } else if (event.key === 'Enter') open(found[at]);
-    else if (event.key === 'Escape') {
+    } else if (event.key === 'Enter') {
+      if (isCurrent) open(found[at]);
+      // A failure is told by the list itself.
+      else openFirst().catch(() => undefined);
+    } else if (event.key === 'Escape') {
       setIsOpen(false);
       onLeave?.();
     }

@@ -1,11 +1,13 @@
-import { useEffect, useRef, type ReactNode } from 'react';
+import { useEffect, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { useNavigate } from 'react-router-dom';
 import { Act } from '../../components/act';
+import { useModal } from '../../components/use-modal';
 import { setSingleKeys, useShortcut, useSingleKeys } from '../../lib/shortcuts';
 import { sheetsFor } from '../sheets';
 import { useWorker } from '../use-worker';
 import { closeShortcutList, openShortcutList, useIsShortcutListOpen } from './shortcut-list-state';
+import './shortcuts.css';
 
 const digits = ['1', '2', '3', '4', '5', '6', '7', '8', '9'] as const;
 /** As printed; the words are `app.shortcuts.keys.<name>`. */
@@ -39,12 +41,7 @@ export function Shortcuts(): ReactNode {
 function ShortcutList(): ReactNode {
   const { t } = useTranslation('app');
   const areOn = useSingleKeys();
-  const dialog = useRef<HTMLDialogElement>(null);
-  useEffect(() => {
-    const shown = dialog.current;
-    shown?.showModal();
-    return () => shown?.close();
-  }, []);
+  const dialog = useModal();
   return (
     <dialog ref={dialog} className="question" aria-labelledby="shortcut-title" onClose={closeShortcutList}>
       <div className="told">

@@ -105,6 +105,14 @@ describe('find', () => {
     expect(screen.getByText(`at /lots/${lot17.id}`)).toBeInTheDocument();
   });
 
+  it('opens what the words as they stand find, when Enter comes before the answer', async () => {
+    open();
+    const box = screen.getByRole('combobox');
+    await userEvent.type(box, '17{Enter}');
+    expect(await screen.findByText(`at /lots/${lot17.id}`)).toBeInTheDocument();
+    expect(box).toHaveValue('');
+  });
+
   it('says so when nothing matches', async () => {
     open();
     await userEvent.type(screen.getByRole('combobox'), 'nowhere');
