@@ -41,10 +41,10 @@ async function addVisit(state: string, stage = stageCode): Promise<string> {
   const id = randomUUID();
   await insert(
     `INSERT INTO visits (id, lot_id, department_id, rule_card_id, stage_code, unit_numbers, state, window_date, window_label, "window", place, inspector_id,
-       planned, requested_by, requesting_side, requested_at, begun_at, begun_from, calendar_uid, created_at)
-     VALUES (:id, :lotId, :departmentId, :ruleCardId, :stage, '{1}', :state, '2027-03-03', :id, tstzrange('2027-03-03T14:30Z', '2027-03-03T16:00Z'), 1,
+       planned, requested_by, requesting_side, requested_at, begun_at, begun_from, ended_at, calendar_uid, created_at)
+     VALUES (:id, :lotId, :departmentId, :ruleCardId, :stage, '{1}', :state, '2027-03-03', 'early', tstzrange('2027-03-03T14:30Z', '2027-03-03T16:00Z'), 1,
        :inspectorId, tstzrange(CAST(:now AS timestamptz) + make_interval(hours => :n), CAST(:now AS timestamptz) + make_interval(hours => :n, mins => 30)),
-       :requestedBy, 'builder', :now, :now, 'ready', :id, :now)`,
+       :requestedBy, 'builder', :now, :now, 'ready', CASE WHEN :state = 'closed' THEN CAST(:now AS timestamptz) END, :id, :now)`,
     {
       ...{ id, state, stage, lotId: lot.id, n: number },
       departmentId: world.organizations.department.id,
@@ -143,7 +143,7 @@ describe('state of plumbing', () => {
     expect(await recompute()).toBe('under-test');
     await insert(`UPDATE visits SET state = 'ready' WHERE id = :visitId`, { visitId });
     expect(await recompute()).toBe('awaiting-visit');
-    await insert(`UPDATE visits SET state = 'withdrawn' WHERE id = :visitId`, { visitId });
+    await insert(`UPDATE visits SET state = 'withdrawn', ended_at = :now WHERE id = :visitId`, { visitId });
     expect(await recompute()).toBe('under-test');
     await addOutcome();
     expect(await recompute()).toBe('clear');

@@ -27,6 +27,9 @@ export class HoldModel extends Model {
   declare ordinal: number;
 
   @Column(DataType.UUID)
+  declare planId: string | null;
+
+  @Column(DataType.UUID)
   declare plumberId: string;
 
   @Column(DataType.TEXT)

@@ -228,12 +228,29 @@ describe('tests over the API', () => {
       expect(pressures).toEqual([71, 73, 72]);
     });
 
-    it('are struck once with a reason by the plumber or whoever made them, and kept', async () => {
+    it('of an inspector or a superintendent are struck by nobody of the crew, those of the crew by any of it', async () => {
+      for (const person of ['inspector', 'superintendent', 'helper'] as const) {
+        const body = scenario.pressure(56);
+        const added = await addAs(person, body).expect(201);
+        const reading = (added.body as Hold).readings.find((each) => each.byRole === person && each.pressurePsi === 56);
+        const strikeAs = (who: WorldPerson) =>
+          world.as(who).post(`/api/readings/${reading?.id}/strike`, { why: 'misread' });
+        if (person === 'helper') {
+          for (const who of ['superintendent', 'inspector'] as const) await strikeAs(who).expect(403);
+          await strikeAs('plumber').expect(200);
+        } else {
+          for (const who of ['plumber', 'helper'] as const) await strikeAs(who).expect(403);
+          await strikeAs(person).expect(200);
+        }
+      }
+    });
+
+    it('are struck once with a reason by whoever made them, and kept', async () => {
       const added = await addAs('superintendent', scenario.pressure(55)).expect(201);
       const reading = (added.body as Hold).readings.find((each) => each.pressurePsi === 55);
       const strikeAs = (person: WorldPerson, why = 'misread') =>
         world.as(person).post(`/api/readings/${reading?.id}/strike`, { why });
-      for (const person of ['helper', 'inspector', 'desk', 'builderOwner'] as const) {
+      for (const person of ['plumber', 'helper', 'inspector', 'desk', 'builderOwner'] as const) {
         expect((await strikeAs(person).expect(403)).body.code).toBe('not-allowed');
       }
       for (const person of ['otherPlumber', 'otherSuperintendent'] as const) await strikeAs(person).expect(404);
@@ -243,11 +260,11 @@ describe('tests over the API', () => {
         isStruck: true,
         struckWhy: 'misread',
       });
-      expect((await strikeAs('plumber').expect(409)).body).toMatchObject({
+      expect((await strikeAs('superintendent').expect(409)).body).toMatchObject({
         code: 'reading-struck',
         params: { why: 'misread' },
       });
-      expect((await strikeAs('plumber', ' ').expect(400)).body.fields).toEqual({ why: 'required' });
+      expect((await strikeAs('superintendent', ' ').expect(400)).body.fields).toEqual({ why: 'required' });
       await world.as('plumber').post(`/api/readings/${randomUUID()}/strike`, { why: 'none' }).expect(404);
     });
 

@@ -8,7 +8,10 @@ import {
   canStrikeReading,
   downMoveOf,
   isVisitOfAnother,
+  type StruckFacts,
 } from './holds.policy.js';
+
+type ReadingRole = StruckFacts['byRole'];
 
 const lot = { builderId: 'builder', plumberId: 'plumber', departmentId: 'department', mayPlumberRequest: true };
 type Place = [organizationId: string, ...roles: MemberRole[]];
@@ -40,14 +43,25 @@ describe('who may do what to a test', () => {
     expect(whoMay((each) => canSayTestUp(each, lot))).toEqual(['plumber']);
   });
 
-  it('lets the plumber strike any reading, and others their own while they may read', () => {
-    expect(whoMay((each) => canStrikeReading(each, lot, { byPerson: 'other' }))).toEqual(['plumber']);
-    expect(whoMay((each) => canStrikeReading(each, lot, { byPerson: 'me' }))).toEqual([
-      'superintendent',
-      'plumber',
-      'helper',
-      'inspector',
-    ]);
+  describe('lets a reading be struck', () => {
+    const struck = (byRole: ReadingRole, byPerson = 'other', plumberId = 'plumber') =>
+      whoMay((each) => canStrikeReading(each, lot, { byPerson, byRole, plumberId }));
+
+    it.each(['plumber', 'helper', 'superintendent', 'inspector'] as const)(
+      'of a %s by whoever made it, while they may read',
+      (role) => {
+        expect(struck(role, 'me')).toEqual(['superintendent', 'plumber', 'helper', 'inspector']);
+      },
+    );
+
+    it('of the crew by the crew, and of another organization by nobody', () => {
+      for (const role of ['plumber', 'helper'] as const) expect(struck(role)).toEqual(['plumber', 'helper']);
+      for (const role of ['superintendent', 'inspector'] as const) expect(struck(role)).toEqual([]);
+    });
+
+    it('of a crew that left the lot by nobody of the new one', () => {
+      expect(struck('plumber', 'other', 'former plumber')).toEqual([]);
+    });
   });
 
   it('lets the plumber say it is down, and the inspector of the visit find it so', () => {

@@ -1,5 +1,12 @@
 import { type Actor, hasRole } from '../common/access/actor.js';
-import { canAddReading, canTest, isImpartialInspectorOf, isPlumberOf, type LotParties } from '../lots/lots.policy.js';
+import {
+  canAddReading,
+  canTest,
+  isHelperOf,
+  isImpartialInspectorOf,
+  isPlumberOf,
+  type LotParties,
+} from '../lots/lots.policy.js';
 
 /** Choose a method, start and end a test: the plumber alone. */
 export function canStartHold(actor: Actor, lot: LotParties): boolean {
@@ -10,9 +17,23 @@ export function canEndHold(actor: Actor, lot: LotParties): boolean {
   return canTest(actor, lot);
 }
 
-/** The plumber of the lot, or whoever made the reading and may still add one. */
-export function canStrikeReading(actor: Actor, lot: LotParties, reading: { readonly byPerson: string }): boolean {
-  return isPlumberOf(actor, lot) || (reading.byPerson === actor.personId && canAddReading(actor, lot));
+/** What of a reading and its test decides who may strike it. */
+export interface StruckFacts {
+  readonly byPerson: string;
+  readonly byRole: 'plumber' | 'helper' | 'superintendent' | 'inspector';
+  /** The plumbing contractor whose test it is; its plumbers and helpers read in its name. */
+  readonly plumberId: string;
+}
+
+/**
+ * Whoever made the reading and may still add one; for a reading of the plumbing contractor also its other plumbers and helpers, while it
+ * is on the lot. Nobody strikes what another organization read.
+ */
+export function canStrikeReading(actor: Actor, lot: LotParties, reading: StruckFacts): boolean {
+  if (reading.byPerson === actor.personId) return canAddReading(actor, lot);
+  const isOfPlumber = reading.byRole === 'plumber' || reading.byRole === 'helper';
+  const isOfCrew = isPlumberOf(actor, lot) || isHelperOf(actor, lot);
+  return isOfPlumber && isOfCrew && reading.plumberId === lot.plumberId;
 }
 
 export function canSayTestUp(actor: Actor, lot: LotParties): boolean {

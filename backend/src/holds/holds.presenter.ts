@@ -31,6 +31,7 @@ function presentHold(hold: HoldModel, readings: readonly NamedReading[]): Hold {
     stageCode: hold.stageCode,
     system: hold.system,
     ordinal: hold.ordinal,
+    planId: hold.planId ?? null,
     method: hold.method,
     medium: hold.medium,
     gauge: hold.gauge,

@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { RouteCall } from '@holdwater/shared-types/common/route.js';
 import type { addReading, Hold, startHold } from '@holdwater/shared-types/holds/hold.contract.js';
 import type { LotModel } from '../lots/lot.model.js';
+import { asOwner } from '../testing/fixtures/visits.js';
 import type { World, WorldPerson } from '../testing/fixtures/world.js';
 import type { TestApp } from '../testing/test-app.js';
 import { VisitModel } from '../visits/visit.model.js';
@@ -92,6 +93,13 @@ export class HoldScenario {
     return { dwv, water };
   }
 
+  /** Every window of the rule card takes as many visits as a test of these makes in it. */
+  private async makeRoom(): Promise<void> {
+    const sql = `UPDATE rule_cards SET content = jsonb_set(content, '{asking,windows}', (SELECT jsonb_agg(w || '{"room": 50}')
+      FROM jsonb_array_elements(content -> 'asking' -> 'windows') w)) WHERE id = $1`;
+    await asOwner(this.server, sql, [this.world.ruleCard.id]);
+  }
+
   async visit(lot: LotModel, wish: VisitWish = {}): Promise<VisitModel> {
     const {
       label = 'mid',
@@ -103,6 +111,7 @@ export class HoldScenario {
     const now = this.server.clock.now();
     const [startAt, endAt] = windows[label].map((at) => new Date(at)) as [Date, Date];
     this.visits += 1;
+    if (this.visits === 1) await this.makeRoom();
     const from = wish.plannedAt
       ? Date.parse(wish.plannedAt)
       : Date.parse('2027-03-02T00:00:00Z') + this.visits * 30 * 60_000;

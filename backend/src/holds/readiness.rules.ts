@@ -1,4 +1,6 @@
 import type { Medium, System } from '@holdwater/shared-types/holds/hold.states.js';
+import { refuse } from '../common/errors/app-error.js';
+import type { StandingHold } from './holds.queries.js';
 import { isLevelTest } from './reading.rules.js';
 
 export interface CountedReading {
@@ -66,6 +68,31 @@ export function readinessOf(required: readonly RequiredTest[], standing: readonl
     overLimit ??= overLimitOf(each, test, reading);
   }
   return { missing, overLimit, readingIds };
+}
+
+/** The readings a statement may rest on now. @throws over-limit, reading-missing */
+export function requireStanding(
+  required: readonly RequiredTest[],
+  standing: readonly StandingTest[],
+): readonly string[] {
+  const { missing, overLimit, readingIds } = readinessOf(required, standing);
+  if (overLimit !== null) refuse('over-limit', { ...overLimit });
+  if (missing.length > 0) refuse('reading-missing', { missing });
+  return readingIds;
+}
+
+/** A standing test as the rules look at it. */
+export function standingTest({ hold, readings }: StandingHold): StandingTest {
+  const { unitNumber, system, medium, minimumPsi, ceilingPsi } = hold;
+  return { unitNumber, system, medium, minimumPsi, ceilingPsi, readings };
+}
+
+/** The same as it stood at an instant: only what had been read by then. */
+export function standingBy(at: Date): (standing: StandingHold) => StandingTest {
+  return (standing) => {
+    const test = standingTest(standing);
+    return { ...test, readings: test.readings.filter(({ madeAt }) => madeAt <= at) };
+  };
 }
 
 /** The last reading that says something of the pipe itself; late arrivals take the place of the time they were made at. */

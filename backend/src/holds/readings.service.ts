@@ -52,7 +52,9 @@ export class Readings {
       const reading = (await this.readings.findByPk(readingId, { lock: true })) ?? refuse('not-found');
       const hold = (await this.holds.findByPk(reading.holdId)) ?? refuse('not-found');
       const lot = await this.lots.getLotFor(actor, hold.lotId);
-      if (!canStrikeReading(actor, lot, reading)) refuse('not-allowed', { who: 'plumber-or-maker' });
+      const { byPerson, byRole } = reading;
+      const facts = { byPerson, byRole, plumberId: hold.plumberId };
+      if (!canStrikeReading(actor, lot, facts)) refuse('not-allowed', { who: 'maker-or-crew' });
       if (reading.struckAt !== null) refuse('reading-struck', { why: reading.struckWhy });
       await reading.update({ struckAt: this.clock.now(), struckBy: actor.personId, struckWhy: why });
       const by = { personId: actor.personId, role: actingRole(actor, lot) };

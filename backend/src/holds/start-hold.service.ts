@@ -13,6 +13,8 @@ import { type RuleCardVersion, RuleCardsQueries } from '../departments/rule-card
 import { Ledger } from '../ledger/ledger.service.js';
 import type { LotRecord } from '../lots/lot-record.js';
 import { LotsQueries } from '../lots/lots.queries.js';
+import { PlansQueries } from '../plans/plans.queries.js';
+import type { TestPlanModel } from '../plans/test-plan.model.js';
 import { VisitMoves } from '../visits/visit-moves.service.js';
 import type { VisitModel } from '../visits/visit.model.js';
 import { HoldEnd } from './hold-end.service.js';
@@ -20,6 +22,7 @@ import { HoldModel } from './hold.model.js';
 import { canStartHold } from './holds.policy.js';
 import { HoldsPresenter } from './holds.presenter.js';
 import { HoldsQueries } from './holds.queries.js';
+import { asPlanned, planOfTest } from './planned-test.js';
 import { ReadingLog } from './reading-log.service.js';
 import { TestedVisitQueries } from './tested-visit.queries.js';
 import { type TestTerms, termsOf } from './test-rule.rules.js';
@@ -35,6 +38,7 @@ export class StartHold {
     private readonly clock: Clock,
     private readonly lots: LotsQueries,
     private readonly ruleCards: RuleCardsQueries,
+    private readonly plans: PlansQueries,
     private readonly tested: TestedVisitQueries,
     private readonly moves: VisitMoves,
     private readonly queries: HoldsQueries,
@@ -45,7 +49,7 @@ export class StartHold {
     private readonly presenter: HoldsPresenter,
   ) {}
 
-  /** @throws not-found, not-allowed, stage-unknown, method-not-accepted, hold-standing, bad-input, reading-out-of-gauge */
+  /** @throws not-found, not-allowed, stage-unknown, method-not-accepted, hold-standing, bad-input (a plan of another part or way too), reading-out-of-gauge */
   async start(actor: Actor, lotId: string, body: Body): Promise<Hold> {
     return this.unitOfWork.run(async () => {
       const visit = await this.lockTestedVisit(actor, lotId, body);
@@ -55,7 +59,9 @@ export class StartHold {
       if (repeated !== null) return this.presenter.one(repeated);
       await this.checkUnit(lotId, body.unitNumber);
       const { content } = await this.ruleCardFor(lot, visit);
-      const hold = await this.create(actor, lot, visit, body, termsOf(content, body));
+      const plan = await this.findPlan(lotId, body);
+      const planned = asPlanned(body, plan);
+      const hold = await this.create(actor, lot, visit, planned, termsOf(content, planned), plan?.id ?? null);
       const { madeAt, ...first } = body.firstReading;
       const corrected = correctedMadeAt(madeAt, this.clock.now());
       await this.log.append(hold, { ...first, madeAt: corrected }, actor, 'plumber', 'firstReading.');
@@ -91,12 +97,18 @@ export class StartHold {
     return inForce.get(departmentId) ?? refuse('no-rule-card');
   }
 
+  private async findPlan(lotId: string, body: Body): Promise<TestPlanModel | null> {
+    const named = body.planId ? await this.plans.findPlan(body.planId) : null;
+    return planOfTest(lotId, body, named, await this.plans.findCurrent(lotId, body));
+  }
+
   private async create(
     actor: Actor,
     lot: LotRecord,
     visit: VisitModel | null,
     body: Body,
     terms: TestTerms,
+    planId: string | null,
   ): Promise<HoldModel> {
     const now = this.clock.now();
     const startedAt = correctedMadeAt(body.madeAt, now);
@@ -115,6 +127,7 @@ export class StartHold {
       stageCode,
       system,
       ordinal,
+      planId,
       plumberId: lot.plumberId,
       method: body.method,
       medium: body.medium,

@@ -207,15 +207,20 @@ describe('saying that the test is up, and that it is down again', () => {
     });
   });
 
-  it('saves nothing on a visit that was freed meanwhile, though it was said in time', async () => {
+  it('keeps the readings of a statement on a visit that changed meanwhile, though nothing is said up', async () => {
     const lot = world.lots[4];
     const { water } = await scenario.standUp(lot);
     const visit = await scenario.visit(lot, { label: 'late' });
-    await visit.update({ state: 'freed', version: 1, endedAt: server.clock.now() });
-    const readings = [{ holdId: water.id, ...scenario.pressure(115, 'open', 30) }];
+    await visit.update({ state: 'withdrawn', version: 1, endedAt: server.clock.now() });
+    const elsewhere = { holdId: randomUUID(), ...scenario.pressure(114) };
+    const readings = [{ holdId: water.id, ...scenario.pressure(115, 'open', 30) }, elsewhere];
     const answer = await upAs('plumber', visit, { ...scenario.stamp(30), expectedVersion: 0, readings }).expect(409);
-    expect(answer.body).toMatchObject({ code: 'stale-state', params: { is: 'freed', version: 1 } });
-    expect(await ReadingModel.count({ where: { holdId: water.id } })).toBe(1);
+    expect(answer.body).toMatchObject({
+      code: 'stale-state',
+      params: { is: 'withdrawn', version: 1, readingsKept: 1 },
+    });
+    expect(await ReadingModel.count({ where: { holdId: water.id } })).toBe(2);
+    expect(await TestUpModel.count({ where: { visitId: visit.id } })).toBe(0);
   });
 
   it('lets one of two at the same moment through', async () => {

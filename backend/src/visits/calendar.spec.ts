@@ -43,6 +43,10 @@ describe('the calendar', () => {
     expect(body.lanes[0].days).toHaveLength(14);
     expect(windowOf(body, nextDay, 'early')).toMatchObject({ room: 3, roomLeft: 2, up: null, isTakeable: true });
     expect(windowOf(body, '2027-03-02', 'late')).toMatchObject({ isTakeable: false });
+    // asked for by 3 pm the working day before, Monday to Thursday (MST, UTC−7; IANA tz): Monday's week begins on the Thursday before it
+    expect(windowOf(body, nextDay, 'early')).toMatchObject({ cutoffAt: '2027-03-02T22:00:00.000Z' });
+    expect(windowOf(body, '2027-03-08', 'late')).toMatchObject({ cutoffAt: '2027-03-04T22:00:00.000Z' });
+    expect(windowOf(body, '2027-03-01', 'early')).toMatchObject({ cutoffAt: '2027-02-25T22:00:00.000Z' });
     expect(body.visits.map(({ id }: { id: string }) => id)).toEqual([past.id, booked.id]);
     expect(body.visits[0]).toMatchObject({ state: 'closed', outcome: { kind: 'fail', reason: null } });
   });
@@ -69,7 +73,10 @@ describe('the calendar', () => {
     expect(JSON.stringify(body)).not.toContain('Sedge Hollow');
     expect(JSON.stringify(body)).not.toContain(world.otherLot.id);
     expect(JSON.stringify((await calendar('otherSuperintendent')).body)).not.toContain('Quillback Rise');
-    await VisitModel.update({ state: 'withdrawn' }, { where: { id: foreign.body.visits[0].id } });
+    await VisitModel.update(
+      { state: 'withdrawn', endedAt: server.clock.now() },
+      { where: { id: foreign.body.visits[0].id } },
+    );
     await LotModel.update(
       { departmentId: world.organizations.otherDepartment.id },
       { where: { id: world.otherLot.id } },

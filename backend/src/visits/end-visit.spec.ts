@@ -64,7 +64,7 @@ describe.each(ways)('$path', ({ path, body, by, to }) => {
     expect(again.status).toBe(201);
     expect((await VisitModel.findByPk(again.body.visits[0].id))?.place).toBe(2);
     for (const { id } of [...visits, again.body.visits[0]])
-      await VisitModel.update({ state: 'withdrawn' }, { where: { id } });
+      await VisitModel.update({ state: 'withdrawn', endedAt: server.clock.now() }, { where: { id } });
   });
 
   it('is refused by another version, and once it is over', async () => {
@@ -73,7 +73,7 @@ describe.each(ways)('$path', ({ path, body, by, to }) => {
       code: 'stale-state',
       params: { is: 'booked', version: 0 },
     });
-    await VisitModel.update({ state: 'closed' }, { where: { id: visit.id } });
+    await VisitModel.update({ state: 'closed', endedAt: server.clock.now() }, { where: { id: visit.id } });
     expect((await act(visit, path, body, by)).body).toMatchObject({ code: 'stale-state', params: { is: 'closed' } });
   });
 
@@ -81,17 +81,25 @@ describe.each(ways)('$path', ({ path, body, by, to }) => {
     const visit = await newVisit('late', '2027-03-08');
     const others = (
       ['superintendent', 'helper', 'inspector', 'desk', 'builderOwner', 'departmentOwner'] as const
-    ).filter((who) => who !== by);
+    ).filter((who) => who !== by && !(path === 'withdraw' && who === 'desk'));
     for (const who of others) expect((await act(visit, path, body, who)).body).toMatchObject({ code: 'not-allowed' });
     for (const who of ['otherSuperintendent', 'otherPlumber', 'otherDesk', 'operator'] as const) {
       expect((await act(visit, path, body, who)).body).toMatchObject({ code: 'not-found' });
     }
     expect(await readVisit(world, visit.id)).toMatchObject({ state: 'booked', version: 0 });
-    await VisitModel.update({ state: 'withdrawn' }, { where: { id: visit.id } });
+    await VisitModel.update({ state: 'withdrawn', endedAt: server.clock.now() }, { where: { id: visit.id } });
   });
 });
 
 describe('a withdrawal', () => {
+  it('is the desk’s too, whoever asked for the visit, and is written down as the desk’s', async () => {
+    const visit = await newVisit('mid');
+    expect((await readVisit(world, visit.id, 'desk')).moves).toContain('withdraw');
+    const answer = await act(visit, 'withdraw', { reason: 'plans-changed', note: 'They called' }, 'desk');
+    expect(answer.body).toMatchObject({ state: 'withdrawn', endReason: 'plans-changed', endNote: 'They called' });
+    expect((await ledgerOf(visit.id)).at(-1)).toMatchObject({ kind: 'visit-withdrawn', actorRole: 'desk' });
+  });
+
   it('says why, and whether there was anything in a calendar', async () => {
     const visit = await newVisit('mid');
     expect((await act(visit, 'withdraw', { reason: 'weather', note: 'Rain' }, 'plumber')).body).toMatchObject({

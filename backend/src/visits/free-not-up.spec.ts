@@ -41,7 +41,10 @@ async function sweepAt(now: string): Promise<string[]> {
 }
 
 beforeEach(async () => {
-  await VisitModel.update({ state: 'withdrawn' }, { where: { state: ['booked', 'ready', 'underway'] } });
+  await VisitModel.update(
+    { state: 'withdrawn', endedAt: server.clock.now() },
+    { where: { state: ['booked', 'ready', 'underway'] } },
+  );
   server.clock.set(testNow);
   await useRuleCard(sevenOClock);
 });

@@ -2,11 +2,8 @@ import { Injectable } from '@nestjs/common';
 import type { OfferedWindow } from '@holdwater/shared-types/visits/visit.contract.js';
 import type { Actor } from '../common/access/actor.js';
 import { AppError, refuse } from '../common/errors/app-error.js';
-import { constraintOf } from './constraint-of.js';
 import { Offers, type OffersWish } from './offers.service.js';
-
-/** Constraints that keep a room and an inspector's time from being taken twice: the net below the lock of the day. */
-const seatConstraints = ['visits_one_place', 'visits_inspector_once'];
+import { bookTwice } from './seat-taken.js';
 
 /** What happens when somebody else was quicker. */
 @Injectable()
@@ -19,7 +16,7 @@ export class FullWindows {
    */
   async telling<T>(actor: Actor, wish: OffersWish, book: () => Promise<T>): Promise<T> {
     try {
-      return await this.twice(book);
+      return await bookTwice(book);
     } catch (error) {
       if (!(error instanceof AppError) || error.code !== 'window-full') throw error;
       return refuse('window-full', { ...error.params, offers: await this.nextBest(actor, wish) });
@@ -35,22 +32,4 @@ export class FullWindows {
       throw error;
     }
   }
-
-  private async twice<T>(book: () => Promise<T>): Promise<T> {
-    try {
-      return await book();
-    } catch (error) {
-      if (!isTaken(error)) throw error;
-    }
-    try {
-      return await book();
-    } catch (error) {
-      if (!isTaken(error)) throw error;
-      return refuse('window-full', { why: 'full' });
-    }
-  }
-}
-
-function isTaken(error: unknown): boolean {
-  return seatConstraints.includes(constraintOf(error) ?? '');
 }

@@ -19,6 +19,8 @@ interface LaneFacts {
   /** Null for the own department, which is bound by no cut-off. */
   readonly openDays: OpenDays | null;
   readonly taken: readonly TakenPlace[];
+  /** By date; empty where no version is in force today. */
+  readonly cutoffs: ReadonlyMap<string, Date>;
 }
 
 /** A department's days with their windows, room and closures, as much of it as the reader may know. */
@@ -53,11 +55,14 @@ export class Lanes {
     const windows = (await this.windows.list(departmentId, fromDate, toDate)).filter(({ isClosed }) => !isClosed);
     const taken = await this.queries.listTaken(departmentId, fromDate, toDate);
     const openDays = isOwn ? null : isInForce ? await this.workingTime.noticeFor(departmentId, now) : noDays;
+    const dates = days.map(({ date }) => date);
+    const cutoffs = await this.workingTime.cutoffsFor(departmentId, dates, now);
+    const facts = { now, isOwn, openDays, taken, cutoffs };
     return days.map((day) =>
       dayOf(
         day,
         windows.filter(({ date }) => date === day.date),
-        { now, isOwn, openDays, taken },
+        facts,
       ),
     );
   }
@@ -79,7 +84,7 @@ function dayOf(
   };
 }
 
-function windowOf(window: DayWindow, { now, isOwn, openDays, taken }: LaneFacts): LaneDay['windows'][number] {
+function windowOf(window: DayWindow, { now, isOwn, openDays, taken, cutoffs }: LaneFacts): LaneDay['windows'][number] {
   const { date, label, startAt, endAt, room } = window;
   const here = taken.filter((place) => keyOf(place) === keyOf(window));
   const roomLeft = roomLeftOf(window, here);
@@ -93,5 +98,12 @@ function windowOf(window: DayWindow, { now, isOwn, openDays, taken }: LaneFacts)
     roomLeft,
     up: isOwn ? here.filter(({ isUp }) => isUp).length : null,
     isTakeable,
+    cutoffAt: earlierOf(cutoffs.get(date), startAt),
   };
+}
+
+/** Nobody asks for a window that has begun, whatever the cut-off says. */
+function earlierOf(cutoff: Date | undefined, startAt: string): string | null {
+  if (cutoff === undefined) return null;
+  return new Date(Math.min(cutoff.getTime(), Date.parse(startAt))).toISOString();
 }

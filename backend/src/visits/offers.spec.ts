@@ -97,7 +97,11 @@ describe('offers', () => {
     for (const { date, label, isTakeable, whyNot } of body.windows as Offer[]) {
       const answer = await ask(world, [world.lots[5].id], { date, label });
       expect([date, label, answer.status]).toEqual([date, label, isTakeable ? 201 : 409]);
-      if (isTakeable) await VisitModel.update({ state: 'withdrawn' }, { where: { id: answer.body.visits[0].id } });
+      if (isTakeable)
+        await VisitModel.update(
+          { state: 'withdrawn', endedAt: server.clock.now() },
+          { where: { id: answer.body.visits[0].id } },
+        );
       else
         expect(answer.body.code).toBe(
           { past: 'window-past', full: 'window-full', closed: 'window-closed' }[whyNot ?? ''] ?? whyNot,

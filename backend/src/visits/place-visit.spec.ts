@@ -215,7 +215,7 @@ describe('a visit moves', () => {
       { where: { id: visit.id } },
     );
     expect((await move(visit, {})).body).toMatchObject({ code: 'stale-state', params: { is: 'underway' } });
-    await VisitModel.update({ state: 'closed' }, { where: { id: visit.id } });
+    await VisitModel.update({ state: 'closed', endedAt: server.clock.now() }, { where: { id: visit.id } });
     expect((await move(visit, {}, 'desk')).body).toMatchObject({ code: 'stale-state', params: { is: 'closed' } });
   });
 });

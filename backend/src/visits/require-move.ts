@@ -8,11 +8,10 @@ import { mayMove, type VisitFacts } from './visits.policy.js';
 
 /** A visit's row as the policy looks at it. */
 export function factsOfVisit(visit: VisitModel): VisitFacts {
-  const { state, requestedBy, requestingSide, inspectorId, begunBy, begunAt } = visit;
+  const { state, requestedBy, inspectorId, begunBy, begunAt } = visit;
   return {
     state,
     requestedBy,
-    requestingSide,
     inspectorId,
     begunBy,
     begunAt,

@@ -95,6 +95,22 @@ export class VisitEvents {
     await this.outbox.add('visit-not-reached', subjectOf(visit, by), { visit: { ...facts, formerInspectorId } });
   }
 
+  /** A visit in the stead of one its deadline had freed: booked again, or first in line for another window. */
+  async restored(visit: VisitModel, freedVisitId: string, saidAt: Date, by: LedgerActor): Promise<void> {
+    const facts = await this.factsOf(visit);
+    const { startAt, endAt, inspectorName } = facts;
+    const told = { visitId: visit.id, freedVisitId, stageCode: visit.stageCode, startAt, endAt };
+    const saidAtText = saidAt.toISOString();
+    if (visit.state === 'requested') {
+      await this.ledger.appendToLot(visit.lotId, 'visit-first-in-line', { ...told, madeAt: saidAtText }, by);
+      await this.outbox.add('visit-first-in-line', subjectOf(visit, by), { visit: facts });
+      return;
+    }
+    const payload = { ...told, madeAt: saidAtText, inspectorName: inspectorName ?? '' };
+    await this.ledger.appendToLot(visit.lotId, 'visit-restored', payload, by);
+    await this.outbox.add('visit-restored', subjectOf(visit, by), { visit: facts });
+  }
+
   private async logRequest(visit: VisitModel, by: LedgerActor): Promise<void> {
     const payload = { visitId: visit.id, stageCode: visit.stageCode, ...windowOf(visit), callerName: visit.callerName };
     await this.ledger.appendToLot(visit.lotId, 'visit-requested', payload, by);

@@ -99,6 +99,10 @@ export class VisitModel extends Model {
   @Column(DataType.INTEGER)
   declare calendarSequence: number;
 
+  /** The visit its deadline had freed, in whose stead this one stands. */
+  @Column(DataType.UUID)
+  declare restoresId: string | null;
+
   @Column(DataType.DATE)
   declare createdAt: Date;
 }

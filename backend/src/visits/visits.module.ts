@@ -5,6 +5,7 @@ import { DepartmentsModule } from '../departments/departments.module.js';
 import { LotsModule } from '../lots/lots.module.js';
 import { BookingQueries } from './booking.queries.js';
 import { Booking } from './booking.service.js';
+import { CalendarEntries } from './calendar-entries.service.js';
 import { CalendarController } from './calendar.controller.js';
 import { Calendars } from './calendars.service.js';
 import { DepartmentWindows } from './department-windows.queries.js';
@@ -19,6 +20,8 @@ import { ReadVisits } from './read-visits.service.js';
 import { RequestVisits } from './request-visits.service.js';
 import { RequestedLotsQueries } from './requested-lots.queries.js';
 import { RequestedLots } from './requested-lots.service.js';
+import { RestoreFreed } from './restore-freed.service.js';
+import { RestoredSeat } from './restored-seat.service.js';
 import { RunStops } from './run-stops.service.js';
 import { Runs } from './runs.service.js';
 import { VisitEvents } from './visit-events.service.js';
@@ -38,6 +41,7 @@ import { Waiting } from './waiting.service.js';
   providers: [
     BookingQueries,
     Booking,
+    CalendarEntries,
     Calendars,
     DepartmentWindows,
     EndVisit,
@@ -51,6 +55,8 @@ import { Waiting } from './waiting.service.js';
     RequestVisits,
     RequestedLotsQueries,
     RequestedLots,
+    RestoreFreed,
+    RestoredSeat,
     RunStops,
     Runs,
     VisitEvents,
@@ -60,6 +66,6 @@ import { Waiting } from './waiting.service.js';
     WaitingQueries,
     Waiting,
   ],
-  exports: [VisitEvents, VisitMoves, VisitsPresenter, VisitsQueries, FreeNotUp],
+  exports: [CalendarEntries, VisitEvents, VisitMoves, VisitsPresenter, VisitsQueries, FreeNotUp, RestoreFreed],
 })
 export class VisitsModule {}

@@ -42,7 +42,6 @@ const after = windowStartAt;
 const visit = (overrides: Partial<VisitFacts> = {}): VisitFacts => ({
   state: 'booked',
   requestedBy: 'della',
-  requestingSide: 'builder',
   inspectorId: 'noor',
   begunBy: null,
   begunAt: null,
@@ -59,7 +58,7 @@ describe('who makes a move', () => {
     ['the plumber', ruben, ['say-test-up', 'no-longer-up']],
     ['a helper', helper, []],
     ['a bare owner', owner, []],
-    ['the desk', desk, ['place', 'decline', 'move', 'free-closure', 'not-reached']],
+    ['the desk', desk, ['place', 'decline', 'withdraw', 'move', 'free-closure', 'not-reached']],
     ['the visit’s inspector', noor, ['find-not-up', 'begin', 'undo-begin', 'close']],
     ['another inspector, knowingly', gil, ['begin']],
     ['an inspector who belongs to the plumber', partial, []],
@@ -70,13 +69,15 @@ describe('who makes a move', () => {
 
   it('the plumber withdraws and moves where the lot allows it, or what they asked for themselves', () => {
     expect(made(ruben, visit(), openLot)).toEqual(['withdraw', 'move', 'say-test-up', 'no-longer-up']);
-    expect(made(ruben, visit({ requestedBy: 'ruben', requestingSide: 'plumber' }))).toContain('withdraw');
+    expect(made(ruben, visit({ requestedBy: 'ruben' }))).toContain('withdraw');
     expect(made(helper, visit({ requestedBy: 'helper' }), openLot)).toEqual([]);
   });
 
-  it('the desk withdraws what it asked for a caller, and nothing else', () => {
-    expect(made(desk, visit({ requestingSide: 'desk', requestedBy: 'someone' }))).toContain('withdraw');
-    expect(made(desk)).not.toContain('withdraw');
+  it('the desk withdraws and moves whoever asked, but not a desk of another department', () => {
+    for (const requestedBy of ['della', 'ruben', 'desk']) {
+      expect(made(desk, visit({ requestedBy }))).toEqual(expect.arrayContaining(['withdraw', 'move']));
+      expect(made(stranger, visit({ requestedBy }))).toEqual([]);
+    }
   });
 
   it('nobody is the deadline', () => {
@@ -87,6 +88,7 @@ describe('who makes a move', () => {
     expect(made(small, visit({ inspectorId: 'small' }))).toEqual([
       'place',
       'decline',
+      'withdraw',
       'move',
       'find-not-up',
       'begin',
@@ -103,8 +105,9 @@ describe('the moves shown', () => {
     movesFor(who, visit({ state, ...facts }), lot, now);
 
   it('are of the state and in time', () => {
-    expect(shown(desk, 'requested')).toEqual(['place', 'decline', 'move']);
-    expect(shown(desk, 'ready')).toEqual(['move', 'free-closure', 'not-reached']);
+    expect(shown(desk, 'requested')).toEqual(['place', 'decline', 'withdraw', 'move']);
+    expect(shown(desk, 'booked')).toEqual(['withdraw', 'move', 'free-closure', 'not-reached']);
+    expect(shown(desk, 'ready')).toEqual(['withdraw', 'move', 'free-closure', 'not-reached']);
     expect(shown(desk, 'underway')).toEqual(['not-reached']);
     expect(shown(della, 'underway')).toEqual([]);
     for (const state of ['closed', 'declined', 'withdrawn', 'freed'] as const) expect(shown(small, state)).toEqual([]);

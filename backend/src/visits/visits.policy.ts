@@ -19,28 +19,22 @@ import {
 export interface VisitFacts {
   readonly state: VisitState;
   readonly requestedBy: string;
-  readonly requestingSide: 'builder' | 'plumber' | 'desk';
   readonly inspectorId: string | null;
   readonly begunBy: string | null;
   readonly begunAt: Date | null;
   readonly windowStartAt: Date;
 }
 
-/**
- * The requesting side: superintendents of the builder; plumbers where the lot allows it, or who requested it; the desk for a caller.
- * `lot.departmentId` is the visit's own department.
- */
-export function isRequestingSide(
-  actor: Actor,
-  visit: Pick<VisitFacts, 'requestedBy' | 'requestingSide'>,
-  lot: LotParties,
-): boolean {
+/** The requesting side: superintendents of the builder; plumbers where the lot allows it, or who requested it. */
+function isRequestingSide(actor: Actor, visit: Pick<VisitFacts, 'requestedBy'>, lot: LotParties): boolean {
   if (isSuperintendentOf(actor, lot)) return true;
-  if (isPlumberOf(actor, lot) && (lot.mayPlumberRequest || visit.requestedBy === actor.personId)) return true;
-  return visit.requestingSide === 'desk' && isDeskOf(actor, lot);
+  return isPlumberOf(actor, lot) && (lot.mayPlumberRequest || visit.requestedBy === actor.personId);
 }
 
-/** Whether the actor is one of those who may make this move on this visit, whatever time it is and whatever state it is in. */
+/**
+ * Whether the actor is one of those who may make this move on this visit, whatever time it is and whatever state it is in.
+ * `lot.departmentId` is the visit's own department.
+ */
 export function mayMove(actor: Actor, move: VisitMove, visit: VisitFacts, lot: LotParties): boolean {
   // a request is placed by the desk; that the requester's own booking places it too happens in the request itself
   if (move === 'place') return isDeskOf(actor, lot);

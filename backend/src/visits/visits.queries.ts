@@ -80,10 +80,21 @@ export class VisitsQueries {
   async findBookedAt(visitId: string): Promise<Date | null> {
     const [found] = await this.sequelize.query<{ at: Date | null }>(
       `SELECT max(e.at) AS at FROM visits v JOIN ledger_entries e ON e.lot_id = v.lot_id
-       WHERE v.id = :visitId AND e.kind IN ('visit-booked', 'visit-moved', 'no-longer-up') AND e.payload ->> 'visitId' = CAST(v.id AS text)`,
+       WHERE v.id = :visitId AND e.kind IN ('visit-booked', 'visit-moved', 'visit-restored', 'no-longer-up') AND e.payload ->> 'visitId' = CAST(v.id AS text)`,
       { replacements: { visitId }, type: QueryTypes.SELECT },
     );
     return found?.at ?? null;
+  }
+
+  /** Whether a visit was freed by its deadline and by nobody, by the ledger: the desk frees for reasons of its own. */
+  async isFreedByDeadline(visitId: string): Promise<boolean> {
+    const found = await this.sequelize.query(
+      `SELECT 1 FROM visits v JOIN ledger_entries e ON e.lot_id = v.lot_id
+       WHERE v.id = :visitId AND v.state = 'freed' AND e.kind = 'visit-freed' AND e.actor_id IS NULL
+         AND e.payload ->> 'visitId' = CAST(v.id AS text) AND e.payload ->> 'reason' = 'not-up'`,
+      { replacements: { visitId }, type: QueryTypes.SELECT },
+    );
+    return found.length > 0;
   }
 
   private async select(where: string, order: string, replacements: Record<string, unknown>): Promise<VisitRow[]> {

@@ -92,8 +92,8 @@ describe('what waits', () => {
       await book(world, freed, { date: '2027-03-04' }),
       await book(world, withdrawn, { date: '2027-03-04' }),
     ];
-    await VisitModel.update({ state: 'freed' }, { where: { id: one.id } });
-    await VisitModel.update({ state: 'withdrawn' }, { where: { id: two.id } });
+    await VisitModel.update({ state: 'freed', endedAt: server.clock.now() }, { where: { id: one.id } });
+    await VisitModel.update({ state: 'withdrawn', endedAt: server.clock.now() }, { where: { id: two.id } });
     await standTest(server, world, tested, 'dwv');
     await addClosedVisit(server, world, passed, 'pass');
     expect(brief(await waiting('superintendent', freed))).toEqual([['no-window', true, 'Odderly Homes', 1]]);

@@ -47,6 +47,8 @@ export const hold = z.object({
   system: z.enum(systems),
   /** 1 for the first test of this unit, stage and system, 2 for the re-test. */
   ordinal: z.number().int(),
+  /** The plan it was started by. */
+  planId: id.nullable().optional(),
   method: z.enum(methods),
   medium: z.enum(media),
   gauge: gauge.nullable(),
@@ -92,6 +94,8 @@ export const startHold = route({
     fillLevelFt: z.number().min(-40).max(300).nullable().optional(),
     /** The lowest-rated part, at the gauge. */
     ceilingPsi: z.number().positive().max(1000).nullable().optional(),
+    /** The plan it goes by: what is left out here is taken from it. Without one the current plan of the same way is meant. */
+    planId: id.nullable().optional(),
     isSuperseding: z.boolean().optional(),
     firstReading: z.strictObject(readingFields),
   }),

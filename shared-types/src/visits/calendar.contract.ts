@@ -9,6 +9,11 @@ export const calendarWindow = visitWindow.extend({
   /** Of the booked ones, how many have their tests up. Null to all but the department. */
   up: z.number().int().nullable(),
   isTakeable: z.boolean(),
+  /**
+   * Until when it can be asked for: the department's cut-off, or the window's own start where that is earlier. The department itself is
+   * not bound by it. Null where no rule card is in force today.
+   */
+  cutoffAt: instant.nullable(),
 });
 
 export const calendarDay = z.object({

@@ -162,7 +162,7 @@ export const declineVisit = route({
 export const withdrawVisit = route({
   method: 'POST',
   path: '/api/visits/:visitId/withdraw',
-  summary: 'Requesting side: withdraw',
+  summary: 'Requesting side or desk: withdraw',
   status: 200,
   params: visitParams,
   body: z.strictObject({ ...asked, reason: z.enum(withdrawReasons), note: words(500).optional() }),

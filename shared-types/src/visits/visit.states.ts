@@ -49,7 +49,7 @@ export interface VisitMoveRule {
 export const visitMoveTable: Readonly<Record<VisitMove, VisitMoveRule>> = {
   place: { from: ['requested'], to: 'booked', by: ['desk', 'requester'] },
   decline: { from: ['requested'], to: 'declined', by: ['desk'] },
-  withdraw: { from: ['requested', 'booked', 'ready'], to: 'withdrawn', by: ['requester'] },
+  withdraw: { from: ['requested', 'booked', 'ready'], to: 'withdrawn', by: ['requester', 'desk'] },
   move: { from: ['requested', 'booked', 'ready'], to: 'same', by: ['requester', 'desk'] },
   'say-test-up': { from: ['booked'], to: 'ready', by: ['plumber'] },
   'no-longer-up': { from: ['ready'], to: 'booked', by: ['plumber'] },
