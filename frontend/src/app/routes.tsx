@@ -30,7 +30,10 @@ const lots = page('LotsPage', () => import('../features/lots/pages/lots-page'));
 const lotForm = page('LotFormPage', () => import('../features/lots/pages/lot-form-page'));
 const lotImport = page('LotImportPage', () => import('../features/lots/pages/lot-import-page'));
 const lotSheet = page('LotSheetPage', () => import('../features/lots/pages/lot-sheet-page'));
+const plan = page('PlanPage', () => import('../features/plans/pages/plan-page'));
 const consents = page('ConsentsPage', () => import('../features/lots/pages/consents-page'));
+const pastLots = page('PastLotsPage', () => import('../features/lots/pages/past-lots-page'));
+const pastLot = page('PastLotPage', () => import('../features/lots/pages/past-lot-page'));
 const testUp = page('TestUpPage', () => import('../features/holds/pages/test-up-page'));
 const thread = page('ThreadPage', () => import('../features/threads/pages/thread-page'));
 const ruleCard = page('RuleCardPage', () => import('../features/departments/pages/rule-card-page'));
@@ -57,8 +60,11 @@ const framedRoutes: RouteObject[] = [
   { path: '/lots/import', element: lotImport },
   { path: '/lots/:lotId', element: lotSheet },
   { path: '/lots/:lotId/edit', element: lotForm },
+  { path: '/lots/:lotId/plan', element: plan, handle: task },
   { path: '/lots/:lotId/test', element: testUp, handle: task },
   { path: '/lots/:lotId/thread', element: thread, handle: task },
+  { path: '/past-lots', element: pastLots },
+  { path: '/past-lots/:lotId', element: pastLot },
   { path: '/notices', element: notices },
   { path: '/people', element: people },
   { path: '/settings', element: settings },

@@ -1,12 +1,19 @@
 import type { ReactNode } from 'react';
 import { Mark } from '../components/mark';
 
-/** What waits on you, for the right end of the ribbon: a lozenge, a count in words, two lines. */
-export function RibbonEnd({ title, lines }: { title: ReactNode; lines: readonly ReactNode[] }): ReactNode {
+export interface RibbonEndProps {
+  title: ReactNode;
+  lines: readonly ReactNode[];
+  /** Waits on the reader; else on others. */
+  isOnYou?: boolean;
+}
+
+/** What waits, for the right end of the ribbon: a lozenge, a count in words, two lines. */
+export function RibbonEnd({ title, lines, isOnYou = true }: RibbonEndProps): ReactNode {
   return (
     <>
       <span className="st">
-        <Mark name="waits-on-you" />
+        <Mark name={isOnYou ? 'waits-on-you' : 'waits-on'} />
         <span>{title}</span>
       </span>
       {lines.slice(0, 2).map((line, index) => (

@@ -22,7 +22,6 @@ export function RibbonColumn({ day, edges, hasGapAfter, isTabStop, onPick, child
       <button
         type="button"
         className={`day ${day.isToday ? 'today' : ''} ${day.isClosed ? 'closed' : ''} ${edges}`}
-        aria-label={words}
         aria-current={day.isToday ? 'date' : undefined}
         aria-pressed={day.isBracketed ?? false}
         tabIndex={isTabStop ? 0 : -1}
@@ -36,9 +35,7 @@ export function RibbonColumn({ day, edges, hasGapAfter, isTabStop, onPick, child
         />
         {children}
         {day.notUp > 0 ? <Mark name="waits-on" size={16} className="flag" /> : null}
-        <span className="hidden-words list-words" aria-hidden="true">
-          {words}
-        </span>
+        <span className="hidden-words list-words">{words}</span>
       </button>
       {hasGapAfter ? <span className={`ribbon-gap ${edges === 'covered' ? 'covered' : ''}`} /> : null}
     </>

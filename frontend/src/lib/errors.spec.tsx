@@ -34,6 +34,14 @@ describe('the words of an error', () => {
     expect(late?.next).toContain('Thu, Apr 16');
   });
 
+  it('name the thing that is not there for this reader, and stay general where the server names none', () => {
+    const words = (params: Record<string, unknown>) =>
+      wordsOf(new ApiError('not-found', { status: 404, params }))?.title;
+    expect(words({ what: 'lot' })).toBe('No such lot for you');
+    expect(words({ what: 'rule-card' })).toBe('No such rule card for you');
+    expect(words({})).toBe('No such page or entry for you');
+  });
+
   it('are Spanish to a Spanish reader', async () => {
     await i18next.changeLanguage('es');
     expect(wordsOf(new ApiError('offline', { status: 0 }))?.title).toBe('Sin señal');

@@ -52,6 +52,7 @@ export function useErrorWords(error: unknown): ErrorWords | null {
 
 /** The value that gives a refusal finer words, `errors:<code>.safe_named`: how many tries are left, which day is the first. */
 const namedBy: Partial<Record<ApiErrorCode, string>> = {
+  'not-found': 'what',
   'sign-in-failed': 'triesLeft',
   'sign-in-throttled': 'retryAfterSeconds',
   'stale-state': 'is',
@@ -70,6 +71,7 @@ function finerParams(
   const name = namedBy[code];
   const value = name === undefined ? undefined : params[name];
   if (value === undefined || value === null) return {};
+  if (code === 'not-found') return { context: value };
   if (code === 'sign-in-failed') return { context: 'named', count: value };
   if (code === 'sign-in-throttled')
     return { context: 'named', wait: durationWords(Math.ceil(Number(value) / 60), locale) };

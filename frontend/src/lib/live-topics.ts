@@ -2,7 +2,7 @@ import type { QueryKey } from '@tanstack/react-query';
 import { queryKeys } from './query-keys';
 
 /** What the server says has changed on a watched lot. */
-export const lotTopics = ['thread', 'visits', 'holds', 'outcomes', 'lot', 'ledger'] as const;
+export const lotTopics = ['thread', 'visits', 'plans', 'holds', 'outcomes', 'lot', 'ledger'] as const;
 export type LotTopic = (typeof lotTopics)[number];
 
 /** What the server tells a person wherever they are. */
@@ -32,6 +32,7 @@ const staleByLotTopic: Record<LotTopic, (lotId: string) => QueryKey[]> = {
     part(lotId, 'ledger'),
     ...boards,
   ],
+  plans: (lotId) => [part(lotId, 'plans'), part(lotId, 'ledger')],
   holds: (lotId) => [
     part(lotId, 'holds'),
     part(lotId, 'visits'),

@@ -28,4 +28,4 @@ export const queryKeys = {
 } as const;
 
 /** What of a lot is queried on its own. `detail` is the lot itself. */
-export type LotPart = 'detail' | 'thread' | 'visits' | 'holds' | 'outcomes' | 'corrections' | 'clearance' | 'ledger';
+export type LotPart = 'detail' | 'thread' | 'visits' | 'plans' | 'holds' | 'outcomes' | 'corrections' | 'clearance' | 'ledger';

@@ -8,7 +8,17 @@ describe('pressure', () => {
     expect(measureWords(readPressure(112, 2))).toBe('112 psi');
     expect(measureWords(workedPressure(48.7, 1))).toBe('49 psi');
     expect(measureWords(workedPressure(48.7, 2))).toBe('48 psi');
-    expect(measureWords(readPressure(5.3, 0.1))).toBe('5.30 psi');
+    expect(measureWords(readPressure(5.3, 0.1))).toBe('5.3 psi');
+  });
+
+  it('on a mark prints no places that were not read, between two marks the half', () => {
+    expect(measureWords(readPressure(116, 1))).toBe('116 psi');
+    expect(measureWords(readPressure(116.5, 1))).toBe('116.5 psi');
+    expect(measureWords(readPressure(116.2, 1))).toBe('116 psi');
+    expect(measureWords(readPressure(100, 0.1))).toBe('100 psi');
+    // Worked out: a whole mark, with the places of the mark.
+    expect(measureWords(workedPressure(116.2, 1))).toBe('116 psi');
+    expect(measureWords(workedPressure(10, 0.1))).toBe('10.0 psi');
   });
 
   it('of a range is rounded outward and is one number where both ends meet', () => {
@@ -31,6 +41,7 @@ describe('heights, levels and temperatures', () => {
     expect(measureWords(height(24))).toBe('24.0 ft');
     expect(measureWords(height(24, 'metric'))).toBe('7.3 m');
     expect(measureWords(readLevel(2.25, 0.5))).toBe('2.25 in');
+    expect(measureWords(readLevel(2, 0.25))).toBe('2 in');
     expect(measureWords(readLevel(10, 0.125, 'metric'))).toBe('25.4 cm');
     expect(measureWords(temperature(32, 'metric'))).toBe('0 °C');
     expect(measureWords(temperature(61))).toBe('61 °F');

@@ -11,9 +11,12 @@ const kPaPerPsi = 6.894757;
 const mPerFt = 0.3048;
 const cmPerIn = 2.54;
 
-/** A pressure as read: to half a mark of the gauge, never finer. `incrementPsi` is the gauge's smallest mark. */
+/**
+ * A pressure as read: to half a mark of the gauge, never finer. `incrementPsi` is the gauge's smallest mark. A needle on a mark prints
+ * without places: "116", between two "116.5".
+ */
 export function readPressure(pressurePsi: number, incrementPsi: number, units: Units = 'us'): Measure {
-  return pressure(pressurePsi, incrementPsi / 2, units, 'nearest');
+  return plainly(pressure(pressurePsi, incrementPsi / 2, units, 'nearest'));
 }
 
 /** A pressure worked out: to a whole mark of the gauge; its words say "about". */
@@ -37,8 +40,8 @@ export function height(heightFt: number, units: Units = 'us'): Measure {
 
 /** A level below the rim as the tape reads it: to half a mark. */
 export function readLevel(levelIn: number, incrementIn: number, units: Units = 'us'): Measure {
-  if (units === 'us') return { number: stepped(levelIn, incrementIn / 2, 'nearest'), unit: 'in' };
-  return { number: stepped(levelIn * cmPerIn, niceStep((incrementIn / 2) * cmPerIn), 'nearest'), unit: 'cm' };
+  if (units === 'us') return plainly({ number: stepped(levelIn, incrementIn / 2, 'nearest'), unit: 'in' });
+  return plainly({ number: stepped(levelIn * cmPerIn, niceStep((incrementIn / 2) * cmPerIn), 'nearest'), unit: 'cm' });
 }
 
 /** A temperature to a whole degree. */
@@ -67,6 +70,11 @@ function stepped(value: number, step: number, rounding: Rounding): string {
     onMark || rounding === 'nearest' ? Math.round(steps) : rounding === 'down' ? Math.floor(steps) : Math.ceil(steps);
   const places = Math.max(0, Math.min(3, decimals(step)));
   return (whole * step).toFixed(places);
+}
+
+/** Half a mark may print several places; zeros behind the point would claim more than was read. */
+function plainly(measure: Measure): Measure {
+  return { ...measure, number: String(Number(measure.number)) };
 }
 
 function decimals(step: number): number {

@@ -22,6 +22,11 @@ export function useIsPhone(): boolean {
   return useMedia(`(max-width: ${phoneToPx}px)`);
 }
 
+/** 1680 px or more: a lot's thread has a column of its own. */
+export function useHasThreadColumn(): boolean {
+  return useMedia(`(min-width: ${columnFromPx}px)`);
+}
+
 /** A phone's or a tablet's width, 1199 px or less: side panels become drawers. */
 export function useIsNarrow(): boolean {
   return useMedia(`(max-width: ${tabletToPx}px)`);

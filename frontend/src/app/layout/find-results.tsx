@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
+import './find.css';
 
 export interface Found {
   readonly id: string;

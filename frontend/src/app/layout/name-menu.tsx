@@ -4,6 +4,7 @@ import { useLocation } from 'react-router-dom';
 import { Icon } from '../../components/icon';
 import { useMe, useSession } from '../../lib/session-context';
 import { NamePanel } from './name-panel';
+import './name-menu.css';
 
 /** Who is signed in, for whom and as what; opens the panel with everything that is one's own. */
 export function NameMenu({ isPhone = false }: { isPhone?: boolean }): ReactNode {
@@ -26,13 +27,13 @@ export function NameMenu({ isPhone = false }: { isPhone?: boolean }): ReactNode 
         className="name-opener"
         aria-expanded={isOpen}
         aria-controls={`${id}-panel`}
-        aria-label={t('nameMenu', { name: me.name })}
         onClick={() => setIsOpen(!isOpen)}
       >
         <span className="who">
           <span className="b s">{me.name}</span>
           <WorksFor />
         </span>
+        <span className="hidden-words">, {t('nameMenu')}</span>
         <Icon name={isOpen ? 'up' : 'down'} size={14} />
       </button>
       {isOpen ? <NamePanel id={`${id}-panel`} onLeave={() => setIsOpen(false)} /> : null}

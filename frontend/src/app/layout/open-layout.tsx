@@ -18,7 +18,7 @@ export function OpenLayout(): ReactNode {
         {t('skip')}
       </a>
       <header className="top">
-        <Link className="brand" to="/sign-in">
+        <Link className="brand" to="/sign-in" aria-label="Holdwater">
           <BrandMark size={26} />
           <span className="brand-word">Holdwater</span>
         </Link>

@@ -4,6 +4,7 @@ import { Icon } from '../../components/icon';
 import { useWorker } from '../use-worker';
 import { FindBox } from './find-box';
 import { NameMenu } from './name-menu';
+import './phone-top.css';
 
 /** The first line of a phone page: who works for whom, and find. */
 export function PhoneTop(): ReactNode {

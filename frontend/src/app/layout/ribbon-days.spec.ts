@@ -37,6 +37,7 @@ function calendar(parts: {
     roomLeft: 1,
     up: 2,
     isTakeable: true,
+    cutoffAt: null,
   };
   const day = { date: '2026-04-15', isWorkingDay: true, closed: parts.closed ?? [], windows: [window] };
   const lane = { departmentId: department, name: 'Tallowmere', zone, isOwn: true, ruleCardVersion: 6, days: [day] };

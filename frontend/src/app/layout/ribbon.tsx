@@ -44,7 +44,7 @@ export function Ribbon(): ReactNode {
         nowFraction={fraction(hoursOfDay(now, zone), hours)}
         over={range.over}
         span={range.span}
-        end={<WaitingEnd />}
+        end={<WaitingEnd calendar={calendar} />}
         onPick={pick}
         onMove={(by) => setWeeks({ of: first, moved: moved + by })}
       />

@@ -20,7 +20,7 @@ export function TopBar(): ReactNode {
   const counts = useSheetCounts();
   return (
     <header className="top">
-      <Link className="brand" to="/">
+      <Link className="brand" to="/" aria-label="Holdwater">
         <BrandMark size={26} />
         <span className="brand-word">Holdwater</span>
       </Link>

@@ -1,7 +1,6 @@
 import type { HouseGeometry } from '@holdwater/shared-types/hydraulics/house-geometry.js';
 import type { Hold } from '@holdwater/shared-types/holds/hold.contract.js';
 import type { NewCorrection } from '@holdwater/shared-types/outcomes/outcome.contract.js';
-import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { sayDone } from '../../components/done-line';
 import { useErrorWords } from '../../lib/errors';
@@ -10,33 +9,34 @@ import { useRecordOutcome } from './api/record-outcome';
 import type { OutcomeFormProps } from './components/outcome-form';
 import {
   earlierOf,
-  emptyOutcome,
   emptySystem,
   subjectKey,
   subjectsOf,
   toRecord,
   type Decision,
-  type OutcomeDraft,
   type Subject,
   type SystemDraft,
 } from './outcome-draft';
 import { verdictOf } from './outcome-verdict';
+import { useKeptOutcome } from './use-kept-outcome';
 
 /** The draft of an outcome, what it comes to, and the act that records it. */
 export function useOutcomeForm({ visit, lot, stage, holds, corrections }: OutcomeFormProps) {
   const { t } = useTranslation(['outcomes', 'marks']);
-  const [draft, setDraft] = useState<OutcomeDraft>(emptyOutcome);
-  const recording = useRecordOutcome(visit.id, visit.lotId, ({ outcome }) =>
+  const earlier = earlierOf(corrections, visit);
+  const kept = useKeptOutcome(visit.id, earlier);
+  const { draft, setDraft } = kept;
+  const recording = useRecordOutcome(visit.id, visit.lotId, ({ outcome }) => {
+    kept.drop();
     sayDone({
       mark: outcome.kind,
       title: t('done.title', { lot: visit.lotNumber, outcome: t(`marks.${outcome.kind}`) }),
       text: t('done.text'),
       link: { to: '/run', word: t('done.run') },
-    }),
-  );
+    });
+  });
   const words = useErrorWords(recording.error);
   const subjects = subjectsOf(visit, stage);
-  const earlier = earlierOf(corrections, visit);
   const verdict = verdictOf(draft, subjects, earlier);
   const lastNumber = Math.max(0, ...corrections.map(({ number }) => number));
   const holdOf = (subject: Subject): Hold | null => findStanding(holds, subject, visit.stageCode);
@@ -49,8 +49,7 @@ export function useOutcomeForm({ visit, lot, stage, holds, corrections }: Outcom
     recording.mutate(toRecord(draft, subjects, visit.version, isLevel));
   };
   return {
-    draft,
-    setDraft,
+    ...kept,
     subjects,
     earlier,
     verdict,

@@ -120,6 +120,13 @@ const specials: Readonly<Record<string, (payload: Payload, told: Told) => Values
       ? { variant: payload['isDisabled'] ? 'disabled' : 'enabled', params: {} }
       : { params: { roles: roleWords(t, payload) } },
   'visit-begun': (payload) => ({ variant: payload['takenOver'] === true ? 'over' : undefined, params: {} }),
+  'plan-chosen': (payload, { t }) => ({
+    params: {
+      system: systemWords(t, textOf(payload, 'system')),
+      method: t(`holds.methods.${textOf(payload, 'method') ?? 'gauge'}`),
+      medium: t(`holds.media.${textOf(payload, 'medium') ?? 'water'}`),
+    },
+  }),
   'test-started': (payload, { t }) => ({
     params: { test: testWords(t, payload), method: t(`holds.methods.${textOf(payload, 'method') ?? 'gauge'}`) },
   }),

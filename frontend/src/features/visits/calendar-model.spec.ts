@@ -26,7 +26,14 @@ describe('the calendar', () => {
 
   it('says of a window that it is over, full, closed or how much room it has', () => {
     const now = Date.parse('2026-04-15T15:30:00Z');
-    const window = { ...windowOf('2026-04-16', 'mid'), room: 6, roomLeft: 4, up: null, isTakeable: true };
+    const window = {
+      ...windowOf('2026-04-16', 'mid'),
+      room: 6,
+      roomLeft: 4,
+      up: null,
+      isTakeable: true,
+      cutoffAt: null,
+    };
     expect(windowSays({ ...window, ...windowOf('2026-04-15', 'mid') }, now)).toBe('over');
     expect(windowSays({ ...window, roomLeft: 0, isTakeable: false }, now)).toBe('full');
     expect(windowSays({ ...window, isTakeable: false }, now)).toBe('shut');

@@ -1,8 +1,9 @@
 import type { LotDetail, LotStage } from '@holdwater/shared-types/lots/lot.contract.js';
+import type { UnitToAsk } from './requested-units';
 
 /** Why a lot cannot be asked for: `req.faults.<code>`. */
 export interface LotFault {
-  readonly code: 'mayNot' | 'noDepartment' | 'otherDepartment' | 'corrections' | 'passed' | 'noStage';
+  readonly code: 'mayNot' | 'noDepartment' | 'otherDepartment' | 'corrections' | 'passed' | 'noStage' | 'noUnit';
   readonly count?: number;
 }
 
@@ -12,6 +13,8 @@ export interface ChosenLot {
   readonly lot: LotDetail | null;
   readonly error: unknown;
   readonly fault: LotFault | null;
+  /** Of a lot of several units: which may be asked for and which are; else none. */
+  readonly units: readonly UnitToAsk[];
 }
 
 export type SharedStage = Pick<LotStage, 'code' | 'name' | 'systems' | 'order'>;
@@ -30,15 +33,26 @@ export function faultOf(
   lot: LotDetail | undefined,
   first: LotDetail | undefined,
   stageCode: string | null,
+  units: readonly UnitToAsk[] = [],
 ): LotFault | null {
   if (lot === undefined) return null;
   if (lot.departmentId === null) return { code: 'noDepartment' };
   if (!lot.abilities.canRequest) return { code: 'mayNot' };
   if (first !== undefined && lot.departmentId !== first.departmentId) return { code: 'otherDepartment' };
-  if (lot.openCorrections > 0) return { code: 'corrections', count: lot.openCorrections };
   const stage = lot.stages.find(({ code }) => code === stageCode);
+  const chosen = units.filter(({ isChosen }) => isChosen).map(({ number }) => number);
+  if (lot.openCorrections > 0 && isInTheWay(stage, units, chosen)) {
+    return { code: 'corrections', count: lot.openCorrections };
+  }
   if (stage === undefined) return { code: 'noStage' };
-  return stage.state === 'clear' || stage.state === 'put-back-due' ? { code: 'passed' } : null;
+  if (stage.state === 'clear' || stage.state === 'put-back-due') return { code: 'passed' };
+  return units.length > 0 && chosen.length === 0 ? { code: 'noUnit' } : null;
+}
+
+/** A correction of one unit does not keep the other waiting. */
+function isInTheWay(stage: LotStage | undefined, units: readonly UnitToAsk[], chosen: readonly number[]): boolean {
+  if (stage === undefined || units.length === 0) return true;
+  return stage.units.some(({ unitNumber, state }) => chosen.includes(unitNumber) && state === 'corrections-open');
 }
 
 /** The lots an error names, by their numbers. */

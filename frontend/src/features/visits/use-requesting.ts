@@ -7,6 +7,7 @@ import { requestedLotQuery } from './api/requested-lot';
 import { ruleCardOfLotQuery } from './api/rule-card-of-lot';
 import { reasonsFor, windowKey, type OfferReason } from './offer-reasons';
 import { faultOf, sharedStages, type ChosenLot, type SharedStage } from './requested-lots';
+import { unitsToAsk, withUnitToggled, type UnitChoices } from './requested-units';
 
 export interface Offer {
   readonly number: number;
@@ -25,6 +26,8 @@ export interface Requesting {
   readonly chosen: Offer | null;
   /** Null takes the choice back. */
   readonly choose: (key: string | null) => void;
+  /** Takes a unit of a lot of several in or out. */
+  readonly toggleUnit: (lot: LotDetail, unitNumber: number) => void;
 }
 
 /**
@@ -32,6 +35,7 @@ export interface Requesting {
  * until another is; a chosen window that is gone leaves none chosen, so that nobody books another than the one they read.
  */
 export function useRequesting(lotIds: readonly string[], stageCode: string | null): Requesting {
+  const [choices, setChoices] = useState<UnitChoices>({});
   const details = useQueries({ queries: lotIds.map((lotId) => requestedLotQuery(lotId)) });
   const known = details.flatMap(({ data }) => (data === undefined ? [] : [data]));
   const stages = sharedStages(known);
@@ -39,10 +43,12 @@ export function useRequesting(lotIds: readonly string[], stageCode: string | nul
   const stage = stages.find(({ code }) => code === wanted) ?? stages[0] ?? null;
   const lots = lotIds.map((id, index): ChosenLot => {
     const { data, error } = details[index] ?? {};
-    return { id, lot: data ?? null, error: error ?? null, fault: faultOf(data, known[0], stage?.code ?? null) };
+    const units = data === undefined || stage === null ? [] : unitsToAsk(data, stage.code, choices);
+    const fault = faultOf(data, known[0], stage?.code ?? null, units);
+    return { id, lot: data ?? null, error: error ?? null, fault, units };
   });
   const canAsk = stage !== null && lots.length > 0 && lots.every(({ lot, fault }) => lot !== null && fault === null);
-  const asked = canAsk ? { lots: lotIds.map((lotId) => ({ lotId })), stageCode: stage.code } : null;
+  const asked = canAsk ? { lots: lots.map(lotAsked), stageCode: stage.code } : null;
   const query = useQuery({
     ...offersQuery(asked ?? { lots: [], stageCode: '' }),
     enabled: asked !== null,
@@ -59,7 +65,16 @@ export function useRequesting(lotIds: readonly string[], stageCode: string | nul
     offers,
     chosen: offers.find(({ window }) => windowKey(window) === choice) ?? null,
     choose: setChoice,
+    toggleUnit: (lot, unitNumber) => {
+      if (stage !== null) setChoices((before) => withUnitToggled(before, lot, stage.code, unitNumber));
+    },
   };
+}
+
+/** A lot of one unit is asked for as a whole: the server knows its unit. */
+function lotAsked({ id, units }: ChosenLot): OffersAsked['lots'][number] {
+  const unitNumbers = units.filter(({ isChosen }) => isChosen).map(({ number }) => number);
+  return units.length === 0 ? { lotId: id } : { lotId: id, unitNumbers };
 }
 
 /** The key chosen for what is asked now. The first offer known is taken once and then kept, whatever is read later. */

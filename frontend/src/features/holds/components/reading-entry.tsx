@@ -113,11 +113,11 @@ function ValueEntry({ instrument, draft, check, stepFrom, onChange }: ReadingEnt
       <button
         type="button"
         className="btn stepper"
-        aria-label={t('reading.stepDown')}
         aria-controls={id}
         onClick={() => step(-1)}
       >
-        −½
+        <span aria-hidden="true">−½</span>
+        <span className="hidden-words">{t('reading.stepDown')}</span>
       </button>
       <Field
         id={id}
@@ -145,11 +145,11 @@ function ValueEntry({ instrument, draft, check, stepFrom, onChange }: ReadingEnt
       <button
         type="button"
         className="btn stepper"
-        aria-label={t('reading.stepUp')}
         aria-controls={id}
         onClick={() => step(1)}
       >
-        +½
+        <span aria-hidden="true">+½</span>
+        <span className="hidden-words">{t('reading.stepUp')}</span>
       </button>
     </div>
   );

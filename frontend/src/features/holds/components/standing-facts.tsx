@@ -1,22 +1,24 @@
-import type { Hold, Reading } from '@holdwater/shared-types/holds/hold.contract.js';
+import type { Hold } from '@holdwater/shared-types/holds/hold.contract.js';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Cell, Cells } from '../../../components/cells';
 import { Measure, Numeral } from '../../../components/numeral';
 import { Panel } from '../../../components/panel';
 import { useTimeWords } from '../../../lib/time';
-import { readLevel, readPressure } from '../../../lib/units';
+import { measureWords, readLevel, readPressure } from '../../../lib/units';
 import { instrumentOf, isLevelTest } from '../standing-tests';
+import { StrikeReading, type StrikeReadingProps } from './strike-reading';
 
 export interface StandingFactsProps {
   hold: Hold;
   name: string;
   zone: string | null;
   ruleCardVersion: number;
+  abilities: StrikeReadingProps['abilities'];
 }
 
 /** The test that stands: how, since when, and its last readings. */
-export function StandingFacts({ hold, name, zone, ruleCardVersion }: StandingFactsProps): ReactNode {
+export function StandingFacts({ hold, name, zone, ruleCardVersion, abilities }: StandingFactsProps): ReactNode {
   const { t } = useTranslation(['holds', 'common']);
   const time = useTimeWords();
   const own = zone ?? Intl.DateTimeFormat().resolvedOptions().timeZone;
@@ -44,14 +46,18 @@ export function StandingFacts({ hold, name, zone, ruleCardVersion }: StandingFac
       </Cells>
       <ol className="last-readings" aria-label={t('facts.readings')}>
         {newest.map((reading) => (
-          <ReadingLine key={reading.id} hold={hold} reading={reading} zone={own} />
+          <ReadingLine key={reading.id} hold={hold} reading={reading} zone={own} abilities={abilities} />
         ))}
       </ol>
     </Panel>
   );
 }
 
-function ReadingLine({ hold, reading, zone }: { hold: Hold; reading: Reading; zone: string }): ReactNode {
+interface ReadingLineProps extends Pick<StrikeReadingProps, 'hold' | 'reading' | 'abilities'> {
+  zone: string;
+}
+
+function ReadingLine({ hold, reading, zone, abilities }: ReadingLineProps): ReactNode {
   const { t } = useTranslation('holds');
   const time = useTimeWords();
   const { increment } = instrumentOf(hold);
@@ -59,12 +65,13 @@ function ReadingLine({ hold, reading, zone }: { hold: Hold; reading: Reading; zo
     reading.pressurePsi === null
       ? readLevel(reading.levelIn ?? 0, increment)
       : readPressure(reading.pressurePsi, increment);
+  const at = time.dayClock(reading.at, zone);
   const valve = reading.gaugeValve === null ? '' : t(`facts.valve.${reading.gaugeValve}`);
   const isTheirs = reading.byRole === 'superintendent' || reading.byRole === 'inspector';
   return (
     <li className={reading.isStruck ? 'struck' : undefined}>
       <span className="n when">
-        <Numeral text={time.dayClock(reading.at, zone)} />
+        <Numeral text={at} />
       </span>
       <span className="b">
         <Measure value={shown.number} unit={shown.unit} />
@@ -80,6 +87,7 @@ function ReadingLine({ hold, reading, zone }: { hold: Hold; reading: Reading; zo
           .join(', ')}
         {reading.isStruck ? `, ${t('facts.struck', { why: reading.struckWhy ?? '' })}` : ''}
       </span>
+      <StrikeReading hold={hold} reading={reading} abilities={abilities} value={measureWords(shown)} at={at} />
     </li>
   );
 }

@@ -69,7 +69,13 @@ export function TestSheet(input: TestSheetInput): ReactNode {
           <>
             {reading}
             <div>
-              <StandingFacts hold={hold} name={name} zone={lot.zone} ruleCardVersion={ruleCard.version} />
+              <StandingFacts
+                hold={hold}
+                name={name}
+                zone={lot.zone}
+                ruleCardVersion={ruleCard.version}
+                abilities={lot.abilities}
+              />
               {lot.abilities.canTest ? (
                 <div className="panel-body">
                   <EndTest lotId={lot.id} hold={hold} name={name} isUp={visit?.state === 'ready'} />

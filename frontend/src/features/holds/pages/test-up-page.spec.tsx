@@ -171,6 +171,47 @@ describe('a test that is started', () => {
   });
 });
 
+describe('a reading that was wrong', () => {
+  it('is struck with its reason after one question, and stays in the list struck', async () => {
+    const wrong = readingOf();
+    const shown = { holds: [dwvHold, holdOf({ readings: [wrong] })] };
+    const struck = holdOf({ readings: [{ ...wrong, isStruck: true, struckWhy: 'read the wrong gauge' }] });
+    const answers = answersFor(shown);
+    const sent = stubApi({
+      ...answers,
+      [`GET /api/lots/${lotId}/holds`]: () => ({ data: { items: shown.holds } }),
+      [`POST /api/readings/${wrong.id}/strike`]: () => {
+        shown.holds = [dwvHold, struck];
+        return { data: struck };
+      },
+    });
+    show();
+    await userEvent.click(await screen.findByRole('button', { name: 'Strike 57 psi of Tue, Apr 14, 5:08 pm' }));
+    const dialog = screen.getByRole('dialog');
+    expect(dialog).toHaveTextContent('It stays in the log, struck');
+    await userEvent.type(within(dialog).getByLabelText('Why it is struck'), ' read the wrong gauge ');
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Strike the reading' }));
+    await waitFor(() => expect(writes(sent)[0]?.body).toEqual({ why: 'read the wrong gauge' }));
+    expect(await screen.findByText(/struck: read the wrong gauge/)).toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /^Strike 57/ })).not.toBeInTheDocument();
+  });
+
+  it('keeps what was typed when it could not be struck, and says why', async () => {
+    const wrong = readingOf();
+    stubApi({
+      ...answersFor({ holds: [dwvHold, holdOf({ readings: [wrong] })] }),
+      [`POST /api/readings/${wrong.id}/strike`]: () => refusal('not-allowed'),
+    });
+    show();
+    await userEvent.click(await screen.findByRole('button', { name: /^Strike 57/ }));
+    const dialog = screen.getByRole('dialog');
+    await userEvent.type(within(dialog).getByLabelText('Why it is struck'), 'misread');
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Strike the reading' }));
+    expect(await within(dialog).findByRole('alert')).not.toBeEmptyDOMElement();
+    expect(within(dialog).getByLabelText('Why it is struck')).toHaveValue('misread');
+  });
+});
+
 describe('what the reader may do', () => {
   it('a helper reads, and is not offered "test up"', async () => {
     const lot = lotOf({ abilities: { ...noAbilities, canAddReading: true } });

@@ -76,6 +76,7 @@ export function lotOf(parts: Partial<LotDetail> = {}): LotDetail {
     units: [{ number: 1, label: 'House', geometry: house }],
     access: null,
     parties: [],
+    handovers: [],
     ruleCard: { id: ruleCardId, version: 6, effectiveFrom: '2026-01-01' },
     abilities: plumberAbilities,
     ...parts,

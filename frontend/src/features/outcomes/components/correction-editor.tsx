@@ -5,7 +5,7 @@ import type { LotDetail } from '@holdwater/shared-types/lots/lot.contract.js';
 import { severities, type CorrectionSubject } from '@holdwater/shared-types/outcomes/correction.states.js';
 import { newCorrection, type NewCorrection } from '@holdwater/shared-types/outcomes/outcome.contract.js';
 import type { VisitSummary } from '@holdwater/shared-types/visits/visit.contract.js';
-import { useMemo, useRef, useState, type ReactNode } from 'react';
+import { useEffect, useMemo, useRef, useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Act } from '../../../components/act';
 import { Choice } from '../../../components/choice';
@@ -14,6 +14,7 @@ import { TaskFoot, TaskHead } from '../../../components/task-head';
 import { useIsPhone } from '../../../lib/use-media';
 import { useContractForm } from '../../../lib/use-contract-form';
 import { emptyCorrection, toNewCorrection, type CorrectionDraft } from '../correction-draft';
+import type { TypedCorrection } from '../kept-outcome';
 import { CorrectionPlace } from './correction-place';
 import { CorrectionWhat } from './correction-what';
 import { SectionChoice } from './section-choice';
@@ -26,6 +27,8 @@ export interface EditedCorrection {
   readonly pointCode: string | null;
   /** The one that is changed; null for a new one. */
   readonly given: NewCorrection | null;
+  /** What was typed of it before the page was left. */
+  readonly values?: CorrectionDraft;
 }
 
 export interface CorrectionEditorProps {
@@ -40,15 +43,22 @@ export interface CorrectionEditorProps {
   onPut: (correction: NewCorrection, another: EditedCorrection | null) => void;
   onDrop: (clientId: string) => void;
   onLeave: () => void;
+  /** Told all that is typed, to keep it. */
+  onTyped: (typed: TypedCorrection) => void;
 }
 
 /** One correction: the place on the house, what, how grave, which section. */
 export function CorrectionEditor(props: CorrectionEditorProps): ReactNode {
-  const { edited, visit, lot, rules, others, number, drains, onPut, onDrop, onLeave } = props;
+  const { edited, visit, lot, rules, others, number, drains, onPut, onDrop, onLeave, onTyped } = props;
   const { t } = useTranslation(['outcomes', 'common']);
-  const form = useContractForm<CorrectionDraft>(newCorrection, emptyCorrection(edited));
+  const form = useContractForm<CorrectionDraft>(newCorrection, edited.values ?? emptyCorrection(edited));
   const [clientId] = useState(() => edited.given?.clientId ?? crypto.randomUUID());
   const isPhone = useIsPhone();
+  const { values } = form;
+  useEffect(() => {
+    const { subject, unitNumber, pointCode, given } = edited;
+    onTyped({ subject, unitNumber, pointCode, given, values });
+  }, [onTyped, edited, values]);
   const body = useRef<HTMLDivElement>(null);
   const house = useMemo(
     () => lot.units.find((unit) => unit.number === form.values.unitNumber)?.geometry ?? emptyHouse(),
@@ -60,7 +70,10 @@ export function CorrectionEditor(props: CorrectionEditorProps): ReactNode {
       focusFirstFault(body.current);
       return;
     }
-    onPut(newCorrection.parse(correction), isAnother ? { ...edited, key: crypto.randomUUID(), given: null } : null);
+    onPut(
+      newCorrection.parse(correction),
+      isAnother ? { ...edited, key: crypto.randomUUID(), given: null, values: undefined } : null,
+    );
   };
   const subjectName = edited.subject === 'work' ? t('work.title') : t(`common.systems.${edited.subject}`);
   return (

@@ -10,16 +10,17 @@ import { CorrectionActs } from './correction-acts';
 
 export interface CorrectionRowProps {
   correction: Correction;
+  /** The zone of the lot's department: its days are told in it. Null while it is not known: then no day is told. */
+  zone: string | null;
   /** Names the lot and leads to it. */
   hasLot?: boolean;
 }
 
 /** One correction: what, where, since when, and what the reader may do to it. */
-export function CorrectionRow({ correction, hasLot = true }: CorrectionRowProps): ReactNode {
+export function CorrectionRow({ correction, zone, hasLot = true }: CorrectionRowProps): ReactNode {
   const { t } = useTranslation(['outcomes', 'marks', 'common']);
   const time = useTimeWords();
   const { lotId, lotNumber, tractName, number, state, severity, section, text } = correction;
-  const own = Intl.DateTimeFormat().resolvedOptions().timeZone;
   const lot = [t('common.lot', { number: lotNumber }), tractName].filter(Boolean).join(', ');
   const facts = [placeWords(t, correction), t(`severity.${severity}`), section].filter(Boolean).join(', ');
   return (
@@ -40,29 +41,31 @@ export function CorrectionRow({ correction, hasLot = true }: CorrectionRowProps)
         <p className="s mid">
           <Numeral text={facts} />
         </p>
-        <p className="s mid">
-          <Numeral text={t('row.opened', { name: correction.openedBy, day: time.day(correction.openedAt, own) })} />
-        </p>
+        {zone === null ? null : (
+          <p className="s mid">
+            <Numeral text={t('row.opened', { name: correction.openedBy, day: time.day(correction.openedAt, zone) })} />
+          </p>
+        )}
         {correction.reopenedWhy === null ? null : (
           <p className="s t-red">{t('row.reopened', { why: correction.reopenedWhy })}</p>
         )}
-        {correction.fixNote === null || correction.fixedAt === null ? null : (
+        {zone === null || correction.fixNote === null || correction.fixedAt === null ? null : (
           <p className="s mid words">
             <Numeral
               text={t('row.fixed', {
                 name: correction.fixedBy ?? '',
-                day: time.day(correction.fixedAt, own),
+                day: time.day(correction.fixedAt, zone),
                 note: correction.fixNote,
               })}
             />
           </p>
         )}
-        {correction.acceptedAt === null ? null : (
+        {zone === null || correction.acceptedAt === null ? null : (
           <p className="s t-green">
             <Numeral
               text={t('row.accepted', {
                 name: correction.acceptedBy ?? '',
-                day: time.day(correction.acceptedAt, own),
+                day: time.day(correction.acceptedAt, zone),
               })}
             />
           </p>

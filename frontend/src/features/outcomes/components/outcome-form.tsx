@@ -8,8 +8,10 @@ import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Failed } from '../../../lib/query-state';
 import { Field } from '../../../components/field';
+import type { TypedCorrection } from '../kept-outcome';
 import { subjectKey } from '../outcome-draft';
 import { useOutcomeForm } from '../use-outcome-form';
+import { CameBack } from './came-back';
 import { CorrectionEditor, type EditedCorrection } from './correction-editor';
 import { EarlierCorrections } from './earlier-corrections';
 import { KindChoice } from './kind-choice';
@@ -31,13 +33,25 @@ export interface OutcomeFormProps {
   head: ReactNode;
 }
 
+/** The correction that was being written when the page was left. */
+function editedAgain(typed: TypedCorrection | null): EditedCorrection | null {
+  if (typed === null) return null;
+  const { values, ...edited } = typed;
+  return { ...edited, key: crypto.randomUUID(), values };
+}
+
 /** What the inspector found: systems, the work and corrections; or not ready, or no access. */
 export function OutcomeForm(props: OutcomeFormProps): ReactNode {
   const { visit, lot, stage, ruleCard, head } = props;
   const { t } = useTranslation(['outcomes', 'common']);
   const form = useOutcomeForm(props);
   const { draft, setDraft, numbered } = form;
-  const [edited, setEdited] = useState<EditedCorrection | null>(null);
+  const { setCorrection } = form;
+  const [edited, setEditedNow] = useState<EditedCorrection | null>(() => editedAgain(form.correction));
+  const setEdited = (next: EditedCorrection | null): void => {
+    setEditedNow(next);
+    if (next === null) setCorrection(null);
+  };
   const asks = useAsksWords(ruleCard, stage.code);
   const open = (next: EditedCorrection): void => {
     setEdited(next);
@@ -53,6 +67,7 @@ export function OutcomeForm(props: OutcomeFormProps): ReactNode {
       <CorrectionEditor
         key={edited.key}
         edited={edited}
+        onTyped={setCorrection}
         visit={visit}
         lot={lot}
         rules={ruleCard.content.corrections}
@@ -75,6 +90,7 @@ export function OutcomeForm(props: OutcomeFormProps): ReactNode {
     <>
       {head}
       <UndoStart visit={visit} />
+      <CameBack at={form.cameBackFrom} zone={visit.zone} />
       <KindChoice visit={visit} draft={draft} onChange={setDraft} />
       {draft.kind === 'seen' ? (
         <>

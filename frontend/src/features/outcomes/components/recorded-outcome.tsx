@@ -82,7 +82,7 @@ export function RecordedOutcome({ visit, outcome, corrections }: RecordedOutcome
         <Panel title={t('recorded.corrections')} isFlush>
           <ul className="correction-list">
             {corrections.map((correction) => (
-              <CorrectionRow key={correction.id} correction={correction} hasLot={false} />
+              <CorrectionRow key={correction.id} correction={correction} zone={visit.zone} hasLot={false} />
             ))}
           </ul>
         </Panel>

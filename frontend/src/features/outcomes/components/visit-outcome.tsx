@@ -4,7 +4,7 @@ import type { LotDetail } from '@holdwater/shared-types/lots/lot.contract.js';
 import type { Correction } from '@holdwater/shared-types/outcomes/outcome.contract.js';
 import type { VisitSummary } from '@holdwater/shared-types/visits/visit.contract.js';
 import { useQuery } from '@tanstack/react-query';
-import type { ReactNode } from 'react';
+import { useEffect, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Act } from '../../../components/act';
 import { Numeral } from '../../../components/numeral';
@@ -13,9 +13,11 @@ import { StateWord } from '../../../components/state-word';
 import { TaskHead } from '../../../components/task-head';
 import { localName, useLocale } from '../../../lib/i18n';
 import { QueryState } from '../../../lib/query-state';
+import { useMe } from '../../../lib/session-context';
 import { useTimeWords } from '../../../lib/time';
 import { findStanding } from '../../holds/standing-tests';
 import { visitOutcomeQuery } from '../../lots/api/visit-outcome';
+import { dropKeptOutcome } from '../kept-outcome';
 import { stageOf, subjectsOf } from '../outcome-draft';
 import { useAsksWords } from '../use-asks-words';
 import { OutcomeForm } from './outcome-form';
@@ -30,10 +32,18 @@ export interface VisitOutcomeProps {
   ruleCard: RuleCard;
 }
 
+/** In every other state nothing can be recorded any more, and what was typed is let go. */
+const startable: readonly VisitSummary['state'][] = ['booked', 'ready', 'underway'];
+
 /** What can be done with the visit now: start it, answer it, or read what was recorded. */
 export function VisitOutcome(props: VisitOutcomeProps): ReactNode {
   const { visit, corrections, ruleCard } = props;
   const { t } = useTranslation('outcomes');
+  const { id: personId } = useMe();
+  const hasEnded = !startable.some((state) => state === visit.state);
+  useEffect(() => {
+    if (hasEnded) dropKeptOutcome({ personId, visitId: visit.id });
+  }, [hasEnded, personId, visit.id]);
   const stage = stageOf(ruleCard.content, visit.stageCode);
   const head = <OutcomeHead visit={visit} />;
   if (visit.state === 'closed') return <Closed visit={visit} corrections={corrections} head={head} />;
@@ -46,7 +56,7 @@ export function VisitOutcome(props: VisitOutcomeProps): ReactNode {
     );
   }
   if (visit.state === 'underway' && visit.moves.includes('close'))
-    return <OutcomeForm {...props} stage={stage} head={head} />;
+    return <OutcomeForm key={visit.id} {...props} stage={stage} head={head} />;
   if (visit.state === 'booked' || visit.state === 'ready') {
     return (
       <>

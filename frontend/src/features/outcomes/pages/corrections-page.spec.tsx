@@ -1,10 +1,11 @@
 import type { Correction } from '@holdwater/shared-types/outcomes/outcome.contract.js';
-import { screen, waitFor, within } from '@testing-library/react';
+import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it } from 'vitest';
 import { personOf } from '../../../lib/testing/people';
 import { renderPage } from '../../../lib/testing/render-page';
 import { refusal, stubApi, type SentRequest } from '../../../lib/testing/stub-api';
+import { lotOf } from '../../holds/testing/tested-lot';
 import { CorrectionsPage } from './corrections-page';
 
 const me = personOf({}, ['plumber']);
@@ -48,7 +49,11 @@ const others = correctionOf({
   text: 'No nail plate',
   abilities: { canFix: false, canDecide: false },
 });
-const list = (...items: Correction[]) => ({ 'GET /api/corrections': () => ({ data: { items, nextCursor: null } }) });
+const lot = { ...lotOf(), id: id('52') };
+const list = (...items: Correction[]) => ({
+  'GET /api/corrections': () => ({ data: { items, nextCursor: null } }),
+  [`GET /api/lots/${id('52')}`]: () => ({ data: lot }),
+});
 const writes = (sent: readonly SentRequest[]): SentRequest[] => sent.filter(({ method }) => method === 'POST');
 
 describe('corrections', () => {
@@ -61,6 +66,25 @@ describe('corrections', () => {
     expect(within(rows[0] as HTMLElement).getByRole('button', { name: /fixed/ })).toBeInTheDocument();
     expect(within(rows[1] as HTMLElement).queryByRole('button')).not.toBeInTheDocument();
     expect(sent[0]?.query).toMatchObject({ state: 'open' });
+  });
+
+  it('tell their days in the zone of the department of the lot, asked once for all of its corrections', async () => {
+    // 10:30 pm of Apr 10 in Denver (UTC-6 in April) is 1:30 pm of Apr 11 in Tokyo (UTC+9): IANA time zone database.
+    const late = { openedAt: '2026-04-11T04:30:00Z' };
+    const sent = stubApi({
+      ...list(correctionOf(late), correctionOf({ ...late, id: id('02'), number: 2, text: 'No nail plate' })),
+      [`GET /api/lots/${id('52')}`]: () => ({ data: { ...lot, zone: 'Asia/Tokyo' } }),
+    });
+    renderPage(<CorrectionsPage />, { me, at: '/corrections' });
+    await waitFor(() => expect(screen.getAllByRole('listitem')[0]).toHaveTextContent('Sat, Apr 11'));
+    expect(sent.filter(({ path }) => path === `/api/lots/${id('52')}`)).toHaveLength(1);
+    cleanup();
+    stubApi({
+      ...list(correctionOf(late)),
+      [`GET /api/lots/${id('52')}`]: () => ({ data: { ...lot, zone: 'America/Denver' } }),
+    });
+    renderPage(<CorrectionsPage />, { me, at: '/corrections' });
+    await waitFor(() => expect(screen.getAllByRole('listitem')[0]).toHaveTextContent('Fri, Apr 10'));
   });
 
   it('are fixed with what was done; without words nothing is sent', async () => {

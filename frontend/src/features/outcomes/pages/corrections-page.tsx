@@ -12,6 +12,7 @@ import { QueryState } from '../../../lib/query-state';
 import { useOrganization } from '../../../lib/session-context';
 import { correctionsQuery } from '../api/corrections';
 import { CorrectionRow } from '../components/correction-row';
+import { useLotZones } from '../use-lot-zones';
 import '../outcomes.css';
 
 /** Corrections of the organization's lots by state, what the reader can act on first. */
@@ -61,6 +62,7 @@ function isYours({ abilities }: Correction): boolean {
 
 function CorrectionList({ items, state }: { items: readonly Correction[]; state: CorrectionState }): ReactNode {
   const { t } = useTranslation('outcomes');
+  const zoneOfLot = useLotZones(items);
   const yours = items.filter(isYours);
   const others = items.filter((one) => !isYours(one));
   if (items.length === 0) {
@@ -72,8 +74,10 @@ function CorrectionList({ items, state }: { items: readonly Correction[]; state:
   }
   return (
     <>
-      {yours.length > 0 ? <Group title={t('list.waitsOnYou', { count: yours.length })} items={yours} isOnYou /> : null}
-      {others.length > 0 ? <Group title={t(`list.others.${state}`)} items={others} /> : null}
+      {yours.length > 0 ? (
+        <Group title={t('list.waitsOnYou', { count: yours.length })} items={yours} zoneOfLot={zoneOfLot} isOnYou />
+      ) : null}
+      {others.length > 0 ? <Group title={t(`list.others.${state}`)} items={others} zoneOfLot={zoneOfLot} /> : null}
     </>
   );
 }
@@ -81,16 +85,17 @@ function CorrectionList({ items, state }: { items: readonly Correction[]; state:
 interface GroupProps {
   title: string;
   items: readonly Correction[];
+  zoneOfLot: (lotId: string) => string | null;
   isOnYou?: boolean;
 }
 
-function Group({ title, items, isOnYou = false }: GroupProps): ReactNode {
+function Group({ title, items, zoneOfLot, isOnYou = false }: GroupProps): ReactNode {
   return (
     <section>
       <h2 className={isOnYou ? 'list-head h3 t-brass' : 'list-head h3'}>{title}</h2>
       <ul className="correction-list">
         {items.map((correction) => (
-          <CorrectionRow key={correction.id} correction={correction} />
+          <CorrectionRow key={correction.id} correction={correction} zone={zoneOfLot(correction.lotId)} />
         ))}
       </ul>
     </section>

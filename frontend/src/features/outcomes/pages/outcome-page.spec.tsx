@@ -1,4 +1,4 @@
-import { screen, waitFor, within } from '@testing-library/react';
+import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { Route, Routes } from 'react-router-dom';
 import { afterEach, describe, expect, it, vi } from 'vitest';
@@ -18,7 +18,10 @@ const opensAt = new Date(underway.window.startAt);
 function at(minutes: number): void {
   vi.useFakeTimers({ toFake: ['Date'], now: opensAt.getTime() + minutes * 60_000 });
 }
-afterEach(() => vi.useRealTimers());
+afterEach(() => {
+  vi.useRealTimers();
+  window.localStorage.clear();
+});
 
 function show(visit = underway, handlers: Parameters<typeof stubApi>[0] = {}, me = noor): SentRequest[] {
   const sent = stubApi({
@@ -84,7 +87,7 @@ describe('what was seen', () => {
     expect(field).toHaveValue('');
     expect(screen.queryByText(/Ruben Achterberg read/)).not.toBeInTheDocument();
     await userEvent.type(field, '56');
-    expect(screen.getByText(/Ruben Achterberg read/)).toHaveTextContent('Ruben Achterberg read 57.0 psi');
+    expect(screen.getByText(/Ruben Achterberg read/)).toHaveTextContent('Ruben Achterberg read 57 psi');
   });
 
   it('passes after one question that says who is told', async () => {
@@ -166,6 +169,97 @@ describe('what was seen', () => {
     await userEvent.keyboard('{ArrowUp}{Enter}');
     expect(screen.getByLabelText(/Floor/)).toHaveDisplayValue(/floor/);
     expect(screen.queryByText('Touch the place on the house, or choose the whole system.')).not.toBeInTheDocument();
+  });
+});
+
+describe('what was typed and not recorded', () => {
+  const keptKeys = (): string[] =>
+    Object.keys({ ...window.localStorage }).filter((key) => key.includes('outcome-draft'));
+  /** As a reload or a new tab does: nothing of the page lives on but what the device keeps. */
+  const reload = (visit = underway, handlers = {}, me = noor): SentRequest[] => {
+    cleanup();
+    return show(visit, handlers, me);
+  };
+
+  it('stands there again after a reload: answers, notes, readings, points looked at, corrections', async () => {
+    at(5);
+    show();
+    await answer('DWV', 'fail');
+    await userEvent.type(screen.getByLabelText('Gauge reads'), '56');
+    await userEvent.click(screen.getByRole('radio', { name: 'stayed' }));
+    await userEvent.click(screen.getByRole('checkbox', { name: 'Looked at: Slope' }));
+    await userEvent.type(screen.getByLabelText(/Note to all three parties/), 'Wet slab');
+    const subject = screen.getByRole('region', { name: 'DWV' });
+    await userEvent.click(within(subject).getByRole('button', { name: 'Open a correction' }));
+    await userEvent.click(screen.getByRole('button', { name: 'drip at a joint' }));
+    await userEvent.click(screen.getByRole('checkbox', { name: 'the whole system' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Add correction' }));
+    reload();
+    expect(await screen.findByText(/You typed this on this device until/)).toHaveTextContent('Wed, Apr 15, 9:05 am');
+    expect(screen.getByLabelText('Gauge reads')).toHaveValue('56');
+    expect(screen.getByRole('radio', { name: 'stayed' })).toBeChecked();
+    expect(screen.getByRole('checkbox', { name: 'Looked at: Slope' })).toBeChecked();
+    expect(screen.getByLabelText(/Note to all three parties/)).toHaveValue('Wet slab');
+    const group = screen.getByRole('radiogroup', { name: 'DWV' });
+    expect(within(group).getByRole('radio', { name: 'fail' })).toBeChecked();
+    expect(screen.getByRole('region', { name: 'DWV' })).toHaveTextContent('Drip at a joint');
+  });
+
+  it('stands there again in the middle of a correction', async () => {
+    at(5);
+    show();
+    const subject = await screen.findByRole('region', { name: 'DWV' });
+    await userEvent.click(within(subject).getByRole('button', { name: 'Open a correction' }));
+    await userEvent.type(screen.getByLabelText(/Room/), 'laundry');
+    reload();
+    expect(await screen.findByLabelText(/Room/)).toHaveValue('laundry');
+    await userEvent.click(screen.getByRole('button', { name: /Back/ }));
+    expect(await screen.findByRole('region', { name: 'DWV' })).toBeInTheDocument();
+    expect(keptKeys()).toEqual([]);
+  });
+
+  it('is never shown to somebody else on the same device', async () => {
+    at(5);
+    show();
+    await userEvent.type(await screen.findByLabelText('Gauge reads'), '56');
+    reload(underway, {}, gil);
+    expect(await screen.findByLabelText('Gauge reads')).toHaveValue('');
+    expect(screen.queryByText(/You typed this/)).not.toBeInTheDocument();
+    reload();
+    expect(await screen.findByLabelText('Gauge reads')).toHaveValue('56');
+  });
+
+  it('is let go once it is recorded, and kept when the record did not go through', async () => {
+    at(5);
+    let times = 0;
+    const closed = { ...underway, state: 'closed' as const, moves: [] };
+    const outcome = {
+      ...{ id: visitId, visitId, kind: 'no-access', reason: 'locked', note: null, byName: noor.name },
+      ...{ at: underway.window.startAt, receivedAt: underway.window.startAt, systems: [], work: [] },
+    };
+    show(underway, {
+      [`POST /api/visits/${visitId}/outcome`]: () =>
+        times++ === 0 ? refusal('busy') : { status: 201, data: { visit: closed, outcome, corrections: [] } },
+    });
+    await userEvent.click(await screen.findByRole('radio', { name: 'no access' }));
+    await userEvent.click(screen.getByRole('radio', { name: 'locked' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Record no access' }));
+    const dialog = screen.getByRole('dialog');
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Record no access' }));
+    await within(dialog).findByRole('alert');
+    expect(keptKeys()).toHaveLength(1);
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Record no access' }));
+    await waitFor(() => expect(keptKeys()).toEqual([]));
+  });
+
+  it('is let go when the visit has ended otherwise', async () => {
+    at(5);
+    show();
+    await userEvent.type(await screen.findByLabelText('Gauge reads'), '56');
+    expect(keptKeys()).toHaveLength(1);
+    reload(visitOf({ state: 'freed', moves: [] }));
+    await screen.findByRole('link', { name: /lot/i });
+    expect(keptKeys()).toEqual([]);
   });
 });
 

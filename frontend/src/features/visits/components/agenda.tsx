@@ -7,24 +7,38 @@ import { useTimeWords } from '../../../lib/time';
 import { agendaOf, type AgendaWindow } from '../agenda-model';
 import { shortNames, type CalendarDay } from '../calendar-model';
 import { useClosureWords } from '../closure-words';
+import type { NextCutoff } from '../next-cutoff';
 import { upUrgency } from '../visit-look';
+import { AgendaCloses, AgendaTimeLeft } from './agenda-cutoff';
+import { AgendaWaits } from './agenda-waits';
 import { VisitSlip } from './visit-slip';
+import '../agenda.css';
 
 export interface AgendaProps {
   calendar: Calendar;
   /** From the day shown on. */
   days: readonly CalendarDay[];
   now: Date;
+  /** Until when a window can still be asked for; null where the reader does not ask, or for nothing left. */
+  cutoff: NextCutoff | null;
   onOpenVisit: (visitId: string) => void;
 }
 
 /** The calendar of a phone: day under day, windows as brackets with the visits that stand in them. */
-export function Agenda({ calendar, days, now, onOpenVisit }: AgendaProps): ReactNode {
+export function Agenda({ calendar, days, now, cutoff, onOpenVisit }: AgendaProps): ReactNode {
   const names = shortNames(calendar.lanes.map(({ name }) => name));
   const nameOf = (departmentId: string): string | undefined =>
     names.length < 2 ? undefined : names[calendar.lanes.findIndex((lane) => lane.departmentId === departmentId)];
   return days.map((day) => (
-    <AgendaDay key={day.date} day={day} today={calendar.today} now={now} nameOf={nameOf} onOpenVisit={onOpenVisit} />
+    <AgendaDay
+      key={day.date}
+      day={day}
+      today={calendar.today}
+      now={now}
+      cutoff={cutoff?.date === day.date ? cutoff : null}
+      nameOf={nameOf}
+      onOpenVisit={onOpenVisit}
+    />
   ));
 }
 
@@ -32,11 +46,12 @@ interface AgendaDayProps {
   day: CalendarDay;
   today: string;
   now: Date;
+  cutoff: NextCutoff | null;
   nameOf: (departmentId: string) => string | undefined;
   onOpenVisit: (visitId: string) => void;
 }
 
-function AgendaDay({ day, today, now, nameOf, onOpenVisit }: AgendaDayProps): ReactNode {
+function AgendaDay({ day, today, now, cutoff, nameOf, onOpenVisit }: AgendaDayProps): ReactNode {
   const { t } = useTranslation('visits');
   const words = useTimeWords();
   const closure = useClosureWords();
@@ -57,7 +72,10 @@ function AgendaDay({ day, today, now, nameOf, onOpenVisit }: AgendaDayProps): Re
             <span>{t('agenda.notUp', { count: notUp.length })}</span>
           </span>
         ) : null}
+        {cutoff === null ? null : <AgendaCloses cutoff={cutoff} now={now} also={nameOf(cutoff.departmentId)} />}
       </div>
+      <AgendaWaits visits={notUp} />
+      {cutoff === null ? null : <AgendaTimeLeft cutoff={cutoff} now={now} />}
       {closed.map((one) => (
         <p key={`${one.departmentId} ${one.from ?? ''}`} className="agenda-closed">
           {[nameOf(one.departmentId), one.why === '' ? t('closed.day') : t('closed.why', { why: closure(one.why) })]

@@ -6,6 +6,7 @@ import { Head } from '../../../components/head';
 import { Mark, type MarkName } from '../../../components/mark';
 import { Numeral } from '../../../components/numeral';
 import { calendarViews, type CalendarView } from '../calendar-address';
+import '../calendar-head.css';
 
 export interface CalendarHeadProps {
   range: string;

@@ -6,6 +6,7 @@ import { useNow } from '../../../lib/clock';
 import { localDateOf, minutesBetween } from '../../../lib/local-days';
 import { useTimeWords } from '../../../lib/time';
 import type { Offers } from '../api/offers';
+import '../request.css';
 
 export interface CutoffLineProps {
   offers: Offers;

@@ -12,6 +12,7 @@ import type { LaneOffer } from './lane-cell';
 import { StaleStrip } from './stale-strip';
 import { VisitList } from './visit-list';
 import { WeekGrid } from './week-grid';
+import '../calendar-head.css';
 
 export interface CalendarViewProps {
   calendar: Calendar;

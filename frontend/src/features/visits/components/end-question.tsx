@@ -8,6 +8,7 @@ import { Question } from '../../../components/question';
 import { useErrorWords } from '../../../lib/errors';
 import { useTimeWords } from '../../../lib/time';
 import { useEndVisit, type EndMove, type EndWords } from '../use-end-visit';
+import '../visit.css';
 
 export type { EndMove } from '../use-end-visit';
 

@@ -1,17 +1,22 @@
+import type { LotDetail } from '@holdwater/shared-types/lots/lot.contract.js';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Icon } from '../../../components/icon';
 import { Mark } from '../../../components/mark';
 import { Numeral } from '../../../components/numeral';
 import type { ChosenLot } from '../requested-lots';
+import { UnitChips } from './unit-chips';
+import '../request.css';
 
-/** The lots chosen for a request, each with what stands in its way and a way out. */
+/** The lots chosen for a request, each with a way out, its units where it has several, and what stands in its way. */
 export function LotChips({
   lots,
   onRemove,
+  onToggleUnit,
 }: {
   lots: readonly ChosenLot[];
   onRemove: (lotId: string) => void;
+  onToggleUnit: (lot: LotDetail, unitNumber: number) => void;
 }): ReactNode {
   const { t } = useTranslation(['visits', 'common']);
   if (lots.length === 0) return <p className="s mid">{t('req.noLots')}</p>;
@@ -37,6 +42,16 @@ export function LotChips({
           </li>
         ))}
       </ul>
+      {lots.map(({ id, lot, units }) =>
+        lot === null || units.length === 0 ? null : (
+          <UnitChips
+            key={id}
+            lotNumber={lot.number}
+            units={units}
+            onToggle={(unitNumber) => onToggleUnit(lot, unitNumber)}
+          />
+        ),
+      )}
       <ul className="req-faults">
         {withFault.map((chosen) => (
           <li key={chosen.id} className="field-error">

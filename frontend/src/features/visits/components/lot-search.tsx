@@ -8,6 +8,7 @@ import { Numeral } from '../../../components/numeral';
 import { useErrorWords } from '../../../lib/errors';
 import { useDebounced } from '../../../lib/use-debounced';
 import { searchLotsQuery } from '../api/search-lots';
+import '../request.css';
 
 export interface LotSearchProps {
   chosen: readonly string[];

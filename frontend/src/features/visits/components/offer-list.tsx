@@ -6,6 +6,7 @@ import { Numeral } from '../../../components/numeral';
 import { useTimeWords, type TimeWords } from '../../../lib/time';
 import { windowKey, type OfferReason } from '../offer-reasons';
 import type { Offer } from '../use-requesting';
+import '../offers.css';
 
 export interface OfferListProps {
   offers: readonly Offer[];

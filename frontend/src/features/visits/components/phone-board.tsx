@@ -7,6 +7,7 @@ import { byTime } from '../calendar-model';
 import { isGone } from '../visit-look';
 import type { DayBoardViewProps } from './day-board';
 import { VisitSlip } from './visit-slip';
+import '../visit.css';
 
 /** The day board of a phone: requests first, then inspector by inspector. */
 export function PhoneBoard({ board, now, onOpenVisit }: DayBoardViewProps): ReactNode {

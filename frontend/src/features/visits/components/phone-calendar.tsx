@@ -4,9 +4,12 @@ import { Act } from '../../../components/act';
 import { PhoneHead } from '../../../components/head';
 import { useTimeWords } from '../../../lib/time';
 import { calendarDays, shownDates } from '../calendar-model';
+import { nextCutoff } from '../next-cutoff';
 import { Agenda } from './agenda';
+import { serverNow } from './cutoff-line';
 import { NoVisits, type CalendarViewProps } from './desk-calendar';
 import { StaleStrip } from './stale-strip';
+import '../side-panel.css';
 
 /** The calendar of a phone: an agenda from the day shown on, the request at the thumb. */
 export function PhoneCalendar({
@@ -22,6 +25,8 @@ export function PhoneCalendar({
   const words = useTimeWords();
   const dates = shownDates(from, 2, calendar).filter((date) => date >= from);
   const days = calendarDays(calendar, dates, null);
+  // The server's clock says what is closed.
+  const cutoff = onRequest === undefined ? null : nextCutoff(days, serverNow(now, calendar.now, readAtMs));
   const count = days.flatMap(({ cells }) => cells.flatMap(({ visits }) => visits)).length;
   return (
     <div className={onRequest === undefined ? '' : 'has-thumb'}>
@@ -31,7 +36,7 @@ export function PhoneCalendar({
       </StaleStrip>
       <NoVisits calendar={calendar} count={count} onRequest={onRequest} />
       {calendar.lanes.length === 0 ? null : (
-        <Agenda calendar={calendar} days={days} now={now} onOpenVisit={address.openVisit} />
+        <Agenda calendar={calendar} days={days} now={now} cutoff={cutoff} onOpenVisit={address.openVisit} />
       )}
       {onRequest === undefined ? null : (
         <div className="thumb">

@@ -4,6 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { Numeral } from '../../../components/numeral';
 import { useTimeWords } from '../../../lib/time';
 import { refusedByReason, windowKey } from '../offer-reasons';
+import '../offers.css';
 
 /** The windows that cannot be taken, behind one line, by their reason. */
 export function RefusedWindows({ windows, zone }: { windows: readonly OfferedWindow[]; zone: string }): ReactNode {

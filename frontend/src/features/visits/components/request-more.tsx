@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Field } from '../../../components/field';
+import '../request.css';
 
 /** What a request says besides lots and window. */
 export interface RequestWords {

@@ -49,7 +49,11 @@ export function RequestPanel({ requesting, onLots, onStage, onClose }: RequestPa
       foot={<RequestAct requesting={requesting} busy={sending.isPending} onSend={() => sending.send(chosen?.window)} />}
     >
       <div className="side-part">
-        <LotChips lots={lots} onRemove={(lotId) => onLots(ids.filter((id) => id !== lotId))} />
+        <LotChips
+          lots={lots}
+          onRemove={(lotId) => onLots(ids.filter((id) => id !== lotId))}
+          onToggleUnit={requesting.toggleUnit}
+        />
         <LotSearch chosen={ids} onAdd={(lotId) => onLots([...ids, lotId])} />
         {stages.length > 1 ? (
           <Choice

@@ -7,6 +7,7 @@ import { StateWord } from '../../../components/state-word';
 import { localName, useLocale } from '../../../lib/i18n';
 import { useTimeWords } from '../../../lib/time';
 import { useVisitLook } from '../visit-look';
+import '../visit.css';
 
 export interface RequestsListProps {
   requests: readonly VisitSummary[];

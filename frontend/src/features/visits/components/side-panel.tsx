@@ -4,6 +4,7 @@ import { PhoneHead } from '../../../components/head';
 import { Icon } from '../../../components/icon';
 import { useShortcut } from '../../../lib/shortcuts';
 import { useIsPhone } from '../../../lib/use-media';
+import '../side-panel.css';
 
 export interface SidePanelProps {
   /** The small words over the title. */

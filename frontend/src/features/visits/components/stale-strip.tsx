@@ -4,6 +4,7 @@ import { Mark } from '../../../components/mark';
 import { Numeral } from '../../../components/numeral';
 import { isApiError } from '../../../lib/api-error';
 import { useTimeWords } from '../../../lib/time';
+import '../side-panel.css';
 
 export interface StaleStripProps {
   /** Of the query shown. */

@@ -10,6 +10,7 @@ import { useErrorWords } from '../../../lib/errors';
 import { Failed } from '../../../lib/query-state';
 import { useTimeWords } from '../../../lib/time';
 import { lotsNamed } from '../requested-lots';
+import '../offers.css';
 
 const nextBest = z.object({ offers: z.array(offeredWindow) });
 

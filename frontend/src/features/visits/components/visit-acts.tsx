@@ -3,6 +3,7 @@ import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Act } from '../../../components/act';
 import { EndQuestion, type EndMove } from './end-question';
+import '../visit.css';
 
 export interface VisitActsProps {
   visit: VisitSummary;

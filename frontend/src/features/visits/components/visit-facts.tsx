@@ -10,6 +10,7 @@ import { localName, useLocale } from '../../../lib/i18n';
 import { useTimeWords } from '../../../lib/time';
 import { useEndWords } from '../end-words';
 import { isOpen, useVisitLook } from '../visit-look';
+import '../visit.css';
 
 /** A visit as a title block: state, window, who comes, what stands, what it waits for. */
 export function VisitFacts({ visit, now }: { visit: VisitSummary; now: Date }): ReactNode {

@@ -7,6 +7,7 @@ import { localName, useLocale } from '../../../lib/i18n';
 import { useTimeWords } from '../../../lib/time';
 import { byTime } from '../calendar-model';
 import { useVisitLook } from '../visit-look';
+import '../visit.css';
 
 export interface VisitListProps {
   visits: readonly VisitSummary[];

@@ -8,6 +8,8 @@ import { DayColumn } from './day-column';
 import { HourEdge } from './hour-edge';
 import type { LaneOffer } from './lane-cell';
 import { useGridKeys } from './use-grid-keys';
+import '../week-grid.css';
+import '../lane.css';
 
 export interface WeekGridProps {
   calendar: Calendar;

@@ -5,6 +5,7 @@ import { Icon } from '../../../components/icon';
 import { Numeral } from '../../../components/numeral';
 import { useTimeWords } from '../../../lib/time';
 import { windowKey } from '../offer-reasons';
+import '../offers.css';
 
 export interface ChoosableWindow extends VisitWindow {
   readonly roomLeft: number;

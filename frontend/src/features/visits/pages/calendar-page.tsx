@@ -20,8 +20,7 @@ import { windowKey } from '../offer-reasons';
 import { useMayRequest } from '../use-may-request';
 import { useRequesting } from '../use-requesting';
 import { shownOffers } from '../components/offer-list';
-import '../visits.css';
-import '../calendar.css';
+import '../side-panel.css';
 
 const deviceZone = Intl.DateTimeFormat().resolvedOptions().timeZone;
 

@@ -22,7 +22,7 @@ import { PhoneBoard } from '../components/phone-board';
 import { StaleStrip } from '../components/stale-strip';
 import { VisitPanel } from '../components/visit-panel';
 import { useOwnDepartment } from '../use-own-department';
-import '../visits.css';
+import '../side-panel.css';
 import '../board.css';
 
 const deviceZone = Intl.DateTimeFormat().resolvedOptions().timeZone;

@@ -18,7 +18,7 @@ import { RequestsList } from '../components/requests-list';
 import { StaleStrip } from '../components/stale-strip';
 import { VisitPanel } from '../components/visit-panel';
 import { useOwnDepartment } from '../use-own-department';
-import '../visits.css';
+import '../side-panel.css';
 
 /** The desk's requests: placed one by one, on the day they want or on another of the ribbon. */
 export function RequestsPage(): ReactNode {

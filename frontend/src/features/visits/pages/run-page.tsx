@@ -19,7 +19,6 @@ import { StopBlock } from '../components/stop-block';
 import { StopRoad } from '../components/stop-road';
 import { doneCount, nextStop, stopCount } from '../run-model';
 import { useOwnDepartment } from '../use-own-department';
-import '../visits.css';
 import '../run.css';
 
 /** An inspector's day: the own one, or for the desk that of the inspector in the address. */

@@ -122,6 +122,7 @@ export function dayOf(date: string, labels: readonly string[]): DayBoard['day'] 
             roomLeft: index === 1 ? 4 : index,
             up: null,
             isTakeable: date > '2026-04-15' && index > 0,
+            cutoffAt: null,
           })),
   };
 }
@@ -188,6 +189,7 @@ export function lotOf(number: number, parts: Partial<LotDetail> = {}): LotDetail
     units: [{ number: 1, label: 'House', geometry: null }],
     access: null,
     parties: [],
+    handovers: [],
     ruleCard: null,
     abilities: {
       canEdit: true,
