@@ -145,3 +145,23 @@ export function millpond(): PlatDrawing {
     [14, 16],
   );
 }
+
+/** Kettle Rise: 14 lots on both sides of one street. */
+export function kettleRise(): PlatDrawing {
+  return draw(
+    490,
+    300,
+    [...row(31, 7, [0, 0], 66, 110), ...row(38, 7, [0, 154], 66, 110)],
+    [
+      {
+        name: 'Kettle Rise',
+        widthFt: 44,
+        points: [
+          [-10, 132],
+          [472, 132],
+        ],
+      },
+    ],
+    [14, 16],
+  );
+}

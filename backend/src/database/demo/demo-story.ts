@@ -5,9 +5,11 @@ import { observedFederalHolidays } from '../../scheduling/working-time/federal-h
 import type { DemoClient } from './demo-client.js';
 import { DemoDays } from './demo-days.js';
 import type { DemoFoundation } from './demo-foundation.js';
+import { tellHandover } from './demo-handovers.js';
+import { kettleRiseLots } from './demo-kettle-rise.js';
 import { ashquillLots, corrowLots, millpondLots, sorrelBenchLots, type DemoLot } from './demo-lots.js';
 import { demoPeople } from './demo-people.js';
-import { millpond, sorrelBench } from './demo-plats.js';
+import { kettleRise, millpond, sorrelBench } from './demo-plats.js';
 import { demoDepartments } from './demo-rule-cards.js';
 import type { DemoStage } from './demo-stage.js';
 import { makeTract, type DemoTract } from './demo-tracts.js';
@@ -24,6 +26,17 @@ const tracts: readonly DemoTract[] = [
     center: { latitude: 39.112, longitude: -104.861 },
     permitPrefix: '26-0',
     lots: sorrelBenchLots,
+  },
+  {
+    name: 'Kettle Rise',
+    plat: kettleRise(),
+    builder: 'penmarrow',
+    superintendent: 'hal',
+    department: 'tallowmere',
+    desk: 'wes',
+    center: { latitude: 39.131, longitude: -104.838 },
+    permitPrefix: '26-4',
+    lots: kettleRiseLots,
   },
   {
     name: 'Millpond, phase 1',
@@ -78,7 +91,8 @@ export async function tellStory(
     for (const [index, lot] of tract.lots.entries()) {
       tellLot({ client, stage, foundation, tract, days, lot, lotId: ids.get(lot.number) ?? '', spread: index % 25 });
     }
-    if (tract.department === 'tallowmere') tellThread(client, stage, days, ids.get('17') ?? '');
+    tellHandover(client, stage, foundation, days, tract.department, ids);
+    if (tract.name?.startsWith('Sorrel Bench')) tellThread(client, stage, days, ids.get('17') ?? '');
   }
 }
 

@@ -4,7 +4,7 @@ import type { DemoClient } from './demo-client.js';
 import type { DemoFoundation } from './demo-foundation.js';
 import { demoHouses } from './demo-houses.js';
 import type { DemoLot } from './demo-lots.js';
-import { demoPeople, type DemoOrganizationKey } from './demo-people.js';
+import { demoOrganizations, demoPeople, type DemoOrganizationKey } from './demo-people.js';
 
 /** Lots of one builder under one department, in a tract or along a street. */
 export interface DemoTract {
@@ -60,7 +60,7 @@ async function makeLot(
       permit: {
         number: `${tract.permitPrefix}${String(100 + index).padStart(5, '0')}-P`,
         status: lot.permit,
-        holder: plumberOrganization(lot.plumber).replace('-', ' '),
+        holder: nameOf(plumberOrganization(lot.plumber)),
       },
       mayPlumberRequest: index % 3 === 0,
       units,
@@ -108,4 +108,8 @@ function plumberOrganization(personKey: string): DemoOrganizationKey {
   const membership = person?.memberships[0];
   if (!membership) throw new Error(`the demo knows no plumber ${personKey}`);
   return membership.organization;
+}
+
+function nameOf(key: DemoOrganizationKey): string {
+  return demoOrganizations.find((each) => each.key === key)?.name ?? key;
 }

@@ -11,8 +11,12 @@ export async function emptyDatabase(owner: Sequelize): Promise<void> {
       { type: QueryTypes.SELECT, transaction },
     );
     const names = tables.map(({ tablename }) => `"${tablename}"`).join(', ');
-    await owner.query('ALTER TABLE ledger_entries DISABLE TRIGGER ledger_append_only', { transaction });
+    const guard = async (what: 'DISABLE' | 'ENABLE') => {
+      for (const table of ['ledger_entries', 'ledger_anchors', 'ledger_anchor_heads'])
+        await owner.query(`ALTER TABLE ${table} ${what} TRIGGER ledger_append_only`, { transaction });
+    };
+    await guard('DISABLE');
     await owner.query(`TRUNCATE ${names} RESTART IDENTITY CASCADE`, { transaction });
-    await owner.query('ALTER TABLE ledger_entries ENABLE TRIGGER ledger_append_only', { transaction });
+    await guard('ENABLE');
   });
 }
