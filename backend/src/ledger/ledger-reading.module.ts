@@ -1,5 +1,7 @@
 import { Module } from '@nestjs/common';
 import { LotsModule } from '../lots/lots.module.js';
+import { LedgerAnchorsQueries } from './ledger-anchors.queries.js';
+import { LedgerAnchors } from './ledger-anchors.service.js';
 import { LedgerController } from './ledger.controller.js';
 import { LedgerQueries } from './ledger.queries.js';
 import { LedgerVerifier } from './ledger.verifier.js';
@@ -8,7 +10,7 @@ import { LedgerVerifier } from './ledger.verifier.js';
 @Module({
   imports: [LotsModule],
   controllers: [LedgerController],
-  providers: [LedgerQueries, LedgerVerifier],
-  exports: [LedgerVerifier],
+  providers: [LedgerAnchors, LedgerAnchorsQueries, LedgerQueries, LedgerVerifier],
+  exports: [LedgerAnchors, LedgerQueries, LedgerVerifier],
 })
 export class LedgerReadingModule {}

@@ -1,3 +1,12 @@
+/** One builder or plumber of a lot in the place of another. */
+interface HandoverPayload {
+  kind: string;
+  organizationId: string;
+  organizationName: string;
+  formerId: string;
+  formerName: string;
+}
+
 /**
  * Every kind of ledger entry and what it carries: a closed union. Payloads hold codes and values, never words in a language, never secrets.
  */
@@ -19,9 +28,18 @@ export interface LedgerPayloads {
   'lot-added': { number: string; address: string; builderId: string };
   'lot-changed': { fields: string[]; permitStatus?: string; permitNumber?: string | null };
   'geometry-set': { unitNumber: number };
+  'house-applied': { unitNumber: number; modelId: string; name: string; version: number; keptChanges: string[] };
+  'house-model-added': { modelId: string; name: string };
+  'house-model-renamed': { modelId: string; name: string; formerName: string };
+  'house-model-versioned': { modelId: string; name: string; version: number };
+  'house-model-removed': { modelId: string; name: string };
   'party-asked': { kind: string; organizationId: string; organizationName: string };
   'party-joined': { kind: string; organizationId: string; organizationName: string };
   'party-refused': { kind: string; organizationId: string; organizationName: string; why: string | null };
+  'handover-asked': HandoverPayload;
+  'handover-withdrawn': HandoverPayload;
+  'handover-refused': HandoverPayload & { why: string | null };
+  'party-replaced': HandoverPayload & { takenOver: number };
   'visit-requested': { visitId: string; stageCode: string; startAt: string; endAt: string; callerName: string | null };
   'visit-booked': { visitId: string; stageCode: string; startAt: string; endAt: string; inspectorName: string };
   'visit-moved': { visitId: string; fromStartAt: string; startAt: string; endAt: string };
@@ -29,6 +47,32 @@ export interface LedgerPayloads {
   'visit-declined': { visitId: string; reason: string };
   'visit-freed': { visitId: string; reason: string };
   'visit-not-reached': { visitId: string };
+  'visit-restored': {
+    visitId: string;
+    freedVisitId: string;
+    stageCode: string;
+    startAt: string;
+    endAt: string;
+    inspectorName: string;
+    madeAt: string;
+  };
+  'visit-first-in-line': {
+    visitId: string;
+    freedVisitId: string;
+    stageCode: string;
+    startAt: string;
+    endAt: string;
+    madeAt: string;
+  };
+  'plan-chosen': {
+    planId: string;
+    unitNumber: number;
+    stageCode: string;
+    system: string;
+    method: string;
+    medium: string;
+    ruleCardVersion: number;
+  };
   'test-started': { holdId: string; system: string; ordinal: number; method: string; unitNumber: number };
   'reading-added': {
     holdId: string;

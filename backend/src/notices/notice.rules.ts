@@ -1,7 +1,8 @@
 import type { NoticeKind } from '@holdwater/shared-types/notices/notice.contract.js';
 
 /** Who stands in what relation to what happened. */
-export type Audience = 'superintendents' | 'plumbers' | 'inspector' | 'opener' | 'desk' | 'asked' | 'requester';
+export type Audience =
+  'superintendents' | 'plumbers' | 'inspector' | 'opener' | 'desk' | 'asked' | 'former' | 'requester';
 
 export interface NoticeRule {
   /** Who sees it on the page. */
@@ -30,6 +31,11 @@ export const noticeRules: Readonly<Record<NoticeKind, NoticeRule>> = {
     email: ['superintendents', 'plumbers', 'inspector'],
     calendar: 'request',
   },
+  'visit-changed': {
+    page: ['superintendents', 'plumbers', 'inspector'],
+    email: ['superintendents', 'plumbers', 'inspector'],
+    calendar: 'request',
+  },
   'visit-withdrawn': {
     page: ['superintendents', 'plumbers', 'inspector', 'desk'],
     email: ['superintendents', 'plumbers', 'inspector'],
@@ -50,6 +56,15 @@ export const noticeRules: Readonly<Record<NoticeKind, NoticeRule>> = {
     email: ['superintendents', 'plumbers', 'inspector'],
     calendar: 'cancel',
   },
+  'visit-restored': {
+    page: ['superintendents', 'plumbers', 'inspector', 'desk'],
+    email: ['superintendents', 'plumbers', 'inspector'],
+    calendar: 'request',
+  },
+  'visit-first-in-line': {
+    page: ['superintendents', 'plumbers', 'desk'],
+    email: ['superintendents', 'plumbers', 'desk'],
+  },
   'test-up': { page: ['superintendents', 'inspector'], email: [] },
   'no-longer-up': { page: ['superintendents', 'inspector', 'plumbers'], email: [] },
   'visit-underway': { page: ['superintendents', 'plumbers'], email: [] },
@@ -62,6 +77,8 @@ export const noticeRules: Readonly<Record<NoticeKind, NoticeRule>> = {
   'consent-asked': { page: ['asked'], email: ['asked'] },
   'consent-given': { page: ['superintendents'], email: [] },
   'consent-refused': { page: ['superintendents'], email: ['superintendents'] },
+  // definitions, notices: "handover (both plumbers, department)"
+  handover: { page: ['former', 'superintendents', 'plumbers', 'desk'], email: ['former', 'plumbers', 'desk'] },
   'rule-card-published': {
     page: ['superintendents', 'plumbers', 'inspector', 'desk'],
     email: ['superintendents', 'plumbers'],

@@ -19,10 +19,14 @@ export interface OutboxPayloads extends Record<NoticeKind, object> {
   'visit-requested': VisitEvent;
   'visit-booked': VisitEvent;
   'visit-moved': VisitEvent & { from: { startAt: string; endAt: string }; isBooked: boolean };
+  /** What its calendar entry says is other than it was, at the same time: another address, other parties. */
+  'visit-changed': VisitEvent;
   'visit-withdrawn': VisitEvent & { reason: string; wasBooked: boolean };
   'visit-declined': VisitEvent & { reason: string };
   'visit-freed': VisitEvent & { reason: string };
   'visit-not-reached': VisitEvent;
+  'visit-restored': VisitEvent;
+  'visit-first-in-line': VisitEvent;
   'test-up': VisitEvent;
   'no-longer-up': VisitEvent;
   'visit-underway': VisitEvent;
@@ -36,6 +40,15 @@ export interface OutboxPayloads extends Record<NoticeKind, object> {
   'consent-asked': { organizationId: string; kind: string; lotCount: number };
   'consent-given': { organizationId: string; kind: string; lotCount: number };
   'consent-refused': { organizationId: string; kind: string; why: string | null; lotCount: number };
+  /** A lot went from one builder or plumber to another. */
+  handover: {
+    party: 'builder' | 'plumber';
+    organizationId: string;
+    organizationName: string;
+    formerId: string;
+    formerName: string;
+    takenOver: number;
+  };
   'rule-card-published': { ruleCardId: string; departmentId: string; version: number; effectiveFrom: string };
   /** Mail of an account to one address. The link's secret is sealed, never readable in the table. */
   'account-mail': {

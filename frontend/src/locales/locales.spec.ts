@@ -105,7 +105,7 @@ describe('codes have words in both languages', () => {
     expect(
       missing(
         'app',
-        waitingKinds.map((kind) => `waiting.kinds.${kind}`),
+        waitingKinds.flatMap((kind) => ['kinds', 'theirs', 'titles'].map((words) => `waiting.${words}.${kind}`)),
       ),
     ).toEqual([]);
   });

@@ -1,3 +1,5 @@
+import type { MissingThing } from './missing-things.js';
+
 /**
  * Every error a person can meet, once. The code is the key of its words in both languages (`errors.<code>`); the same body goes over HTTP
  * and the socket. A refusal that is expected has a code of its own.
@@ -9,7 +11,6 @@ export const errorCatalogue = {
   'not-found': 404,
   'signed-out': 401,
   'not-allowed': 403,
-  'idempotency-key-missing': 400,
   'idempotency-key-reused': 409,
   'stale-state': 409,
   busy: 503,
@@ -32,10 +33,13 @@ export const errorCatalogue = {
   // lots
   'lot-number-taken': 409,
   'tract-name-taken': 409,
+  'house-model-name-taken': 409,
+  'house-model-in-use': 409,
+  'houses-changed-by-hand': 409,
+  'house-cannot-be': 409,
   'party-pending': 409,
   'party-already-attached': 409,
   'party-has-visit': 409,
-  'import-refused': 400,
   // visits
   'window-past': 409,
   'window-closed': 409,
@@ -55,6 +59,9 @@ export const errorCatalogue = {
   'window-not-open': 409,
   'undo-too-late': 409,
   'visit-of-another': 409,
+  // plans
+  'no-house': 409,
+  'plan-not-usable': 409,
   // holds
   'hold-standing': 409,
   'hold-ended': 409,
@@ -64,6 +71,7 @@ export const errorCatalogue = {
   'method-not-accepted': 409,
   'over-limit': 409,
   'reading-in-the-future': 400,
+  'said-too-late': 409,
   // outcomes
   'fail-needs-a-correction': 400,
   'answers-missing': 400,
@@ -72,4 +80,9 @@ export const errorCatalogue = {
 } as const satisfies Record<string, number>;
 
 export type ErrorCode = keyof typeof errorCatalogue;
+/** What refusals carry whose words are made of it; every other carries what it likes. */
+interface TypedParams {
+  'not-found': { what?: MissingThing };
+}
+export type ErrorParams<C extends ErrorCode> = C extends keyof TypedParams ? TypedParams[C] : Record<string, unknown>;
 export const errorCodes = Object.keys(errorCatalogue) as ErrorCode[];

@@ -6,6 +6,8 @@ import { route } from '../common/route.js';
 import { organizationBrief, personBrief } from '../accounts/person.contract.js';
 import { houseGeometry } from '../hydraulics/house-geometry.js';
 import { systems } from '../holds/hold.states.js';
+import { houseOrigin } from './house-origin.js';
+import { houseToSave } from './house.rules.js';
 import { visitStates } from '../visits/visit.states.js';
 
 export const permitStatuses = ['not-applied', 'applied', 'issued', 'expired'] as const;
@@ -26,6 +28,9 @@ export const lotAccess = z.strictObject({
 export type LotAccess = z.infer<typeof lotAccess>;
 
 export const partyKinds = ['builder', 'plumber', 'department'] as const;
+/** Parties that another may take the place of. */
+export const handoverKinds = ['builder', 'plumber'] as const;
+export type HandoverKind = (typeof handoverKinds)[number];
 export const partyStatuses = ['pending', 'attached', 'refused'] as const;
 export const party = z.object({
   kind: z.enum(partyKinds),
@@ -49,6 +54,8 @@ export const lotUnit = z.object({
   number: z.number().int(),
   label: z.string(),
   geometry: houseGeometry.nullable(),
+  /** The builder's house model it was taken from; null for a house measured on its own. */
+  model: houseOrigin.nullish(),
 });
 export type LotUnit = z.infer<typeof lotUnit>;
 
@@ -104,6 +111,8 @@ export const lotDetail = lotSummary.extend({
   /** Null where the reader may not see it. */
   access: lotAccess.nullable(),
   parties: z.array(party),
+  /** Who is asked to take the place of a party and has not answered. */
+  handovers: z.array(z.object({ kind: z.enum(handoverKinds), organization: organizationBrief })),
   ruleCard: z.object({ id, version: z.number().int(), effectiveFrom: localDate.nullable() }).nullable(),
   abilities: lotAbilities,
 });
@@ -210,7 +219,7 @@ export const setGeometry = route({
   summary: 'Builder or plumber: the house as it will be tested',
   status: 200,
   params: z.object({ lotId: id, unitNumber: z.coerce.number().int().min(1).max(12) }),
-  body: z.strictObject({ geometry: houseGeometry }),
+  body: z.strictObject({ geometry: houseToSave }),
   answer: lotDetail,
 });
 
@@ -224,6 +233,20 @@ export const attachParty = route({
   answer: lotDetail,
 });
 
+/** A test that stands on a lot to be handed over: what whoever takes it over decides by. */
+export const testToTakeOver = z.object({
+  holdId: id,
+  unitNumber: z.number().int(),
+  stageName: z.object({ en: z.string(), es: z.string().optional() }).nullable(),
+  system: z.enum(systems),
+  ordinal: z.number().int(),
+  /** DWV under water: read as a level with a tape; everything else at a gauge. */
+  isLevel: z.boolean(),
+  lastPsi: z.number().nullable(),
+  lastLevelIn: z.number().nullable(),
+});
+export type TestToTakeOver = z.infer<typeof testToTakeOver>;
+
 export const consentRequest = z.object({
   lotId: id,
   lotNumber: z.string(),
@@ -233,6 +256,8 @@ export const consentRequest = z.object({
   kind: z.enum(partyKinds),
   organization: organizationBrief,
   askedAt: instant,
+  /** Set where they would take the place of another; answered by `answerHandover`. */
+  handover: z.object({ replacesName: z.string(), tests: z.array(testToTakeOver) }).nullable(),
 });
 export type ConsentRequest = z.infer<typeof consentRequest>;
 

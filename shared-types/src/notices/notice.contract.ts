@@ -8,10 +8,13 @@ export const noticeKinds = [
   'visit-requested',
   'visit-booked',
   'visit-moved',
+  'visit-changed',
   'visit-withdrawn',
   'visit-declined',
   'visit-freed',
   'visit-not-reached',
+  'visit-restored',
+  'visit-first-in-line',
   'test-up',
   'no-longer-up',
   'visit-underway',
@@ -24,6 +27,7 @@ export const noticeKinds = [
   'consent-asked',
   'consent-given',
   'consent-refused',
+  'handover',
   'rule-card-published',
 ] as const;
 export type NoticeKind = (typeof noticeKinds)[number];

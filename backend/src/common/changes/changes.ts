@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { EventEmitter2 } from '@nestjs/event-emitter';
 import { UnitOfWork } from '../unit-of-work/unit-of-work.js';
 
-export const changeTopics = ['thread', 'visits', 'holds', 'outcomes', 'lot', 'ledger'] as const;
+export const changeTopics = ['thread', 'visits', 'plans', 'holds', 'outcomes', 'lot', 'ledger'] as const;
 export type ChangeTopic = (typeof changeTopics)[number];
 
 /** What pages that look at a lot should fetch anew. */

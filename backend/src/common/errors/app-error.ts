@@ -1,4 +1,4 @@
-import { errorCatalogue, type ErrorCode } from '@holdwater/shared-types/errors/catalogue.js';
+import { errorCatalogue, type ErrorCode, type ErrorParams } from '@holdwater/shared-types/errors/catalogue.js';
 
 /** A refusal a person can meet; its code stands in the catalogue and has words in both languages. */
 export class AppError extends Error {
@@ -14,10 +14,10 @@ export class AppError extends Error {
   }
 }
 
-/** Refuses with a code of the catalogue. */
-export function refuse(
-  code: ErrorCode,
-  params: Record<string, unknown> = {},
+/** Refuses with a code of the catalogue and what its words are made of. */
+export function refuse<C extends ErrorCode>(
+  code: C,
+  params: ErrorParams<C> = {} as ErrorParams<C>,
   fields: Record<string, string> = {},
 ): never {
   throw new AppError(code, params, fields);

@@ -14,7 +14,7 @@ const handovers: Readonly<Record<string, { number: string; askedOn: number; answ
 export function tellHandover(
   client: DemoClient,
   stage: DemoStage,
-  { organizationId }: DemoFoundation,
+  foundation: DemoFoundation,
   days: DemoDays,
   department: string,
   lotIds: ReadonlyMap<string, string>,
@@ -22,7 +22,7 @@ export function tellHandover(
   const told = handovers[department];
   if (!told) return;
   const lotId = lotIds.get(told.number) ?? '';
-  const successor = organizationId('merrow');
+  const successor = foundation.organizationId('merrow');
   stage.at(days.instant(days.workingDate(told.askedOn), '10:20'), async () => {
     await client.call(askHandover, 'della', {
       params: { lotId },

@@ -11,6 +11,7 @@ import { ashquillLots, corrowLots, millpondLots, sorrelBenchLots, type DemoLot }
 import { demoPeople } from './demo-people.js';
 import { kettleRise, millpond, sorrelBench } from './demo-plats.js';
 import { demoDepartments } from './demo-rule-cards.js';
+import { findDemoPlan } from './demo-plans.js';
 import type { DemoStage } from './demo-stage.js';
 import { makeTract, type DemoTract } from './demo-tracts.js';
 import { DemoVisitStory } from './demo-visit-story.js';
@@ -127,17 +128,21 @@ function tellStanding(
   const at = new Date(days.instant(days.workingDate(standing.day), '16:10').getTime() + spread * 60_000);
   stage.at(at, async () => {
     const write = () => ({ clientId: randomUUID(), madeAt: stage.now().toISOString() });
+    const { system, method } = standing;
+    const part = { lotId, unitNumber: 1, stageCode: 'rough-in', system, method, medium: 'water' } as const;
+    const plan = await findDemoPlan(client, lot.plumber, part, stage.now());
     await client.call(startHold, lot.plumber, {
       params: { lotId },
       body: {
         ...write(),
         unitNumber: 1,
         stageCode: 'rough-in',
-        system: standing.system,
-        method: standing.method,
+        system,
+        method,
         medium: 'water',
+        planId: plan?.id ?? null,
         tape: { incrementIn: 0.25 },
-        fillLevelFt: 21,
+        ...(plan === null && { fillLevelFt: 21 }),
         firstReading: { ...write(), levelIn: 0, temperatureF: 60 },
       },
     });

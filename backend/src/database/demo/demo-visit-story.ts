@@ -16,6 +16,7 @@ import {
 import { Temporal } from 'temporal-polyfill';
 import type { DemoClient } from './demo-client.js';
 import type { DemoDays } from './demo-days.js';
+import { findDemoPlan } from './demo-plans.js';
 import type { DemoStage } from './demo-stage.js';
 
 type OutcomeResult = RouteCall<typeof recordOutcome>['body']['result'];
@@ -171,6 +172,11 @@ export class DemoVisitStory {
   private async startTest(unitNumber: number, system: 'dwv' | 'water'): Promise<Hold> {
     const write = this.write();
     const isWater = system === 'water';
+    const { stage: stageCode } = this.plan;
+    const method = isWater ? 'gauge' : this.plan.method;
+    const medium = isWater ? (this.plan.medium ?? 'water') : this.plan.method === 'air' ? 'air' : 'water';
+    const part = { lotId: this.lot.lotId, unitNumber, stageCode, system, method, medium } as const;
+    const plan = await findDemoPlan(this.client, this.people.plumber, part, this.stage.now());
     return this.client.call(startHold, this.people.plumber, {
       params: { lotId: this.lot.lotId },
       body: {
@@ -178,15 +184,17 @@ export class DemoVisitStory {
         unitNumber,
         stageCode: this.plan.stage,
         system,
-        method: isWater ? 'gauge' : this.plan.method,
-        medium: isWater ? (this.plan.medium ?? 'water') : this.plan.method === 'air' ? 'air' : 'water',
+        method,
+        medium,
+        planId: plan?.id ?? null,
         isSuperseding: true,
         ...(isWater
           ? {
               gauge: { rangePsi: 200, incrementPsi: 1 },
-              ceilingPsi: (this.plan.medium ?? 'water') === 'water' ? 180 : 80,
+              // a plan brings the ceiling of this very house
+              ...(plan === null && { ceilingPsi: medium === 'water' ? 180 : 80 }),
             }
-          : { tape: { incrementIn: 0.25 }, fillLevelFt: this.plan.levelFt ?? 21 }),
+          : { tape: { incrementIn: 0.25 }, ...(plan === null && { fillLevelFt: this.plan.levelFt ?? 21 }) }),
         firstReading: this.reading(system, 0),
       },
     });

@@ -95,6 +95,8 @@ export class DeliveryWorker {
   }
 }
 
+/** What is said to those who leave a lot, and what takes an entry out of a calendar, asks no more whether they are of it. */
 function lotIdOf(facts: MailFacts): string | null {
+  if (facts.type === 'lot' && (facts.hasLeft || facts.invite?.method === 'CANCEL')) return null;
   return facts.type === 'lot' && facts.lotId !== '' ? facts.lotId : null;
 }

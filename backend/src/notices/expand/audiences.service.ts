@@ -23,6 +23,7 @@ export class Audiences {
     const members = await this.facts.listMembers([lot.builderId, lot.plumberId, lot.departmentId]);
     const openerId =
       typeof event.payload.correctionId === 'string' ? await this.facts.findOpenerId(event.payload.correctionId) : null;
+    const former = event.kind === 'handover' ? await this.formerOf(event) : [];
     const inspectorId = visit?.inspectorId ?? formerInspectorOf(event);
     return {
       people: {
@@ -31,9 +32,16 @@ export class Audiences {
         desk: idsOf(members, lot.departmentId, 'desk'),
         inspector: members.filter(({ id }) => id === inspectorId).map(({ id }) => id),
         opener: members.filter(({ id }) => id === openerId).map(({ id }) => id),
+        former: former.filter(({ id }) => !members.some((each) => each.id === id)).map(({ id }) => id),
       },
-      byId: byId(members),
+      byId: byId([...members, ...former]),
     };
+  }
+
+  /** Those who spoke for an organization on a lot it is no longer on. */
+  private async formerOf(event: OutboxEventModel): Promise<PersonRow[]> {
+    const members = await this.facts.listMembers([String(event.payload.formerId)]);
+    return members.filter(({ roles }) => roles.some((role) => ['superintendent', 'plumber', 'owner'].includes(role)));
   }
 
   private async ofConsent(event: OutboxEventModel, lot: LotFacts | null): Promise<EventAudience> {
@@ -43,7 +51,7 @@ export class Audiences {
     return {
       people: {
         asked: asked
-          .filter(({ roles }) => roles.some((role) => ['plumber', 'desk', 'owner'].includes(role)))
+          .filter(({ roles }) => roles.some((role) => ['superintendent', 'plumber', 'desk', 'owner'].includes(role)))
           .map(({ id }) => id),
         superintendents: idsOf(members, lot?.builderId ?? null, 'superintendent'),
       },

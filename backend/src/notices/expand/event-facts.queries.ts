@@ -74,6 +74,16 @@ export class EventFactsQueries {
     );
   }
 
+  /** Somebody who may be on no organization of the lot any more, as a member of any. */
+  async findMember(personId: string): Promise<PersonRow | null> {
+    return this.one<PersonRow>(
+      `SELECT p.id, p.name, p.email, p.locale, o.id AS "organizationId", o.name AS "organizationName", m.roles
+       FROM memberships m JOIN persons p ON p.id = m.person_id JOIN organizations o ON o.id = m.organization_id
+       WHERE p.id = :personId AND NOT m.is_disabled AND NOT p.is_disabled ORDER BY o.name, o.id LIMIT 1`,
+      { personId },
+    );
+  }
+
   async findPersonName(personId: string | null): Promise<string | null> {
     if (personId === null) return null;
     const row = await this.one<{ name: string }>('SELECT name FROM persons WHERE id = :personId', { personId });

@@ -2,7 +2,7 @@ import type { NoticeKind } from '@holdwater/shared-types/notices/notice.contract
 import { instantOf } from '../../scheduling/working-time/local-instant.js';
 import type { InviteFacts, LotMailFacts } from '../mail/mail-facts.js';
 import type { Audience } from '../notice.rules.js';
-import type { VisitEventFacts } from '../outbox.kinds.js';
+import type { OutboxPayloads, VisitEventFacts } from '../outbox.kinds.js';
 import type { OutboxEventModel } from '../outbox-event.model.js';
 import type { LotFacts, PersonRow, VisitFacts } from './event-facts.queries.js';
 
@@ -65,8 +65,16 @@ export function lotMailFacts(
     outcome: kind === 'outcome' ? String(payload.kind) : null,
     correctionNumber: typeof payload.number === 'number' ? payload.number : null,
     version: typeof payload.version === 'number' ? payload.version : null,
+    handover: handoverFacts(subject),
+    hasLeft: people.former?.includes(person.id) ?? false,
     invite,
   };
+}
+
+function handoverFacts({ event }: EventSubject): LotMailFacts['handover'] {
+  if (event.kind !== 'handover') return null;
+  const { formerName, organizationName } = event.payload as OutboxPayloads['handover'];
+  return { formerName, organizationName };
 }
 
 function visitFacts({ event, lot, visit }: EventSubject): LotMailFacts['visit'] {

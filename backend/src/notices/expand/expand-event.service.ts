@@ -76,7 +76,8 @@ export class ExpandEvent {
     for (const [personId, channels] of recipients) {
       const person = audience.byId.get(personId);
       if (!person) continue;
-      const noticeId = channels.page ? await this.notice(subject, personId) : null;
+      const hasLeft = audience.people.former?.includes(personId) ?? false;
+      const noticeId = channels.page ? await this.notice(subject, personId, hasLeft) : null;
       if (!channels.email) continue;
       const mail = lotMailFacts(subject, person, audience.people, invites.of(personId));
       if (mail) await this.deliver(event, { personId, address: person.email, noticeId }, mail);
@@ -86,20 +87,19 @@ export class ExpandEvent {
 
   /** Somebody who had the entry and is no longer concerned, such as an inspector whose visit went to another: their entry goes. */
   private async cancelFor(subject: EventSubject, left: { personId: string; address: string }): Promise<void> {
-    const [person] = (
-      await this.facts.listMembers([
-        subject.lot?.departmentId ?? null,
-        subject.lot?.builderId ?? null,
-        subject.lot?.plumberId ?? null,
-      ])
-    ).filter(({ id }) => id === left.personId);
+    const { departmentId = null, builderId = null, plumberId = null } = subject.lot ?? {};
+    const members = await this.facts.listMembers([departmentId, builderId, plumberId]);
+    const member = members.find(({ id }) => id === left.personId);
+    const person = member ?? (await this.facts.findMember(left.personId));
     if (!person) return;
-    const mail = lotMailFacts(subject, person, {}, cancellationOf(subject), 'visit-passed-on');
+    const former = member ? [] : [person.id];
+    const kind = person.organizationId === departmentId ? 'visit-passed-on' : 'visit-left';
+    const mail = lotMailFacts(subject, person, { former }, cancellationOf(subject), kind);
     if (mail)
       await this.deliver(subject.event, { personId: left.personId, address: left.address, noticeId: null }, mail);
   }
 
-  private async notice(subject: EventSubject, personId: string): Promise<string> {
+  private async notice(subject: EventSubject, personId: string, hasLeft: boolean): Promise<string> {
     const { event, kind } = subject;
     const id = randomUUID();
     await this.notices.create({
@@ -107,7 +107,7 @@ export class ExpandEvent {
       eventId: event.id,
       personId,
       kind,
-      params: noticeParams(subject),
+      params: { ...noticeParams(subject), ...(hasLeft && { hasLeft }) },
       lotId: event.lotId,
       visitId: event.visitId,
       at: event.at,

@@ -28,22 +28,23 @@ export function composeLotMail(facts: LotMailFacts, appUrl: string): MailDraft {
   const w = words[facts.locale];
   const values = valuesOf(facts, w);
   const kind = w.kinds[facts.kind];
-  const act = facts.lotId
-    ? {
-        words: fill(w.openLot, { number: facts.lotNumber }),
-        url: `${appUrl}${facts.kind === 'consent-asked' ? '/consents' : `/lots/${facts.lotId}`}`,
-      }
-    : { words: w.openPage, url: appUrl };
   return {
     language: facts.locale,
     tag: kind.tag,
     subject: fill(kind.subject, values),
     lead: [fill(kind.lead, values), ...whatNext(facts, w, values)].join(' '),
     cells: cellsOf(facts, w, values),
-    act,
+    act: actOf(facts, w, appUrl),
     notes: notesOf(facts, w),
     foot: footOf(facts, w),
   };
+}
+
+function actOf(facts: LotMailFacts, w: MailWords, appUrl: string): MailDraft['act'] {
+  if (!facts.lotId) return { words: w.openPage, url: appUrl };
+  if (facts.hasLeft) return { words: w.openLeft, url: `${appUrl}/past-lots/${facts.lotId}` };
+  const path = facts.kind === 'consent-asked' ? '/consents' : `/lots/${facts.lotId}`;
+  return { words: fill(w.openLot, { number: facts.lotNumber }), url: `${appUrl}${path}` };
 }
 
 /** Puts a mail of an account into words; `token` is the secret of its link, opened only now. */
@@ -93,15 +94,18 @@ function valuesOf(facts: LotMailFacts, w: MailWords): Record<string, string> {
     version: String(facts.version ?? ''),
     organization: facts.organizationName,
     builder: facts.builderName,
+    former: facts.handover?.formerName ?? '',
+    successor: facts.handover?.organizationName ?? '',
   };
 }
 
-const comes: ReadonlyArray<LotMailFacts['kind']> = ['visit-booked', 'visit-moved'];
+const comes: ReadonlyArray<LotMailFacts['kind']> = ['visit-booked', 'visit-moved', 'visit-changed', 'visit-restored'];
 
 function whatNext(facts: LotMailFacts, w: MailWords, values: Record<string, string>): string[] {
   if (!comes.includes(facts.kind) || !facts.visit?.inspectorName) return [];
   const sentences = facts.visit.plannedStartAt ? [fill(w.arrives, values)] : [];
-  return facts.visit.upBy && facts.recipientRole !== 'inspector' ? [...sentences, fill(w.putUpBy, values)] : sentences;
+  const isStillToDo = facts.recipientRole !== 'inspector' && facts.kind !== 'visit-restored';
+  return facts.visit.upBy && isStillToDo ? [...sentences, fill(w.putUpBy, values)] : sentences;
 }
 
 function cellsOf(facts: LotMailFacts, w: MailWords, values: Record<string, string>): MailDraft['cells'] {
@@ -125,20 +129,20 @@ function cellsOf(facts: LotMailFacts, w: MailWords, values: Record<string, strin
   return cells.slice(0, 4);
 }
 
+function askedOf(kind: LotMailFacts['kind']): 'request' | 'move' | 'change' {
+  if (kind === 'visit-moved') return 'move';
+  return kind === 'visit-changed' ? 'change' : 'request';
+}
+
 function notesOf(facts: LotMailFacts, w: MailWords): string[] {
   const notes = [];
-  if (facts.invite)
-    notes.push(
-      facts.invite.method === 'CANCEL'
-        ? w.calendar.cancel
-        : w.calendar[facts.kind === 'visit-moved' ? 'move' : 'request'],
-    );
+  if (facts.invite) notes.push(w.calendar[facts.invite.method === 'CANCEL' ? 'cancel' : askedOf(facts.kind)]);
   if (facts.visit?.upBy && comes.includes(facts.kind)) notes.push(w.local);
   return notes;
 }
 
 function footOf(facts: LotMailFacts, w: MailWords): string[] {
-  const because = fill(w.sentBecause, {
+  const because = fill(facts.hasLeft ? w.sentBecauseLeft : w.sentBecause, {
     name: facts.recipientName,
     organization: facts.organizationName,
     role: w.roles[facts.recipientRole],

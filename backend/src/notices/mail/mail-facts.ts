@@ -5,8 +5,8 @@ import type { Locale } from '@holdwater/shared-types/common/locale.js';
 /** What a mail about a lot says, as it stood at the moment of the event. Kept with the delivery: a late mail tells the truth of its time. */
 export interface LotMailFacts {
   type: 'lot';
-  /** `visit-passed-on`: to somebody whose visit went to another. */
-  kind: NoticeKind | 'visit-passed-on';
+  /** `visit-passed-on`: to an inspector whose visit went to another; `visit-left`: to somebody whose lot did. */
+  kind: NoticeKind | 'visit-passed-on' | 'visit-left';
   locale: Locale;
   recipientName: string;
   /** Why they get it. */
@@ -35,6 +35,10 @@ export interface LotMailFacts {
   outcome: string | null;
   correctionNumber: number | null;
   version: number | null;
+  /** A handover: who went, who came. Absent from mails written before there was any. */
+  handover?: { formerName: string; organizationName: string } | null;
+  /** The reader's organization is no longer on the lot. */
+  hasLeft?: boolean;
   invite: InviteFacts | null;
 }
 

@@ -8,5 +8,7 @@ export function noticeLink({ kind, lotId, params }: Notice): string | null {
     return typeof ruleCardId === 'string' ? `/rule-cards/${ruleCardId}` : '/rule-cards';
   }
   if (lotId === null) return null;
+  // those who were replaced read only what there was until then
+  if (params['hasLeft'] === true) return `/past-lots/${lotId}`;
   return kind === 'comment' ? `/lots/${lotId}/thread` : `/lots/${lotId}`;
 }

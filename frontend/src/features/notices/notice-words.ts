@@ -20,10 +20,13 @@ const marks: Readonly<Record<Notice['kind'], MarkName>> = {
   'visit-requested': 'requested',
   'visit-booked': 'booked',
   'visit-moved': 'booked',
+  'visit-changed': 'booked',
   'visit-withdrawn': 'withdrawn',
   'visit-declined': 'declined',
   'visit-freed': 'freed',
   'visit-not-reached': 'requested',
+  'visit-restored': 'booked',
+  'visit-first-in-line': 'requested',
   'test-up': 'ready',
   'no-longer-up': 'booked',
   'visit-underway': 'underway',
@@ -36,6 +39,7 @@ const marks: Readonly<Record<Notice['kind'], MarkName>> = {
   'consent-asked': 'waits-on-you',
   'consent-given': 'sent',
   'consent-refused': 'declined',
+  handover: 'sent',
   'rule-card-published': 'sent',
 };
 
@@ -66,6 +70,8 @@ export function useNoticeWords(): (notice: Notice) => NoticeWords {
         version: text('version'),
         day: text('effectiveFrom') === '' ? '' : time.date(text('effectiveFrom')),
         outcome: kind === 'outcome' && isMarkName(outcome) ? t(`marks.${outcome}`) : '',
+        former: text('formerName'),
+        successor: text('organizationName'),
         count: Number(params['lotCount'] ?? 1),
       };
       const lot = text('lotNumber');

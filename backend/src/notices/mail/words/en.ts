@@ -15,6 +15,11 @@ export const en: MailWords = {
       subject: '{lot}: {stage} visit moved to {when}',
       lead: 'The visit was moved from {from} to {when}.',
     },
+    'visit-changed': {
+      tag: 'Changed',
+      subject: '{lot}: {stage} visit {when}, entry changed',
+      lead: 'The window stays. What its calendar entry says is other than it was: the address, the lot or who is on it.',
+    },
     'visit-withdrawn': {
       tag: 'Withdrawn',
       subject: '{lot}: {stage} visit {when} withdrawn',
@@ -24,6 +29,11 @@ export const en: MailWords = {
       tag: 'Another inspector',
       subject: '{lot}: {stage} visit {when} is no longer yours',
       lead: 'The visit stays booked with another inspector. You do not have to be there.',
+    },
+    'visit-left': {
+      tag: 'No longer yours',
+      subject: '{lot}: {stage} visit {when} is no longer yours',
+      lead: 'The visit stays booked for those who are on the lot now. You do not have to be there.',
     },
     'visit-declined': {
       tag: 'Declined',
@@ -39,6 +49,16 @@ export const en: MailWords = {
       tag: 'Not reached',
       subject: '{lot}: {stage} visit {when} not reached',
       lead: 'The inspector did not get to this lot. It keeps first place for the next window and there is no fee.',
+    },
+    'visit-restored': {
+      tag: 'Booked again',
+      subject: '{lot}: {stage} visit {when} booked again',
+      lead: 'The window was freed, but the test had been said up in time, without signal. The visit is booked again.',
+    },
+    'visit-first-in-line': {
+      tag: 'First in line',
+      subject: '{lot}: {stage} visit is first in line',
+      lead: 'The window {when} was freed, though the test had been said up in time, without signal. It is full by now: the lot is first in line for another one.',
     },
     'test-up': { tag: 'Test up', subject: '{lot}: test up for {when}', lead: '{actor} says the tests are standing.' },
     'no-longer-up': {
@@ -80,6 +100,11 @@ export const en: MailWords = {
       subject: '{lot}: {actor} does not join',
       lead: '{actor} does not join the lot. Ask another.',
     },
+    handover: {
+      tag: 'Handed over',
+      subject: '{lot}: handed over from {former} to {successor}',
+      lead: '{former} was replaced by {successor} on this lot. What {former} wrote until now stays theirs to read; from now on {successor} writes.',
+    },
     'rule-card-published': {
       tag: 'Rule card',
       subject: 'Rule card {version} is published',
@@ -111,13 +136,16 @@ export const en: MailWords = {
   notSetYet: 'not placed yet',
   openLot: 'Open lot {number}',
   openPage: 'Open Holdwater',
+  openLeft: 'Open what stays yours to read',
   calendar: {
     request:
       'The file attached puts the visit in your own calendar. If it moves, the same entry moves. If it is withdrawn, the entry goes.',
     move: 'The entry in your calendar moves with it.',
+    change: 'The file attached brings the entry in your own calendar up to date, or puts it there.',
     cancel: 'The entry in your calendar goes.',
   },
   sentBecause: 'Sent to {name}, {organization}, because you are the {role} of this lot.',
+  sentBecauseLeft: 'Sent to {name}, {organization}, because you were on this lot until now.',
   department: 'Builder: {builder}. Department: {department}, {phone}.',
   local: 'The local code, the department and a licensed plumber decide.',
   accounts: {

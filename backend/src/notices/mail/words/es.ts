@@ -19,6 +19,11 @@ export const es: MailWords = {
       subject: '{lot}: visita de {stage} pasa a {when}',
       lead: 'La visita pasó de {from} a {when}.',
     },
+    'visit-changed': {
+      tag: 'Entrada cambiada',
+      subject: '{lot}: visita de {stage}, {when}, entrada cambiada',
+      lead: 'El horario sigue igual. Cambió lo que dice su entrada: la dirección, el lote o quién está en él.',
+    },
     'visit-withdrawn': {
       tag: 'Retirada',
       subject: '{lot}: visita de {stage}, {when}, retirada',
@@ -28,6 +33,11 @@ export const es: MailWords = {
       tag: 'Otro inspector',
       subject: '{lot}: la visita de {stage}, {when}, ya no es suya',
       lead: 'La visita sigue reservada con otro inspector. Usted no tiene que estar.',
+    },
+    'visit-left': {
+      tag: 'Ya no es suya',
+      subject: '{lot}: la visita de {stage}, {when}, ya no es suya',
+      lead: 'La visita sigue reservada para quienes están ahora en el lote. Usted no tiene que estar.',
     },
     'visit-declined': {
       tag: 'Rechazada',
@@ -43,6 +53,16 @@ export const es: MailWords = {
       tag: 'No alcanzada',
       subject: '{lot}: visita de {stage}, {when}, no alcanzada',
       lead: 'El inspector no llegó a este lote. Conserva el primer lugar para el próximo horario y no hay cargo.',
+    },
+    'visit-restored': {
+      tag: 'Reservada otra vez',
+      subject: '{lot}: visita de {stage}, {when}, reservada otra vez',
+      lead: 'El horario se había liberado, pero la prueba se declaró puesta a tiempo, sin señal. La visita está reservada otra vez.',
+    },
+    'visit-first-in-line': {
+      tag: 'Primero en la fila',
+      subject: '{lot}: la visita de {stage} es la primera en la fila',
+      lead: 'El horario de {when} se liberó, aunque la prueba se declaró puesta a tiempo, sin señal. Ya está lleno: el lote es el primero en la fila para otro.',
     },
     'test-up': {
       tag: 'Prueba puesta',
@@ -92,6 +112,11 @@ export const es: MailWords = {
       subject: '{lot}: {actor} no se une',
       lead: '{actor} no se une al lote. Pida a otro.',
     },
+    handover: {
+      tag: 'Entregado',
+      subject: '{lot}: pasa de {former} a {successor}',
+      lead: '{successor} reemplaza a {former} en este lote. {former} puede seguir leyendo lo que había hasta ahora; desde ahora escribe {successor}.',
+    },
     'rule-card-published': {
       tag: 'Tarjeta de reglas',
       subject: 'Se publicó la tarjeta de reglas {version}',
@@ -129,13 +154,16 @@ export const es: MailWords = {
   notSetYet: 'sin asignar todavía',
   openLot: 'Abrir el lote {number}',
   openPage: 'Abrir Holdwater',
+  openLeft: 'Abrir lo que usted puede seguir leyendo',
   calendar: {
     request:
       'El archivo adjunto pone la visita en su propio calendario. Si cambia, cambia la misma entrada. Si se retira, la entrada desaparece.',
     move: 'La entrada de su calendario cambia con ella.',
+    change: 'El archivo adjunto pone al día la entrada de su propio calendario, o la pone ahí.',
     cancel: 'La entrada de su calendario desaparece.',
   },
   sentBecause: 'Enviado a {name}, {organization}, porque usted es {role} de este lote.',
+  sentBecauseLeft: 'Enviado a {name}, {organization}, porque usted estaba en este lote hasta ahora.',
   department: 'Constructor: {builder}. Departamento: {department}, {phone}.',
   local: 'Deciden el código local, el departamento y un plomero con licencia.',
   accounts: {

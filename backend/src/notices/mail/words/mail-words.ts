@@ -15,8 +15,10 @@ export interface MailWords {
   notSetYet: string;
   openLot: string;
   openPage: string;
-  calendar: Record<'request' | 'move' | 'cancel', string>;
+  openLeft: string;
+  calendar: Record<'request' | 'move' | 'change' | 'cancel', string>;
   sentBecause: string;
+  sentBecauseLeft: string;
   department: string;
   local: string;
   accounts: Record<AccountMailFacts['mail'], { tag: string; subject: string; lead: string; act: string; note: string }>;

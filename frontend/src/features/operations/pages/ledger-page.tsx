@@ -28,6 +28,7 @@ export function LedgerPage(): ReactNode {
         cells={[
           { label: t('ledger.chains'), value: check.data?.chains ?? '' },
           { label: t('ledger.entries'), value: check.data?.entries ?? '' },
+          { label: t('ledger.anchors'), value: check.data?.anchors.days ?? '' },
           { label: t('ledger.checked'), value: checkedAt },
         ]}
         acts={
@@ -43,11 +44,22 @@ export function LedgerPage(): ReactNode {
 
 function LedgerVerdict({ verdict }: { verdict: Verdict }): ReactNode {
   const { t } = useTranslation('operations');
+  const words = useTimeWords();
   if (verdict.entries === 0) {
     return (
       <Plain kind="empty" title={t('ledger.emptyTitle')}>
         {t('ledger.emptyText')}
       </Plain>
+    );
+  }
+  if (verdict.anchors.firstBroken !== null) {
+    return (
+      <>
+        <Plain kind="error" title={t('ledger.anchorBrokenTitle')}>
+          {t('ledger.anchorBrokenText', { day: words.dateYear(verdict.anchors.firstBroken) })}
+        </Plain>
+        <BrokenChains verdict={verdict} />
+      </>
     );
   }
   if (verdict.broken.length === 0) {
@@ -57,6 +69,12 @@ function LedgerVerdict({ verdict }: { verdict: Verdict }): ReactNode {
       </Plain>
     );
   }
+  return <BrokenChains verdict={verdict} />;
+}
+
+function BrokenChains({ verdict }: { verdict: Verdict }): ReactNode {
+  const { t } = useTranslation('operations');
+  if (verdict.broken.length === 0) return null;
   return (
     <>
       <Plain kind="error" title={t('ledger.brokenTitle', { count: verdict.broken.length })}>

@@ -41,13 +41,18 @@ describe('deliveries', () => {
 describe('the ledger', () => {
   it('is whole, or names the first entry that does not fit', async () => {
     let broken: { scope: string; firstBroken: number }[] = [];
-    stubApi({ 'GET /api/operations/ledger': () => ({ data: { chains: 2, entries: 40, broken } }) });
+    let anchors: object = { days: 9, lastDay: '2026-04-14', firstBroken: null };
+    stubApi({ 'GET /api/operations/ledger': () => ({ data: { chains: 2, entries: 40, broken, anchors } }) });
     renderPage(<LedgerPage />, { me });
     expect(await screen.findByRole('heading', { name: 'No entry altered' })).toBeInTheDocument();
     broken = [{ scope: 'lot 17', firstBroken: 12 }];
     await userEvent.click(screen.getByRole('button', { name: 'Check now' }));
     expect(await screen.findByRole('heading', { name: '1 chain does not fit' })).toBeInTheDocument();
     expect(screen.getByRole('row', { name: /lot 17/ })).toHaveTextContent('12');
+    broken = [];
+    anchors = { days: 9, lastDay: '2026-04-14', firstBroken: '2026-04-12' };
+    await userEvent.click(screen.getByRole('button', { name: 'Check now' }));
+    expect(await screen.findByRole('heading', { name: 'A daily anchor does not fit' })).toBeInTheDocument();
   });
 });
 
