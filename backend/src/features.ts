@@ -5,6 +5,7 @@ import { DepartmentsModule } from './departments/departments.module.js';
 import { LotsModule } from './lots/lots.module.js';
 import { VisitsModule } from './visits/visits.module.js';
 import { HoldsModule } from './holds/holds.module.js';
+import { HandoversModule } from './handovers/handovers.module.js';
 import { OutcomesModule } from './outcomes/outcomes.module.js';
 import { ThreadsModule } from './threads/threads.module.js';
 import { LedgerReadingModule } from './ledger/ledger-reading.module.js';
@@ -22,6 +23,7 @@ export const features: Type[] = [
   ClearancesModule,
   VisitsModule,
   HoldsModule,
+  HandoversModule,
   OutcomesModule,
   ThreadsModule,
   NoticesModule,

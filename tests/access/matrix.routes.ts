@@ -213,6 +213,30 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     body: (t) => ({ kind: 'plumber', organizationId: t.plumberId }),
   },
 
+  'POST /api/lots/:lotId/handovers': {
+    may: ['superintendent', 'builderOwner'],
+    path: (t) => `/api/lots/${t.lotId}/handovers`,
+    body: (t) => ({ kind: 'plumber', organizationId: t.plumberId }),
+  },
+  'POST /api/lots/:lotId/handovers/answer': {
+    may: ['plumber', 'plumberOwner'],
+    path: (t) => `/api/lots/${t.askedOverLotId}/handovers/answer`,
+    body: (t) => ({ organizationId: t.plumberId, isJoining: false }),
+  },
+  'DELETE /api/lots/:lotId/handovers/:kind': {
+    may: ['superintendent', 'builderOwner'],
+    path: (t) => `/api/lots/${t.lotId}/handovers/plumber`,
+  },
+  'GET /api/past-lots': { may: 'signed-in' },
+  'GET /api/past-lots/:lotId': {
+    may: ['plumber', 'helper', 'plumberOwner'],
+    path: (t) => `/api/past-lots/${t.pastLotId}`,
+  },
+  'GET /api/past-lots/:lotId/ledger': {
+    may: ['plumber', 'helper', 'plumberOwner'],
+    path: (t) => `/api/past-lots/${t.pastLotId}/ledger`,
+  },
+
   'POST /api/visits/offers': {
     may: ['superintendent', 'desk'],
     body: (t) => ({ lots: [{ lotId: t.freeLotId }], stageCode: 'groundwork' }),
@@ -247,7 +271,7 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     body: () => ({ expectedVersion: 99, ...day }),
   },
   'POST /api/visits/:visitId/withdraw': {
-    may: ['superintendent'],
+    may: ['superintendent', 'desk'],
     path: (t) => `/api/visits/${t.visitId}/withdraw`,
     body: () => ({ expectedVersion: 99, reason: 'weather' }),
   },
@@ -277,6 +301,26 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     body: () => ({ expectedVersion: 99, ...write(), result: { kind: 'no-access', reason: 'locked' } }),
   },
 
+  'GET /api/lots/:lotId/plans': { may: own, path: (t) => `/api/lots/${t.lotId}/plans` },
+  'GET /api/lots/:lotId/plans/history': {
+    may: own,
+    path: (t) => `/api/lots/${t.lotId}/plans/history?unitNumber=1&stageCode=rough-in&system=dwv`,
+  },
+  'GET /api/plans/:planId': { may: own, path: (t) => `/api/plans/${t.planId}` },
+  'POST /api/lots/:lotId/plan-offers': {
+    may: own,
+    path: (t) => `/api/lots/${t.lotId}/plan-offers`,
+    body: () => ({ unitNumber: 1, stageCode: 'rough-in', system: 'dwv' }),
+  },
+  'POST /api/lots/:lotId/plans': {
+    may: ['plumber'],
+    path: (t) => `/api/lots/${t.lotId}/plans`,
+    body: () => ({
+      ...write(),
+      ...{ unitNumber: 1, stageCode: 'rough-in', system: 'water', method: 'gauge', medium: 'water' },
+    }),
+  },
+
   'POST /api/lots/:lotId/holds': {
     may: ['plumber'],
     path: (t) => `/api/lots/${t.lotId}/holds`,
@@ -297,7 +341,7 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     body: () => ({ ...write(), levelIn: 1 }),
   },
   'POST /api/readings/:readingId/strike': {
-    may: ['plumber'],
+    may: ['plumber', 'helper'],
     path: (t) => `/api/readings/${t.readingId}/strike`,
     body: () => ({ why: 'typed wrong' }),
   },

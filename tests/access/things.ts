@@ -1,4 +1,6 @@
 import { randomUUID } from 'node:crypto';
+import { OrganizationModel } from '@holdwater/backend/accounts/organization.model.js';
+import { PastPartyModel } from '@holdwater/backend/handovers/past-party.model.js';
 import { CorrectionModel } from '@holdwater/backend/outcomes/correction.model.js';
 import { OutcomeModel } from '@holdwater/backend/outcomes/outcome.model.js';
 import { LotConsentModel } from '@holdwater/backend/lots/lot-consent.model.js';
@@ -13,7 +15,7 @@ import { testNow, type TestApp } from '@holdwater/backend/testing/test-app.js';
 export type Things = Awaited<ReturnType<typeof makeThings>>;
 
 export async function makeThings(server: TestApp, world: World) {
-  const [lot, freeLot, closedLot, askedLot] = world.lots;
+  const [lot, freeLot, closedLot, askedLot, askedOverLot, pastLot] = world.lots;
   // that a plumber may request where the lot allows it is told beside the visits
   await LotModel.update({ mayPlumberRequest: false }, { where: {} });
   const visit = await post(world, 'superintendent', '/api/visits', {
@@ -23,9 +25,14 @@ export async function makeThings(server: TestApp, world: World) {
     label: 'mid',
   });
   const { hold, reading } = await makeHold(world, lot.id);
+  const plan = await post(world, 'plumber', `/api/lots/${lot.id}/plans`, {
+    ...{ clientId: randomUUID(), madeAt: testNow, unitNumber: 1, stageCode: 'rough-in', system: 'dwv' },
+    ...{ method: 'attic-cut', medium: 'water' },
+  });
   const closedVisitId = await makeClosedVisit(world, closedLot.id);
   const correctionId = await makeCorrection(world, closedLot.id, closedVisitId);
   await makeConsent(server, world, askedLot.id);
+  await makeHandovers(server, world, askedOverLot.id, pastLot.id);
   const invitation = await post(
     world,
     'builderOwner',
@@ -48,6 +55,8 @@ export async function makeThings(server: TestApp, world: World) {
     lotId: lot.id,
     freeLotId: freeLot.id,
     askedLotId: askedLot.id,
+    askedOverLotId: askedOverLot.id,
+    pastLotId: pastLot.id,
     tractId: world.tract.id,
     builderId: world.organizations.builder.id,
     plumberId: world.organizations.plumber.id,
@@ -62,6 +71,7 @@ export async function makeThings(server: TestApp, world: World) {
     closedVisitId,
     correctionId,
     holdId: hold,
+    planId: plan.id as string,
     readingId: reading,
     geometry: shown.body.units[0].geometry as object,
     deliveryId: await makeGivenUpDelivery(),
@@ -157,6 +167,24 @@ async function makeConsent(server: TestApp, world: World, lotId: string): Promis
     organizationId: world.organizations.plumber.id,
     askedBy: world.people.superintendent.id,
     askedAt: server.clock.now(),
+  });
+}
+
+/** One lot that the first set's plumber is asked to take over from a third, and one it was replaced on by that third. */
+async function makeHandovers(server: TestApp, world: World, askedOverLotId: string, pastLotId: string): Promise<void> {
+  const at = server.clock.now();
+  const third = await OrganizationModel.create({
+    ...{ id: randomUUID(), name: 'Corrin Pipe', kind: 'plumber', phone: null, createdAt: at },
+  });
+  const plumberId = world.organizations.plumber.id;
+  await LotModel.update({ plumberId: third.id }, { where: { id: [askedOverLotId, pastLotId] } });
+  await LotConsentModel.create({
+    ...{ id: randomUUID(), lotId: askedOverLotId, kind: 'plumber', organizationId: plumberId, replacesId: third.id },
+    ...{ askedBy: world.people.superintendent.id, askedAt: at },
+  });
+  await PastPartyModel.create({
+    ...{ id: randomUUID(), lotId: pastLotId, kind: 'plumber', organizationId: plumberId, replacedById: third.id },
+    ...{ until: at, untilSequence: 1, lotNumber: '6', tractName: null, address: '6 Tern Court' },
   });
 }
 

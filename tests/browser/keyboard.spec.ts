@@ -31,7 +31,11 @@ describe('by keyboard alone', { timeout: 240_000 }, () => {
     page.evaluate(() => {
       const at = document.activeElement;
       if (at === null || at.matches('body, main')) return '';
-      return at.getAttribute('aria-label') ?? at.textContent?.trim() ?? '';
+      const named = at.getAttribute('aria-label');
+      if (named !== null) return named;
+      const read = at.cloneNode(true) as Element;
+      read.querySelectorAll('[aria-hidden="true"]').forEach((hidden) => hidden.remove());
+      return read.textContent.replaceAll(/\s+/g, ' ').trim();
     });
   const untilFocused = (wanted: RegExp): Promise<true> =>
     vi

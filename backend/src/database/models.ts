@@ -9,10 +9,13 @@ import { ClearanceModel } from '../clearances/clearance.model.js';
 import { ClosureModel } from '../departments/closure.model.js';
 import { DepartmentModel } from '../departments/department.model.js';
 import { RuleCardModel } from '../departments/rule-card.model.js';
+import { PastPartyModel } from '../handovers/past-party.model.js';
 import { HoldModel } from '../holds/hold.model.js';
 import { ReadingModel } from '../holds/reading.model.js';
 import { TestUpModel } from '../holds/test-up.model.js';
 import { LedgerEntryModel } from '../ledger/ledger-entry.model.js';
+import { HouseModelVersionModel } from '../lots/houses/house-model-version.model.js';
+import { HouseModelModel } from '../lots/houses/house-model.model.js';
 import { LotConsentModel } from '../lots/lot-consent.model.js';
 import { LotUnitModel } from '../lots/lot-unit.model.js';
 import { LotModel } from '../lots/lot.model.js';
@@ -25,6 +28,7 @@ import { OutcomeSystemModel } from '../outcomes/outcome-system.model.js';
 import { OutcomeWorkModel } from '../outcomes/outcome-work.model.js';
 import { OutcomeModel } from '../outcomes/outcome.model.js';
 import { CommentModel } from '../threads/comment.model.js';
+import { TestPlanModel } from '../plans/test-plan.model.js';
 import { VisitModel } from '../visits/visit.model.js';
 
 /** Every model, for Sequelize to know. */
@@ -36,6 +40,8 @@ export const models = [
   DeliveryModel,
   DepartmentModel,
   HoldModel,
+  HouseModelModel,
+  HouseModelVersionModel,
   InvitationModel,
   LedgerEntryModel,
   LinkTokenModel,
@@ -49,11 +55,13 @@ export const models = [
   OutcomeModel,
   OutcomeSystemModel,
   OutcomeWorkModel,
+  PastPartyModel,
   PersonModel,
   ReadingModel,
   RefreshTokenModel,
   RuleCardModel,
   SessionModel,
+  TestPlanModel,
   TestUpModel,
   TractModel,
   VisitModel,

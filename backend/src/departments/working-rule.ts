@@ -58,6 +58,11 @@ export function lastYearNeeded(today: string, { content: { asking } }: RuleCardV
   return yearOf(today) + 1 + Math.ceil(days / (40 * new Set(asking.workingDays).size));
 }
 
+/** Far enough back that no day counted back from a date lies in a year that was not looked at. */
+export function firstYearNeeded(date: string, { content: { asking } }: RuleCardVersion): number {
+  return yearOf(date) - 1 - Math.ceil(asking.workingDaysAhead / (40 * new Set(asking.workingDays).size));
+}
+
 export function yearOf(date: string): number {
   return Number(date.slice(0, 4));
 }

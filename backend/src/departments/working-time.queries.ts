@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { NoticeAnswer, NoticeWindow } from '@holdwater/shared-types/scheduling/notice.contract.js';
 import { Temporal } from 'temporal-polyfill';
+import { cutoffForDates } from '../scheduling/working-time/cutoff-for-dates.js';
 import { localDateOf } from '../scheduling/working-time/local-instant.js';
 import { computeNotice } from '../scheduling/working-time/notice.js';
 import { windowsOfDates } from '../scheduling/working-time/windows-of-dates.js';
@@ -9,7 +10,7 @@ import { ClosuresQueries } from './closures.queries.js';
 import { daysOff } from './days-off.js';
 import { DepartmentsQueries } from './departments.queries.js';
 import { RuleCardsQueries, type RuleCardVersion } from './rule-cards.queries.js';
-import { type ClosedPart, closedOf, lastYearNeeded, ruleOf, yearOf } from './working-rule.js';
+import { type ClosedPart, closedOf, firstYearNeeded, lastYearNeeded, ruleOf, yearOf } from './working-rule.js';
 
 /** A window of a day with the rule card version that makes it and how many visits it takes. */
 export interface DepartmentWindow extends NoticeWindow {
@@ -70,6 +71,17 @@ export class WorkingTimeQueries {
         room: rooms.get(window.label) ?? 0,
       }));
     });
+  }
+
+  /** Until when a request opens each of these days, past ones too. Empty when no rule card is in force today: it sets the cut-off. */
+  async cutoffsFor(departmentId: string, dates: readonly string[], now: Date): Promise<Map<string, Date>> {
+    const [first, last] = [dates.at(0), dates.at(-1)];
+    const ruleCard = (await this.ruleCards.listInForce([departmentId], now)).get(departmentId);
+    if (first === undefined || last === undefined || ruleCard === undefined) return new Map();
+    const { zone } = await this.departments.getDepartment(departmentId);
+    const fromDate = `${firstYearNeeded(first, ruleCard)}-01-01`;
+    const closures = await this.closures.listClosures(departmentId, fromDate, last);
+    return cutoffForDates(ruleOf(zone, ruleCard, closures, fromDate, yearOf(last)), dates);
   }
 
   /** What is closed on a day, and whether it is a working day at all. */

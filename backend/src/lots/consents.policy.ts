@@ -5,13 +5,16 @@ export function canSeeConsents(actor: Actor, organizationId: string): boolean {
   return isMember(actor, organizationId);
 }
 
-/** For a contractor its plumbers or owner, for a department its desk or owner. */
+/** For a builder its superintendents, for a contractor its plumbers, for a department its desk; for each its owner. */
 export function canAnswerConsent(actor: Actor, organizationId: string): boolean {
-  return hasRole(actor, organizationId, 'plumber', 'desk', 'owner');
+  return hasRole(actor, organizationId, 'superintendent', 'plumber', 'desk', 'owner');
 }
 
 /** The role an answer is given in, for the record. */
-export function answeringRole(actor: Actor, organizationId: string): 'plumber' | 'desk' | 'owner' | null {
-  const roles = ['plumber', 'desk', 'owner'] as const;
+export function answeringRole(
+  actor: Actor,
+  organizationId: string,
+): 'superintendent' | 'plumber' | 'desk' | 'owner' | null {
+  const roles = ['superintendent', 'plumber', 'desk', 'owner'] as const;
   return roles.find((role) => hasRole(actor, organizationId, role)) ?? null;
 }

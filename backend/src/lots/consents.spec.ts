@@ -82,6 +82,7 @@ describe('asking a party to join', () => {
       kind: 'plumber',
       organization: { id: world.organizations.otherPlumber.id, name: 'Merrow', kind: 'plumber', phone: '555-0104' },
       askedAt: server.clock.now().toISOString(),
+      handover: null,
     });
     expect((await world.as('otherPlumber').get(`/api/lots/${lotId}`)).status).toBe(404);
     expect(await askedLots('otherHelper')).toEqual([lotId]);

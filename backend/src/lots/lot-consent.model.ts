@@ -16,6 +16,10 @@ export class LotConsentModel extends Model {
   @Column(DataType.UUID)
   declare organizationId: string;
 
+  /** Whose place it is; null where there is none to replace. */
+  @Column(DataType.UUID)
+  declare replacesId: string | null;
+
   @Column(DataType.UUID)
   declare askedBy: string | null;
 

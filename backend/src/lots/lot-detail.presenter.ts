@@ -1,15 +1,15 @@
 import { Injectable } from '@nestjs/common';
-import { InjectModel } from '@nestjs/sequelize';
 import type { LotAccess, LotDetail, LotUnit } from '@holdwater/shared-types/lots/lot.contract.js';
 import type { Actor } from '../common/access/actor.js';
 import { refuse } from '../common/errors/app-error.js';
 import { Clock } from '../common/time/clock.js';
 import { RuleCardsQueries } from '../departments/rule-cards.queries.js';
 import { localDateOf } from '../scheduling/working-time/local-instant.js';
+import { originOf } from './houses/modelled-units.js';
+import { UnitHousesQueries } from './houses/unit-houses.queries.js';
 import { LotPartiesPresenter } from './lot-parties.presenter.js';
 import { LotProgressQueries } from './lot-progress.queries.js';
 import type { LotRecord } from './lot-record.js';
-import { LotUnitModel } from './lot-unit.model.js';
 import { canSeeAccess, lotAbilities } from './lots.policy.js';
 import { LotsPresenter } from './lots.presenter.js';
 import { LotsQueries } from './lots.queries.js';
@@ -18,7 +18,7 @@ import { LotsQueries } from './lots.queries.js';
 @Injectable()
 export class LotDetailPresenter {
   constructor(
-    @InjectModel(LotUnitModel) private readonly units: typeof LotUnitModel,
+    private readonly units: UnitHousesQueries,
     private readonly lots: LotsQueries,
     private readonly summaries: LotsPresenter,
     private readonly parties: LotPartiesPresenter,
@@ -43,14 +43,20 @@ export class LotDetailPresenter {
       units: await this.unitsOf(lotId),
       access: await this.accessFor(actor, lot, brief.zone),
       parties: await this.parties.present(lot),
+      handovers: await this.parties.presentHandovers(lot.id),
       ruleCard: await this.ruleCardOf(lot),
       abilities: lotAbilities(actor, lot),
     };
   }
 
   private async unitsOf(lotId: string): Promise<LotUnit[]> {
-    const rows = await this.units.findAll({ where: { lotId }, order: [['number', 'ASC']] });
-    return rows.map(({ number, label, geometry }) => ({ number, label, geometry }));
+    const units = await this.units.listOfLots([lotId]);
+    return units.map((unit) => ({
+      number: unit.unitNumber,
+      label: unit.unitLabel,
+      geometry: unit.geometry,
+      model: originOf(unit),
+    }));
   }
 
   private async accessFor(actor: Actor, lot: LotRecord, zone: string | null): Promise<LotAccess | null> {

@@ -32,6 +32,15 @@ export class LotPartiesPresenter {
         : [];
     });
   }
+
+  async presentHandovers(lotId: string): Promise<LotDetail['handovers']> {
+    const open = await this.parties.listOpenHandovers(lotId);
+    const organizations = await this.parties.listOrganizations(open.map(({ organizationId }) => organizationId));
+    return open.flatMap(({ kind, organizationId }) => {
+      const organization = organizations.get(organizationId);
+      return organization ? [{ kind, organization }] : [];
+    });
+  }
 }
 
 function attachedOf({ builderId, plumberId, departmentId }: LotParties) {

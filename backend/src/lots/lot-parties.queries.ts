@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import type { OrganizationKind } from '@holdwater/shared-types/accounts/roles.js';
+import type { HandoverKind } from '@holdwater/shared-types/lots/lot.contract.js';
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
 
@@ -40,8 +41,17 @@ export class LotPartiesQueries {
       `SELECT * FROM (
          SELECT DISTINCT ON (kind) id AS "consentId", lot_id AS "lotId", kind, organization_id AS "organizationId",
            answered_at IS NULL AS "isPending", is_joining
-         FROM lot_consents WHERE lot_id = :lotId AND kind IN ('plumber', 'department') ORDER BY kind, asked_at DESC, (answered_at IS NULL) DESC
+         FROM lot_consents WHERE lot_id = :lotId AND kind IN ('plumber', 'department') AND replaces_id IS NULL ORDER BY kind, asked_at DESC, (answered_at IS NULL) DESC
        ) newest WHERE is_joining IS NOT TRUE ORDER BY kind DESC`,
+      { lotId },
+    );
+  }
+
+  /** Those asked to take the place of a party of the lot, without an answer yet. */
+  async listOpenHandovers(lotId: string): Promise<Array<{ kind: HandoverKind; organizationId: string }>> {
+    return this.select(
+      `SELECT kind, organization_id AS "organizationId" FROM lot_consents
+       WHERE lot_id = :lotId AND replaces_id IS NOT NULL AND answered_at IS NULL ORDER BY kind`,
       { lotId },
     );
   }

@@ -19,4 +19,11 @@ export class LotUnitModel extends Model {
 
   @Column(DataType.JSONB)
   declare geometry: HouseGeometry | null;
+
+  /** The version of a house model it was taken from; both or neither. */
+  @Column(DataType.UUID)
+  declare houseModelId: string | null;
+
+  @Column(DataType.INTEGER)
+  declare houseModelVersion: number | null;
 }

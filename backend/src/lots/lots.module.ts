@@ -8,10 +8,20 @@ import { AskPartiesService } from './ask-parties.service.js';
 import { ConsentsController } from './consents.controller.js';
 import { ConsentsQueries } from './consents.queries.js';
 import { CreateLotService } from './create-lot.service.js';
+import { ApplyHouseModelService } from './houses/apply-house-model.service.js';
+import { HouseModelVersionModel } from './houses/house-model-version.model.js';
+import { HouseModelModel } from './houses/house-model.model.js';
+import { HouseModelsController } from './houses/house-models.controller.js';
+import { HouseModelsPresenter } from './houses/house-models.presenter.js';
+import { HouseModelsQueries } from './houses/house-models.queries.js';
+import { HouseModelsService } from './houses/house-models.service.js';
+import { RemoveHouseModelService } from './houses/remove-house-model.service.js';
+import { UnitHousesQueries } from './houses/unit-houses.queries.js';
 import { ImportLotsController } from './import/import-lots.controller.js';
 import { ImportLotsService } from './import/import-lots.service.js';
 import { LotConsentModel } from './lot-consent.model.js';
 import { LotDetailPresenter } from './lot-detail.presenter.js';
+import { LotFollowers } from './lot-followers.js';
 import { LotListQueries } from './lot-list.queries.js';
 import { LotPartiesPresenter } from './lot-parties.presenter.js';
 import { LotPartiesQueries } from './lot-parties.queries.js';
@@ -32,13 +42,21 @@ import { UpdateLotService } from './update-lot.service.js';
 /** Tracts and lots, the house on each, its parties and their consent. */
 @Module({
   imports: [
-    SequelizeModule.forFeature([LotModel, LotUnitModel, LotConsentModel, TractModel]),
+    SequelizeModule.forFeature([
+      LotModel,
+      LotUnitModel,
+      LotConsentModel,
+      TractModel,
+      HouseModelModel,
+      HouseModelVersionModel,
+    ]),
     DepartmentsModule,
     ClearancesModule,
   ],
-  controllers: [LotsController, ConsentsController, TractsController, ImportLotsController],
+  controllers: [LotsController, ConsentsController, TractsController, ImportLotsController, HouseModelsController],
   providers: [
     LotsQueries,
+    LotFollowers,
     LotListQueries,
     LotPeopleQueries,
     LotPartiesQueries,
@@ -56,7 +74,13 @@ import { UpdateLotService } from './update-lot.service.js';
     UpdateLotService,
     TractsService,
     ImportLotsService,
+    HouseModelsQueries,
+    UnitHousesQueries,
+    HouseModelsPresenter,
+    HouseModelsService,
+    RemoveHouseModelService,
+    ApplyHouseModelService,
   ],
-  exports: [LotsQueries, LotPeopleQueries],
+  exports: [ConsentsQueries, LotDetailPresenter, LotFollowers, LotPartiesQueries, LotPeopleQueries, LotsQueries],
 })
 export class LotsModule {}

@@ -44,12 +44,13 @@ async function bookVisit(lotId: string, date: string, startAt: string, state = '
   const id = randomUUID();
   await server.db.query(
     `INSERT INTO visits (id, lot_id, department_id, rule_card_id, stage_code, unit_numbers, state, window_date, window_label, "window", place,
-       inspector_id, planned, requested_by, requesting_side, requested_at, calendar_uid, created_at)
-     VALUES (:id, :lotId, :departmentId, :ruleCardId, 'rough-in', '{1}', :state, :date, :label, tstzrange(:startAt, CAST(:startAt AS timestamptz) + interval '2 hours'),
-       1, :inspectorId, tstzrange(:startAt, CAST(:startAt AS timestamptz) + interval '30 minutes'), :requestedBy, 'builder', :startAt, :id, :startAt)`,
+       inspector_id, planned, requested_by, requesting_side, requested_at, ended_at, calendar_uid, created_at)
+     VALUES (:id, :lotId, :departmentId, :ruleCardId, 'rough-in', '{1}', :state, :date, 'mid', tstzrange(:startAt, CAST(:startAt AS timestamptz) + interval '2 hours'),
+       1, :inspectorId, tstzrange(:startAt, CAST(:startAt AS timestamptz) + interval '30 minutes'), :requestedBy, 'builder', :startAt,
+       CASE WHEN :state = 'closed' THEN CAST(:startAt AS timestamptz) END, :id, :startAt)`,
     {
       replacements: {
-        ...{ id, lotId, date, startAt, state, label: id.slice(0, 8) },
+        ...{ id, lotId, date, startAt, state },
         departmentId: world.organizations.department.id,
         ruleCardId: world.ruleCard.id,
         inspectorId: world.people.inspector.id,

@@ -22,6 +22,18 @@ export class TractsQueries {
     return found ?? refuse('not-found');
   }
 
+  /** Every lot of a tract, whoever reads. */
+  async listLotIds(tractId: string): Promise<string[]> {
+    const found = await this.sequelize.query<{ id: string }>(
+      'SELECT id FROM lots WHERE tract_id = :tractId ORDER BY id',
+      {
+        replacements: { tractId },
+        type: QueryTypes.SELECT,
+      },
+    );
+    return found.map(({ id }) => id);
+  }
+
   private async select(actor: Actor, condition: string, replacements: Record<string, unknown>): Promise<Tract[]> {
     return this.sequelize.query<Tract>(
       `SELECT * FROM (

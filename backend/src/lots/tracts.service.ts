@@ -9,6 +9,7 @@ import { refuse } from '../common/errors/app-error.js';
 import { Clock } from '../common/time/clock.js';
 import { UnitOfWork } from '../common/unit-of-work/unit-of-work.js';
 import { Ledger } from '../ledger/ledger.service.js';
+import { LotFollowers } from './lot-followers.js';
 import { TractModel } from './tract.model.js';
 import { canEditTracts } from './tracts.policy.js';
 import { TractsQueries } from './tracts.queries.js';
@@ -24,6 +25,7 @@ export class TractsService {
     private readonly unitOfWork: UnitOfWork,
     private readonly ledger: Ledger,
     private readonly clock: Clock,
+    private readonly followers: LotFollowers,
   ) {}
 
   /** Throws `not-found`, `not-allowed`, `tract-name-taken`. */
@@ -48,6 +50,7 @@ export class TractsService {
       await namedOnce(this.models.update(update, { where: { id: tractId } }));
       const changed = { name: update.name ?? tract.name, fields };
       await this.ledger.appendTo(`organization:${tract.builderId}`, 'tract-changed', changed, whoActs(actor));
+      if (changed.name !== tract.name) await this.followers.renamed(await this.tracts.listLotIds(tractId), actor);
       return this.tracts.getFor(actor, tractId);
     });
   }

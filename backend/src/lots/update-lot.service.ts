@@ -8,6 +8,7 @@ import { refuse } from '../common/errors/app-error.js';
 import { UnitOfWork } from '../common/unit-of-work/unit-of-work.js';
 import { Ledger } from '../ledger/ledger.service.js';
 import { fieldsChanged, fieldsGiven, type LotFields, type LotUpdate } from './lot-changes.js';
+import { LotFollowers } from './lot-followers.js';
 import { LotDetailPresenter } from './lot-detail.presenter.js';
 import type { LotRecord } from './lot-record.js';
 import { LotUnitModel } from './lot-unit.model.js';
@@ -26,11 +27,13 @@ export class UpdateLotService {
     private readonly unitOfWork: UnitOfWork,
     private readonly ledger: Ledger,
     private readonly changes: Changes,
+    private readonly followers: LotFollowers,
   ) {}
 
   /** Throws `not-found`, `not-allowed` (the desk may set the permit alone), `bad-input`, `lot-number-taken`. */
   async update(actor: Actor, lotId: string, update: LotUpdate): Promise<LotDetail> {
     return this.unitOfWork.run(async () => {
+      await this.lockFollowers(actor, lotId, update);
       const lot = await this.lots.lockLotFor(actor, lotId);
       if (!mayUpdate(actor, lot, update)) refuse('not-allowed');
       const given = fieldsGiven(update);
@@ -47,7 +50,7 @@ export class UpdateLotService {
       const lot = await this.lots.lockLotFor(actor, lotId);
       if (!canEditGeometry(actor, lot)) refuse('not-allowed');
       const [changed] = await this.units.update({ geometry }, { where: { lotId, number: unitNumber } });
-      if (changed === 0) refuse('not-found');
+      if (changed === 0) refuse('not-found', { what: 'unit' });
       await this.ledger.appendToLot(lotId, 'geometry-set', { unitNumber }, whoActs(actor, lot));
       this.changes.lot(lotId, 'lot');
       return this.detail.present(actor, lotId);
@@ -62,7 +65,21 @@ export class UpdateLotService {
     const { permitStatus, permitNumber } = changed;
     await this.ledger.appendToLot(lot.id, 'lot-changed', { fields, permitStatus, permitNumber }, whoActs(actor, lot));
     this.changes.lot(lot.id, 'lot');
+    // gate code and contact stand in no invite, so they send none
+    if (isRenamed(changed)) await this.followers.renamed([lot.id], actor);
   }
+
+  /** Visits are locked before their lot, and only where this may concern them. */
+  private async lockFollowers(actor: Actor, lotId: string, update: LotUpdate): Promise<void> {
+    if (!isRenamed(update)) return;
+    await this.lots.getLotFor(actor, lotId);
+    await this.followers.lock([lotId]);
+  }
+}
+
+/** What the calendar entries of a lot's visits name it by. */
+function isRenamed(fields: LotFields | LotUpdate): boolean {
+  return fields.number !== undefined || fields.address !== undefined;
 }
 
 function mayUpdate(actor: Actor, lot: LotRecord, { permit: _, ...others }: LotUpdate): boolean {

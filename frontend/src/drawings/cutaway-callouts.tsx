@@ -51,19 +51,31 @@ export function Callouts({ house, scale, method, levelFt, plugSizeIn }: Callouts
       ) : null}
       <Callout scale={scale} from={[stackFt + 0.4, lowest + 5.6]} to={[23, lowest + 6.2]} word={t('cutaway.stack')} />
       <Callout scale={scale} from={[22.9, lowest + 1.1]} to={[24, lowest + 2.4]} word={t('cutaway.cleanout')} />
-      <LaundryWords house={house} scale={scale} levelFt={levelFt} />
+      <LaundryWords house={house} scale={scale} levelFt={levelFt} method={method} />
     </>
   );
 }
 
-function LaundryWords({ house, scale, levelFt }: Pick<CalloutsProps, 'house' | 'scale' | 'levelFt'>): ReactNode {
+type LaundryProps = Pick<CalloutsProps, 'house' | 'scale' | 'levelFt' | 'method'>;
+
+function LaundryWords({ house, scale, levelFt, method }: LaundryProps): ReactNode {
   const { t } = useTranslation('marks');
   const outlet = house.laundryOutletFt;
   if (outlet === null) return null;
+  if (method === 'laundry-riser' && levelFt !== null) {
+    return (
+      <Callout scale={scale} from={[9.5, levelFt + 0.1]} to={[8.4, levelFt + 1.6]} word={t('cutaway.riser')} isEnd />
+    );
+  }
   const isPlugged = levelFt !== null && levelFt > outlet + 0.05;
   return (
     <text className="halo s12 med" x={scale.x(5.75)} y={scale.y(outlet + 2.6)}>
       {t('cutaway.laundry')}
+      {method === 'laundry-box' ? (
+        <tspan className="mut" x={scale.x(5.75)} dy="14">
+          {t('cutaway.knockedOut')}
+        </tspan>
+      ) : null}
       {isPlugged ? (
         <tspan className="mut" x={scale.x(5.75)} dy="14">
           {t('cutaway.plugged')}

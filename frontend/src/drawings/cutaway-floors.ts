@@ -23,7 +23,12 @@ export function addStack(made: Runs, house: DrawnHouse, lowest: DrawnFloor): voi
 }
 
 /** Kitchen with its vent, and a closet, on the building drain. */
-export function addLowestFloor(made: Runs, house: DrawnHouse, { heightFt: floor, hasLaundry }: DrawnFloor): void {
+export function addLowestFloor(
+  made: Runs,
+  house: DrawnHouse,
+  { heightFt: floor, hasLaundry }: DrawnFloor,
+  riserTopFt: number | null,
+): void {
   made.runs.push(
     pipe(2, 5.2, drainAt(5.2), 5.2, floor + 3.3),
     pipe(1.5, 5.2, floor + 1.6, 3, floor + 1.646),
@@ -35,11 +40,16 @@ export function addLowestFloor(made: Runs, house: DrawnHouse, { heightFt: floor,
   prime(made, 5.2, 0.12, 2);
   prime(made, 16.4, 0.36, 3);
   prime(made, 5.2, floor + 1.65, 1.5);
-  if (hasLaundry) addLaundry(made, house, floor, pipe(2, 11.8, floor + 1.12, 11.8, drainAt(11.8)));
+  if (hasLaundry) addLaundry(made, house, floor, pipe(2, 11.8, floor + 1.12, 11.8, drainAt(11.8)), riserTopFt);
 }
 
 /** Lavatory left of the stack, closet and shower right of it, each falling to the branch under the floor. */
-export function addUpperFloor(made: Runs, house: DrawnHouse, { heightFt: floor, hasLaundry }: DrawnFloor): void {
+export function addUpperFloor(
+  made: Runs,
+  house: DrawnHouse,
+  { heightFt: floor, hasLaundry }: DrawnFloor,
+  riserTopFt: number | null,
+): void {
   const branch = (x: number): number => floor - 0.5 + Math.abs(x - stackFt) * fallPerFt;
   const shower = pipe(2, 24.2, branch(24.2), 26, branch(26), 27.25, branch(27.25));
   made.runs.push(
@@ -60,11 +70,21 @@ export function addUpperFloor(made: Runs, house: DrawnHouse, { heightFt: floor, 
   prime(made, 17.4, floor + 1.75, 1.5);
   prime(made, 26, floor - 0.25, 1.5);
   const drain = pipe(2, 11.8, floor + 1.12, 11.8, branch(11.8), 17.4, branch(17.4));
-  if (hasLaundry) addLaundry(made, house, floor, drain);
+  if (hasLaundry) addLaundry(made, house, floor, drain, riserTopFt);
 }
 
-/** A standpipe with its trap 6 to 18 in above the floor, up into the laundry box. */
-function addLaundry(made: Runs, house: DrawnHouse, floor: number, drain: Run): void {
+/**
+ * A standpipe with its trap 6 to 18 in above the floor, up into the laundry box. Under test by a riser, that stands on the branch in its
+ * place, open at the top.
+ */
+function addLaundry(made: Runs, house: DrawnHouse, floor: number, drain: Run, riserTopFt: number | null): void {
+  if (riserTopFt !== null) {
+    const branch = floor + 1.12;
+    const vent = pipe(1.5, 11.8, branch, 11.8, house.headerFt - 0.13);
+    made.runs.push(drain, vent, pipe(2, 11.8, branch, 9.8, branch + 0.04, 9.8, Math.max(branch + 0.6, riserTopFt)));
+    prime(made, 9.8, branch + 0.4, 2);
+    return;
+  }
   const outletFt = house.laundryOutletFt ?? floor + 3.5;
   const arm = pipe(2, 11.8, floor + 1.12, 10.62, floor + 1.145);
   made.runs.push(drain, pipe(1.5, 11.8, floor + 1.12, 11.8, house.headerFt - 0.13), {

@@ -18,10 +18,8 @@ export function runsOf(house: DrawnHouse, method: DwvMethod | null, levelFt: num
     return made;
   }
   addStack(made, house, lowest);
-  addLowestFloor(made, house, lowest);
-  upper.forEach((floor) => addUpperFloor(made, house, floor));
-  if (house.laundryOutletFt !== null && method === 'laundry-riser' && levelFt !== null) {
-    made.runs.push(pipe(2, 9.8, house.laundryOutletFt, 9.8, levelFt + 0.4));
-  }
+  const riserTopFt = method === 'laundry-riser' && levelFt !== null ? levelFt + 0.4 : null;
+  addLowestFloor(made, house, lowest, riserTopFt);
+  upper.forEach((floor) => addUpperFloor(made, house, floor, riserTopFt));
   return made;
 }

@@ -1,16 +1,20 @@
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import type { HeadRow } from './cutaway-heads';
-import { feetWords, useRowWords } from './use-cutaway-words';
+import type { DrawnLift } from './cutaway-lifts';
+import type { CutawayUnits } from './cutaway-units';
+import { useRowWords } from './use-cutaway-words';
 
 interface TwinProps {
   rows: readonly HeadRow[];
   /** Feet above the plug: from the water to the vent terminal; null when all is under test. */
   bare: { fromFt: number; toFt: number } | null;
+  lifts: readonly DrawnLift[];
+  units: CutawayUnits;
 }
 
 /** The section in words: floors with head and pressure, and what is not under test. For readers who do not see the drawing. */
-export function CutawayTwin({ rows, bare }: TwinProps): ReactNode {
+export function CutawayTwin({ rows, bare, lifts, units }: TwinProps): ReactNode {
   const { t } = useTranslation('marks');
   const wordsOf = useRowWords();
   if (rows.length === 0) return null;
@@ -21,23 +25,32 @@ export function CutawayTwin({ rows, bare }: TwinProps): ReactNode {
         <thead>
           <tr>
             <th scope="col">{t('cutaway.place')}</th>
-            <th scope="col">{t('cutaway.height')}</th>
-            <th scope="col">{t('cutaway.head')}</th>
-            <th scope="col">{t('cutaway.pressure')}</th>
+            <th scope="col">{t('cutaway.heightIn', { unit: units.lengthUnit })}</th>
+            <th scope="col">{t('cutaway.headIn', { unit: units.lengthUnit })}</th>
+            <th scope="col">{t('cutaway.pressureIn', { unit: units.pressureUnit })}</th>
           </tr>
         </thead>
         <tbody>
           {rows.map((row) => (
             <tr key={row.key}>
               <th scope="row">{wordsOf(row)}</th>
-              <td>{feetWords(row.heightFt)}</td>
-              <td>{row.headFt === null ? '–' : feetWords(row.headFt)}</td>
-              <td>{row.pressurePsi.toFixed(1)}</td>
+              <td>{units.length(row.heightFt)}</td>
+              <td>{row.headFt === null ? '–' : units.length(row.headFt)}</td>
+              <td>{units.pressure(row.pressurePsi)}</td>
             </tr>
           ))}
         </tbody>
       </table>
-      {bare ? <p>{t('cutaway.notUnderTest', { from: feetWords(bare.fromFt), to: feetWords(bare.toFt) })}</p> : null}
+      {bare ? <p>{t('cutaway.bare', { ...spanOf(bare, units), unit: units.lengthUnit })}</p> : null}
+      {lifts.map((lift, index) => (
+        <p key={index}>
+          {t('cutaway.liftFrom', { number: index + 1, ...spanOf(lift, units), unit: units.lengthUnit })}
+        </p>
+      ))}
     </div>
   );
+}
+
+function spanOf({ fromFt, toFt }: DrawnLift, units: CutawayUnits): { from: string; to: string } {
+  return { from: units.length(fromFt), to: units.length(toFt) };
 }

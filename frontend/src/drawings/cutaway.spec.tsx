@@ -52,6 +52,34 @@ describe('Cutaway', () => {
     expect(twin().find(([place]) => place === 'Test plug')?.[3]).toBe('10.4');
   });
 
+  it('has no attic under a standpipe: the house does not stand yet', () => {
+    render(<Cutaway house={{ ...house, standpipeFt: 21 }} method="standpipe" fillLevelFt={21} />);
+    expect(twin().map(([place, , head]) => [place, head])).toEqual([
+      ['First floor', '21.0'],
+      ['Test plug', '24.0'],
+    ]);
+  });
+
+  it('tells the same in metres and kilopascals by choice', () => {
+    render(<Cutaway house={house} method="attic-cut" fillLevelFt={21} units="metric" />);
+    // NIST SP 811: a foot is 0.3048 m, a conventional foot of water 2.989067 kPa; 24 ft are 7.3 m and 71.7 kPa
+    expect(screen.getByRole('columnheader', { name: 'Pressure, kPa' })).toBeInTheDocument();
+    const plug = twin().find(([place]) => place === 'Test plug') ?? [];
+    expect(plug[2]).toBe((24 * 0.3048).toFixed(1));
+    expect(Math.abs(Number(plug[3]) - 24 * 2.989067)).toBeLessThan(0.6);
+    expect(screen.getByRole('img', { name: /water at 7.3 m above the plug/ })).toBeVisible();
+  });
+
+  it('names each lift of a stack tested by sections', () => {
+    const lifts = [
+      { fromFt: -2, toFt: 14 },
+      { fromFt: 4, toFt: 24.5 },
+    ];
+    render(<Cutaway house={house} method="sectional" fillLevelFt={24.5} lifts={lifts} />);
+    expect(screen.getByText('Lift 1: 1.0 to 17.0 ft above the plug')).toBeInTheDocument();
+    expect(screen.getByText('Lift 2: 7.0 to 27.5 ft above the plug')).toBeInTheDocument();
+  });
+
   it('says nothing of heads without a method, and nothing is under water', () => {
     const { container } = render(<Cutaway house={house} method={null} fillLevelFt={null} />);
     expect(screen.queryByRole('table')).toBeNull();
@@ -99,6 +127,15 @@ describe('runs of a house', () => {
     const height = (trap?.points.at(-1)?.[1] ?? 0) - (drawn.floors[1]?.heightFt ?? 0);
     expect(height).toBeGreaterThanOrEqual(0.5);
     expect(height).toBeLessThanOrEqual(1.5);
+  });
+
+  it('stands a riser on the laundry branch up to its level, in place of the trap', () => {
+    const drawn = drawHouse({ ...house, laundry: { floor: 'first', boxOutletFt: 3.5, branchFt: 0.9 } });
+    const levelFt = 0.9 + 1.5 - drawn.datumFt;
+    const { runs } = runsOf(drawn, 'laundry-riser', levelFt);
+    const riser = runs.find(({ points }) => points.length === 3 && points[2]?.[0] === 9.8);
+    expect(riser?.points[2]?.[1]).toBeCloseTo(levelFt + 0.4, 9);
+    expect(runs.some(({ trap }) => trap?.riserFt === 9.8)).toBe(false);
   });
 
   it('keeps the vents of every house between its attic floor and its terminal', () => {

@@ -7,17 +7,19 @@ import { Callouts } from './cutaway-callouts';
 import { FeetRule, HeadChain } from './cutaway-chain';
 import { headRows, type PlanLevel } from './cutaway-heads';
 import { drawHouse, type CutawayHouse } from './cutaway-house';
+import { Lifts, type DrawnLift } from './cutaway-lifts';
 import { AtticCut, isCut, LaundryBox, LevelLine, TestPlug } from './cutaway-level';
 import { Pipes } from './cutaway-pipes';
 import { runsOf } from './cutaway-runs';
 import { cutawayScale, type CutawayScale } from './cutaway-scale';
 import { Structure } from './cutaway-structure';
 import { CutawayTwin } from './cutaway-twin';
+import { cutawayUnits } from './cutaway-units';
 import { WaterLines } from './cutaway-water';
 import { usePatterns } from './patterns';
 import { TouchSurface, type TouchPlace } from './touch-surface';
 import { useDrawnWidth } from './use-drawn-width';
-import { feetWords } from './use-cutaway-words';
+import type { Units } from '../lib/units';
 
 export type { CutawayHouse } from './cutaway-house';
 export type { TouchPlace } from './touch-surface';
@@ -30,7 +32,10 @@ export interface CutawayProps {
   fillLevelFt: number | null;
   /** The plan's answer; without it heads are worked out at 0.433 psi per foot. */
   levels?: readonly PlanLevel[];
+  /** By sections: each lift, feet above the finished first floor. */
+  lifts?: readonly DrawnLift[] | null;
   view?: 'dwv' | 'water';
+  units?: Units;
   /** The rule of feet, the chain of heads and the callouts. */
   hasLabels?: boolean;
   /** Places are fractions of the drawing's frame, labels or not. */
@@ -47,6 +52,7 @@ export interface CutawayProps {
 export function Cutaway(props: CutawayProps): ReactNode {
   const { house, method, fillLevelFt, levels = [], view = 'dwv', hasLabels = true, maxHeight = 460 } = props;
   const { t } = useTranslation('marks');
+  const units = cutawayUnits(props.units ?? 'us');
   const [place, width] = useDrawnWidth(560);
   const drawn = useMemo(() => drawHouse(house), [house]);
   const scale = useMemo(() => cutawayScale(drawn, width, maxHeight, hasLabels), [drawn, width, maxHeight, hasLabels]);
@@ -62,7 +68,7 @@ export function Cutaway(props: CutawayProps): ReactNode {
     isWaterView || method === null
       ? []
       : headRows(
-          isGroundwork ? { ...drawn, floors: drawn.floors.slice(0, 1) } : drawn,
+          isGroundwork ? { ...drawn, floors: drawn.floors.slice(0, 1), atticFt: Infinity } : drawn,
           levelFt,
           levels,
           plug?.name ?? null,
@@ -70,9 +76,13 @@ export function Cutaway(props: CutawayProps): ReactNode {
   const isBare = levelFt !== null && method !== 'sectional' && !isGroundwork && levelFt < drawn.ventFt - 0.05;
   const name =
     levelFt !== null
-      ? t('cutaway.atLevel', { feet: feetWords(levelFt) })
+      ? t('cutaway.waterLevel', { level: `${units.length(levelFt)} ${units.lengthUnit}` })
       : t(isAir ? 'cutaway.underAir' : 'cutaway.noTest');
   const hatchFill = patterns.fill('not-under-test');
+  const lifts = (props.lifts ?? []).map(({ fromFt, toFt }) => ({
+    fromFt: fromFt - drawn.datumFt,
+    toFt: toFt - drawn.datumFt,
+  }));
   const isRoomy = hasLabels && width >= 480;
   return (
     <figure className="drawing" ref={place}>
@@ -96,8 +106,11 @@ export function Cutaway(props: CutawayProps): ReactNode {
         ) : null}
         {levelFt === null || isWaterView ? null : <LevelLine scale={scale} levelFt={levelFt} />}
         {isCut(method) && !isWaterView && drawn.cutFt !== null ? <AtticCut scale={scale} cutFt={drawn.cutFt} /> : null}
-        {hasLabels ? <FeetRule house={drawn} scale={scale} /> : null}
-        {hasLabels ? <HeadChain rows={rows} scale={scale} levelFt={isWaterView ? null : levelFt} /> : null}
+        {lifts.length > 1 && !isWaterView ? <Lifts lifts={lifts} scale={scale} /> : null}
+        {hasLabels ? <FeetRule house={drawn} scale={scale} units={units} /> : null}
+        {hasLabels ? (
+          <HeadChain rows={rows} scale={scale} levelFt={isWaterView ? null : levelFt} units={units} />
+        ) : null}
         {isRoomy && !isWaterView ? (
           <Callouts
             house={drawn}
@@ -112,7 +125,12 @@ export function Cutaway(props: CutawayProps): ReactNode {
           <TouchSurface frame={scale.frame} place={props.touched ?? null} onTouch={props.onTouch} />
         ) : null}
       </svg>
-      <CutawayTwin rows={rows} bare={isBare && levelFt !== null ? { fromFt: levelFt, toFt: drawn.ventFt } : null} />
+      <CutawayTwin
+        rows={rows}
+        bare={isBare && levelFt !== null ? { fromFt: levelFt, toFt: drawn.ventFt } : null}
+        lifts={lifts}
+        units={units}
+      />
       <KeyWords {...props} />
     </figure>
   );

@@ -13,8 +13,3 @@ export function useRowWords(): (row: Pick<HeadRow, 'kind' | 'name'>) => string {
     return knownFloors.includes(code) ? t(`cutaway.floor.${code}`) : t('cutaway.floorNamed', { name });
   };
 }
-
-/** Feet, to 0.1. */
-export function feetWords(feet: number): string {
-  return feet.toFixed(1);
-}

@@ -30,8 +30,16 @@ const headRule = z.strictObject({
 
 const pressure = z.strictObject({
   medium: z.enum(media),
-  minimumPsi: z.number().positive().max(1000),
-  preferredPsi: z.number().positive().max(1000).nullable(),
+  minimumPsi: z.number().positive('must-be-positive').max(1000),
+  preferredPsi: z.number().positive('must-be-positive').max(1000).nullable(),
+});
+
+/** What the department asks where a test is made with air, besides the pressure. */
+const airRules = z.strictObject({
+  /** Null: no highest pressure of its own. */
+  highestPsi: z.number().positive('must-be-positive').max(1000).nullable(),
+  needsMakersConsent: z.boolean(),
+  needsReliefValve: z.boolean(),
 });
 
 /** How one system is tested at one stage. */
@@ -46,12 +54,17 @@ export const testRule = z.strictObject({
   /** Minutes to stand; null: until seen. */
   standMinutes: z.number().int().min(1).max(2880).nullable(),
   airOnPlastic: z.boolean(),
+  /** Absent from versions written before there were any: no further rule. */
+  airRules: airRules.optional(),
   settleMinutes: z.number().int().min(0).max(600),
   gaugeIncrements: z
     .array(
       z.union([
-        z.strictObject({ upToPsi: z.number().positive(), incrementPsi: z.number().positive() }),
-        z.strictObject({ percent: z.number().positive() }),
+        z.strictObject({
+          upToPsi: z.number().positive('must-be-positive'),
+          incrementPsi: z.number().positive('must-be-positive'),
+        }),
+        z.strictObject({ percent: z.number().positive('must-be-positive') }),
       ]),
     )
     .max(10),

@@ -13,7 +13,7 @@ import {
 } from './field-kinds.js';
 import { hydraulicLimits } from './hydraulic-limits.js';
 import { materials } from './materials.js';
-import { nominalSizesIn, pipeKinds } from './pipes.js';
+import { nominalSizesIn, pipeKinds, waterSizesIn } from './pipes.js';
 
 const nominalIn = z.literal([...nominalSizesIn], {
   error: ({ input }) => (input === undefined ? 'required' : 'not-one-of-the-choices'),
@@ -43,6 +43,17 @@ export type Laundry = z.output<typeof laundry>;
 
 export const floors = defaulted(list(floor, hydraulicLimits.floors), []);
 export const materialList = defaulted(list(choice(materials), hydraulicLimits.materials), []);
+
+/** A stretch of water line; its rating is that of the whole side. */
+export const waterPipe = strict({
+  material: choice(materials),
+  nominalIn: z.literal([...waterSizesIn], {
+    error: ({ input }) => (input === undefined ? 'required' : 'not-one-of-the-choices'),
+  }),
+  lengthFt: notNegative,
+});
+export type WaterPipe = z.output<typeof waterPipe>;
+export const waterPipes = defaulted(list(waterPipe, hydraulicLimits.pipes), []);
 
 /** The drain, waste and vent side of a house; what a method does not use may be left out. Elevations in feet above the finished first floor. */
 export const dwvHouseShape = {

@@ -1,6 +1,6 @@
 import { type z } from 'zod';
 import { notNegative, number, optional, positive, siteElevationFt, strict } from './field-kinds.js';
-import { dwvHouseShape, materialList } from './house-fields.js';
+import { dwvHouseShape, materialList, waterPipes } from './house-fields.js';
 import {
   refuseAbove,
   refuseFloorsNamedTwice,
@@ -15,11 +15,14 @@ const storedHouse = strict({
   ...dwvHouseShape,
   /** Site above sea level; null leaves it to the department's elevation. */
   elevationFt: optional(siteElevationFt),
+  /** The outlet of the laundry's trap. */
+  laundryTrapFt: optional(number),
   /** The water side: where the gauge sits, and the ends of the lines. */
   gaugeFt: optional(number),
   highestOutletFt: optional(number),
   waterLowestFittingFt: optional(number),
   waterPipeMaterials: materialList,
+  waterPipes,
   lowestRatedPsi: optional(positive),
   lowestRatedAirPsi: optional(positive),
   supplyPsi: optional(notNegative),

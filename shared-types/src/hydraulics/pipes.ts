@@ -2,6 +2,10 @@
 export const nominalSizesIn = [1.25, 1.5, 2, 3, 4, 6] as const;
 export type NominalSizeIn = (typeof nominalSizesIn)[number];
 
+/** Nominal sizes of water lines in houses, inches: common practice, no published source. */
+export const waterSizesIn = [0.375, 0.5, 0.75, 1, 1.25, 1.5, 2] as const;
+export type WaterSizeIn = (typeof waterSizesIn)[number];
+
 export const pipeKinds = ['pvc-sch40', 'abs-sch40'] as const;
 export type PipeKind = (typeof pipeKinds)[number];
 

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { id, instant } from '../common/fields.js';
+import { id, instant, localDate } from '../common/fields.js';
 import { done, pageOf, pageQuery } from '../common/paging.js';
 import { route } from '../common/route.js';
 
@@ -58,5 +58,11 @@ export const verifyLedger = route({
     chains: z.number().int(),
     entries: z.number().int(),
     broken: z.array(z.object({ scope: z.string(), firstBroken: z.number().int() })),
+    /** One anchor a day over all chains: the first day whose anchor does not fit; null when all do. */
+    anchors: z.object({
+      days: z.number().int(),
+      lastDay: localDate.nullable(),
+      firstBroken: localDate.nullable(),
+    }),
   }),
 });

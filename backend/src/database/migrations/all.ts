@@ -9,6 +9,13 @@ import { ledger } from './0008-ledger.js';
 import { notices } from './0009-notices.js';
 import { requests } from './0010-requests.js';
 import { oneLot } from './0011-one-lot.js';
+import { knownRules } from './0012-known-rules.js';
+import { keptRight } from './0013-kept-right.js';
+import { handovers } from './0014-handovers.js';
+import { anchors } from './0015-anchors.js';
+import { testPlans } from './0017-test-plans.js';
+import { plannedHolds } from './0018-planned-holds.js';
+import { houseModels } from './0020-house-models.js';
 import type { Migration } from './migration.js';
 
 /** Every step, in order. */
@@ -24,4 +31,11 @@ export const migrations: readonly Migration[] = [
   notices,
   requests,
   oneLot,
+  knownRules,
+  keptRight,
+  handovers,
+  anchors,
+  testPlans,
+  houseModels,
+  plannedHolds,
 ];

@@ -11,18 +11,13 @@ export function measureOf(hold: Hold, reading: Reading, units: 'us' | 'metric'):
   const { pressurePsi, levelIn } = reading;
   if (pressurePsi !== null)
     return markedPressure(pressurePsi, hold.gauge?.incrementPsi ?? usualMarks.incrementPsi, units);
-  if (levelIn !== null) return plainly(readLevel(levelIn, hold.tape?.incrementIn ?? usualMarks.incrementIn, units));
+  if (levelIn !== null) return readLevel(levelIn, hold.tape?.incrementIn ?? usualMarks.incrementIn, units);
   return null;
 }
 
 /** A pressure to half a mark of its gauge: "112", "112.5". */
 export function markedPressure(pressurePsi: number, incrementPsi: number | undefined, units: 'us' | 'metric'): Measure {
-  return plainly(readPressure(pressurePsi, incrementPsi ?? usualMarks.incrementPsi, units));
-}
-
-/** Half a mark may print several places; zeros behind the point would claim more than was read. */
-function plainly(measure: Measure): Measure {
-  return { ...measure, number: String(Number(measure.number)) };
+  return readPressure(pressurePsi, incrementPsi ?? usualMarks.incrementPsi, units);
 }
 
 /** Readings in the reader's own units. */

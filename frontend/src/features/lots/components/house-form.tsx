@@ -16,6 +16,7 @@ import { focusFirstFault } from '../focus-fault';
 import { draftOf, drawnDraft, geometryOf } from '../house-draft';
 import { FloorRows, PipeRows, PlugRows } from './house-rows';
 import { HeightFields, LaundryFields, WaterFields } from './house-fields';
+import '../house-form.css';
 
 /** The house as it will be tested, measured from the finished first floor; its section is drawn as it is typed. */
 export function HouseForm({ lotId, unit }: { lotId: string; unit: LotDetail['units'][number] }): ReactNode {

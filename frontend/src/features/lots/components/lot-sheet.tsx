@@ -7,6 +7,7 @@ import { PhoneHead } from '../../../components/head';
 import { StateWord } from '../../../components/state-word';
 import { useSheetWidth } from '../../../components/use-sheet-width';
 import { QueryState } from '../../../lib/query-state';
+import { useHasThreadColumn } from '../../../lib/use-media';
 import { ruleCardQuery } from '../../departments/api/rule-card';
 import { ThreadPanel } from '../../threads/components/thread-panel';
 import { lotCorrectionsQuery } from '../api/lot-corrections';
@@ -22,11 +23,17 @@ import { TitleFacts } from './title-facts';
 import { TitleNumber, TitleState } from './title-block';
 import { TitleVisit } from './title-visit';
 import { VisitsPart } from './visits-part';
+import '../lot-sheet.css';
+import '../lot-title.css';
 
-/** The lot sheet: on desk the title block at the right edge, on a phone one column in the order of what is needed there. */
+/**
+ * The lot sheet: on desk the title block at the right edge, on a very wide one the thread in a column of its own beside it, on a phone one
+ * column in the order of what is needed there.
+ */
 export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
   const { t } = useTranslation(['lots', 'common', 'marks']);
   const isPhone = useSheetWidth() === 'phone';
+  const hasThreadColumn = useHasThreadColumn();
   const view = useLotView(lot);
   const holds = useQuery(lotHoldsQuery(lot.id));
   const visits = useQuery(lotVisitsQuery(lot.id));
@@ -85,6 +92,7 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
           zone={zone}
           canAddReading={abilities.canAddReading && !hasThumb}
           canTest={abilities.canTest && !hasThumb}
+          abilities={abilities}
         />
       )}
     </QueryState>
@@ -123,8 +131,13 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
       </article>
     );
   }
+  const thread = (
+    <div className="lot-thread">
+      <ThreadPanel lotId={lot.id} />
+    </div>
+  );
   return (
-    <article className="lot-sheet">
+    <article className={hasThreadColumn ? 'lot-sheet with-thread' : 'lot-sheet'}>
       <div className="lot-title">
         <TitleNumber lot={lot} />
         {top}
@@ -135,14 +148,13 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
           {section}
           {log}
         </div>
-        <div className="lot-trio">
+        <div className={hasThreadColumn ? 'lot-trio of-2' : 'lot-trio'}>
           <CorrectionsPart query={corrections} zone={zone} />
           <VisitsPart query={visits} />
-          <div className="lot-thread">
-            <ThreadPanel lotId={lot.id} />
-          </div>
+          {hasThreadColumn ? null : thread}
         </div>
       </div>
+      {hasThreadColumn ? thread : null}
     </article>
   );
 }

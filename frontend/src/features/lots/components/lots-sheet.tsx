@@ -14,6 +14,8 @@ import { LotsHead, LotsPhoneHead } from './lots-head';
 import { LotsTable } from './lots-table';
 import { AddActs, RequestAct, TableHead, useLotActs } from './lots-acts';
 import { PlatPart } from './plat-part';
+import '../plat.css';
+import '../lots-table.css';
 
 export interface LotsSheetProps {
   tracts: readonly Tract[];

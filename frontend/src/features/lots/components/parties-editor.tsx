@@ -7,6 +7,7 @@ import { sayDone } from '../../../components/done-line';
 import { Failed } from '../../../lib/query-state';
 import { useAttachParty } from '../api/save-lot';
 import { PartyField } from './party-field';
+import { ReplaceParty } from './replace-party';
 
 const kinds = ['plumber', 'department'] as const;
 
@@ -26,6 +27,7 @@ function OneParty({ lot, kind }: { lot: LotDetail; kind: (typeof kinds)[number] 
   const [chosen, setChosen] = useState<OrganizationBrief | null>(null);
   const asking = useAttachParty(lot.id);
   const standing = lot.parties.filter((one) => one.kind === kind);
+  const attached = standing.find(({ status }) => status === 'attached');
   const ask = (organization: OrganizationBrief): void =>
     asking.mutate(
       { kind, organizationId: organization.id },
@@ -49,7 +51,10 @@ function OneParty({ lot, kind }: { lot: LotDetail; kind: (typeof kinds)[number] 
           </span>
         </p>
       ))}
-      {lot.abilities.canAttach ? (
+      {kind === 'plumber' && attached !== undefined ? (
+        <ReplaceParty lot={lot} kind="plumber" former={attached.organization} />
+      ) : null}
+      {lot.abilities.canAttach && attached === undefined ? (
         <>
           <PartyField kind={kind} value={chosen} onChange={setChosen} />
           {chosen === null ? null : (

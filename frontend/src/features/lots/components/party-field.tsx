@@ -10,13 +10,13 @@ import { useDebounced } from '../../../lib/use-debounced';
 import { partiesQuery } from '../api/organizations';
 
 export interface PartyFieldProps {
-  kind: Exclude<OrganizationKind, 'builder'>;
+  kind: OrganizationKind;
   value: OrganizationBrief | null;
   onChange: (organization: OrganizationBrief | null) => void;
   error?: string;
 }
 
-/** Finds a plumber or a department by name; it is asked, and on the lot only once it agrees. */
+/** Finds an organization by name; it is asked, and on the lot only once it agrees. */
 export function PartyField({ kind, value, onChange, error }: PartyFieldProps): ReactNode {
   const { t } = useTranslation(['lots', 'common']);
   const [typed, setTyped] = useState('');

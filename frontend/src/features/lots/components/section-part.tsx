@@ -11,11 +11,13 @@ import { Panel } from '../../../components/panel';
 import { Plain } from '../../../components/plain';
 import { Cutaway } from '../../../drawings/cutaway';
 import { findDwvPlan, drawnHouseOf } from '../dwv-ways';
+import { PlanSlot } from '../../plans/components/plan-slot';
 import type { LotView } from '../lot-view';
 import { SectionCautions } from './section-cautions';
 import { SectionFacts } from './section-facts';
 import { StandingLine } from './standing-line';
 import { WaysToTest } from './ways-to-test';
+import '../section.css';
 
 export interface SectionPartProps {
   lot: LotDetail;
@@ -63,6 +65,9 @@ export function SectionPart({ lot, view, tests, corrections, rule, isGroundwork,
       isFlush
     >
       <StandingLine hold={hold} zone={zone} />
+      {view.stage?.systems.includes(view.system) ? (
+        <PlanSlot lotId={lot.id} stageCode={view.stage.code} unitNumber={view.unitNumber} system={view.system} />
+      ) : null}
       {house === null ? (
         <Plain
           kind="empty"

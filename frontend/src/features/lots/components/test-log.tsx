@@ -1,4 +1,5 @@
 import type { Hold, Reading } from '@holdwater/shared-types/holds/hold.contract.js';
+import type { LotAbilities } from '@holdwater/shared-types/lots/lot.contract.js';
 import { Fragment, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Act } from '../../../components/act';
@@ -7,7 +8,9 @@ import { Numeral } from '../../../components/numeral';
 import { Panel } from '../../../components/panel';
 import { Plain } from '../../../components/plain';
 import { useTimeWords } from '../../../lib/time';
+import { StrikeReading } from '../../holds/components/strike-reading';
 import { useReadingWords } from '../reading-words';
+import '../test-log.css';
 
 export interface TestLogProps {
   lotId: string;
@@ -17,10 +20,13 @@ export interface TestLogProps {
   zone: string;
   canAddReading: boolean;
   canTest: boolean;
+  /** What the reader may do to the readings themselves. */
+  abilities: Pick<LotAbilities, 'canTest' | 'canAddReading'>;
 }
 
 /** The log of readings, test by test; a struck reading stays where it was, struck, with why. */
-export function TestLog({ lotId, tests, systemWord, zone, canAddReading, canTest }: TestLogProps): ReactNode {
+export function TestLog(props: TestLogProps): ReactNode {
+  const { lotId, tests, systemWord, zone, canAddReading, canTest, abilities } = props;
   const { t } = useTranslation(['lots', 'common']);
   const [latest, ...older] = tests;
   const mayRead = canAddReading && latest?.state === 'standing';
@@ -41,13 +47,13 @@ export function TestLog({ lotId, tests, systemWord, zone, canAddReading, canTest
   }
   return (
     <Panel title={<TestTitle hold={latest} systemWord={systemWord} />} side={act} isFlush>
-      <LogTable hold={latest} zone={zone} />
+      <LogTable hold={latest} zone={zone} abilities={abilities} />
       {older.map((hold) => (
         <details key={hold.id} className="older-test">
           <summary>
             <TestTitle hold={hold} systemWord={systemWord} />
           </summary>
-          <LogTable hold={hold} zone={zone} />
+          <LogTable hold={hold} zone={zone} abilities={abilities} />
         </details>
       ))}
     </Panel>
@@ -60,7 +66,11 @@ function TestTitle({ hold, systemWord }: { hold: Hold; systemWord: string }): Re
   return <Numeral text={t(hold.ordinal > 1 ? 'log.retest' : 'log.test', { system: systemWord, test })} />;
 }
 
-function LogTable({ hold, zone }: { hold: Hold; zone: string }): ReactNode {
+interface OfTest extends Pick<TestLogProps, 'zone' | 'abilities'> {
+  hold: Hold;
+}
+
+function LogTable({ hold, zone, abilities }: OfTest): ReactNode {
   const { t } = useTranslation(['lots', 'common']);
   const words = useTimeWords();
   const readingWords = useReadingWords();
@@ -97,7 +107,7 @@ function LogTable({ hold, zone }: { hold: Hold; zone: string }): ReactNode {
                   </th>
                 </tr>
               ) : null}
-              <ReadingRow hold={hold} reading={reading} zone={zone} hasValve={!isLevel} />
+              <ReadingRow hold={hold} reading={reading} zone={zone} abilities={abilities} hasValve={!isLevel} />
             </Fragment>
           );
         })}
@@ -106,17 +116,12 @@ function LogTable({ hold, zone }: { hold: Hold; zone: string }): ReactNode {
   );
 }
 
-function ReadingRow({
-  hold,
-  reading,
-  zone,
-  hasValve,
-}: {
-  hold: Hold;
+interface ReadingRowProps extends OfTest {
   reading: Reading;
-  zone: string;
   hasValve: boolean;
-}): ReactNode {
+}
+
+function ReadingRow({ hold, reading, zone, abilities, hasValve }: ReadingRowProps): ReactNode {
   const { t } = useTranslation(['lots', 'common']);
   const words = useTimeWords();
   const readingWords = useReadingWords();
@@ -151,6 +156,13 @@ function ReadingRow({
       <td className="mid">
         {reading.byName}
         {reading.byRole === 'plumber' ? null : <span className="s mut row">{t(`common.roles.${reading.byRole}`)}</span>}
+        <StrikeReading
+          hold={hold}
+          reading={reading}
+          abilities={abilities}
+          value={readingWords.value(hold, reading) ?? ''}
+          at={words.dayClock(reading.at, zone)}
+        />
       </td>
     </tr>
   );

@@ -5,6 +5,7 @@ import { Link } from 'react-router-dom';
 import { Cell, Cells } from '../../../components/cells';
 import { Numeral } from '../../../components/numeral';
 import { useTimeWords } from '../../../lib/time';
+import { ReplaceParty } from './replace-party';
 
 const organizationKinds = { builder: 'builder', plumber: 'plumber', department: 'department' } as const;
 
@@ -60,6 +61,9 @@ export function TitleFacts({ lot }: { lot: LotDetail }): ReactNode {
                 <Phone number={person.phone} />
               </div>
             ))}
+            {one.status === 'attached' && one.kind !== 'department' ? (
+              <ReplaceParty lot={lot} kind={one.kind} former={one.organization} />
+            ) : null}
           </Cell>
         ))}
         {lot.access === null ? null : <AccessCells access={lot.access} />}

@@ -9,8 +9,11 @@ import { useMe } from '../../../app/session';
 import { Icon } from '../../../components/icon';
 import { Numeral } from '../../../components/numeral';
 import { drawHouse } from '../../../drawings/cutaway-house';
-import { height, measureWords, readPressure } from '../../../lib/units';
+import { height, measureWords, workedPressure } from '../../../lib/units';
 import { drawnHouseOf, dwvWays, type DwvWay } from '../dwv-ways';
+
+/** No gauge hangs at a plug: to a tenth, as the feet beside it. */
+const plugMarkPsi = 0.1;
 
 export interface WaysToTestProps {
   house: HouseGeometry;
@@ -78,7 +81,10 @@ function useWayWords(house: HouseGeometry, chosen: DwvMethod | null, isGroundwor
     const words =
       atPlug === undefined
         ? level
-        : t('ways.levelAtPlug', { level, pressure: measureWords(readPressure(atPlug.pressurePsi, 0.2, units)) });
+        : t('ways.levelAtPlug', {
+            level,
+            pressure: measureWords(workedPressure(atPlug.pressurePsi, plugMarkPsi, units)),
+          });
     return method === chosen ? t('ways.chosen', { words }) : words;
   };
 }

@@ -9,9 +9,10 @@ import { useSheetWidth } from '../../../components/use-sheet-width';
 import { QueryState } from '../../../lib/query-state';
 import { consentsQuery } from '../api/consents';
 import { ConsentGroup } from '../components/consent-group';
+import { HandoverRequest } from '../components/handover-request';
 import '../lots.css';
 
-/** Lots that ask an organization of the reader to join, answered several at once. */
+/** Lots that ask an organization of the reader to join, answered several at once; those to be taken over from another one by one. */
 export function ConsentsPage(): ReactNode {
   const { t } = useTranslation('lots');
   const isPhone = useSheetWidth() === 'phone';
@@ -35,7 +36,16 @@ export function ConsentsPage(): ReactNode {
               {t('consents.emptyText')}
             </Plain>
           ) : (
-            byOrganization(items).map((group) => <ConsentGroup key={group[0]?.organization.id} items={group} />)
+            <>
+              {items.map((item) =>
+                item.handover ? (
+                  <HandoverRequest key={`${item.lotId} ${item.organization.id}`} item={item} {...item.handover} />
+                ) : null,
+              )}
+              {byOrganization(items.filter(({ handover }) => !handover)).map((group) => (
+                <ConsentGroup key={group[0]?.organization.id} items={group} />
+              ))}
+            </>
           )
         }
       </QueryState>

@@ -126,6 +126,7 @@ describe('lots that ask in', () => {
   const asked = (number: string) => ({
     ...{ lotId: uuid(Number(number)), lotNumber: number, tractName: null, address: '418 Sedge Loop' },
     ...{ builderName: 'Odderly Homes', kind: 'plumber', organization: dunlatch, askedAt: '2026-04-14T15:00:00Z' },
+    handover: null,
   });
 
   it('are joined several at once, without those taken out', async () => {

@@ -17,6 +17,7 @@ import { ImportFaults } from '../components/import-report';
 import { PartyField } from '../components/party-field';
 import { TractField } from '../components/tract-field';
 import '../lots.css';
+import '../lot-import.css';
 
 /** Builder: adds many lots from a list; tried first, and all or none are added. */
 export function LotImportPage(): ReactNode {

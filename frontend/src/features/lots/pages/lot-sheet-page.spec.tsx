@@ -1,4 +1,5 @@
-import { screen, within } from '@testing-library/react';
+import { cleanup, screen, waitFor, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
 import { Route, Routes } from 'react-router-dom';
 import { describe, expect, it } from 'vitest';
 import type { Hold } from '@holdwater/shared-types/holds/hold.contract.js';
@@ -18,11 +19,22 @@ interface Shown {
   visits?: VisitSummary[];
   corrections?: Correction[];
   check?: object;
+  more?: Parameters<typeof stubApi>[0];
   at?: string;
   widthPx?: number;
 }
 
-function show({ abilities = {}, lot, holds = [], visits = [], corrections = [], check, at = '', widthPx }: Shown) {
+function show({
+  abilities = {},
+  lot,
+  holds = [],
+  visits = [],
+  corrections = [],
+  check,
+  more,
+  at = '',
+  widthPx,
+}: Shown) {
   const path = `/api/lots/${uuid(17)}`;
   const sent = stubApi({
     [`GET ${path}`]: () => ({ data: lotDetailOf(abilities, lot) }),
@@ -32,6 +44,7 @@ function show({ abilities = {}, lot, holds = [], visits = [], corrections = [], 
     [`GET ${path}/ledger`]: () => ({ data: { items: [], nextCursor: null, total: 0 } }),
     [`GET ${path}/ledger/check`]: () => ({ data: check ?? { isWhole: true, entries: 41, firstBroken: null } }),
     [`GET ${path}/comments`]: () => ({ data: { items: [], nextCursor: null } }),
+    ...more,
   });
   renderPage(
     <Routes>
@@ -55,6 +68,27 @@ describe('the lot sheet', () => {
         .getByText('131')
         .closest('del'),
     ).not.toBeNull();
+  });
+
+  it('strikes an own reading after one question, with the reason; a stranger’s is not offered', async () => {
+    const own = readingOf('2026-04-15T01:00:00Z', { byName: personOf().name, byRole: 'superintendent' });
+    const theirs = readingOf('2026-04-15T00:05:00Z', { pressurePsi: 131 });
+    const sent = show({
+      holds: [holdOf({ readings: [own, theirs] })],
+      abilities: { canAddReading: true },
+      at: '?system=water',
+      more: { [`POST /api/readings/${own.id}/strike`]: () => ({ data: holdOf() }) },
+    });
+    await userEvent.click(await screen.findByRole('button', { name: /^Strike 112 psi of/ }));
+    expect(screen.getAllByRole('button', { name: /^Strike/ })).toHaveLength(2);
+    const dialog = screen.getByRole('dialog');
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Strike the reading' }));
+    expect(within(dialog).getByText('This is needed.')).toBeInTheDocument();
+    await userEvent.type(within(dialog).getByLabelText('Why it is struck'), 'misread');
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Strike the reading' }));
+    await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
+    const strikes = sent.filter(({ method }) => method === 'POST');
+    expect(strikes.map(({ body }) => body)).toEqual([{ why: 'misread' }]);
   });
 
   it('names the second test the re-test and keeps the first below it', async () => {
@@ -117,6 +151,16 @@ describe('the lot sheet', () => {
     const items = await within(part).findAllByRole('listitem');
     expect(items[0]).toHaveTextContent('No nail plate');
     expect(within(part).queryByRole('link', { name: 'Fix or answer' })).not.toBeInTheDocument();
+  });
+
+  it('gives the thread a column of its own from 1680 px on, beside the rest', async () => {
+    show({ widthPx: 1680 });
+    const column = (await screen.findByRole('region', { name: 'Thread' })).closest('.lot-thread');
+    expect(column?.parentElement).toHaveClass('lot-sheet', 'with-thread');
+    cleanup();
+    show({ widthPx: 1679 });
+    const part = (await screen.findByRole('region', { name: 'Thread' })).closest('.lot-thread');
+    expect(part?.parentElement).toHaveClass('lot-trio');
   });
 
   it('leads on a phone to the thread instead of showing it', async () => {

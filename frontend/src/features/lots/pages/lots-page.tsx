@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
 import { waitingQuery } from '../../../app/layout/counts';
 import { useOrganization } from '../../../app/session';
 import { Lines } from '../../../components/lines';
@@ -28,7 +29,9 @@ export function LotsPage(): ReactNode {
 
 /** The tract with the most lots is shown first; without tracts, all lots. */
 function OrganizationLots({ organizationId }: { organizationId: string }): ReactNode {
+  const { t } = useTranslation('lots');
   const { tractId } = useLotsAddress();
+  const isContractor = useOrganization()?.organization.kind !== 'department';
   const tracts = useQuery(tractsQuery());
   const known = tracts.data?.items ?? [];
   const usual = [...known].sort((a, b) => b.lotCount - a.lotCount)[0]?.id ?? null;
@@ -43,13 +46,20 @@ function OrganizationLots({ organizationId }: { organizationId: string }): React
       {({ items }) => (
         <QueryState query={lots} loading={<Lines rows={10} />}>
           {(scoped) => (
-            <LotsSheet
-              tracts={items}
-              tract={items.find(({ id }) => id === shownId) ?? null}
-              scoped={scoped}
-              waiting={waiting.data?.items ?? []}
-              isWaitingUnknown={waiting.isError}
-            />
+            <>
+              <LotsSheet
+                tracts={items}
+                tract={items.find(({ id }) => id === shownId) ?? null}
+                scoped={scoped}
+                waiting={waiting.data?.items ?? []}
+                isWaitingUnknown={waiting.isError}
+              />
+              {isContractor ? (
+                <p className="past-link s">
+                  <Link to="/past-lots">{t('past.title')}</Link>
+                </p>
+              ) : null}
+            </>
           )}
         </QueryState>
       )}

@@ -77,6 +77,7 @@ export function lotDetailOf(abilities: Partial<LotAbilities>, parts: Partial<Lot
       { kind: 'builder', organization: odderly, status: 'attached', people: [] },
       { kind: 'department', organization: tallowmere, status: 'pending', people: [] },
     ],
+    handovers: [],
     ruleCard: null,
     abilities: { ...noAbilities, ...abilities },
     ...parts,
