@@ -36,7 +36,7 @@ export function SectionCautions({ hold, plan, system }: SectionCautionsProps): R
   const bare = plan?.cautions.find(({ code }) => code === 'floors-not-under-test')?.params['floors'];
   const isDwvWater = hold !== null && system === 'dwv' && hold.medium === 'water';
   return (
-    <div className="cautions">
+    <div className="section-cautions">
       {hold !== null && hold.medium !== 'water' ? <Caution>{t('cautions.air')}</Caution> : null}
       {last?.gaugeValve === 'shut' ? <Caution>{t('cautions.shut')}</Caution> : null}
       {hold !== null && !isDwvWater ? <Caution>{t('cautions.pressure')}</Caution> : null}

@@ -92,7 +92,7 @@ interface GroupProps {
 function Group({ title, items, zoneOfLot, isOnYou = false }: GroupProps): ReactNode {
   return (
     <section>
-      <h2 className={isOnYou ? 'list-head h3 t-brass' : 'list-head h3'}>{title}</h2>
+      <h2 className={isOnYou ? 'corrections-head h3 t-brass' : 'corrections-head h3'}>{title}</h2>
       <ul className="correction-list">
         {items.map((correction) => (
           <CorrectionRow key={correction.id} correction={correction} zone={zoneOfLot(correction.lotId)} />

@@ -13,7 +13,7 @@ export function RefusedWindows({ windows, zone }: { windows: readonly OfferedWin
   const groups = refusedByReason(windows.filter(({ whyNot }) => whyNot !== 'past'));
   if (groups.length === 0) return null;
   return (
-    <details className="refused">
+    <details className="refused-windows">
       <summary>{t('offer.whyNot')}</summary>
       <ul>
         {groups.map((group) => (
