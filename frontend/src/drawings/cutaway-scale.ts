@@ -20,7 +20,7 @@ const belowFt = -2.7;
 export function cutawayScale(house: DrawnHouse, width: number, maxHeight: number, hasLabels: boolean): CutawayScale {
   const isNarrow = width < 480;
   const left = hasLabels ? (isNarrow ? 40 : 46) : 4;
-  const right = hasLabels ? (isNarrow ? 96 : 118) : 4;
+  const right = hasLabels ? (isNarrow ? 110 : 118) : 4;
   const top = hasLabels ? 26 : 6;
   const highFt = Math.max(house.ridgeFt + 0.7, house.ventFt + 0.3);
   const tallFt = highFt - belowFt;
