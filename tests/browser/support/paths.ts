@@ -35,6 +35,7 @@ export function pathsOf(stack: Stack, scene: Scene): Array<{ person: WorldPerson
       paths: [
         ...[`/calendar?date=${date}`, '/lots', `/lots/${failedLot}`, `/lots/${scene.booked.lotId}/test`],
         ...[`/lots/${readyLot}/test`, `/lots/${failedLot}/thread`, '/corrections', '/consents', '/notices'],
+        ...[`/lots/${readyLot}/plan`, `/lots/${failedLot}/plan`],
       ],
     },
     { person: 'helper', paths: [`/lots/${readyLot}/test`] },
