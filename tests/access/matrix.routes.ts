@@ -135,6 +135,12 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     path: (t) => `/api/rule-cards/${t.draftId}/publish`,
     body: () => ({ effectiveFrom: '2027-12-01' }),
   },
+  // behind the publishing: by then it is refused as no draft any more, which is not a refusal of who may
+  'DELETE /api/rule-cards/:ruleCardId': { may: ['desk'], path: (t) => `/api/rule-cards/${t.draftId}` },
+  'GET /api/rule-cards/:ruleCardId/touches': {
+    may: ['desk', ...inspectors, 'departmentOwner'],
+    path: (t) => `/api/rule-cards/${t.draftId}/touches`,
+  },
   'POST /api/departments/:departmentId/closures': {
     may: ['desk'],
     isPublicThing: true,
@@ -164,6 +170,41 @@ export const matrix: Readonly<Record<string, MatrixRow>> = {
     may: ['superintendent'],
     path: (t) => `/api/tracts/${t.tractId}`,
     body: () => ({ plat: null }),
+  },
+  'GET /api/house-models': {
+    may: ['superintendent', 'builderOwner'],
+    path: (t) => `/api/house-models?builderId=${t.builderId}`,
+  },
+  'POST /api/house-models': {
+    may: ['superintendent', 'builderOwner'],
+    body: (t) => ({ builderId: t.builderId, name: randomUUID(), geometry: t.geometry }),
+  },
+  'GET /api/house-models/:houseModelId': {
+    may: ['superintendent', 'builderOwner'],
+    path: (t) => `/api/house-models/${t.houseModelId}`,
+  },
+  'PATCH /api/house-models/:houseModelId': {
+    may: ['superintendent', 'builderOwner'],
+    path: (t) => `/api/house-models/${t.houseModelId}`,
+    body: () => ({ name: randomUUID() }),
+  },
+  'POST /api/house-models/:houseModelId/versions': {
+    may: ['superintendent', 'builderOwner'],
+    path: (t) => `/api/house-models/${t.houseModelId}/versions`,
+    body: (t) => ({ expectedVersion: 99, geometry: t.geometry }),
+  },
+  'GET /api/house-models/:houseModelId/units': {
+    may: ['superintendent', 'builderOwner'],
+    path: (t) => `/api/house-models/${t.houseModelId}/units?tractId=${t.tractId}`,
+  },
+  'POST /api/house-models/:houseModelId/apply': {
+    may: ['superintendent'],
+    path: (t) => `/api/house-models/${t.houseModelId}/apply`,
+    body: (t) => ({ expectedVersion: 99, units: [{ lotId: t.lotId, unitNumber: 1 }] }),
+  },
+  'DELETE /api/house-models/:houseModelId': {
+    may: ['superintendent', 'builderOwner'],
+    path: (t) => `/api/house-models/${t.unusedHouseModelId}`,
   },
   'POST /api/lots': {
     may: ['superintendent'],

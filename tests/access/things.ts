@@ -51,6 +51,10 @@ export async function makeThings(server: TestApp, world: World) {
     why: 'Staff day',
   });
   const shown = await world.as('superintendent').get(`/api/lots/${lot.id}`);
+  const houseModel = (name: string) =>
+    post(world, 'superintendent', '/api/house-models', {
+      ...{ builderId: world.organizations.builder.id, name, geometry: shown.body.units[0].geometry },
+    });
   return {
     lotId: lot.id,
     freeLotId: freeLot.id,
@@ -74,6 +78,8 @@ export async function makeThings(server: TestApp, world: World) {
     planId: plan.id as string,
     readingId: reading,
     geometry: shown.body.units[0].geometry as object,
+    houseModelId: (await houseModel('Plan 2210')).id as string,
+    unusedHouseModelId: (await houseModel('Plan 0')).id as string,
     deliveryId: await makeGivenUpDelivery(),
   };
 }

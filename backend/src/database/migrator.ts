@@ -74,7 +74,7 @@ async function grant(db: Sequelize, appRole: string, ownerRole: string): Promise
     GRANT EXECUTE ON ALL FUNCTIONS IN SCHEMA ${queueSchema} TO ${role};
     REVOKE UPDATE, DELETE, TRUNCATE ON ledger_entries, ledger_anchors, ledger_anchor_heads, lot_past_parties FROM ${role};
     REVOKE INSERT, UPDATE, DELETE, TRUNCATE ON schema_steps FROM ${role};
-    REVOKE DELETE ON readings, holds, outcomes, outcome_systems, outcome_work, corrections, visits, comments, rule_cards FROM ${role};
+    REVOKE DELETE ON readings, holds, outcomes, outcome_systems, outcome_work, corrections, visits, comments FROM ${role};
     REVOKE DELETE ON ledger_heads FROM ${role};
   `);
 }

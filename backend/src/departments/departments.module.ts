@@ -10,6 +10,8 @@ import { DepartmentsQueries } from './departments.queries.js';
 import { PublishRuleCardService } from './publish-rule-card.service.js';
 import { ReadDepartmentsService } from './read-departments.service.js';
 import { RuleCardDraftsService } from './rule-card-drafts.service.js';
+import { RuleCardTouchesQueries } from './rule-card-touches.queries.js';
+import { RuleCardTouchesService } from './rule-card-touches.service.js';
 import { RuleCardModel } from './rule-card.model.js';
 import { RuleCardsController } from './rule-cards.controller.js';
 import { RuleCardsQueries } from './rule-cards.queries.js';
@@ -28,6 +30,8 @@ import { WorkingTimeQueries } from './working-time.queries.js';
     ReadDepartmentsService,
     RuleCardDraftsService,
     PublishRuleCardService,
+    RuleCardTouchesQueries,
+    RuleCardTouchesService,
     ClosuresService,
   ],
   exports: [DepartmentsQueries, RuleCardsQueries, ClosuresQueries, WorkingTimeQueries, ClosureEffects],

@@ -9,13 +9,21 @@ export function presentRuleCardBrief(card: RuleCardVersion, today: string): Rule
   return { id, departmentId, version, state, effectiveFrom, effectiveTo, isInForce };
 }
 
-export function presentRuleCard(card: RuleCardVersion, department: DepartmentRecord, today: string): RuleCard {
+/** `isOwn`: for a member of its department, who is told by whom it was changed. */
+export function presentRuleCard(
+  card: RuleCardVersion,
+  department: DepartmentRecord,
+  today: string,
+  isOwn: boolean,
+): RuleCard {
+  const { editedBy, editedAt } = card;
   return {
     ...presentRuleCardBrief(card, today),
     departmentName: department.name,
     zone: department.zone,
     content: card.content,
     publishedAt: card.publishedAt?.toISOString() ?? null,
+    edited: isOwn && editedBy !== null && editedAt !== null ? { by: editedBy, at: editedAt.toISOString() } : null,
   };
 }
 

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import type { RuleCard } from '@holdwater/shared-types/departments/departments.contract.js';
+import { ruleCardFaults } from '@holdwater/shared-types/departments/rule-card-faults.js';
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
 import type { Actor } from '../common/access/actor.js';
@@ -11,7 +12,6 @@ import { Ledger } from '../ledger/ledger.service.js';
 import { Outbox } from '../notices/outbox.service.js';
 import { localDateOf } from '../scheduling/working-time/local-instant.js';
 import { DepartmentsQueries } from './departments.queries.js';
-import { publishFaults } from './publish-faults.js';
 import { ReadDepartmentsService } from './read-departments.service.js';
 import { RuleCardDraftsService } from './rule-card-drafts.service.js';
 import { RuleCardsQueries } from './rule-cards.queries.js';
@@ -39,7 +39,7 @@ export class PublishRuleCardService {
     return this.unitOfWork.run(async () => {
       const { departmentId, version, content } = await this.drafts.getDraftToChange(actor, ruleCardId);
       await this.refuseWrongDay(departmentId, effectiveFrom);
-      const faults = publishFaults(content);
+      const faults = ruleCardFaults(content);
       if (Object.keys(faults).length > 0) refuse('rule-card-incomplete', {}, faults);
       await this.endVersionBefore(departmentId, effectiveFrom);
       await this.write(actor, ruleCardId, effectiveFrom);

@@ -47,10 +47,10 @@ export class ReadDepartmentsService {
   /** One version; a draft only to its department, and to nobody who is not signed in. Throws `not-found`. */
   async readRuleCard(actor: Actor | null, ruleCardId: string): Promise<RuleCard> {
     const card = await this.ruleCards.getRuleCard(ruleCardId);
-    const mayRead = card.state === 'published' || (actor !== null && canReadDraft(actor, card.departmentId));
-    if (!mayRead) refuse('not-found');
+    const isOwn = actor !== null && canReadDraft(actor, card.departmentId);
+    if (card.state === 'draft' && !isOwn) refuse('not-found');
     const department = await this.departments.getDepartment(card.departmentId);
-    return presentRuleCard(card, department, this.todayIn(department));
+    return presentRuleCard(card, department, this.todayIn(department), isOwn);
   }
 
   private async present(records: readonly DepartmentRecord[]): Promise<Department[]> {

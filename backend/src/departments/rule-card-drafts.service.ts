@@ -43,8 +43,19 @@ export class RuleCardDraftsService {
   async edit(actor: Actor, ruleCardId: string, content: RuleCardContent): Promise<RuleCard> {
     return this.unitOfWork.run(async () => {
       await this.getDraftToChange(actor, ruleCardId);
-      await this.models.update({ content }, { where: { id: ruleCardId } });
+      const editedAt = this.clock.now();
+      await this.models.update({ content, editedBy: actor.personId, editedAt }, { where: { id: ruleCardId } });
       return this.reading.readRuleCard(actor, ruleCardId);
+    });
+  }
+
+  /** Throws a draft away; its number is the next draft's. Throws `not-found`, `not-allowed`, `rule-card-not-draft`. */
+  async remove(actor: Actor, ruleCardId: string): Promise<void> {
+    await this.unitOfWork.run(async () => {
+      const { departmentId, version } = await this.getDraftToChange(actor, ruleCardId);
+      await this.models.destroy({ where: { id: ruleCardId } });
+      const who = { personId: actor.personId, role: 'desk' };
+      await this.ledger.appendTo(`department:${departmentId}`, 'rule-card-draft-deleted', { ruleCardId, version }, who);
     });
   }
 

@@ -31,6 +31,12 @@ export class RuleCardModel extends Model {
   declare createdAt: Date;
 
   @Column(DataType.UUID)
+  declare editedBy: string | null;
+
+  @Column(DataType.DATE)
+  declare editedAt: Date | null;
+
+  @Column(DataType.UUID)
   declare publishedBy: string | null;
 
   @Column(DataType.DATE)

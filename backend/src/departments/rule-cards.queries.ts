@@ -17,10 +17,14 @@ export interface RuleCardVersion {
   /** Last day in force; null until replaced. */
   readonly effectiveTo: string | null;
   readonly publishedAt: Date | null;
+  /** Who changed it last and when; null for one nobody changed since it was drafted. */
+  readonly editedBy: string | null;
+  readonly editedAt: Date | null;
 }
 
 const columns = `rc.id, rc.department_id AS "departmentId", rc.version, rc.state, rc.content,
-  lower(rc.effective)::text AS "effectiveFrom", (upper(rc.effective) - 1)::text AS "effectiveTo", rc.published_at AS "publishedAt"`;
+  lower(rc.effective)::text AS "effectiveFrom", (upper(rc.effective) - 1)::text AS "effectiveTo", rc.published_at AS "publishedAt",
+  (SELECT name FROM persons WHERE id = rc.edited_by) AS "editedBy", rc.edited_at AS "editedAt"`;
 
 /** How other modules read rule cards. */
 @Injectable()

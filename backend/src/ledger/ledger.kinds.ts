@@ -20,6 +20,7 @@ export interface LedgerPayloads {
   'password-changed': { personId: string };
   'session-reused': { personId: string };
   'rule-card-drafted': { ruleCardId: string; version: number };
+  'rule-card-draft-deleted': { ruleCardId: string; version: number };
   'rule-card-published': { ruleCardId: string; version: number; effectiveFrom: string };
   'closure-added': { date: string; from: string | null; to: string | null; why: string };
   'closure-removed': { date: string };

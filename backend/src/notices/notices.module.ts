@@ -4,6 +4,7 @@ import { DeliveryWorker } from './deliver/delivery-worker.service.js';
 import { StillConcerned } from './deliver/still-concerned.js';
 import { DeliveryModel } from './delivery.model.js';
 import { Audiences } from './expand/audiences.service.js';
+import { RuleCardNewsQueries } from './expand/rule-card-news.js';
 import { EventFactsQueries } from './expand/event-facts.queries.js';
 import { ExpandEvent } from './expand/expand-event.service.js';
 import { Mailer } from './mail/mailer.js';
@@ -20,6 +21,7 @@ import { OutboxWorker } from './outbox-worker.service.js';
   controllers: [NoticesController],
   providers: [
     Audiences,
+    RuleCardNewsQueries,
     DeliveryWorker,
     EventFactsQueries,
     ExpandEvent,

@@ -29,6 +29,10 @@ const corrections = page('CorrectionsPage', () => import('../features/outcomes/p
 const lots = page('LotsPage', () => import('../features/lots/pages/lots-page'));
 const lotForm = page('LotFormPage', () => import('../features/lots/pages/lot-form-page'));
 const lotImport = page('LotImportPage', () => import('../features/lots/pages/lot-import-page'));
+const houseModels = page('HouseModelsPage', () => import('../features/lots/pages/house-models-page'));
+const houseModel = page('HouseModelPage', () => import('../features/lots/pages/house-model-page'));
+const houseModelForm = page('HouseModelFormPage', () => import('../features/lots/pages/house-model-form-page'));
+const houseApply = page('HouseApplyPage', () => import('../features/lots/pages/house-apply-page'));
 const lotSheet = page('LotSheetPage', () => import('../features/lots/pages/lot-sheet-page'));
 const plan = page('PlanPage', () => import('../features/plans/pages/plan-page'));
 const consents = page('ConsentsPage', () => import('../features/lots/pages/consents-page'));
@@ -58,6 +62,11 @@ const framedRoutes: RouteObject[] = [
   { path: '/lots', element: lots },
   { path: '/lots/new', element: lotForm },
   { path: '/lots/import', element: lotImport },
+  { path: '/lots/houses', element: houseModels },
+  { path: '/lots/houses/new', element: houseModelForm },
+  { path: '/lots/houses/:houseModelId', element: houseModel },
+  { path: '/lots/houses/:houseModelId/edit', element: houseModelForm },
+  { path: '/lots/houses/:houseModelId/apply', element: houseApply },
   { path: '/lots/:lotId', element: lotSheet },
   { path: '/lots/:lotId/edit', element: lotForm },
   { path: '/lots/:lotId/plan', element: plan, handle: task },

@@ -13,6 +13,7 @@ export const queryKeys = {
   lots: ['lots'],
   search: ['search'],
   tracts: ['tracts'],
+  houseModels: ['house-models'],
   consents: ['consents'],
   corrections: ['corrections'],
   departments: ['departments'],

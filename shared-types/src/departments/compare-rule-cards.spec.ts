@@ -12,8 +12,12 @@ describe('two versions of a rule card compared', () => {
   it('has every field of the contract in the rule card the specs change', () => {
     // the schema is the list: what it parses to names each field once
     const names = new Set(JSON.stringify(wholeRuleCard).match(/"(\w+)":/g));
-    const declared = JSON.stringify(ruleCardContent.toJSONSchema({ unrepresentable: 'any' })).match(/"required":\[[^\]]*\]/g);
-    const required = new Set((declared ?? []).flatMap((list) => list.slice(11).match(/"\w+"/g) ?? []).map((n) => `${n}:`));
+    const declared = JSON.stringify(ruleCardContent.toJSONSchema({ unrepresentable: 'any' })).match(
+      /"required":\[[^\]]*\]/g,
+    );
+    const required = new Set(
+      (declared ?? []).flatMap((list) => list.slice(11).match(/"\w+"/g) ?? []).map((n) => `${n}:`),
+    );
     // of the ways a test may be due up, the other one has its own field; of a source, both are named
     expect([...required].filter((name) => !names.has(name))).toEqual(['"hours":']);
     expect(changes.length).toBeGreaterThan(100);
@@ -26,18 +30,21 @@ describe('two versions of a rule card compared', () => {
     expect(compareRuleCards(wholeRuleCard, turned)).toEqual([]);
   });
 
-  it.each(changes.map((one) => [one.path, one] as const))('tells of %s once, in both languages', (_path, { changed }) => {
-    const told = compareRuleCards(wholeRuleCard, changed);
-    // a window's label or span is told where re-inspections name the window, too
-    expect(new Set(told.map(({ note, row, stageCode }) => `${stageCode} ${note} ${row}`)).size).toBe(told.length);
-    expect(told.length).toBeGreaterThanOrEqual(1);
-    for (const change of told) {
-      for (const locale of ['en', 'es'] as const) {
-        expect(isEqual(change.before?.[locale], change.after?.[locale])).toBe(false);
-        expect(changeSentence(change, locale)).not.toMatch(/\{\{|undefined|null|^:/);
+  it.each(changes.map((one) => [one.path, one] as const))(
+    'tells of %s once, in both languages',
+    (_path, { changed }) => {
+      const told = compareRuleCards(wholeRuleCard, changed);
+      // a window's label or span is told where re-inspections name the window, too
+      expect(new Set(told.map(({ note, row, stageCode }) => `${stageCode} ${note} ${row}`)).size).toBe(told.length);
+      expect(told.length).toBeGreaterThanOrEqual(1);
+      for (const change of told) {
+        for (const locale of ['en', 'es'] as const) {
+          expect(isEqual(change.before?.[locale], change.after?.[locale])).toBe(false);
+          expect(changeSentence(change, locale)).not.toMatch(/\{\{|undefined|null|^:/);
+        }
       }
-    }
-  });
+    },
+  );
 
   it('tells one change as one, but where a value stands in for two rows', () => {
     const many = changes.filter(({ changed }) => compareRuleCards(wholeRuleCard, changed).length > 1);

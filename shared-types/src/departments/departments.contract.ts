@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { clockTime, id, instant, line, localDate } from '../common/fields.js';
 import { done } from '../common/paging.js';
 import { route } from '../common/route.js';
+import { systems } from '../holds/hold.states.js';
 import { ruleCardContent } from './rule-card.content.js';
 
 export const ruleCardStates = ['draft', 'published'] as const;
@@ -24,6 +25,8 @@ export const ruleCard = ruleCardBrief.extend({
   zone: z.string(),
   content: ruleCardContent,
   publishedAt: instant.nullable(),
+  /** Who changed it last, told to its department only. */
+  edited: z.object({ by: z.string(), at: instant }).nullish(),
 });
 export type RuleCard = z.infer<typeof ruleCard>;
 
@@ -126,6 +129,48 @@ export const publishRuleCard = route({
   params: z.object({ ruleCardId: id }),
   body: z.strictObject({ effectiveFrom: localDate }),
   answer: ruleCard,
+});
+
+export const deleteRuleCardDraft = route({
+  method: 'DELETE',
+  path: '/api/rule-cards/:ruleCardId',
+  summary: 'Desk: throw a draft away; a published version stays for good',
+  status: 200,
+  params: z.object({ ruleCardId: id }),
+  answer: done,
+});
+
+/** What of a test plan a version does not take any more. */
+export const unfitReasons = ['method', 'medium', 'pressure', 'level'] as const;
+
+export const ruleCardTouches = z.object({
+  /** Open visits keep the version they were booked or requested under. */
+  keptVisits: z.object({ booked: z.number().int(), requested: z.number().int(), versions: z.array(z.number().int()) }),
+  /** Lots of the department without an open visit: their next one is planned on the new version. */
+  lotsWithoutVisit: z.number().int(),
+  /** Who is told when it is published: those with an open visit, and the department itself. */
+  told: z.array(z.object({ organizationId: id, name: z.string(), people: z.number().int() })),
+  /** Test plans of lots without an open visit at their stage that the new version does not take. */
+  unfitPlans: z.array(
+    z.object({
+      lotId: id,
+      lotNumber: z.string(),
+      tractName: z.string().nullable(),
+      stageCode: z.string(),
+      system: z.enum(systems),
+      reason: z.enum(unfitReasons),
+    }),
+  ),
+});
+export type RuleCardTouches = z.infer<typeof ruleCardTouches>;
+
+export const readRuleCardTouches = route({
+  method: 'GET',
+  path: '/api/rule-cards/:ruleCardId/touches',
+  summary: 'Department: what a draft will touch once it is in force, and who is told',
+  status: 200,
+  params: z.object({ ruleCardId: id }),
+  answer: ruleCardTouches,
 });
 
 export const addClosure = route({

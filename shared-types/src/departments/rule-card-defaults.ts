@@ -60,7 +60,8 @@ export const ruleCardDefaults: readonly AnyDefault[] = [
 
 /** What the model codes offer for one field of a test; an air pressure only where air is accepted. */
 export function offeredDefaults(test: TestRule, field: SourcedField): AnyDefault[] {
-  const isAirPressure = (each: AnyDefault) => each.field === 'pressures' && each.value.some(({ medium }) => medium === 'air');
+  const isAirPressure = (each: AnyDefault) =>
+    each.field === 'pressures' && each.value.some(({ medium }) => medium === 'air');
   const isAirTested = test.system === 'water' || test.acceptedMethods.includes('air');
   return ruleCardDefaults.filter(
     (each) => each.field === field && each.system === test.system && (isAirTested || !isAirPressure(each)),

@@ -15,7 +15,11 @@ function stageFaults({ stages }: RuleCardContent): Faults {
   const faults: Faults = {};
   stages.forEach((stage, s) => {
     if (stages.findIndex(({ order }) => order === stage.order) !== s) faults[`stages.${s}.order`] = 'named-twice';
-    twice(stage.work, ({ code }) => code, (w) => (faults[`stages.${s}.work.${w}.code`] = 'named-twice'));
+    twice(
+      stage.work,
+      ({ code }) => code,
+      (w) => (faults[`stages.${s}.work.${w}.code`] = 'named-twice'),
+    );
   });
   return faults;
 }
@@ -42,7 +46,11 @@ function faultsOfTest(test: TestRule): Faults {
   const isFilled = !isWater && acceptedMethods.some((method) => method !== 'air');
   if (isFilled && headRule === null) faults.headRule = 'required';
   if (headRule?.kind === 'above-highest-fitting' && !headRule.feet) faults['headRule.feet'] = 'must-be-positive';
-  twice(pressures, ({ medium }) => medium, (p) => (faults[`pressures.${p}.medium`] = 'named-twice'));
+  twice(
+    pressures,
+    ({ medium }) => medium,
+    (p) => (faults[`pressures.${p}.medium`] = 'named-twice'),
+  );
   pressures.forEach(({ minimumPsi, preferredPsi }, p) => {
     if (preferredPsi !== null && preferredPsi < minimumPsi) faults[`pressures.${p}.preferredPsi`] = 'below-minimum';
   });
@@ -63,7 +71,11 @@ function windowFaults({ asking: { windows, workingDays, reinspectionWindows } }:
 
 function otherFaults({ fees, corrections }: RuleCardContent): Faults {
   const faults: Faults = {};
-  twice(fees, ({ event }) => event, (f) => (faults[`fees.${f}.event`] = 'named-twice'));
+  twice(
+    fees,
+    ({ event }) => event,
+    (f) => (faults[`fees.${f}.event`] = 'named-twice'),
+  );
   const named = (list: 'frequent' | 'sections', part: string) => (at: number) =>
     (faults[`corrections.${list}.${at}.${part}`] = 'named-twice');
   twice(corrections.frequent, ({ code }) => code, named('frequent', 'code'));

@@ -5,9 +5,7 @@ import type { RuleCardWords } from './rule-card-words.js';
 /** Notes 2 and 3: how drains, wastes and vents, or water lines, are tested at a stage. */
 export function testNote(test: TestRule | undefined, system: TestRule['system']): RuleCardRow[] {
   if (test === undefined) {
-    return [
-      { key: 'none', value: null, ...said('rows.thisStage', ({ t }) => [t('says.notTested')]), isFiller: true },
-    ];
+    return [{ key: 'none', value: null, ...said('rows.thisStage', ({ t }) => [t('says.notTested')]), isFiller: true }];
   }
   const isDwv = system === 'dwv';
   const withAir = test.acceptedMethods.includes('air') || test.pressures.some(({ medium }) => medium !== 'water');
@@ -90,7 +88,9 @@ function levelLine({ headRule }: TestRule, { t, more }: RuleCardWords): string {
   if (headRule.kind === 'fill-level') {
     return headRule.feet === null ? t('says.levelOfMethod') : more(t('says.levelOfMethod'), `${headRule.feet} ft`);
   }
-  return headRule.feet === null ? more(t('says.levelAbove', { feet: 0 }), '–') : t('says.levelAbove', { feet: headRule.feet });
+  return headRule.feet === null
+    ? more(t('says.levelAbove', { feet: 0 }), '–')
+    : t('says.levelAbove', { feet: headRule.feet });
 }
 
 function standRow({ standMinutes }: TestRule): RuleCardRow {

@@ -59,15 +59,19 @@ export function workNote(stage: Stage | undefined): RuleCardRow[] {
   if (stage === undefined) return [];
   const { work, minutesPerVisit, inspectionCode, covers, systems, order, name } = stage;
   return [
-    { key: 'stageName', value: name, label: ({ t }) => t('rows.stageName'), lines: (w) => [w.name(name)], isQuiet: true },
+    {
+      key: 'stageName',
+      value: name,
+      label: ({ t }) => t('rows.stageName'),
+      lines: (w) => [w.name(name)],
+      isQuiet: true,
+    },
     { key: 'order', value: order, label: ({ t }) => t('rows.order'), lines: () => [String(order)], isQuiet: true },
     {
       key: 'systems',
       value: [...new Set(systems)].sort(),
       label: ({ t }) => t('rows.systems'),
-      lines: ({ t }) => [
-        systems.map((system) => t(`says.systems.${system}`)).join(', ') || t('says.systems.none'),
-      ],
+      lines: ({ t }) => [systems.map((system) => t(`says.systems.${system}`)).join(', ') || t('says.systems.none')],
     },
     {
       key: 'lookedAt',
@@ -145,7 +149,11 @@ function feeRow(fee: Fee, nth: number): RuleCardRow {
 }
 
 /** Note 7: corrections the department writes often, with their sections, and what a photo is enough for. */
-export function correctionsNote({ frequent, acceptFromPhoto, sections }: RuleCardContent['corrections']): RuleCardRow[] {
+export function correctionsNote({
+  frequent,
+  acceptFromPhoto,
+  sections,
+}: RuleCardContent['corrections']): RuleCardRow[] {
   return [
     {
       key: 'fromPhoto',

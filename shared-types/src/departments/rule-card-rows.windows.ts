@@ -19,7 +19,10 @@ export function windowsNote(asking: Asking): RuleCardRow[] {
       key: 'booking',
       value: [asking.booking, asking.lotsPerRequest],
       label: ({ t }) => t('rows.booking'),
-      lines: ({ t }) => [t(`says.booking.${asking.booking}`), t('says.lotsPerRequest', { count: asking.lotsPerRequest })],
+      lines: ({ t }) => [
+        t(`says.booking.${asking.booking}`),
+        t('says.lotsPerRequest', { count: asking.lotsPerRequest }),
+      ],
     },
     {
       key: 'whoMayRequest',

@@ -23,8 +23,7 @@ export function withDefault(content: RuleCardContent, testIndex: number, offered
 export function withTest(content: RuleCardContent, testIndex: number, change: Partial<TestRule>): RuleCardContent {
   const test = content.tests[testIndex];
   if (test === undefined) return content;
-  const isTyped = (path: string) =>
-    Object.keys(change).some((field) => isUnder(path, `tests.${testIndex}.${field}`));
+  const isTyped = (path: string) => Object.keys(change).some((field) => isUnder(path, `tests.${testIndex}.${field}`));
   return {
     ...content,
     tests: content.tests.with(testIndex, { ...test, ...change }),
@@ -48,7 +47,9 @@ export function withoutTest(content: RuleCardContent, testIndex: number): RuleCa
 
 /** How many values that could come from a model code are local, and how many do. */
 export function countSources(content: RuleCardContent): { local: number; fromModelCode: number } {
-  const paths = content.tests.flatMap((_, index) => sourcedFieldNames.map((field) => findSource(content, index, field)));
+  const paths = content.tests.flatMap((_, index) =>
+    sourcedFieldNames.map((field) => findSource(content, index, field)),
+  );
   const fromModelCode = paths.filter((source) => source !== null && source.from !== 'local').length;
   return { local: paths.length - fromModelCode, fromModelCode };
 }

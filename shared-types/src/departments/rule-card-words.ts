@@ -77,7 +77,8 @@ function phraseFiller(locale: Locale): RuleCardWords['t'] {
   const plural = new Intl.PluralRules(tags[locale]);
   return (key, values = {}) => {
     const { count } = values;
-    const forms = typeof count === 'number' ? [...(count === 0 ? ['_zero'] : []), `_${plural.select(count)}`, '_other'] : [];
+    const forms =
+      typeof count === 'number' ? [...(count === 0 ? ['_zero'] : []), `_${plural.select(count)}`, '_other'] : [];
     const found = [...forms.map((form) => key + form), key].map((each) => phraseAt(locale, each)).find(Boolean);
     if (found === undefined) throw new Error(`no phrase of a rule card: ${locale} ${key}`);
     return found.replaceAll(/\{\{(\w+)\}\}/g, (_whole, name: string) => String(values[name] ?? ''));

@@ -54,8 +54,9 @@ export type ModelledUnit = z.infer<typeof modelledUnit>;
 
 export const houseModelDetail = houseModelBrief.extend({
   versions: z.array(z.object({ version: z.number().int(), madeAt: instant, madeByName: z.string() })),
-  /** The units taken from it, by lot. */
+  /** The units taken from it, those at an earlier version first, then by lot. */
   units: z.array(modelledUnit),
+  areUnitsCut: z.boolean(),
   abilities: z.object({ canWrite: z.boolean(), canApply: z.boolean() }),
 });
 export type HouseModelDetail = z.infer<typeof houseModelDetail>;

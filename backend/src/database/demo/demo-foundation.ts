@@ -6,9 +6,11 @@ import { MembershipModel } from '../../accounts/membership.model.js';
 import { OrganizationModel } from '../../accounts/organization.model.js';
 import { PersonModel } from '../../accounts/person.model.js';
 import { SessionModel } from '../../accounts/session.model.js';
+import { Temporal } from 'temporal-polyfill';
 import { DepartmentModel } from '../../departments/department.model.js';
+import { RuleCardModel } from '../../departments/rule-card.model.js';
 import { demoOrganizations, demoPassword, demoPeople, type DemoOrganizationKey } from './demo-people.js';
-import { demoDepartments } from './demo-rule-cards.js';
+import { demoDepartments, type DemoDepartment } from './demo-rule-cards.js';
 
 /** What the story needs to know of the people and organizations it is told about. */
 export interface DemoFoundation {
@@ -37,7 +39,13 @@ export async function layFoundation(db: Sequelize, since: Date, present: Date): 
     if (!department.ruleCard) continue;
     const content = openToday(department.ruleCard.content, department.zone, present);
     ruleCards.set(department.key, { workingDays: content.asking.workingDays });
-    await publish(db, id, department.ruleCard.version, content, since);
+    const from = since.toISOString().slice(0, 10);
+    await publish(db, id, department.ruleCard.version, content, since, [from, null]);
+    await tellEarlier(db, id, department.earlier ?? [], since);
+    if (department.draft !== undefined) {
+      const draft = openToday(department.draft, department.zone, present);
+      await layDraft(id, department.ruleCard.version + 1, draft, known(personIds, 'wes'), present);
+    }
   }
   return {
     organizationId: (key) => known(organizationIds, key),
@@ -116,22 +124,47 @@ async function publish(
   version: number,
   content: object,
   since: Date,
+  [from, to]: readonly [from: string, to: string | null],
 ): Promise<void> {
   await db.query(
     `INSERT INTO rule_cards (id, department_id, version, state, content, effective, created_at, published_at)
-     VALUES (:id, :departmentId, :version, 'published', :content, daterange(:from, NULL), :since, :since)`,
+     VALUES (:id, :departmentId, :version, 'published', :content, daterange(:from, :to), :since, :since)`,
     {
       replacements: {
         id: randomUUID(),
         departmentId,
         version,
         content: JSON.stringify(content),
-        from: since.toISOString().slice(0, 10),
+        from,
+        to,
         since,
       },
       type: QueryTypes.INSERT,
     },
   );
+}
+
+/** The versions that were replaced: each ended on the day the next began. */
+async function tellEarlier(
+  db: Sequelize,
+  departmentId: string,
+  earlier: NonNullable<DemoDepartment['earlier']>,
+  since: Date,
+): Promise<void> {
+  let to = Temporal.PlainDate.from(since.toISOString().slice(0, 10));
+  for (const { version, content, days } of earlier) {
+    const from = to.subtract({ days });
+    const at = new Date(`${from.toString()}T16:00:00Z`);
+    await publish(db, departmentId, version, content, at, [from.toString(), to.toString()]);
+    to = from;
+  }
+}
+
+async function layDraft(departmentId: string, version: number, content: object, editedBy: string, at: Date) {
+  await RuleCardModel.create({
+    ...{ id: randomUUID(), departmentId, version, state: 'draft', content, effective: null },
+    ...{ createdBy: editedBy, createdAt: at, editedBy, editedAt: at },
+  });
 }
 
 function known(ids: Map<string, string>, key: string): string {

@@ -1,5 +1,6 @@
 import type { RuleCardContent, Stage, TestRule } from '@holdwater/shared-types/departments/rule-card.content.js';
 import type { DemoOrganizationKey } from './demo-people.js';
+import { tallowmereVersions } from './demo-rule-card-versions.js';
 
 type Window = RuleCardContent['asking']['windows'][number];
 
@@ -30,7 +31,7 @@ const sections: RuleCardContent['corrections']['sections'] = [
     section: '7-204',
     says: {
       en: 'Joints are tight under the test of the rule card',
-      es: 'Las uniones no gotean bajo la prueba de la tarjeta de reglas',
+      es: 'Las uniones no gotean bajo la prueba de la hoja de reglas',
     },
   },
   {
@@ -170,7 +171,12 @@ const tallowmere: RuleCardContent = {
   corrections: { frequent, sections, acceptFromPhoto: ['note', 'fix-before-final'] },
   weather: { isFeeFree: true, latestHoursBefore: 2 },
   lateness: { minutesBeforeLate: 15 },
-  sources: { 'tests.2.pressures.1': { from: 'local', section: '7-301' } },
+  sources: {
+    'tests.0.headRule': { from: 'IPC', section: '312.2' },
+    'tests.1.headRule': { from: 'IPC', section: '312.2' },
+    'tests.1.airOnPlastic': { from: 'IPC', section: '312.3' },
+    'tests.2.airOnPlastic': { from: 'IRC', section: 'P2503.7' },
+  },
 };
 
 const vennick: RuleCardContent = {
@@ -197,7 +203,11 @@ const vennick: RuleCardContent = {
   },
   readiness: { ...tallowmere.readiness, upBy: { kind: 'hours-before', hours: 1 }, whenNotUp: 'stays' },
   fees: [{ event: 're-inspection', firstFree: 0, cents: 9000, payer: 'builder', isPaidBeforeNext: true }],
-  sources: { 'tests.1.headRule': { from: 'plumbing code, water test by sections', section: '312.2' } },
+  sources: {
+    'tests.0.headRule': { from: 'IPC', section: '312.2' },
+    'tests.1.headRule': { from: 'IPC', section: '312.2' },
+    'tests.1.standMinutes': { from: 'IPC', section: '312.2' },
+  },
 };
 
 const ashquill: RuleCardContent = {
@@ -227,6 +237,11 @@ const ashquill: RuleCardContent = {
   },
   readiness: { ...tallowmere.readiness, upBy: { kind: 'hours-before', hours: 0 }, whenNotUp: 'stays' },
   fees: [],
+  sources: {
+    'tests.1.headRule': { from: 'IRC 2018', section: 'P2503.5.1' },
+    'tests.1.standMinutes': { from: 'IPC', section: '312.2' },
+    'tests.2.standMinutes': { from: 'IRC', section: 'P2503.7' },
+  },
 };
 
 export interface DemoDepartment {
@@ -235,6 +250,10 @@ export interface DemoDepartment {
   elevationFt: number;
   isOutside: boolean;
   ruleCard: { version: number; content: RuleCardContent } | null;
+  /** Versions replaced by now, the newest first, each in force for `days`. */
+  earlier?: ReadonlyArray<{ version: number; content: RuleCardContent; days: number }>;
+  /** What the desk is about to change. */
+  draft?: RuleCardContent;
 }
 
 /** Three departments that differ in nearly everything, and one that is not on Holdwater. */
@@ -245,6 +264,7 @@ export const demoDepartments: readonly DemoDepartment[] = [
     elevationFt: 4400,
     isOutside: false,
     ruleCard: { version: 6, content: tallowmere },
+    ...tallowmereVersions(tallowmere),
   },
   {
     key: 'vennick',

@@ -1,8 +1,8 @@
-import { answerConsents, createLot, setGeometry } from '@holdwater/shared-types/lots/lot.contract.js';
+import { answerConsents, createLot } from '@holdwater/shared-types/lots/lot.contract.js';
 import { createTract, type PlatDrawing } from '@holdwater/shared-types/lots/tract.contract.js';
 import type { DemoClient } from './demo-client.js';
 import type { DemoFoundation } from './demo-foundation.js';
-import { demoHouses } from './demo-houses.js';
+import { giveHouses } from './demo-house-models.js';
 import type { DemoLot } from './demo-lots.js';
 import { demoOrganizations, demoPeople, type DemoOrganizationKey } from './demo-people.js';
 
@@ -33,6 +33,7 @@ export async function makeTract(
   for (const [index, lot] of tract.lots.entries()) {
     ids.set(lot.number, await makeLot(client, foundation, tract, lot, index, builderId, made?.id ?? null));
   }
+  await giveHouses(client, builderId, tract, ids);
   await joinAll(client, foundation, tract, ids);
   return ids;
 }
@@ -74,12 +75,6 @@ async function makeLot(
       departmentId: foundation.organizationId(tract.department),
     },
   });
-  for (const unit of units.keys()) {
-    await client.call(setGeometry, tract.superintendent, {
-      params: { lotId: added.id, unitNumber: unit + 1 },
-      body: { geometry: demoHouses[lot.house] },
-    });
-  }
   return added.id;
 }
 

@@ -16,6 +16,7 @@ import { anchors } from './0015-anchors.js';
 import { testPlans } from './0017-test-plans.js';
 import { plannedHolds } from './0018-planned-holds.js';
 import { houseModels } from './0020-house-models.js';
+import { ruleCardDrafts } from './0018-rule-card-drafts.js';
 import type { Migration } from './migration.js';
 
 /** Every step, in order. */
@@ -36,6 +37,7 @@ export const migrations: readonly Migration[] = [
   handovers,
   anchors,
   testPlans,
-  houseModels,
+  ruleCardDrafts,
   plannedHolds,
+  houseModels,
 ];

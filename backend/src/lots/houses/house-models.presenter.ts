@@ -9,11 +9,10 @@ import {
 } from '@holdwater/shared-types/lots/house-model.contract.js';
 import type { Actor } from '../../common/access/actor.js';
 import { refuse } from '../../common/errors/app-error.js';
-import { groupBy } from '../group-by.js';
 import { canApplyHouseModels, canReadHouseModels, canWriteHouseModels } from './house-models.policy.js';
-import { HouseModelsQueries, type HouseModelRecord } from './house-models.queries.js';
-import { modelledUnitOf, useOf } from './modelled-units.js';
-import { UnitHousesQueries, type UnitHouse } from './unit-houses.queries.js';
+import { HouseModelsQueries, type HouseModelRecord, type HouseModelUse } from './house-models.queries.js';
+import { modelledUnitOf } from './modelled-units.js';
+import { UnitHousesQueries } from './unit-houses.queries.js';
 
 /** Presents house models to their builder's people. */
 @Injectable()
@@ -27,9 +26,9 @@ export class HouseModelsPresenter {
   async list(actor: Actor, builderId: string): Promise<RouteAnswer<typeof listHouseModels>> {
     if (!canReadHouseModels(actor, builderId)) refuse('not-found');
     const models = await this.models.listOf(builderId);
-    const units = groupBy(await this.units.listOfModels(models.map(({ id }) => id)), ({ modelId }) => modelId);
+    const useOf = await this.models.countUse(models.map(({ id }) => id));
     return {
-      items: models.map((model) => briefOf(model, units.get(model.id) ?? [])),
+      items: models.map((model) => briefOf(model, useOf(model.id))),
       canWrite: canWriteHouseModels(actor, builderId),
     };
   }
@@ -37,12 +36,14 @@ export class HouseModelsPresenter {
   /** Throws `not-found`. */
   async present(actor: Actor, modelId: string): Promise<HouseModelDetail> {
     const model = await this.models.getFor(actor, modelId);
-    const units = await this.units.listOfModels([modelId]);
+    const units = await this.units.listOfModel(modelId);
     const versions = await this.models.listVersions(modelId);
+    const useOf = await this.models.countUse([modelId]);
     return {
-      ...briefOf(model, units),
+      ...briefOf(model, useOf(modelId)),
       versions: versions.map(({ madeAt, ...version }) => ({ ...version, madeAt: madeAt.toISOString() })),
-      units: units.map((unit) => modelledUnitOf(unit, model)),
+      units: units.slice(0, mostUnitsListed).map((unit) => modelledUnitOf(unit, model)),
+      areUnitsCut: units.length > mostUnitsListed,
       abilities: {
         canWrite: canWriteHouseModels(actor, model.builderId),
         canApply: canApplyHouseModels(actor, model.builderId),
@@ -61,7 +62,7 @@ export class HouseModelsPresenter {
   }
 }
 
-function briefOf(model: HouseModelRecord, units: readonly UnitHouse[]): HouseModelBrief {
+function briefOf(model: HouseModelRecord, use: HouseModelUse): HouseModelBrief {
   const { id, builderId, name, version, geometry, madeAt, madeByName } = model;
-  return { id, builderId, name, version, geometry, madeByName, madeAt: madeAt.toISOString(), use: useOf(units) };
+  return { id, builderId, name, version, geometry, madeByName, madeAt: madeAt.toISOString(), use };
 }

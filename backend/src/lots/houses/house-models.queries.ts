@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { InjectConnection } from '@nestjs/sequelize';
 import type { HouseGeometry } from '@holdwater/shared-types/hydraulics/house-geometry.js';
+import type { HouseModelBrief } from '@holdwater/shared-types/lots/house-model.contract.js';
 import { QueryTypes } from 'sequelize';
 import { Sequelize } from 'sequelize-typescript';
 import type { Actor } from '../../common/access/actor.js';
@@ -23,6 +24,10 @@ export interface HouseVersionRecord {
   readonly madeAt: Date;
   readonly madeByName: string;
 }
+
+/** How far a model is used, in units. */
+export type HouseModelUse = HouseModelBrief['use'];
+const unused: HouseModelUse = { units: 0, lots: 0, changed: 0, behind: 0 };
 
 const columns = `m.id, m.builder_id AS "builderId", m.name, m.version, v.geometry, v.made_at AS "madeAt", p.name AS "madeByName"`;
 const tables = `house_models m JOIN house_model_versions v ON v.model_id = m.id AND v.version = m.version
@@ -63,6 +68,24 @@ export class HouseModelsQueries {
        WHERE v.model_id = :modelId ORDER BY v.version DESC`,
       { modelId },
     );
+  }
+
+  /**
+   * Of each model, on its builder's lots. Counted where the rows are: a builder may have tens of thousands of them. A part that only one of
+   * two houses was saved with, since it was not known before, is no change while it says nothing.
+   */
+  async countUse(modelIds: readonly string[]): Promise<(modelId: string) => HouseModelUse> {
+    const counted = await this.select<HouseModelUse & { modelId: string }>(
+      `SELECT m.id AS "modelId", count(*)::int AS units, count(DISTINCT l.id)::int AS lots,
+         count(*) FILTER (WHERE jsonb_strip_nulls(u.geometry) <> jsonb_strip_nulls(v.geometry))::int AS changed,
+         count(*) FILTER (WHERE v.version < m.version)::int AS behind
+       FROM lot_units u JOIN house_models m ON m.id = u.house_model_id JOIN lots l ON l.id = u.lot_id AND l.builder_id = m.builder_id
+       JOIN house_model_versions v ON v.model_id = m.id AND v.version = u.house_model_version
+       WHERE m.id = ANY (ARRAY[:modelIds]::uuid[]) GROUP BY m.id`,
+      { modelIds: [...modelIds] },
+    );
+    const known = new Map(counted.map(({ modelId, ...use }) => [modelId, use]));
+    return (modelId) => known.get(modelId) ?? unused;
   }
 
   private async find(modelId: string): Promise<HouseModelRecord | null> {

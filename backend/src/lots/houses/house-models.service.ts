@@ -88,12 +88,7 @@ export class HouseModelsService {
     await this.versions.create({ modelId, number: version, geometry, madeBy: actor.personId, madeAt });
     await this.rows.update({ newestVersion: version }, { where: { id: modelId } });
     const entry = { modelId, name, version };
-    await this.ledger.appendTo(
-      `organization:${builderId}`,
-      'house-model-versioned',
-      entry,
-      whoActs(actor, builderId),
-    );
+    await this.ledger.appendTo(`organization:${builderId}`, 'house-model-versioned', entry, whoActs(actor, builderId));
   }
 
   private async lockToWrite(actor: Actor, modelId: string): Promise<HouseModelRecord> {

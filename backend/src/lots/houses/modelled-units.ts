@@ -1,6 +1,6 @@
 import type { HouseGeometry } from '@holdwater/shared-types/hydraulics/house-geometry.js';
 import { differingParts } from '@holdwater/shared-types/lots/house-differences.js';
-import type { HouseModelBrief, ModelledUnit } from '@holdwater/shared-types/lots/house-model.contract.js';
+import type { ModelledUnit } from '@holdwater/shared-types/lots/house-model.contract.js';
 import type { HouseOrigin } from '@holdwater/shared-types/lots/house-origin.js';
 import type { UnitHouse } from './unit-houses.queries.js';
 
@@ -27,16 +27,5 @@ export function modelledUnitOf(unit: UnitHouse, model: { id: string; geometry: H
     isMeasured: unit.geometry !== null,
     isSame: isAsNewest && origin?.id === model.id && origin.version === origin.newestVersion,
     canKeepChanges: isByHand && origin?.id === model.id,
-  };
-}
-
-/** How far a model is used, from the units taken from it. */
-export function useOf(units: readonly UnitHouse[]): HouseModelBrief['use'] {
-  const origins = units.map(originOf);
-  return {
-    units: units.length,
-    lots: new Set(units.map(({ lotId }) => lotId)).size,
-    changed: origins.filter((origin) => origin !== null && origin.changes.length > 0).length,
-    behind: origins.filter((origin) => origin !== null && origin.version < origin.newestVersion).length,
   };
 }

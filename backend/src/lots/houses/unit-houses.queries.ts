@@ -31,7 +31,7 @@ const select = `SELECT u.lot_id AS "lotId", l.number AS "lotNumber", l.address, 
   LEFT JOIN house_model_versions v ON v.model_id = m.id AND v.version = u.house_model_version`;
 
 /** By tract, then as people read numbers: 2, 10, 10B. */
-const order = `ORDER BY t.name NULLS LAST, substring(l.number FROM '^[^0-9]*'),
+const order = `t.name NULLS LAST, substring(l.number FROM '^[^0-9]*'),
   COALESCE(substring(l.number FROM '[0-9]+'), '0')::numeric, l.number, l.id, u.number`;
 
 @Injectable()
@@ -40,18 +40,23 @@ export class UnitHousesQueries {
 
   /** The units of these lots; no check of who reads. */
   async listOfLots(lotIds: readonly string[]): Promise<UnitHouse[]> {
-    return this.rows(`${select} WHERE u.lot_id = ANY (ARRAY[:lotIds]::uuid[]) ${order}`, { lotIds: [...lotIds] });
+    return this.rows(`${select} WHERE u.lot_id = ANY (ARRAY[:lotIds]::uuid[]) ORDER BY ${order}`, {
+      lotIds: [...lotIds],
+    });
   }
 
-  /** The units taken from any of these models. */
-  async listOfModels(modelIds: readonly string[]): Promise<UnitHouse[]> {
-    return this.rows(`${select} WHERE m.id = ANY (ARRAY[:modelIds]::uuid[]) ${order}`, { modelIds: [...modelIds] });
+  /** The units taken from a model, those at an earlier version first; one more than a list shows where there are more. */
+  async listOfModel(modelId: string): Promise<UnitHouse[]> {
+    return this.rows(`${select} WHERE m.id = :modelId ORDER BY v.version = m.version, ${order} LIMIT :limit`, {
+      modelId,
+      limit: mostUnitsListed + 1,
+    });
   }
 
   /** The units of a builder's lots in a tract, or in none; one more than a list shows where there are more. */
   async listOfTract(builderId: string, tractId: string | null): Promise<UnitHouse[]> {
     const inTract = tractId === null ? 'l.tract_id IS NULL' : 'l.tract_id = :tractId';
-    return this.rows(`${select} WHERE l.builder_id = :builderId AND ${inTract} ${order} LIMIT :limit`, {
+    return this.rows(`${select} WHERE l.builder_id = :builderId AND ${inTract} ORDER BY ${order} LIMIT :limit`, {
       builderId,
       tractId,
       limit: mostUnitsListed + 1,

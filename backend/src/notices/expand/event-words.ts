@@ -5,6 +5,7 @@ import type { Audience } from '../notice.rules.js';
 import type { OutboxPayloads, VisitEventFacts } from '../outbox.kinds.js';
 import type { OutboxEventModel } from '../outbox-event.model.js';
 import type { LotFacts, PersonRow, VisitFacts } from './event-facts.queries.js';
+import type { RuleCardNews } from './rule-card-news.js';
 
 export interface EventSubject {
   event: OutboxEventModel;
@@ -12,6 +13,8 @@ export interface EventSubject {
   lot: LotFacts | null;
   visit: VisitFacts | null;
   actorName: string | null;
+  /** Of a rule card that was published; null for every other event. */
+  ruleCard: RuleCardNews | null;
 }
 
 /** Named values for the words of a notice on the page. */
@@ -66,9 +69,18 @@ export function lotMailFacts(
     correctionNumber: typeof payload.number === 'number' ? payload.number : null,
     version: typeof payload.version === 'number' ? payload.version : null,
     handover: handoverFacts(subject),
+    ruleCard: ruleCardFacts(subject, person),
     hasLeft: people.former?.includes(person.id) ?? false,
     invite,
   };
+}
+
+function ruleCardFacts({ event, ruleCard }: EventSubject, person: PersonRow): LotMailFacts['ruleCard'] {
+  if (ruleCard === null) return null;
+  const { ruleCardId, effectiveFrom } = event.payload as OutboxPayloads['rule-card-published'];
+  const { sentences, more } = ruleCard.of(person);
+  const { departmentName } = ruleCard;
+  return { ruleCardId, departmentName, effectiveFrom, changes: [...sentences[person.locale]], more };
 }
 
 function handoverFacts({ event }: EventSubject): LotMailFacts['handover'] {

@@ -13,9 +13,10 @@ import { noticeRules, recipientsOf } from '../notice.rules.js';
 import type { OutboxPayloads } from '../outbox.kinds.js';
 import type { OutboxEventModel } from '../outbox-event.model.js';
 import { Audiences } from './audiences.service.js';
-import { EventFactsQueries } from './event-facts.queries.js';
+import { EventFactsQueries, type PersonRow } from './event-facts.queries.js';
 import { type EventSubject, lotMailFacts, noticeParams } from './event-words.js';
 import { cancellationOf, invitesOf } from './invites.js';
+import { RuleCardNewsQueries } from './rule-card-news.js';
 
 interface Addressee {
   personId: string | null;
@@ -32,6 +33,7 @@ export class ExpandEvent {
     @Inject(ENVIRONMENT) private readonly environment: Environment,
     private readonly facts: EventFactsQueries,
     private readonly audiences: Audiences,
+    private readonly ruleCards: RuleCardNewsQueries,
     private readonly changes: Changes,
     private readonly clock: Clock,
   ) {}
@@ -64,6 +66,10 @@ export class ExpandEvent {
       lot,
       visit,
       actorName: await this.facts.findPersonName(event.actorId),
+      ruleCard:
+        kind === 'rule-card-published'
+          ? await this.ruleCards.find(event.payload as OutboxPayloads['rule-card-published'])
+          : null,
     };
     const audience = await this.audiences.of(event, lot, visit);
     const recipients = recipientsOf(kind, audience.people, event.actorId, lot?.hasOpenVisit ?? false);
@@ -77,7 +83,7 @@ export class ExpandEvent {
       const person = audience.byId.get(personId);
       if (!person) continue;
       const hasLeft = audience.people.former?.includes(personId) ?? false;
-      const noticeId = channels.page ? await this.notice(subject, personId, hasLeft) : null;
+      const noticeId = channels.page ? await this.notice(subject, person, hasLeft) : null;
       if (!channels.email) continue;
       const mail = lotMailFacts(subject, person, audience.people, invites.of(personId));
       if (mail) await this.deliver(event, { personId, address: person.email, noticeId }, mail);
@@ -99,15 +105,20 @@ export class ExpandEvent {
       await this.deliver(subject.event, { personId: left.personId, address: left.address, noticeId: null }, mail);
   }
 
-  private async notice(subject: EventSubject, personId: string, hasLeft: boolean): Promise<string> {
-    const { event, kind } = subject;
+  private async notice(subject: EventSubject, person: PersonRow, hasLeft: boolean): Promise<string> {
+    const { event, kind, ruleCard } = subject;
+    const personId = person.id;
     const id = randomUUID();
     await this.notices.create({
       id,
       eventId: event.id,
       personId,
       kind,
-      params: { ...noticeParams(subject), ...(hasLeft && { hasLeft }) },
+      params: {
+        ...noticeParams(subject),
+        ...(hasLeft && { hasLeft }),
+        ...(ruleCard && { departmentName: ruleCard.departmentName, changes: ruleCard.of(person) }),
+      },
       lotId: event.lotId,
       visitId: event.visitId,
       at: event.at,

@@ -41,6 +41,10 @@ export function composeLotMail(facts: LotMailFacts, appUrl: string): MailDraft {
 }
 
 function actOf(facts: LotMailFacts, w: MailWords, appUrl: string): MailDraft['act'] {
+  if (facts.ruleCard) {
+    const words = fill(w.ruleCard.open, { version: String(facts.version ?? '') });
+    return { words, url: `${appUrl}/rule-cards/${facts.ruleCard.ruleCardId}` };
+  }
   if (!facts.lotId) return { words: w.openPage, url: appUrl };
   if (facts.hasLeft) return { words: w.openLeft, url: `${appUrl}/past-lots/${facts.lotId}` };
   const path = facts.kind === 'consent-asked' ? '/consents' : `/lots/${facts.lotId}`;
@@ -96,6 +100,8 @@ function valuesOf(facts: LotMailFacts, w: MailWords): Record<string, string> {
     builder: facts.builderName,
     former: facts.handover?.formerName ?? '',
     successor: facts.handover?.organizationName ?? '',
+    department: facts.ruleCard?.departmentName ?? facts.departmentName ?? '',
+    day: facts.ruleCard ? new When(facts.locale, 'UTC').day(`${facts.ruleCard.effectiveFrom}T12:00:00Z`) : '',
   };
 }
 
@@ -135,17 +141,31 @@ function askedOf(kind: LotMailFacts['kind']): 'request' | 'move' | 'change' {
 }
 
 function notesOf(facts: LotMailFacts, w: MailWords): string[] {
-  const notes = [];
+  const notes = ruleCardNotes(facts, w);
   if (facts.invite) notes.push(w.calendar[facts.invite.method === 'CANCEL' ? 'cancel' : askedOf(facts.kind)]);
   if (facts.visit?.upBy && comes.includes(facts.kind)) notes.push(w.local);
   return notes;
 }
 
+/** What a published rule card changes for the reader, a line each; what stays comes last. */
+function ruleCardNotes({ ruleCard }: LotMailFacts, w: MailWords): string[] {
+  if (!ruleCard) return [];
+  const { changes, more } = ruleCard;
+  const told = changes.length === 0 ? [w.ruleCard.none] : [w.ruleCard.changes, ...changes];
+  return [...told, ...(more > 0 ? [fill(w.ruleCard.more, { more: String(more) })] : []), w.ruleCard.kept];
+}
+
+function becauseOf({ ruleCard, hasLeft }: LotMailFacts, w: MailWords): string {
+  if (ruleCard) return w.ruleCard.because;
+  return hasLeft ? w.sentBecauseLeft : w.sentBecause;
+}
+
 function footOf(facts: LotMailFacts, w: MailWords): string[] {
-  const because = fill(facts.hasLeft ? w.sentBecauseLeft : w.sentBecause, {
+  const because = fill(becauseOf(facts, w), {
     name: facts.recipientName,
     organization: facts.organizationName,
     role: w.roles[facts.recipientRole],
+    department: facts.ruleCard?.departmentName ?? '',
   });
   if (!facts.departmentName) return [because];
   return [

@@ -37,6 +37,15 @@ export interface LotMailFacts {
   version: number | null;
   /** A handover: who went, who came. Absent from mails written before there was any. */
   handover?: { formerName: string; organizationName: string } | null;
+  /** A rule card that was published, with what it changes for the reader. Absent from mails written before that was told. */
+  ruleCard?: {
+    ruleCardId: string;
+    departmentName: string;
+    effectiveFrom: string;
+    changes: string[];
+    /** How many more changes there are than are told. */
+    more: number;
+  } | null;
   /** The reader's organization is no longer on the lot. */
   hasLeft?: boolean;
   invite: InviteFacts | null;

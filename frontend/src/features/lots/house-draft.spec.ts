@@ -1,11 +1,41 @@
 import { houseGeometry } from '@holdwater/shared-types/hydraulics/house-geometry.js';
+import { houseToSave } from '@holdwater/shared-types/lots/house.rules.js';
 import { describe, expect, it } from 'vitest';
-import { draftOf, drawnDraft, geometryOf } from './house-draft';
+import { draftOf, drawnDraft, geometryOf, newPlug } from './house-draft';
 import { house } from './testing/lot-fixtures';
 
 describe('a house as typed', () => {
   it('is saved as it was read when nothing is typed', () => {
-    expect(houseGeometry.parse(geometryOf(draftOf(house, 'first')))).toEqual(house);
+    for (const units of ['us', 'metric'] as const) {
+      expect(houseGeometry.parse(geometryOf(draftOf(house, 'first', units)))).toEqual(house);
+    }
+  });
+
+  it('is drawn and saved in feet when it is typed in metres', () => {
+    const draft = { ...draftOf(house, 'first', 'metric'), ventTerminalFt: '7.62', laundryTrapFt: '3.6576' };
+    // 1 ft is exactly 0.3048 m (NIST SP 811)
+    expect(geometryOf(draft)).toMatchObject({ ventTerminalFt: 25, laundryTrapFt: 12 });
+    expect(drawnDraft(draft).ventTerminalFt).toBe(25);
+  });
+
+  it('takes the material of a water line onto the list, and no trap without a laundry', () => {
+    const draft = {
+      ...draftOf(house, 'first'),
+      waterPipes: [{ material: 'copper', nominalIn: '0.5', lengthFt: '12' }],
+      laundry: { floor: '', boxOutletFt: '3', branchFt: '1' },
+      laundryTrapFt: '2',
+    };
+    const saved = houseToSave.parse(geometryOf(draft));
+    expect(saved).toMatchObject({ waterPipeMaterials: ['copper'], laundry: null, laundryTrapFt: null });
+    expect(saved.waterPipes).toEqual([{ material: 'copper', nominalIn: 0.5, lengthFt: 12 }]);
+  });
+
+  it('is refused with a plug whose size nobody chose', () => {
+    const plugs = [{ ...newPlug, name: 'drain', elevationFt: '-3', ratedPsi: '17' }];
+    const refused = houseToSave.safeParse(geometryOf({ ...draftOf(house, 'first'), plugs }));
+    expect(refused.error?.issues.map(({ path, message }) => [path.join('.'), message])).toEqual([
+      ['plugs.0.nominalIn', 'size-missing'],
+    ]);
   });
 
   it('begins with a first floor at height zero and nothing else known', () => {

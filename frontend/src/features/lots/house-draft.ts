@@ -1,7 +1,9 @@
 import type { HouseGeometry, HouseGeometryGiven } from '@holdwater/shared-types/hydraulics/house-geometry.js';
 import { materials, type Material } from '@holdwater/shared-types/hydraulics/materials.js';
-import { nominalSizesIn, pipeKinds } from '@holdwater/shared-types/hydraulics/pipes.js';
+import { nominalSizesIn, pipeKinds, waterSizesIn } from '@holdwater/shared-types/hydraulics/pipes.js';
 import type { CutawayHouse } from '../../drawings/cutaway';
+import type { Units } from '../../lib/units';
+import { houseMeasures, readNumber, type HouseMeasures, type MeasureKind } from './house-measures';
 
 export const numberFields = [
   'lowestFittingFt',
@@ -10,6 +12,7 @@ export const numberFields = [
   'atticCutFt',
   'standpipeFt',
   'cappedVents',
+  'laundryTrapFt',
   'gaugeFt',
   'highestOutletFt',
   'waterLowestFittingFt',
@@ -20,82 +23,99 @@ export const numberFields = [
 ] as const;
 export type NumberField = (typeof numberFields)[number];
 
+/** Null for a count. */
+export const kindOf = (field: NumberField): MeasureKind | null =>
+  field === 'cappedVents' ? null : field.endsWith('Psi') ? 'pressure' : 'length';
+
 export type FloorDraft = Record<'name' | 'elevationFt', string>;
 export type PlugDraft = Record<'name' | 'elevationFt' | 'ratedPsi' | 'nominalIn', string>;
 export type PipeDraft = Record<'nominalIn' | 'material' | 'bottomFt' | 'topFt' | 'lengthFt', string>;
 
-/** A house as typed: every measure in words until it is saved. */
+export type WaterPipeDraft = Record<'material' | 'nominalIn' | 'lengthFt', string>;
+
+/** A house as typed: every measure in words, in the units of whoever types, until it is saved. */
 export interface HouseDraft extends Record<string, unknown>, Readonly<Record<NumberField, string>> {
   floors: readonly FloorDraft[];
   plugs: readonly PlugDraft[];
   pipes: readonly PipeDraft[];
+  waterPipes: readonly WaterPipeDraft[];
   laundry: Record<'floor' | 'boxOutletFt' | 'branchFt', string>;
   pipeMaterial: string;
   waterPipeMaterials: readonly Material[];
+  measures: HouseMeasures;
 }
 
 export const newFloor: FloorDraft = { name: '', elevationFt: '' };
-export const newPlug: PlugDraft = { name: '', elevationFt: '', ratedPsi: '', nominalIn: '4' };
+export const newPlug: PlugDraft = { name: '', elevationFt: '', ratedPsi: '', nominalIn: '' };
 export const newPipe: PipeDraft = { nominalIn: '3', material: pipeKinds[0], bottomFt: '', topFt: '', lengthFt: '' };
+export const newWaterPipe: WaterPipeDraft = { material: 'pex', nominalIn: '0.75', lengthFt: '' };
 
 const text = (value: number | null | undefined): string => (value === null || value === undefined ? '' : String(value));
 
 /** A house already known, or the beginning of one: a first floor, which every height is measured from. */
-export function draftOf(house: HouseGeometry | null, firstFloor: string): HouseDraft {
-  const numbers = Object.fromEntries(numberFields.map((name) => [name, text(house?.[name])])) as Record<
-    NumberField,
-    string
-  >;
+export function draftOf(house: HouseGeometry | null, firstFloor: string, units: Units = 'us'): HouseDraft {
+  const measures = houseMeasures(units);
+  const feet = (value: number | null | undefined): string => measures.show(value, 'length');
+  const shown = (name: NumberField): string => {
+    const kind = kindOf(name);
+    return kind === null ? text(house?.[name] ?? 0) : measures.show(house?.[name], kind);
+  };
+  const numbers = Object.fromEntries(numberFields.map((name) => [name, shown(name)])) as Record<NumberField, string>;
   return {
     ...numbers,
-    cappedVents: text(house?.cappedVents ?? 0),
-    floors: house?.floors.map(({ name, elevationFt }) => ({ name, elevationFt: text(elevationFt) })) ?? [
+    measures,
+    floors: house?.floors.map(({ name, elevationFt }) => ({ name, elevationFt: feet(elevationFt) })) ?? [
       { name: firstFloor, elevationFt: '0' },
     ],
     plugs:
       house?.plugs.map((plug) => ({
         name: plug.name,
-        elevationFt: text(plug.elevationFt),
-        ratedPsi: text(plug.ratedPsi),
+        elevationFt: feet(plug.elevationFt),
+        ratedPsi: measures.show(plug.ratedPsi, 'pressure'),
         nominalIn: text(plug.nominalIn),
       })) ?? [],
     pipes:
       house?.pipes.map((pipe) => ({
         nominalIn: text(pipe.nominalIn),
         material: pipe.material,
-        bottomFt: text(pipe.bottomFt),
-        topFt: text(pipe.topFt),
-        lengthFt: text(pipe.lengthFt),
+        bottomFt: feet(pipe.bottomFt),
+        topFt: feet(pipe.topFt),
+        lengthFt: feet(pipe.lengthFt),
+      })) ?? [],
+    waterPipes:
+      house?.waterPipes?.map((pipe) => ({
+        material: pipe.material,
+        nominalIn: text(pipe.nominalIn),
+        lengthFt: feet(pipe.lengthFt),
       })) ?? [],
     laundry: {
       floor: house?.laundry?.floor ?? '',
-      boxOutletFt: text(house?.laundry?.boxOutletFt),
-      branchFt: text(house?.laundry?.branchFt),
+      boxOutletFt: feet(house?.laundry?.boxOutletFt),
+      branchFt: feet(house?.laundry?.branchFt),
     },
     pipeMaterial: house?.pipeMaterial ?? '',
     waterPipeMaterials: house?.waterPipeMaterials ?? [],
   };
 }
 
-/** Absent when nothing is typed; NaN for what is no number, which the contract then names. A comma is taken as the point. */
-function typed(words: string): number | null {
-  const plain = words.trim().replace(',', '.');
-  return plain === '' ? null : Number(plain);
-}
-
-const needed = (words: string): number => typed(words) ?? Number.NaN;
-
-/** The house to save, by the contract's fields; it still has to be checked. */
+/** The house to save, by the contract's fields, in feet and psi; it still has to be checked. */
 export function geometryOf(draft: HouseDraft): HouseGeometryGiven {
-  const numbers = Object.fromEntries(numberFields.map((name) => [name, typed(draft[name])]));
-  const { laundry } = draft;
+  const { laundry, measures } = draft;
+  const feet = (words: string): number | null => measures.read(words, 'length');
+  // what a row needs and lacks is NaN, which the contract then names
+  const needed = (words: string, kind: MeasureKind = 'length'): number => measures.read(words, kind) ?? Number.NaN;
+  const read = (name: NumberField): number | null => {
+    const kind = kindOf(name);
+    return kind === null ? readNumber(draft[name]) : measures.read(draft[name], kind);
+  };
   return {
-    ...numbers,
+    ...Object.fromEntries(numberFields.map((name) => [name, read(name)])),
+    laundryTrapFt: laundry.floor === '' ? null : read('laundryTrapFt'),
     floors: draft.floors.map(({ name, elevationFt }) => ({ name: name.trim(), elevationFt: needed(elevationFt) })),
     plugs: draft.plugs.map((plug) => ({
       name: plug.name.trim(),
       elevationFt: needed(plug.elevationFt),
-      ratedPsi: needed(plug.ratedPsi),
+      ratedPsi: needed(plug.ratedPsi, 'pressure'),
       nominalIn: nominalSizesIn.find((size) => String(size) === plug.nominalIn) ?? null,
     })),
     pipes: draft.pipes.map((pipe) => ({
@@ -108,20 +128,39 @@ export function geometryOf(draft: HouseDraft): HouseGeometryGiven {
     laundry:
       laundry.floor === ''
         ? null
-        : { floor: laundry.floor, boxOutletFt: typed(laundry.boxOutletFt), branchFt: typed(laundry.branchFt) },
+        : { floor: laundry.floor, boxOutletFt: feet(laundry.boxOutletFt), branchFt: feet(laundry.branchFt) },
     pipeMaterial: materials.find((one) => one === draft.pipeMaterial) ?? null,
-    waterPipeMaterials: [...draft.waterPipeMaterials],
+    ...waterLines(draft, needed),
+  };
+}
+
+/** A line of a material puts the material on the list. */
+function waterLines(
+  { waterPipes, waterPipeMaterials }: HouseDraft,
+  needed: (words: string) => number,
+): Pick<HouseGeometryGiven, 'waterPipes' | 'waterPipeMaterials'> {
+  const lines = waterPipes.map((pipe) => ({
+    material: materials.find((one) => one === pipe.material) ?? 'pex',
+    nominalIn: waterSizesIn.find((size) => String(size) === pipe.nominalIn) ?? 0.75,
+    lengthFt: needed(pipe.lengthFt),
+  }));
+  return {
+    waterPipes: lines,
+    waterPipeMaterials: [...new Set([...waterPipeMaterials, ...lines.map(({ material }) => material)])],
   };
 }
 
 const farthestDrawnFt = 300;
-const drawable = (words: string): number | null => {
-  const value = typed(words);
-  return value !== null && Number.isFinite(value) && Math.abs(value) <= farthestDrawnFt ? value : null;
-};
+const drawableBy =
+  ({ measures }: HouseDraft) =>
+  (words: string): number | null => {
+    const value = measures.read(words, 'length');
+    return value !== null && Number.isFinite(value) && Math.abs(value) <= farthestDrawnFt ? value : null;
+  };
 
 /** The house drawn while it is typed: what is not a measure yet is left out of the drawing. */
 export function drawnDraft(draft: HouseDraft): CutawayHouse {
+  const drawable = drawableBy(draft);
   const floors = draft.floors.flatMap(({ name, elevationFt }) => {
     const elevation = drawable(elevationFt);
     return elevation === null || name.trim().toLowerCase() === 'attic'
@@ -148,7 +187,7 @@ export function drawnDraft(draft: HouseDraft): CutawayHouse {
             {
               name: plug.name,
               elevationFt,
-              ratedPsi: drawable(plug.ratedPsi) ?? 1,
+              ratedPsi: 1,
               nominalIn: nominalSizesIn.find((size) => String(size) === plug.nominalIn) ?? null,
             },
           ];

@@ -1,10 +1,18 @@
+import type { Locale } from '@holdwater/shared-types/common/locale.js';
 import type { Notice } from '@holdwater/shared-types/notices/notice.contract.js';
+import type { TFunction } from 'i18next';
 import { useCallback } from 'react';
 import { useTranslation } from 'react-i18next';
+import { z } from 'zod';
 import { isMarkName, type MarkName } from '../../components/mark-names';
 import { localName, useLocale } from '../../lib/i18n';
 import { useTimeWords } from '../../lib/time';
 import { reasonWords } from '../threads/ledger-words';
+
+const ruleCardNews = z.object({
+  sentences: z.object({ en: z.array(z.string()), es: z.array(z.string()) }),
+  more: z.number(),
+});
 
 export interface NoticeWords {
   /** What happened: "Correction 2 is fixed". */
@@ -68,6 +76,8 @@ export function useNoticeWords(): (notice: Notice) => NoticeWords {
         number: text('number'),
         excerpt: text('excerpt'),
         version: text('version'),
+        department: text('departmentName') || t('notices.ruleCard.aDepartment'),
+        changes: kind === 'rule-card-published' ? ruleCardChanges(params['changes'], locale, t) : '',
         day: text('effectiveFrom') === '' ? '' : time.date(text('effectiveFrom')),
         outcome: kind === 'outcome' && isMarkName(outcome) ? t(`marks.${outcome}`) : '',
         former: text('formerName'),
@@ -85,6 +95,16 @@ export function useNoticeWords(): (notice: Notice) => NoticeWords {
     },
     [t, locale, time],
   );
+}
+
+/** What a rule card changes for the reader, in a sentence each; notices from before that was told say nothing of it. */
+function ruleCardChanges(value: unknown, locale: Locale, t: TFunction): string {
+  const told = ruleCardNews.safeParse(value);
+  if (!told.success) return '';
+  const { sentences, more } = told.data;
+  if (sentences[locale].length === 0) return t('notices.ruleCard.nothing');
+  const all = more === 0 ? sentences[locale] : [...sentences[locale], t('notices.ruleCard.more', { count: more })];
+  return `${all.join('. ')}.`;
 }
 
 function spanOf(value: unknown): { startAt: string; endAt: string } {

@@ -12,12 +12,21 @@ export interface OneChange {
 /** By the name of the field. */
 const choices: Readonly<Record<string, readonly string[]>> = {
   ...{ acceptedMethods: dwvMethods, medium: media, systems, acceptFromPhoto: severities, event: feeEvents },
-  ...{ kind: ['above-highest-fitting', 'fill-level'], measuredAt: ['gauge', 'highest-outlet'], covers: ['slab', 'wall'] },
-  ...{ booking: ['self', 'desk'], whoMayRequest: ['superintendent', 'plumber'], whenNotUp: ['goes-to-standby', 'stays'] },
+  ...{
+    kind: ['above-highest-fitting', 'fill-level'],
+    measuredAt: ['gauge', 'highest-outlet'],
+    covers: ['slab', 'wall'],
+  },
+  ...{
+    booking: ['self', 'desk'],
+    whoMayRequest: ['superintendent', 'plumber'],
+    whenNotUp: ['goes-to-standby', 'stays'],
+  },
   ...{ levelSeenFrom: ['sight-tube', 'overflow'], payer: ['builder', 'plumber'] },
 };
 /** What only names another part, or the kind of a union: changed as a whole, not alone. */
-const isName = (path: string): boolean => /^(stages\.\d+\.code|tests\.\d+\.(stageCode|system)|readiness\.upBy\.kind)$/.test(path);
+const isName = (path: string): boolean =>
+  /^(stages\.\d+\.code|tests\.\d+\.(stageCode|system)|readiness\.upBy\.kind)$/.test(path);
 
 /** Every field of a rule card's content changed alone: numbers by one, yes to no, words by a letter, lists by one item fewer. */
 export function everyChange(content: RuleCardContent): OneChange[] {
@@ -36,7 +45,8 @@ function changesOf(value: unknown, path: string): Changed[] {
     const inside = items.flatMap((item, at) =>
       changesOf(item, `${path}.${at}`).map((one) => ({ path: one.path, value: items.with(at, one.value) })),
     );
-    const fewer = items.length > 0 && !/^(stages|tests)$/.test(path) ? [{ path: `${path}[]`, value: items.slice(1) }] : [];
+    const fewer =
+      items.length > 0 && !/^(stages|tests)$/.test(path) ? [{ path: `${path}[]`, value: items.slice(1) }] : [];
     return [...inside, ...fewer];
   }
   if (typeof value === 'object' && value !== null) {

@@ -12,6 +12,7 @@ export interface MailWords {
   systems: Record<string, string>;
   roles: Record<LotMailFacts['recipientRole'], string>;
   labels: { when: string; where: string; inspector: string; tests: string; reason: string; was: string };
+  ruleCard: { changes: string; none: string; more: string; kept: string; open: string; because: string };
   notSetYet: string;
   openLot: string;
   openPage: string;

@@ -1,103 +1,86 @@
 import type { RuleCard } from '@holdwater/shared-types/departments/departments.contract.js';
-import { asking } from '@holdwater/shared-types/departments/rule-card.content.js';
 import { useRef, type FormEvent, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Act } from '../../../components/act';
-import { Choice } from '../../../components/choice';
 import { sayDone } from '../../../components/done-line';
-import { Field } from '../../../components/field';
+import { Head } from '../../../components/head';
 import { Failed } from '../../../lib/query-state';
-import { useContractForm } from '../../../lib/use-contract-form';
 import { useEditRuleCard } from '../api/edit-rule-card';
-import { contentOf, draftOf, type WindowDraft } from '../draft-values';
-import { withoutPrefix } from '../without-prefix';
-import { WindowFields } from './window-fields';
+import { AskingSection } from '../draft/asking-section';
+import { CorrectionsSection } from '../draft/corrections-section';
+import { DraftFaultsContext } from '../draft/draft-context';
+import { FeesSection } from '../draft/fees-section';
+import { ReadinessSection } from '../draft/readiness-section';
+import { StageSection } from '../draft/stage-section';
+import { withNewStage } from '../draft/stages-of-draft';
+import { useRuleCardDraft } from '../draft/use-rule-card-draft';
 
-const newWindow: WindowDraft = { label: '', start: '08:00', end: '10:00', days: [], room: '4' };
-const numbers = ['workingDaysAhead', 'horizonWorkingDays', 'lotsPerRequest'] as const;
-
-/** Desk: windows and requests of a draft. What is not asked here stays as in the version before. */
+/** Desk: every field of a draft, folded by note and stage; saved half done as well, and marked where it could not be published. */
 export function DraftForm({ ruleCard }: { ruleCard: RuleCard }): ReactNode {
   const { t } = useTranslation(['departments', 'common']);
-  const form = useContractForm(asking, draftOf(ruleCard.content));
+  const draft = useRuleCardDraft(ruleCard);
   const editing = useEditRuleCard(ruleCard.id);
   const place = useRef<HTMLFormElement>(null);
-  const { values, set, faultOf } = form;
+  const { content, edit } = draft;
   const focusFault = (): void =>
-    void requestAnimationFrame(() => place.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus());
+    void requestAnimationFrame(() =>
+      place.current?.querySelector<HTMLElement>('[aria-invalid="true"], [data-fault]')?.focus(),
+    );
   const submit = (event: FormEvent): void => {
     event.preventDefault();
-    const content = contentOf(ruleCard.content, values);
-    if (!form.check(content.asking)) return focusFault();
+    if (!draft.check()) return focusFault();
     editing.mutate(content, {
       onError: (error) => {
-        form.takeError(withoutPrefix(error, 'content.asking.'));
+        draft.takeError(error);
         focusFault();
       },
-      onSuccess: () => sayDone({ mark: 'sent', title: t('draft.saved', { version: ruleCard.version }) }),
+      onSuccess: () => {
+        draft.lookAtWhole();
+        sayDone({ mark: 'sent', title: t('draft.saved', { version: ruleCard.version }) });
+      },
     });
   };
-  const change = (index: number, window: WindowDraft): void => set('windows', values.windows.with(index, window));
   return (
-    <form ref={place} onSubmit={submit} noValidate className="fields">
-      {values.windows.map((window, index) => (
-        <WindowFields
-          key={index}
-          window={window}
-          index={index}
-          faultOf={(name) => faultOf(`windows.${index}.${name}`)}
-          onChange={(changed) => change(index, changed)}
-          onRemove={
-            values.windows.length > 1
-              ? () =>
-                  set(
-                    'windows',
-                    values.windows.filter((_, at) => at !== index),
-                  )
-              : undefined
-          }
-        />
-      ))}
-      <div>
-        <Act size="sm" icon="plus" onClick={() => set('windows', [...values.windows, newWindow])}>
-          {t('draft.addWindow')}
-        </Act>
-      </div>
-      <div className="fields two">
-        <Field
-          label={t('rows.cutoff')}
-          type="time"
-          isNumeral
-          value={values.cutoff}
-          error={faultOf('cutoff')}
-          onChange={(event) => set('cutoff', event.target.value)}
-        />
-        {numbers.map((name) => (
-          <Field
-            key={name}
-            label={t(`draft.${name}`)}
-            isNumeral
-            inputMode="numeric"
-            value={values[name]}
-            error={faultOf(name)}
-            onChange={(event) => set(name, event.target.value)}
-          />
-        ))}
-      </div>
-      <Choice
-        label={t('rows.booking')}
-        isLabelShown
-        stacked
-        options={(['self', 'desk'] as const).map((value) => ({ value, label: t(`says.booking.${value}`) }))}
-        value={values.booking}
-        onChange={(booking) => set('booking', booking)}
+    <DraftFaultsContext value={draft.faults}>
+      <Head
+        label={t('draft.title', { version: ruleCard.version })}
+        title={t('sheet.title', { department: ruleCard.departmentName, version: ruleCard.version })}
       />
-      {editing.error !== null ? <Failed error={editing.error} level={3} /> : null}
-      <div>
-        <Act type="submit" busy={editing.isPending}>
-          {t('draft.save', { version: ruleCard.version })}
-        </Act>
-      </div>
-    </form>
+      <form ref={place} onSubmit={submit} noValidate className="draft-form">
+        <p className="s mid panel-body">{t('form.caution')}</p>
+        <AskingSection value={content.asking} onChange={(path, asking) => edit(path, { ...content, asking })} />
+        <ReadinessSection
+          value={content.readiness}
+          lateness={content.lateness}
+          onChange={(readiness) => edit('readiness', { ...content, readiness })}
+          onLateness={(lateness) => edit('lateness', { ...content, lateness })}
+        />
+        {content.stages.map((_stage, index) => (
+          <StageSection key={index} content={content} index={index} onChange={edit} />
+        ))}
+        <div className="panel-body">
+          <Act size="sm" icon="plus" onClick={() => edit('stages', withNewStage(content))}>
+            {t('form.addStage')}
+          </Act>
+        </div>
+        <FeesSection
+          fees={content.fees}
+          weather={content.weather}
+          onFees={(fees) => edit('fees', { ...content, fees })}
+          onWeather={(weather) => edit('weather', { ...content, weather })}
+        />
+        <CorrectionsSection
+          value={content.corrections}
+          onChange={(path, corrections) => edit(path, { ...content, corrections })}
+        />
+        <div className="panel-body draft-foot">
+          {editing.error !== null ? <Failed error={editing.error} level={3} /> : null}
+          {draft.faultCount > 0 ? <p className="t-red">{t('form.notYet', { count: draft.faultCount })}</p> : null}
+          <Act type="submit" kind="first" busy={editing.isPending}>
+            {t('draft.save', { version: ruleCard.version })}
+          </Act>
+        </div>
+      </form>
+    </DraftFaultsContext>
   );
 }

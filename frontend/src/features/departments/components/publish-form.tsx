@@ -1,7 +1,9 @@
 import { localDate } from '@holdwater/shared-types/common/fields.js';
+import { ruleCardFaults } from '@holdwater/shared-types/departments/rule-card-faults.js';
 import type { RuleCard } from '@holdwater/shared-types/departments/departments.contract.js';
 import { useState, type FormEvent, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
 import { Act } from '../../../components/act';
 import { sayDone } from '../../../components/done-line';
 import { Field } from '../../../components/field';
@@ -11,6 +13,7 @@ import { useNow } from '../../../lib/clock';
 import { useErrorWords, useFieldWords } from '../../../lib/errors';
 import { addDays, localDateOf } from '../../../lib/local-days';
 import { useTimeWords } from '../../../lib/time';
+import { PublishTold } from './publish-told';
 import { usePublishRuleCard } from '../api/publish-rule-card';
 
 /** Desk: puts a draft in force from a day on, after one question. */
@@ -24,11 +27,12 @@ export function PublishForm({ ruleCard }: { ruleCard: RuleCard }): ReactNode {
   const [isAsking, setIsAsking] = useState(false);
   const publishing = usePublishRuleCard(ruleCard.id);
   const refusal = useErrorWords(publishing.error);
+  const faults = Object.keys(ruleCardFaults(ruleCard.content));
   const isDate = localDate.safeParse(from).success;
   const named = isApiError(publishing.error) ? publishing.error.fields['effectiveFrom'] : undefined;
   const ask = (event: FormEvent): void => {
     event.preventDefault();
-    if (isDate) setIsAsking(true);
+    if (isDate && faults.length === 0) setIsAsking(true);
   };
   const publish = (): void =>
     publishing.mutate(from, {
@@ -51,9 +55,16 @@ export function PublishForm({ ruleCard }: { ruleCard: RuleCard }): ReactNode {
           setFrom(event.target.value);
         }}
       />
-      <Act kind="first" size="lg" type="submit" wide>
+      <Act
+        kind="first"
+        size="lg"
+        type="submit"
+        wide
+        cannotYet={faults.length > 0 ? t('publish.faults', { count: faults.length }) : undefined}
+      >
         {t('publish.act', { version })}
       </Act>
+      {faults.length > 0 ? <Link to={`/rule-cards/${ruleCard.id}?mode=change`}>{t('publish.showFaults')}</Link> : null}
       <p className="s mid">{t('publish.never', { next: version + 1 })}</p>
       <Question
         isOpen={isAsking}
@@ -65,7 +76,7 @@ export function PublishForm({ ruleCard }: { ruleCard: RuleCard }): ReactNode {
         busy={publishing.isPending}
         error={refusal ? `${refusal.title}. ${refusal.safe} ${refusal.next}` : undefined}
       >
-        {t('publish.told')}
+        <PublishTold ruleCardId={ruleCard.id} />
       </Question>
     </form>
   );

@@ -1,107 +1,98 @@
 import type { RuleCard } from '@holdwater/shared-types/departments/departments.contract.js';
+import { stageCodesInOrder } from '@holdwater/shared-types/departments/rule-card-rows.js';
 import { useQuery } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Choice } from '../../../components/choice';
-import { Head, PhoneHead } from '../../../components/head';
-import { Numeral } from '../../../components/numeral';
-import { QueryState } from '../../../lib/query-state';
 import { useSheetWidth } from '../../../components/use-sheet-width';
-import { useTimeWords } from '../../../lib/time';
-import { departmentQuery } from '../api/department';
+import { QueryState } from '../../../lib/query-state';
 import { ruleCardQuery } from '../api/rule-card';
-import { ruleCardNotes, stagesInOrder } from '../rule-card-notes';
 import { useRuleCardWords } from '../rule-card-words';
-import { countChanges, NotesSheet } from './notes-sheet';
-import { VersionState } from './version-list';
+import { changedOnly, countRows, sheetNotes } from '../sheet-notes';
+import { useAgainst } from '../use-against';
+import { AgainstChoice } from './against-choice';
+import { NotesSheet } from './notes-sheet';
+import { RuleCardHead } from './rule-card-head';
+
+export interface RuleCardViewProps {
+  ruleCardId: string;
+  isPublic: boolean;
+  /** Beside another version, as the department's own and signed-in readers may look at it. */
+  isCompared?: boolean;
+}
 
 /** One version of a rule card, one stage at a time; a draft stands beside the version in force. */
-export function RuleCardView({ ruleCardId, isPublic }: { ruleCardId: string; isPublic: boolean }): ReactNode {
+export function RuleCardView({ ruleCardId, isPublic, isCompared = !isPublic }: RuleCardViewProps): ReactNode {
   const card = useQuery(ruleCardQuery(ruleCardId, isPublic));
-  return <QueryState query={card}>{(ruleCard) => <Sheet key={ruleCard.id} ruleCard={ruleCard} />}</QueryState>;
+  return (
+    <QueryState query={card}>
+      {(ruleCard) => <Sheet key={ruleCard.id} ruleCard={ruleCard} isCompared={isCompared} />}
+    </QueryState>
+  );
 }
 
-/** The version a draft will replace; null for all others. */
-function useInForce({ state, departmentId }: RuleCard): RuleCard | null {
-  const isDraft = state === 'draft';
-  const department = useQuery({ ...departmentQuery(departmentId), enabled: isDraft });
-  const inForceId = isDraft ? (department.data?.department.ruleCard?.id ?? null) : null;
-  const inForce = useQuery({ ...ruleCardQuery(inForceId ?? ''), enabled: inForceId !== null });
-  return inForceId === null ? null : (inForce.data ?? null);
-}
-
-function Sheet({ ruleCard }: { ruleCard: RuleCard }): ReactNode {
+function Sheet({ ruleCard, isCompared }: { ruleCard: RuleCard; isCompared: boolean }): ReactNode {
   const { t } = useTranslation(['departments', 'common']);
-  const words = useTimeWords();
-  const noteWords = useRuleCardWords();
+  const words = useRuleCardWords();
+  const { content, version } = ruleCard;
+  const codes = stageCodesInOrder(content);
+  const [chosen, setChosen] = useState(() => usualStage(ruleCard));
+  const stageCode = codes.includes(chosen) ? chosen : (codes[0] ?? '');
+  const [shown, setShown] = useState<'all' | 'changed'>('all');
   const isPhone = useSheetWidth() === 'phone';
-  const stages = stagesInOrder(ruleCard.content);
-  const usual = stages.find(({ systems }) => systems.length > 1) ?? stages[0];
-  const [chosen, setChosen] = useState(usual?.code ?? '');
-  const inForce = useInForce(ruleCard);
-  const stageName = stages.find(({ code }) => code === chosen)?.name ?? usual?.name;
-  const notes = ruleCardNotes(ruleCard.content, chosen, noteWords);
-  const before = inForce === null ? undefined : ruleCardNotes(inForce.content, chosen, noteWords);
-  const title = t('sheet.title', { department: ruleCard.departmentName, version: ruleCard.version });
-  const label = t('sheet.label', { stage: stageName === undefined ? '' : noteWords.name(stageName) });
-  const choice = (
+  const against = useAgainst(ruleCard, !isCompared);
+  const other = isCompared && !isPhone ? against.card : null;
+  const notes = sheetNotes(content, other?.content ?? null, stageCode, words);
+  const nameOf = (code: string): string => {
+    const stage = content.stages.find((each) => each.code === code);
+    return stage === undefined ? code : words.name(stage.name);
+  };
+  const stages = (
     <Choice
       label={t('sheet.stage')}
-      options={stages.map((stage) => ({ value: stage.code, label: noteWords.name(stage.name) }))}
-      value={chosen}
+      options={codes.map((code) => ({ value: code, label: nameOf(code) }))}
+      value={stageCode}
       onChange={setChosen}
       wide={isPhone}
     />
   );
   return (
     <article>
-      {isPhone ? (
-        <PhoneHead label={label} title={title} right={<VersionState card={ruleCard} />} />
-      ) : (
-        <Head
-          label={label}
-          title={title}
-          cells={[
-            { label: t('sheet.state'), value: <VersionState card={ruleCard} /> },
-            {
-              label: t('sheet.from'),
-              value:
-                ruleCard.effectiveFrom === null ? (
-                  t('versions.noDate')
-                ) : (
-                  <Numeral text={words.dateYear(ruleCard.effectiveFrom)} />
-                ),
-            },
-            { label: t('sheet.zone'), value: words.zone(ruleCard.zone) },
-            ...(before && inForce
-              ? [
-                  {
-                    label: t('sheet.changed', { version: inForce.version }),
-                    value: t('sheet.changes', { count: countChanges(notes, before) }),
-                  },
-                ]
-              : []),
-          ]}
-          acts={choice}
-        />
-      )}
-      {isPhone ? (
-        <div className="panel-body">
-          {choice}
-          <p className="s mid phone-facts">
-            {ruleCard.effectiveFrom === null
-              ? t('versions.noDate')
-              : t('versions.since', { date: words.dateYear(ruleCard.effectiveFrom) })}
-            . {words.zone(ruleCard.zone)}
-          </p>
+      <RuleCardHead
+        ruleCard={ruleCard}
+        stageName={nameOf(stageCode)}
+        changes={other === null ? null : { version: other.version, ...countRows(notes) }}
+        acts={stages}
+      />
+      {isCompared && !isPhone && against.others.length > 0 ? (
+        <div className="compare-bar">
+          <AgainstChoice against={against} />
+          {other === null ? null : (
+            <Choice
+              label={t('against.shown')}
+              options={(['all', 'changed'] as const).map((value) => ({ value, label: t(`against.${value}`) }))}
+              value={shown}
+              onChange={setShown}
+            />
+          )}
         </div>
       ) : null}
       <NotesSheet
-        notes={notes}
-        version={ruleCard.version}
-        against={before && inForce && !isPhone ? { notes: before, version: inForce.version } : undefined}
+        notes={other !== null && shown === 'changed' ? changedOnly(notes) : notes}
+        version={version}
+        againstVersion={other?.version ?? null}
       />
+      {other !== null && shown === 'changed' && countRows(notes).changed === 0 ? (
+        <p className="panel-body">{t('against.nothing', { version: other.version })}</p>
+      ) : null}
       <p className="s mid panel-body">{t('common.localCode')}</p>
     </article>
   );
+}
+
+/** The stage most readers come for: the first that tests both systems. */
+function usualStage({ content }: RuleCard): string {
+  const codes = stageCodesInOrder(content);
+  const both = content.stages.filter(({ systems }) => systems.length > 1).map(({ code }) => code);
+  return codes.find((code) => both.includes(code)) ?? codes[0] ?? '';
 }

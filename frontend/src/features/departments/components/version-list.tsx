@@ -16,9 +16,10 @@ export function VersionList({
   const { t } = useTranslation(['departments', 'common']);
   const words = useTimeWords();
   const sorted = [...ruleCards].sort((a, b) => b.version - a.version);
-  const dates = ({ effectiveFrom, effectiveTo }: RuleCardBrief): string => {
+  const dates = ({ effectiveFrom, effectiveTo, isInForce }: RuleCardBrief): string => {
     if (effectiveFrom === null) return t('versions.noDate');
-    if (effectiveTo === null) return t('versions.since', { date: words.dateYear(effectiveFrom) });
+    if (effectiveTo === null)
+      return t(isInForce ? 'versions.since' : 'versions.from', { date: words.dateYear(effectiveFrom) });
     return t('versions.fromTo', { from: words.dateYear(effectiveFrom), to: words.dateYear(effectiveTo) });
   };
   return (

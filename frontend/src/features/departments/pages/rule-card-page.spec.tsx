@@ -12,6 +12,18 @@ const desk = personOf({ memberships: [{ organization: tallowmere, roles: ['desk'
 const draft = briefOf(7, 'draft');
 const changed = { ...content, asking: { ...content.asking, cutoff: '14:00' } };
 
+const touches = {
+  keptVisits: { booked: 26, requested: 1, versions: [6] },
+  lotsWithoutVisit: 18,
+  told: [{ organizationId: tallowmere.id, name: 'Odderly Homes', people: 3 }],
+  unfitPlans: [
+    {
+      ...{ lotId: draft.id, lotNumber: '17', tractName: 'Sorrel Bench', stageCode: 'rough-in' },
+      ...{ system: 'water', reason: 'pressure' },
+    },
+  ],
+};
+
 function answers(abilities: { canEditRuleCards: boolean; canClose: boolean }, hasDraft = true) {
   const inForce = briefOf(6, 'published');
   return {
@@ -21,10 +33,11 @@ function answers(abilities: { canEditRuleCards: boolean; canClose: boolean }, ha
     }),
     [`GET /api/rule-cards/${inForce.id}`]: () => ({ data: cardOf(6, 'published') }),
     [`GET /api/rule-cards/${draft.id}`]: () => ({ data: cardOf(7, 'draft', changed) }),
+    [`GET /api/rule-cards/${draft.id}/touches`]: () => ({ data: touches }),
   };
 }
 
-function open(at: string, me = desk, widthPx = 1440) {
+function open(at: string, me: typeof desk | null = desk, widthPx = 1440) {
   return renderPage(
     <Routes>
       <Route path="/rule-cards" element={<RuleCardPage />} />
@@ -38,22 +51,32 @@ const may = { canEditRuleCards: true, canClose: true };
 const mayNot = { canEditRuleCards: false, canClose: false };
 
 describe('a rule card', () => {
-  it('is read by anyone, through the public routes alone', async () => {
+  it('is read by anyone in one column, through the public routes alone', async () => {
+    const inForce = briefOf(6, 'published');
     const sent = stubApi({
       'GET /api/public/rule-cards': () => ({ data: { items: [department] } }),
-      [`GET /api/public/rule-cards/${briefOf(6, 'published').id}`]: () => ({ data: cardOf(6, 'published') }),
+      [`GET /api/public/rule-cards/${inForce.id}`]: () => ({ data: cardOf(6, 'published') }),
     });
-    renderPage(
-      <Routes>
-        <Route path="/rule-cards" element={<RuleCardPage />} />
-      </Routes>,
-      { me: null, at: '/rule-cards', widthPx: 390 },
-    );
-    expect(await screen.findByRole('heading', { level: 1 })).toHaveTextContent(
+    open('/rule-cards', null, 390);
+    expect(await screen.findByRole('heading', { level: 1 })).toHaveTextContent('Rule cards');
+    await userEvent.click(screen.getByRole('link', { name: /Tallowmere/ }));
+    expect(await screen.findByRole('heading', { level: 1, name: /rule card 6/ })).toHaveTextContent(
       'Tallowmere Building Department, rule card 6',
     );
     expect(sent.every(({ path }) => path.startsWith('/api/public/'))).toBe(true);
-    expect(screen.queryByRole('button', { name: /Publish|New draft|Close it/ })).not.toBeInTheDocument();
+    // interface §5: "Public: one version, no side columns"
+    expect(screen.queryByRole('navigation', { name: 'Departments and versions' })).not.toBeInTheDocument();
+    expect(screen.queryByRole('complementary')).not.toBeInTheDocument();
+    expect(screen.queryByRole('button')).not.toBeInTheDocument();
+  });
+
+  it('stands at the address of its department, too', async () => {
+    stubApi({
+      'GET /api/public/rule-cards': () => ({ data: { items: [department] } }),
+      [`GET /api/public/rule-cards/${briefOf(6, 'published').id}`]: () => ({ data: cardOf(6, 'published') }),
+    });
+    open(`/rule-cards/${tallowmere.id}`, null, 390);
+    expect(await screen.findByRole('heading', { level: 1, name: /rule card 6/ })).toBeInTheDocument();
   });
 
   it('says its notes in words', async () => {
@@ -85,27 +108,67 @@ describe('a rule card', () => {
     expect(screen.getByText('(changed)').parentElement).toHaveTextContent('2:00 pm, 1 working day before');
   });
 
-  it('saves the windows as typed, and names a fault at its field', async () => {
-    const sent = stubApi({
-      ...answers(may),
-      [`PUT /api/rule-cards/${draft.id}`]: () => ({ data: cardOf(7, 'draft') }),
+  it('shows only what changed, or everything, against the version chosen', async () => {
+    const fifth = { ...briefOf(5, 'published'), isInForce: false, effectiveTo: '2026-01-01' };
+    const older = { ...content, readiness: { ...content.readiness, isExtensionAllowed: false } };
+    const base = answers(may);
+    stubApi({
+      ...base,
+      [`GET /api/departments/${tallowmere.id}`]: () => ({
+        data: { department, ruleCards: [draft, briefOf(6, 'published'), fifth], closures: [], abilities: may },
+      }),
+      [`GET /api/rule-cards/${fifth.id}`]: () => ({ data: cardOf(5, 'published', older) }),
     });
     open(`/rule-cards/${draft.id}`);
-    const second = await screen.findByRole('group', { name: 'Window 2' });
-    const end = within(second).getByLabelText('To');
-    await userEvent.clear(end);
-    await userEvent.type(end, '10:00');
-    await userEvent.click(screen.getByRole('button', { name: 'Save rule card 7' }));
-    expect(within(second).getByText('It ends before it starts.')).toBeInTheDocument();
-    await waitFor(() => expect(end).toHaveFocus());
-    expect(sent.some(({ method }) => method === 'PUT')).toBe(false);
-    await userEvent.click(within(second).getByRole('button', { name: 'Take out midday' }));
-    await userEvent.click(screen.getByRole('button', { name: 'Save rule card 7' }));
-    await waitFor(() => expect(sent.find(({ method }) => method === 'PUT')).toBeDefined());
-    // Re-inspections were in the window that went: every window is open to them again.
-    expect(sent.find(({ method }) => method === 'PUT')?.body).toMatchObject({
-      content: { asking: { windows: [{ label: 'early', room: 4 }], cutoff: '14:00', reinspectionWindows: null } },
-    });
+    const changedOnly = await screen.findByRole('radio', { name: 'Changed' });
+    const rows = document.querySelectorAll('.notes-sheet dt').length;
+    expect(rows).toBeGreaterThan(20);
+    expect(screen.getByText(`1 of ${rows}`)).toBeInTheDocument();
+    await userEvent.click(changedOnly);
+    expect(document.querySelectorAll('.notes-sheet dt')).toHaveLength(1);
+    expect(screen.queryByRole('region', { name: /Test up/ })).not.toBeInTheDocument();
+    await userEvent.selectOptions(screen.getByLabelText('Beside it'), 'Rule card 5');
+    const testUp = await screen.findByRole('region', { name: /Test up/ });
+    expect(testUp).toHaveTextContent('ExtensionNoneOne may be asked');
+    expect(testUp.querySelector('ins')).toHaveTextContent('One may be asked');
+    await userEvent.selectOptions(screen.getByLabelText('Beside it'), 'no other version');
+    expect(screen.queryByText('(changed)')).not.toBeInTheDocument();
+  });
+
+  it('says what a draft touches once it is in force', async () => {
+    stubApi(answers(may));
+    open(`/rule-cards/${draft.id}`);
+    const panel = await screen.findByRole('region', { name: 'When rule card 7 is in force' });
+    expect(await within(panel).findByText('27 open visits stay on rule card 6.')).toBeInTheDocument();
+    expect(panel).toHaveTextContent('18 lots without a visit will be planned on rule card 7.');
+    expect(within(panel).getByText(/1 test plan does not fit/)).toBeInTheDocument();
+    expect(within(panel).getByRole('link', { name: 'Lot 17, Sorrel Bench' })).toHaveAttribute(
+      'href',
+      `/lots/${draft.id}`,
+    );
+    expect(panel).toHaveTextContent('Rough-in, Water: another pressure');
+  });
+
+  it('is read as a plumber or the public reads it: without the draft and the desk’s acts', async () => {
+    stubApi(answers(may));
+    open(`/rule-cards/${draft.id}`);
+    await userEvent.click(await screen.findByRole('radio', { name: 'Public' }));
+    expect(await screen.findByRole('status')).toHaveTextContent('Rule card 7 is a draft');
+    expect(await screen.findByRole('heading', { level: 1, name: /rule card 6/ })).toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /Publish/ })).not.toBeInTheDocument();
+    expect(screen.queryByRole('navigation', { name: 'Departments and versions' })).not.toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Back to the desk' }));
+    expect(await screen.findByRole('button', { name: /Publish rule card 7/ })).toBeInTheDocument();
+  });
+
+  it('is thrown away after one question', async () => {
+    const sent = stubApi({ ...answers(may), [`DELETE /api/rule-cards/${draft.id}`]: () => ({ data: { done: true } }) });
+    open(`/rule-cards/${draft.id}`);
+    await userEvent.click(await screen.findByRole('button', { name: 'Throw rule card 7 away' }));
+    const dialog = screen.getByRole('dialog', { name: 'Throw the draft of rule card 7 away?' });
+    expect(sent.some(({ method }) => method === 'DELETE')).toBe(false);
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Throw rule card 7 away' }));
+    await waitFor(() => expect(sent.some(({ method }) => method === 'DELETE')).toBe(true));
   });
 
   it('is published only after a question, and a refusal stands in it', async () => {
@@ -117,7 +180,11 @@ describe('a rule card', () => {
     open(`/rule-cards/${draft.id}`);
     await userEvent.click(await screen.findByRole('button', { name: 'Publish rule card 7' }));
     const dialog = screen.getByRole('dialog', { name: /Publish rule card 7 from/ });
-    expect(dialog).toHaveTextContent('Builders and plumbers with an open visit are told');
+    expect(dialog).toHaveTextContent('Told of what changes for them:');
+    expect(await within(dialog).findByText('Odderly Homes, 3 people')).toBeInTheDocument();
+    expect(dialog).toHaveTextContent(
+      '27 open visits stay on the rule card they have. 1 test plan is to be chosen again.',
+    );
     expect(sent.some(({ method }) => method === 'POST')).toBe(false);
     await userEvent.click(within(dialog).getByRole('button', { name: 'Publish rule card 7' }));
     expect(await within(dialog).findByRole('alert')).toHaveTextContent('Another rule card begins on that day');

@@ -59,7 +59,7 @@ export const briefOf = (version: number, state: RuleCardBrief['state']): RuleCar
 
 export const cardOf = (version: number, state: RuleCardBrief['state'], said = content): RuleCard => ({
   ...briefOf(version, state),
-  ...{ departmentName: tallowmere.name, zone: 'America/Denver', content: said, publishedAt: null },
+  ...{ departmentName: tallowmere.name, zone: 'America/Denver', content: said, publishedAt: null, edited: null },
 });
 
 export const department = {

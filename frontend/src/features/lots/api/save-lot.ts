@@ -35,7 +35,7 @@ export function useSetGeometry(lotId: string, unitNumber: number) {
   return useIdempotentMutation({
     mutationFn: (geometry: HouseGeometryGiven, options) =>
       call(setGeometry, { params: { lotId, unitNumber }, body: { geometry } }, options),
-    invalidates: () => [queryKeys.lot(lotId)],
+    invalidates: () => [queryKeys.lot(lotId), queryKeys.houseModels],
   });
 }
 

@@ -3,31 +3,25 @@ import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Field } from '../../../components/field';
 import type { ContractForm } from '../../../lib/use-contract-form';
-import type { HouseDraft, NumberField } from '../house-draft';
+import { kindOf, type HouseDraft, type NumberField } from '../house-draft';
 
 export interface HouseFieldsProps {
   form: ContractForm<HouseDraft>;
 }
 
-const heights: readonly NumberField[] = [
-  'lowestFittingFt',
-  'highestFittingFt',
-  'ventTerminalFt',
-  'atticCutFt',
-  'standpipeFt',
-];
-const waterHeights: readonly NumberField[] = ['gaugeFt', 'highestOutletFt', 'waterLowestFittingFt'];
-const pressures: readonly NumberField[] = ['lowestRatedPsi', 'lowestRatedAirPsi', 'supplyPsi'];
+const heights: readonly NumberField[] = ['lowestFittingFt', 'highestFittingFt', 'ventTerminalFt', 'atticCutFt'];
+const waterSide: readonly NumberField[] = ['gaugeFt', 'highestOutletFt', 'waterLowestFittingFt', 'lowestRatedPsi'];
 
-function Measured({ form, name, unit }: HouseFieldsProps & { name: NumberField; unit?: string }): ReactNode {
+function Measured({ form, name }: HouseFieldsProps & { name: NumberField }): ReactNode {
   const { t } = useTranslation('lots');
+  const kind = kindOf(name);
   return (
     <Field
       label={t(`house.fields.${name}`)}
       isNumeral
       isOptional
       inputMode="text"
-      unit={unit}
+      unit={kind === null ? undefined : form.values.measures.unitOf(kind)}
       value={form.values[name]}
       error={form.faultOf(name)}
       onChange={(event) => form.set(name, event.target.value)}
@@ -35,15 +29,24 @@ function Measured({ form, name, unit }: HouseFieldsProps & { name: NumberField; 
   );
 }
 
-/** Heights of the drain, waste and vent side, and what it is made of. */
+/** Heights of the drain, waste and vent side. */
 export function HeightFields({ form }: HouseFieldsProps): ReactNode {
-  const { t } = useTranslation(['lots', 'common']);
   return (
     <div className="fields two">
       {heights.map((name) => (
-        <Measured key={name} form={form} name={name} unit="ft" />
+        <Measured key={name} form={form} name={name} />
       ))}
       <Measured form={form} name="cappedVents" />
+    </div>
+  );
+}
+
+/** What few houses need: a standpipe for groundwork, what the drains are of, the site, ratings beside the lowest for water. */
+export function FinerFields({ form }: HouseFieldsProps): ReactNode {
+  const { t } = useTranslation('lots');
+  return (
+    <div className="fields two">
+      <Measured form={form} name="standpipeFt" />
       <Field label={t('house.fields.pipeMaterial')} isOptional error={form.faultOf('pipeMaterial')}>
         {(control) => (
           <select
@@ -60,7 +63,9 @@ export function HeightFields({ form }: HouseFieldsProps): ReactNode {
           </select>
         )}
       </Field>
-      <Measured form={form} name="elevationFt" unit="ft" />
+      {(['elevationFt', 'supplyPsi', 'lowestRatedAirPsi'] as const).map((name) => (
+        <Measured key={name} form={form} name={name} />
+      ))}
     </div>
   );
 }
@@ -68,7 +73,7 @@ export function HeightFields({ form }: HouseFieldsProps): ReactNode {
 /** The laundry: its floor, and the heights a test through it needs. */
 export function LaundryFields({ form }: HouseFieldsProps): ReactNode {
   const { t } = useTranslation('lots');
-  const { laundry, floors } = form.values;
+  const { laundry, floors, measures } = form.values;
   const names = floors.map(({ name }) => name.trim()).filter((name) => name !== '');
   const known = laundry.floor === '' || names.includes(laundry.floor) ? names : [...names, laundry.floor];
   return (
@@ -81,8 +86,8 @@ export function LaundryFields({ form }: HouseFieldsProps): ReactNode {
             onChange={(event) => form.set('laundry', { ...laundry, floor: event.target.value })}
           >
             <option value="">{t('house.noLaundry')}</option>
-            {known.map((name) => (
-              <option key={name} value={name}>
+            {known.map((name, index) => (
+              <option key={`${index} ${name}`} value={name}>
                 {name}
               </option>
             ))}
@@ -98,28 +103,26 @@ export function LaundryFields({ form }: HouseFieldsProps): ReactNode {
               isNumeral
               isOptional
               inputMode="text"
-              unit="ft"
+              unit={measures.unitOf('length')}
               value={laundry[name]}
               error={form.faultOf(`laundry.${name}`)}
               onChange={(event) => form.set('laundry', { ...laundry, [name]: event.target.value })}
             />
           ))}
+      {laundry.floor === '' ? null : <Measured form={form} name="laundryTrapFt" />}
     </div>
   );
 }
 
-/** The water side: heights of the gauge and of the ends of the lines, materials and ratings. */
+/** The water side: heights of the gauge and of the ends of the lines, the lowest-rated part and the materials. */
 export function WaterFields({ form }: HouseFieldsProps): ReactNode {
   const { t } = useTranslation('lots');
   const { waterPipeMaterials: chosen } = form.values;
   return (
     <div className="fields">
       <div className="fields two">
-        {waterHeights.map((name) => (
-          <Measured key={name} form={form} name={name} unit="ft" />
-        ))}
-        {pressures.map((name) => (
-          <Measured key={name} form={form} name={name} unit="psi" />
+        {waterSide.map((name) => (
+          <Measured key={name} form={form} name={name} />
         ))}
       </div>
       <fieldset>
@@ -130,12 +133,13 @@ export function WaterFields({ form }: HouseFieldsProps): ReactNode {
               <input
                 type="checkbox"
                 checked={chosen.includes(material)}
-                onChange={(event) =>
+                onChange={(event) => {
+                  const next = event.target.checked ? [...chosen, material] : chosen.filter((one) => one !== material);
                   form.set(
                     'waterPipeMaterials',
-                    event.target.checked ? [...chosen, material] : chosen.filter((one) => one !== material),
-                  )
-                }
+                    materials.filter((one) => next.includes(one)),
+                  );
+                }}
               />
               {t(`materials.${material}`)}
             </label>

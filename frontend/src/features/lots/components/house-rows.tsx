@@ -1,13 +1,17 @@
 import { hydraulicLimits } from '@holdwater/shared-types/hydraulics/hydraulic-limits.js';
-import { nominalSizesIn, pipeKinds } from '@holdwater/shared-types/hydraulics/pipes.js';
+import { materials } from '@holdwater/shared-types/hydraulics/materials.js';
+import { nominalSizesIn, pipeKinds, waterSizesIn } from '@holdwater/shared-types/hydraulics/pipes.js';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Act } from '../../../components/act';
 import { Field } from '../../../components/field';
-import { newFloor, newPipe, newPlug } from '../house-draft';
+import { newFloor, newPipe, newPlug, newWaterPipe } from '../house-draft';
+import { sizeWords } from '../size-words';
 import type { HouseFieldsProps } from './house-fields';
 
-type ListName = 'floors' | 'plugs' | 'pipes';
+type ListName = 'floors' | 'plugs' | 'pipes' | 'waterPipes';
+
+const mostRows = { ...hydraulicLimits, waterPipes: hydraulicLimits.pipes };
 
 interface RowsProps<Row extends Readonly<Record<string, string>>> extends HouseFieldsProps {
   name: ListName;
@@ -70,7 +74,7 @@ function Rows<Row extends Readonly<Record<string, string>>>(props: RowsProps<Row
           </Act>
         </fieldset>
       ))}
-      {rows.length < hydraulicLimits[name] ? (
+      {rows.length < mostRows[name] ? (
         <div>
           <Act size="sm" icon="plus" onClick={() => onChange([...rows, empty])}>
             {t(`house.add.${name}`)}
@@ -88,15 +92,17 @@ export function FloorRows({ form }: HouseFieldsProps): ReactNode {
       name="floors"
       rows={form.values.floors}
       empty={newFloor}
-      fields={[{ name: 'name' }, { name: 'elevationFt', unit: 'ft' }]}
+      fields={[{ name: 'name' }, { name: 'elevationFt', unit: form.values.measures.unitOf('length') }]}
       onChange={(floors) => form.set('floors', floors)}
     />
   );
 }
 
-const sizes = nominalSizesIn.map((size) => ({ value: String(size), word: `${size} in` }));
-
 export function PlugRows({ form }: HouseFieldsProps): ReactNode {
+  const { t } = useTranslation('lots');
+  const words = sizeWords(form.values.measures.units);
+  const { unitOf } = form.values.measures;
+  const sizes = nominalSizesIn.map((size) => ({ value: String(size), word: words(size) }));
   return (
     <Rows
       form={form}
@@ -105,9 +111,9 @@ export function PlugRows({ form }: HouseFieldsProps): ReactNode {
       empty={newPlug}
       fields={[
         { name: 'name' },
-        { name: 'elevationFt', unit: 'ft' },
-        { name: 'ratedPsi', unit: 'psi' },
-        { name: 'nominalIn', options: sizes },
+        { name: 'elevationFt', unit: unitOf('length') },
+        { name: 'ratedPsi', unit: unitOf('pressure') },
+        { name: 'nominalIn', options: [{ value: '', word: t('house.chooseSize') }, ...sizes] },
       ]}
       onChange={(plugs) => form.set('plugs', plugs)}
     />
@@ -116,6 +122,8 @@ export function PlugRows({ form }: HouseFieldsProps): ReactNode {
 
 export function PipeRows({ form }: HouseFieldsProps): ReactNode {
   const { t } = useTranslation('lots');
+  const words = sizeWords(form.values.measures.units);
+  const unit = form.values.measures.unitOf('length');
   return (
     <Rows
       form={form}
@@ -123,13 +131,32 @@ export function PipeRows({ form }: HouseFieldsProps): ReactNode {
       rows={form.values.pipes}
       empty={newPipe}
       fields={[
-        { name: 'nominalIn', options: sizes },
+        { name: 'nominalIn', options: nominalSizesIn.map((size) => ({ value: String(size), word: words(size) })) },
         { name: 'material', options: pipeKinds.map((kind) => ({ value: kind, word: t(`materials.${kind}`) })) },
-        { name: 'bottomFt', unit: 'ft' },
-        { name: 'topFt', unit: 'ft' },
-        { name: 'lengthFt', unit: 'ft' },
+        { name: 'bottomFt', unit },
+        { name: 'topFt', unit },
+        { name: 'lengthFt', unit },
       ]}
       onChange={(pipes) => form.set('pipes', pipes)}
+    />
+  );
+}
+
+export function WaterPipeRows({ form }: HouseFieldsProps): ReactNode {
+  const { t } = useTranslation('lots');
+  const words = sizeWords(form.values.measures.units);
+  return (
+    <Rows
+      form={form}
+      name="waterPipes"
+      rows={form.values.waterPipes}
+      empty={newWaterPipe}
+      fields={[
+        { name: 'material', options: materials.map((one) => ({ value: one, word: t(`materials.${one}`) })) },
+        { name: 'nominalIn', options: waterSizesIn.map((size) => ({ value: String(size), word: words(size) })) },
+        { name: 'lengthFt', unit: form.values.measures.unitOf('length') },
+      ]}
+      onChange={(waterPipes) => form.set('waterPipes', waterPipes)}
     />
   );
 }

@@ -6,6 +6,8 @@ import { Act } from '../../../components/act';
 export interface LotActs {
   readonly canAdd: boolean;
   readonly canRequest: boolean;
+  /** A builder's own people read its house models. */
+  readonly hasHouseModels: boolean;
 }
 
 /**
@@ -13,23 +15,29 @@ export interface LotActs {
  * is in the chosen organization; the server has the last word on each lot.
  */
 export function useLotActs(): LotActs {
-  const roles = useOrganization()?.roles ?? [];
+  const chosen = useOrganization();
+  const roles = chosen?.roles ?? [];
   return {
     canAdd: roles.includes('superintendent'),
     canRequest: roles.includes('superintendent') || roles.includes('plumber') || roles.includes('desk'),
+    hasHouseModels: chosen?.organization.kind === 'builder',
   };
 }
 
 export function AddActs({ acts, tractId }: { acts: LotActs; tractId: string | null }): ReactNode {
   const { t } = useTranslation('lots');
-  if (!acts.canAdd) return null;
   const query = tractId === null ? '' : `?tract=${tractId}`;
   return (
     <>
-      <Act icon="plus" to={`/lots/new${query}`}>
-        {t('acts.add')}
-      </Act>
-      <Act to={`/lots/import${query}`}>{t('acts.import')}</Act>
+      {acts.canAdd ? (
+        <>
+          <Act icon="plus" to={`/lots/new${query}`}>
+            {t('acts.add')}
+          </Act>
+          <Act to={`/lots/import${query}`}>{t('acts.import')}</Act>
+        </>
+      ) : null}
+      {acts.hasHouseModels ? <Act to="/lots/houses">{t('acts.houses')}</Act> : null}
     </>
   );
 }

@@ -13,6 +13,7 @@ import { Cutaway } from '../../../drawings/cutaway';
 import { findDwvPlan, drawnHouseOf } from '../dwv-ways';
 import { PlanSlot } from '../../plans/components/plan-slot';
 import type { LotView } from '../lot-view';
+import { HouseOriginLine } from './house-origin-line';
 import { SectionCautions } from './section-cautions';
 import { SectionFacts } from './section-facts';
 import { StandingLine } from './standing-line';
@@ -38,7 +39,8 @@ function asDwvMethod(method: Method | undefined): DwvMethod | null {
 /** The section through the house as it stands under test, what the test rests on, and what may hurt. */
 export function SectionPart({ lot, view, tests, corrections, rule, isGroundwork, zone }: SectionPartProps): ReactNode {
   const { t } = useTranslation(['lots', 'common']);
-  const house = lot.units.find(({ number }) => number === view.unitNumber)?.geometry ?? null;
+  const unit = lot.units.find(({ number }) => number === view.unitNumber);
+  const house = unit?.geometry ?? null;
   const hold = tests[0] ?? null;
   const shown = hold?.state === 'standing' ? hold : null;
   const isWater = view.system === 'water';
@@ -91,6 +93,7 @@ export function SectionPart({ lot, view, tests, corrections, rule, isGroundwork,
             view={view.system}
             corrections={pinned}
           />
+          <HouseOriginLine origin={unit?.model} isLinked={lot.abilities.canEdit} />
         </div>
       )}
       <SectionFacts house={house} hold={shown} rule={rule} plan={plan} system={view.system} />

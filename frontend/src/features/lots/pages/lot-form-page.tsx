@@ -93,6 +93,7 @@ function EditLot({ lot }: { lot: LotDetail }): ReactNode {
   const { t } = useTranslation(['lots', 'common']);
   const [search, setSearch] = useSearchParams();
   const { canEdit, canSetPermit, canAttach, canEditGeometry } = lot.abilities;
+  const builderId = lot.parties.find(({ kind }) => kind === 'builder')?.organization.id ?? null;
   const hasLotPart = canEdit || canSetPermit || canAttach;
   const part = canEditGeometry && (search.get('part') === 'house' || !hasLotPart) ? 'house' : 'lot';
   const unit = lot.units.find(({ number }) => String(number) === search.get('unit')) ?? lot.units[0];
@@ -138,7 +139,7 @@ function EditLot({ lot }: { lot: LotDetail }): ReactNode {
     <>
       {head}
       {part === 'house' && unit !== undefined ? (
-        <HouseForm key={unit.number} lotId={lot.id} unit={unit} />
+        <HouseForm key={unit.number} lotId={lot.id} unit={unit} builderId={canEdit ? builderId : null} />
       ) : (
         <EditLotForm key={lot.id} lot={lot} />
       )}

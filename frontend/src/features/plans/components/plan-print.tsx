@@ -39,6 +39,7 @@ export function PlanPrint({ lot, shown, plan, rule, standingSince, zone }: PlanP
       <div className="print-columns">
         <div>
           <PlanDrawing shown={shown} maxHeight={330} />
+          <PlanDial shown={shown} size={150} />
           <h2 className="h3">{t('stepsTitle')}</h2>
           <PlanSteps shown={shown} settleMinutes={rule?.settleMinutes ?? 0} />
           <h2 className="h3">{t('takeDownTitle')}</h2>
@@ -46,12 +47,7 @@ export function PlanPrint({ lot, shown, plan, rule, standingSince, zone }: PlanP
         </div>
         <div>
           {way.dwv === null ? null : <DwvFacts {...{ rule, isGroundwork, datumFt, words }} plan={way.dwv} />}
-          {way.water === null ? null : (
-            <>
-              <PlanDial shown={shown} size={150} />
-              <WaterFacts {...{ rule, tools, words }} plan={way.water} />
-            </>
-          )}
+          {way.water === null ? null : <WaterFacts {...{ rule, tools, words }} plan={way.water} />}
           <GaugeTag lot={lot} plan={plan} standingSince={standingSince} zone={zone} />
         </div>
       </div>

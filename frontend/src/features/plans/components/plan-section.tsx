@@ -1,7 +1,6 @@
 import { dwvMethods } from '@holdwater/shared-types/holds/hold.states.js';
 import type { TestRule } from '@holdwater/shared-types/departments/rule-card.content.js';
 import type { ReactNode } from 'react';
-import { useTranslation } from 'react-i18next';
 import { useMe } from '../../../app/session';
 import { useSheetWidth } from '../../../components/use-sheet-width';
 import { Cutaway } from '../../../drawings/cutaway';
@@ -66,12 +65,11 @@ export function PlanDrawing({ shown, maxHeight }: { shown: ShownPlan; maxHeight:
 
 /** Target and ceiling on the gauge in hand. */
 export function PlanDial({ shown, size }: { shown: ShownPlan; size: number }): ReactNode {
-  const { t } = useTranslation('marks');
   const { way, tools } = shown;
   if (way.water === null) return null;
   const { targetPsi, floorPsi, ceilingPsi } = way.water;
   return (
-    <div className="plan-dial" title={t('dial.pump', { value: targetPsi })}>
+    <div className="plan-dial">
       <Dial
         max={tools.gauge.rangePsi}
         unit="psi"
