@@ -84,6 +84,7 @@ export const englishRuleCardPhrases = {
     untilSeen: 'Until seen',
     minutes_one: '{{count}} min',
     minutes_other: '{{count}} min',
+    refusedAir: 'Air',
     refusedAirOnPlastic: 'Air on plastic pipe',
     airOnPlastic: 'On plastic pipe too, where its makers allow it',
     airNotOnPlastic: 'Not on plastic pipe',

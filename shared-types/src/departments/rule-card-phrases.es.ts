@@ -89,6 +89,7 @@ export const spanishRuleCardPhrases = {
     minutes_one: '{{count}} min',
     minutes_many: '{{count}} min',
     minutes_other: '{{count}} min',
+    refusedAir: 'Aire',
     refusedAirOnPlastic: 'Aire en tubo de plástico',
     airOnPlastic: 'También en tubo de plástico, donde sus fabricantes lo permiten',
     airNotOnPlastic: 'No en tubo de plástico',

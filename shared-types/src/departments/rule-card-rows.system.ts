@@ -27,7 +27,7 @@ export function testNote(test: TestRule | undefined, system: TestRule['system'])
     {
       key: 'air',
       value: test.airOnPlastic,
-      ...said('rows.air', ({ t }) => [t(test.airOnPlastic ? 'says.airOnPlastic' : 'says.airNotOnPlastic')]),
+      ...said(isDwv ? 'rows.refused' : 'rows.air', (words) => [airLine(test, words)]),
     },
     {
       key: 'airRules',
@@ -91,6 +91,14 @@ function levelLine({ headRule }: TestRule, { t, more }: RuleCardWords): string {
   return headRule.feet === null
     ? more(t('says.levelAbove', { feet: 0 }), '–')
     : t('says.levelAbove', { feet: headRule.feet });
+}
+
+/** Of drains, what is refused: air at all where no way with air is accepted, else air on plastic. Of lines, where air may go. */
+function airLine({ system, acceptedMethods, airOnPlastic }: TestRule, { t, more }: RuleCardWords): string {
+  const onPlastic = t(airOnPlastic ? 'says.airOnPlastic' : 'says.airNotOnPlastic');
+  if (system === 'water') return onPlastic;
+  if (!acceptedMethods.includes('air')) return more(t('says.refusedAir'), onPlastic);
+  return airOnPlastic ? t('says.systems.none') : t('says.refusedAirOnPlastic');
 }
 
 function standRow({ standMinutes }: TestRule): RuleCardRow {

@@ -42,6 +42,14 @@ describe('where a value comes from', () => {
     expect(findSource(withTest(taken, 1, { standMinutes: 20 }), 0, 'headRule')).not.toBeNull();
   });
 
+  it('takes over the pressure of its medium alone', () => {
+    const air = offeredDefaults(water!, 'pressures').find(({ section }) => section === 'P2503.7');
+    expect(withDefault(wholeRuleCard, 1, air!).tests[1]?.pressures).toEqual([
+      ...water!.pressures,
+      { medium: 'air', minimumPsi: 50, preferredPsi: null },
+    ]);
+  });
+
   it('stays with its test when one before it goes', () => {
     const [offered] = offeredDefaults(water!, 'standMinutes');
     const fewer = withoutTest(withDefault(wholeRuleCard, 1, offered!), 0);

@@ -15,8 +15,16 @@ export function findSource(content: RuleCardContent, testIndex: number, field: S
 /** Takes over a model code's value, its section beside it. */
 export function withDefault(content: RuleCardContent, testIndex: number, offered: RuleCardDefault): RuleCardContent {
   const { field, value, from, section } = offered;
-  const changed = withTest(content, testIndex, { [field]: structuredClone(value) });
+  const taken = field === 'pressures' ? withPressures(content.tests[testIndex], value) : structuredClone(value);
+  const changed = withTest(content, testIndex, { [field]: taken });
   return { ...changed, sources: { ...changed.sources, [`tests.${testIndex}.${field}`]: { from, section } } };
+}
+
+/** A code's pressure takes the place of that medium's; those of other media stay. */
+function withPressures(test: TestRule | undefined, offered: RuleCardDefault['value']): TestRule['pressures'] {
+  const pressures = offered as TestRule['pressures'];
+  const kept = (test?.pressures ?? []).filter(({ medium }) => !pressures.some((each) => each.medium === medium));
+  return [...kept, ...structuredClone(pressures)];
 }
 
 /** Changes a test; what the desk types of its own is local from then on. */

@@ -34,7 +34,7 @@ export function NotesSheet({ notes, version, againstVersion }: NotesSheetProps):
 function Note({ note, number, isTwo }: { note: SheetNote; number: number; isTwo: boolean }): ReactNode {
   const { t } = useTranslation('departments');
   return (
-    <section id={`note-${number}`} className="note" aria-labelledby={`note-${number}-title`}>
+    <section id={`note-${number}`} className="rule-note" aria-labelledby={`note-${number}-title`}>
       <span className="note-no n" aria-hidden="true">
         {number}
       </span>
