@@ -1,7 +1,7 @@
 import { sqlMigration } from './migration.js';
 
 export const plannedHolds = sqlMigration(
-  '0018-planned-holds',
+  '0019-planned-holds',
   `
   -- The plan a test was started by; none for tests started without one.
   ALTER TABLE holds ADD COLUMN plan_id uuid REFERENCES test_plans (id);

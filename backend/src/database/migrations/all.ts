@@ -14,7 +14,7 @@ import { keptRight } from './0013-kept-right.js';
 import { handovers } from './0014-handovers.js';
 import { anchors } from './0015-anchors.js';
 import { testPlans } from './0017-test-plans.js';
-import { plannedHolds } from './0018-planned-holds.js';
+import { plannedHolds } from './0019-planned-holds.js';
 import { houseModels } from './0020-house-models.js';
 import { ruleCardDrafts } from './0018-rule-card-drafts.js';
 import type { Migration } from './migration.js';
