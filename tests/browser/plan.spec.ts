@@ -33,7 +33,10 @@ describe('a test plan on its page', { timeout: 240_000 }, () => {
     await openPath(page, `/lots/${lot.id}/plan`);
     await choose(page, 'Stage', 'Rough-in');
     await see(page, 'the rule card does not accept it');
-    await page.getByRole('button', { name: /Attic cut/ }).first().click();
+    await page
+      .getByRole('button', { name: /Attic cut/ })
+      .first()
+      .click();
     await press(page, 'Choose this way');
     await see(page, /^Chosen: Attic cut/);
     await keepShot(page, 'plan chosen');
