@@ -6,15 +6,20 @@ import type { VisitSummary } from '@holdwater/shared-types/visits/visit.contract
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { sayDone } from '../../components/done-line';
+import { useNow } from '../../lib/clock';
 import { isApiError } from '../../lib/api-error';
 import { useAddReading } from './api/add-reading';
 import { useSayTestUp } from './api/say-test-up';
 import { useStartHold } from './api/start-hold';
 import { keepTools, readTools } from './kept-tools';
+import { withTyped } from './shown-test';
 import { instrumentOf, lastReading, type TestedPart } from './standing-tests';
 import { firstSetup, instrumentOfSetup, newHoldOf, setupFaults, type SetupDraft } from './test-setup';
 import { checkReading, emptyReading, type ReadingDraft, type TypedReading } from './typed-reading';
 import { whyNotUp, type WhyNotUp } from './up-act';
+import { useKeptTemperatures } from './use-kept-temperatures';
+import { useTestAnalysis } from './use-test-analysis';
+import { verdictKind } from './verdict';
 
 export interface TestSheetInput {
   readonly lot: LotDetail;
@@ -33,10 +38,12 @@ export function useTestSheet(input: TestSheetInput) {
   const house = lot.units.find(({ number }) => number === part.unitNumber)?.geometry ?? null;
   const earlier = holds.find((one) => one.unitNumber === part.unitNumber && one.system === part.system) ?? null;
   const [setup, setSetup] = useState<SetupDraft>(() => firstSetup(rule, house, earlier, readTools()));
-  const [draft, setDraft] = useState<ReadingDraft>(emptyReading);
+  const [ownDraft, setDraft] = useState<ReadingDraft>(emptyReading);
+  const [temperatures, setTemperatures] = useKeptTemperatures(lot);
   const [isTried, setIsTried] = useState(false);
   const instrument = hold === null ? instrumentOfSetup(setup, rule) : instrumentOf(hold);
   const medium = hold === null ? setup.medium : hold.medium;
+  const draft = instrument.isLevel ? ownDraft : { ...ownDraft, temperatureF: temperatures.now };
   const check = checkReading(draft, instrument);
   const missing = hold === null ? setupFaults(setup, rule) : {};
   const isUntyped = draft.value.trim() === '';
@@ -52,6 +59,9 @@ export function useTestSheet(input: TestSheetInput) {
     minimumPsi: instrument.minimumPsi,
     isValveShut: draft.valve === 'shut',
   });
+  const shown = withTyped(input, { setup, instrument, reading: check.reading, now: useNow() });
+  const found = useTestAnalysis({ lot, test: shown, visit, rule, temperatures });
+  const isOverLimit = check.isOverLimit || (isUntyped && found !== null && verdictKind(found.analysis) === 'over');
   const mayStart = lot.abilities.canTest;
   const maySave = hold === null ? mayStart : lot.abilities.canAddReading;
   const maySayUp = lot.abilities.canSayTestUp && visit?.state !== 'ready';
@@ -65,6 +75,11 @@ export function useTestSheet(input: TestSheetInput) {
     check,
     instrument,
     medium,
+    temperatures,
+    setTemperatures,
+    /** What stands and what is typed, worked out; the inspector sees it once a reading is typed. */
+    found: lot.abilities.canDecide && check.reading === null ? null : found,
+    isOverLimit,
     isUntyped,
     isValveShut,
     maySave,

@@ -95,6 +95,7 @@ function StageTests({ lot, holds, visit, ruleCard, stageCode, unitNumber }: Stag
       <PartCells
         lot={lot}
         holds={holds}
+        visit={visit}
         stageCode={stageCode}
         ruleCard={ruleCard}
         systems={systems}
@@ -102,7 +103,7 @@ function StageTests({ lot, holds, visit, ruleCard, stageCode, unitNumber }: Stag
         onChoose={choose}
       />
       <TestSheet
-        key={`${unitNumber}.${system}`}
+        key={`${lot.id}.${unitNumber}.${system}`}
         lot={lot}
         holds={holds}
         visit={visit}

@@ -2,6 +2,7 @@ import type { RuleCard } from '@holdwater/shared-types/departments/departments.c
 import type { Hold } from '@holdwater/shared-types/holds/hold.contract.js';
 import type { System } from '@holdwater/shared-types/holds/hold.states.js';
 import type { LotDetail } from '@holdwater/shared-types/lots/lot.contract.js';
+import type { VisitSummary } from '@holdwater/shared-types/visits/visit.contract.js';
 import type { TFunction } from 'i18next';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
@@ -11,11 +12,15 @@ import { markTones } from '../../../components/mark-names';
 import { readPressure } from '../../../lib/units';
 import { levelWords } from '../level-words';
 import { findStanding, instrumentOf, lastCounted, upState, type TestedPart, type UpState } from '../standing-tests';
+import { useKeptTemperatures } from '../use-kept-temperatures';
+import { findAnalysis, useElevation } from '../use-test-analysis';
+import { verdictKind, verdictMarks } from '../verdict';
 import { SystemCells, type SystemCell } from './system-cells';
 
 export interface PartCellsProps {
   lot: LotDetail;
   holds: readonly Hold[];
+  visit: VisitSummary | null;
   stageCode: string;
   ruleCard: RuleCard;
   systems: readonly System[];
@@ -26,8 +31,9 @@ export interface PartCellsProps {
 /** Which unit and which system: each cell says what is up and what is needed. */
 export function PartCells(props: PartCellsProps): ReactNode {
   const { lot, systems, chosen, onChoose } = props;
-  const { t } = useTranslation(['holds', 'common']);
-  const cells = systems.map((system) => cellOf(t, props, { unitNumber: chosen.unitNumber, system }));
+  const { t } = useTranslation(['holds', 'common', 'marks']);
+  const verdictOf = useVerdicts(props);
+  const cells = systems.map((system) => cellOf(t, props, { unitNumber: chosen.unitNumber, system }, verdictOf));
   return (
     <>
       {lot.units.length > 1 ? (
@@ -57,18 +63,42 @@ export function PartCells(props: PartCellsProps): ReactNode {
 const markOf: Record<UpState, MarkName> = {
   none: 'booked',
   'no-reading': 'booked',
-  below: 'test-losing',
+  below: 'test-short',
   over: 'test-over',
   up: 'ready',
 };
 
-type Words = TFunction<['holds', 'common']>;
+type Words = TFunction<['holds', 'common', 'marks']>;
+type VerdictOf = (hold: Hold) => (typeof verdictMarks)[keyof typeof verdictMarks] | null;
 
-function cellOf(t: Words, { lot, holds, stageCode, ruleCard }: PartCellsProps, part: TestedPart): SystemCell {
+/** The mark of what a standing test's log says; the inspector reads the gauge before seeing it. */
+function useVerdicts({ lot, holds, visit, ruleCard, stageCode, chosen }: PartCellsProps): VerdictOf {
+  const [temperatures] = useKeptTemperatures(lot);
+  const hasAir = holds.some(({ medium }) => medium !== 'water');
+  const elevationFt = useElevation(lot, chosen.unitNumber, hasAir);
+  return (test) => {
+    if (elevationFt === null || lot.abilities.canDecide) return null;
+    const rule = ruleCard.content.tests.find((one) => one.stageCode === stageCode && one.system === test.system);
+    const found = findAnalysis({ lot, test, visit, rule: rule ?? null, temperatures }, elevationFt);
+    return found && verdictMarks[verdictKind(found.analysis)];
+  };
+}
+
+function cellOf(
+  t: Words,
+  { lot, holds, stageCode, ruleCard }: PartCellsProps,
+  part: TestedPart,
+  verdictOf: VerdictOf,
+): SystemCell {
   const hold = findStanding(holds, part, stageCode);
   const state = upState(hold);
-  const mark = state === 'up' && part.system === 'dwv' && hold?.fillLevelFt != null ? 'level' : markOf[state];
-  const line = hold === null ? needs() : stands(hold);
+  const isLevelUp = state === 'up' && part.system === 'dwv' && hold?.fillLevelFt != null;
+  const verdict = hold === null || state !== 'up' ? null : verdictOf(hold);
+  const isQuiet = isLevelUp && (verdict === 'test-holds' || verdict === 'test-few');
+  const told = isQuiet ? null : verdict;
+  const mark = told ?? (isLevelUp ? 'level' : markOf[state]);
+  const bare = hold === null ? needs() : stands(hold);
+  const line = told === null ? bare : t('cell.told', { what: bare, verdict: t(`marks.${told}`) });
   return { key: part.system, label: t(`common.systems.${part.system}`), line, mark, tone: markTones[mark] };
 
   function needs(): string {

@@ -10,38 +10,43 @@ import { useFaultWords } from '../use-fault-words';
 
 export interface ReadingEntryProps {
   instrument: Instrument;
-  /** What the temperature is of. */
-  temperatureOf: 'air' | 'water';
   draft: ReadingDraft;
   check: ReadingCheck;
   /** Where the steppers start while nothing is typed. */
   stepFrom: number;
   /** The picture over the entry of a level. */
   picture: ReactNode;
+  /** The air temperatures of a test at a gauge. */
+  temperatures: ReactNode;
+  /** What the needle is expected to show at the window, and what to pump to, psi. */
+  expected: { readonly atWindow: number; readonly pumpTo: number | null } | null;
   onChange: (draft: ReadingDraft) => void;
 }
 
 /** A reading as it is typed: the dial follows, steppers go half a mark. */
 export function ReadingEntry(props: ReadingEntryProps): ReactNode {
-  const { instrument, temperatureOf, draft, check, picture, onChange } = props;
+  const { instrument, draft, check, picture, temperatures, onChange } = props;
   const { t } = useTranslation('holds');
   const words = useFaultWords();
   return (
     <div className="reading-entry">
       {instrument.isLevel ? picture : <DialAndValve {...props} />}
       <ValueEntry {...props} />
-      <div className="fields two">
-        <Field
-          label={t(`reading.temperature.${temperatureOf}`)}
-          labelPlace="inside"
-          unit="°F"
-          isNumeral
-          isOptional
-          autoComplete="off"
-          value={draft.temperatureF}
-          error={words(check.faults.temperatureF)}
-          onChange={(event) => onChange({ ...draft, temperatureF: event.target.value })}
-        />
+      {instrument.isLevel ? null : temperatures}
+      <div className={instrument.isLevel ? 'fields two' : 'fields'}>
+        {instrument.isLevel ? (
+          <Field
+            label={t('reading.temperature.water')}
+            labelPlace="inside"
+            unit="°F"
+            isNumeral
+            isOptional
+            autoComplete="off"
+            value={draft.temperatureF}
+            error={words(check.faults.temperatureF)}
+            onChange={(event) => onChange({ ...draft, temperatureF: event.target.value })}
+          />
+        ) : null}
         <Field
           label={t('reading.note')}
           labelPlace="inside"
@@ -56,7 +61,7 @@ export function ReadingEntry(props: ReadingEntryProps): ReactNode {
   );
 }
 
-function DialAndValve({ instrument, draft, onChange }: ReadingEntryProps): ReactNode {
+function DialAndValve({ instrument, draft, expected, onChange }: ReadingEntryProps): ReactNode {
   const { t } = useTranslation('holds');
   const isPhone = useIsPhone();
   const typed = parseNumber(draft.value);
@@ -73,6 +78,8 @@ function DialAndValve({ instrument, draft, onChange }: ReadingEntryProps): React
           value={typed === null || typed > rangePsi ? null : typed}
           minimum={minimumPsi ?? 0}
           limit={ceilingPsi}
+          ghost={expected?.atWindow ?? null}
+          pumpTo={expected?.pumpTo ?? null}
           size={isPhone ? 180 : 220}
         />
       )}
@@ -110,12 +117,7 @@ function ValueEntry({ instrument, draft, check, stepFrom, onChange }: ReadingEnt
   const { meant } = check;
   return (
     <div className="value-entry">
-      <button
-        type="button"
-        className="btn stepper"
-        aria-controls={id}
-        onClick={() => step(-1)}
-      >
+      <button type="button" className="btn stepper" aria-controls={id} onClick={() => step(-1)}>
         <span aria-hidden="true">−½</span>
         <span className="hidden-words">{t('reading.stepDown')}</span>
       </button>
@@ -142,12 +144,7 @@ function ValueEntry({ instrument, draft, check, stepFrom, onChange }: ReadingEnt
         }
         onChange={(event) => onChange({ ...draft, value: event.target.value })}
       />
-      <button
-        type="button"
-        className="btn stepper"
-        aria-controls={id}
-        onClick={() => step(1)}
-      >
+      <button type="button" className="btn stepper" aria-controls={id} onClick={() => step(1)}>
         <span aria-hidden="true">+½</span>
         <span className="hidden-words">{t('reading.stepUp')}</span>
       </button>

@@ -1,18 +1,24 @@
-import type { ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { TaskFoot } from '../../../components/task-head';
 import { Panel } from '../../../components/panel';
 import { Plain } from '../../../components/plain';
 import { Failed } from '../../../lib/query-state';
+import { useNow } from '../../../lib/clock';
 import { lastCounted } from '../standing-tests';
 import { ownLevelFt } from '../test-setup';
 import { parseNumber } from '../typed-reading';
 import { useTestSheet, type TestSheetInput, type TestSheetState } from '../use-test-sheet';
+import { useVerdictWords, type VerdictWords } from '../use-verdict-words';
+import { verdictMeasures } from '../verdict-measures';
 import { EndTest } from './end-test';
 import { LevelPicture } from './level-picture';
 import { NoLongerUp } from './no-longer-up';
 import { ReadingEntry } from './reading-entry';
+import { ShortQuestion } from './short-question';
 import { StandingFacts } from './standing-facts';
+import { TemperatureFields } from './temperature-fields';
+import { TestAnswer } from './test-answer';
 import { TestActs } from './test-acts';
 import { TestCautions } from './test-cautions';
 import { TestSetupForm } from './test-setup-form';
@@ -22,6 +28,8 @@ export function TestSheet(input: TestSheetInput): ReactNode {
   const { lot, visit, ruleCard, rule, part, hold } = input;
   const { t } = useTranslation(['holds', 'common']);
   const sheet = useTestSheet(input);
+  const words = useSheetWords(input, sheet);
+  const [isAsking, setIsAsking] = useState(false);
   const cannotSave = useCannotSave(sheet);
   const nextOrdinal = ordinalAfter(input);
   const name = t('testName', {
@@ -35,7 +43,7 @@ export function TestSheet(input: TestSheetInput): ReactNode {
       medium={sheet.medium}
       instrument={sheet.instrument}
       isValveShut={sheet.isValveShut}
-      isOverLimit={sheet.check.isOverLimit}
+      isOverLimit={sheet.isOverLimit}
     />
   );
   const reading = (
@@ -45,12 +53,15 @@ export function TestSheet(input: TestSheetInput): ReactNode {
           <Entry input={input} sheet={sheet} />
         </Panel>
       ) : null}
-      {sheet.check.isOverLimit ? null : <div className="panel-body">{cautions}</div>}
+      {sheet.isOverLimit || words === null || sheet.found === null ? null : (
+        <TestAnswer found={sheet.found} words={words} zone={zoneOf(input)} isValveShut={sheet.isValveShut} />
+      )}
+      {sheet.isOverLimit ? null : <div className="panel-body">{cautions}</div>}
     </div>
   );
   return (
     <>
-      {sheet.check.isOverLimit ? cautions : null}
+      {sheet.isOverLimit ? cautions : null}
       <div className="test-sheet">
         {hold === null ? (
           <>
@@ -86,6 +97,17 @@ export function TestSheet(input: TestSheetInput): ReactNode {
         )}
       </div>
       {sheet.error === null ? null : <Failed error={sheet.error} level={2} />}
+      {words === null ? null : (
+        <ShortQuestion
+          isOpen={isAsking}
+          words={words}
+          onKeep={() => setIsAsking(false)}
+          onUp={() => {
+            setIsAsking(false);
+            sheet.sayUp();
+          }}
+        />
+      )}
       <TaskFoot>
         {visit?.moves.includes('no-longer-up') ? <NoLongerUp visit={visit} /> : null}
         <TestActs
@@ -94,11 +116,32 @@ export function TestSheet(input: TestSheetInput): ReactNode {
           isStarting={hold === null}
           busy={sheet.busy}
           onSave={() => (sheet.trySetup() ? sheet.save() : undefined)}
-          onUp={() => (sheet.trySetup() ? sheet.sayUp() : undefined)}
+          onUp={() => {
+            if (!sheet.trySetup()) return;
+            if (words?.kind === 'short') setIsAsking(true);
+            else sheet.sayUp();
+          }}
         />
       </TaskFoot>
     </>
   );
+}
+
+const zoneOf = ({ lot, visit }: TestSheetInput): string =>
+  visit?.zone ?? lot.zone ?? Intl.DateTimeFormat().resolvedOptions().timeZone;
+
+function useSheetWords(input: TestSheetInput, { found }: TestSheetState): VerdictWords | null {
+  const wordsOf = useVerdictWords();
+  const now = useNow();
+  return found === null ? null : wordsOf({ ...found, zone: zoneOf(input), units: 'us', now });
+}
+
+/** Where the needle is expected at the window, in whole marks, and what to pump to. */
+function expectedOf({ found, isOverLimit }: TestSheetState): { atWindow: number; pumpTo: number | null } | null {
+  const forecast = found?.analysis.forecast ?? null;
+  if (found === null || forecast === null || isOverLimit) return null;
+  const { number } = verdictMeasures(found.analysis, 'us').worked(forecast.from.mid);
+  return { atWindow: Number(number), pumpTo: forecast.topUpTo };
 }
 
 function ordinalAfter({ holds, part, rule }: TestSheetInput): number {
@@ -128,8 +171,9 @@ function NotYours({ isStanding, name }: { isStanding: boolean; name: string }): 
 }
 
 function Entry({ input, sheet }: { input: TestSheetInput; sheet: TestSheetState }): ReactNode {
-  const { hold } = input;
-  const { instrument, medium } = sheet;
+  const { hold, lot } = input;
+  const { t } = useTranslation('holds');
+  const { instrument } = sheet;
   const counted = hold === null ? null : lastCounted(hold);
   const last = instrument.isLevel ? counted?.levelIn : counted?.pressurePsi;
   const method = hold?.method ?? sheet.setup.method;
@@ -137,13 +181,20 @@ function Entry({ input, sheet }: { input: TestSheetInput; sheet: TestSheetState 
   return (
     <ReadingEntry
       instrument={instrument}
-      temperatureOf={medium === 'air' ? 'air' : 'water'}
       draft={sheet.draft}
       check={sheet.check}
       stepFrom={last ?? instrument.minimumPsi ?? 0}
       picture={
         <LevelPicture house={sheet.house} method={method} fillLevelFt={level ?? ownLevelFt(method, sheet.house)} />
       }
+      temperatures={
+        <TemperatureFields
+          typed={sheet.temperatures}
+          place={lot.tract?.name ?? t('air.thisLot')}
+          onChange={sheet.setTemperatures}
+        />
+      }
+      expected={expectedOf(sheet)}
       onChange={sheet.setDraft}
     />
   );

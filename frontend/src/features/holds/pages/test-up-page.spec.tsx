@@ -1,7 +1,8 @@
-import { screen, waitFor, within } from '@testing-library/react';
+import { houseGeometry } from '@holdwater/shared-types/hydraulics/house-geometry.js';
+import { cleanup, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { Route, Routes } from 'react-router-dom';
-import { describe, expect, it } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { personOf } from '../../../lib/testing/people';
 import { renderPage } from '../../../lib/testing/render-page';
 import { refusal, stubApi, type SentRequest } from '../../../lib/testing/stub-api';
@@ -10,6 +11,7 @@ import {
   dwvHold,
   holdId,
   holdOf,
+  house,
   lotId,
   lotOf,
   noAbilities,
@@ -254,5 +256,82 @@ describe('what the reader may do', () => {
     await userEvent.click(within(dialog).getByRole('radio', { name: /did not hold/ }));
     await userEvent.click(within(dialog).getByRole('button', { name: 'End the test' }));
     await waitFor(() => expect(writes(sent)[0]?.body).toMatchObject({ reason: 'lost' }));
+  });
+});
+
+describe('the answer to a reading, on the device', () => {
+  /** Tue, Apr 14, 2026, 5:10 pm in Denver (UTC−6, IANA tz). */
+  beforeEach(() => {
+    vi.useFakeTimers({ now: new Date('2026-04-14T23:10:00Z'), toFake: ['Date'] });
+    window.localStorage.clear();
+  });
+  afterEach(() => vi.useRealTimers());
+
+  const copper = houseGeometry.parse({ ...house, waterPipeMaterials: ['copper'], elevationFt: 5000 });
+  const lot = lotOf({ units: [{ number: 1, label: 'House', geometry: copper }] });
+  const bare = holdOf({ readings: [] });
+
+  async function typeReading(psi: string): Promise<void> {
+    await userEvent.type(await screen.findByLabelText(/Air in the house now/), '61');
+    await userEvent.type(screen.getByLabelText(/Air at the window/), '47');
+    await userEvent.type(screen.getByLabelText(/Coldest tonight/), '33');
+    await userEvent.type(screen.getByLabelText('Gauge reads'), psi);
+    await userEvent.click(screen.getByRole('radio', { name: 'open' }));
+  }
+
+  it('tells what the needle will show at the window and what to pump to, and asks nothing of the server', async () => {
+    const sent = stubApi(answersFor({ lot, holds: [dwvHold, bare] }));
+    show();
+    await typeReading('51');
+    // 51 psi at 61 °F, 12.228 psia: (63.228 × 506.67 ÷ 520.67) − 12.228 = 49.3 psi at 47 °F (P/T of the absolute values)
+    const answer = screen.getByRole('status');
+    expect(answer).toHaveTextContent('About 49 psi (48–51) at Wed, Apr 15, 9:00 am, 47 °F.');
+    expect(answer).toHaveTextContent('Pump to 53 psi to be safe.');
+    expect(answer).toHaveTextContent('One reading: read again after 8:45 pm to know the trend.');
+    expect(screen.getByRole('img', { name: /^Gauge, 51 psi.*about 49 at the window; pump to 53/ })).toBeInTheDocument();
+    expect(
+      screen.getByRole('img', { name: 'At 9:00 am about 49 psi (48–51), minimum 50, pump to 53' }),
+    ).toBeInTheDocument();
+    expect(screen.getByText(/33 °F tonight is close to freezing/)).toBeInTheDocument();
+    expect(writes(sent)).toEqual([]);
+  });
+
+  it('short at the window asks one question before it is said to be up', async () => {
+    const up = visitOf({ state: 'ready', version: 4, moves: ['no-longer-up'] });
+    const sent = stubApi({
+      ...answersFor({ lot, holds: [dwvHold, bare] }),
+      [`POST /api/visits/${visitId}/test-up`]: () => ({ data: up }),
+    });
+    show();
+    await typeReading('51');
+    await userEvent.click(screen.getByRole('button', { name: 'Save and say test up' }));
+    const dialog = screen.getByRole('dialog');
+    expect(dialog).toHaveTextContent('Pump to 53 psi to be safe.');
+    expect(writes(sent)).toEqual([]);
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Say test up' }));
+    await waitFor(() =>
+      expect(writes(sent)[0]?.body).toMatchObject({ readings: [{ holdId, pressurePsi: 51, temperatureF: 61 }] }),
+    );
+  });
+
+  it('remembers the temperatures for the next lot of the tract', async () => {
+    stubApi(answersFor({ lot, holds: [dwvHold, bare] }));
+    show();
+    await typeReading('53');
+    cleanup();
+    show();
+    expect(await screen.findByLabelText(/Air at the window/)).toHaveValue('47');
+    expect(screen.getByLabelText(/Air in the house now/)).toHaveValue('61');
+  });
+
+  it('gives an inspector the answer only to an own reading', async () => {
+    const inspected = lotOf({ units: lot.units, abilities: { ...noAbilities, canAddReading: true, canDecide: true } });
+    stubApi(answersFor({ lot: inspected, holds: [dwvHold, holdOf()] }));
+    show();
+    await screen.findByLabelText('Gauge reads');
+    expect(screen.queryByRole('status')).not.toBeInTheDocument();
+    await userEvent.type(screen.getByLabelText('Gauge reads'), '57');
+    await userEvent.click(screen.getByRole('radio', { name: 'open' }));
+    expect(screen.getByRole('status')).toHaveTextContent('9:00 am');
   });
 });

@@ -14,6 +14,7 @@ import { lotCorrectionsQuery } from '../api/lot-corrections';
 import { lotHoldsQuery } from '../api/lot-holds';
 import { lotVisitsQuery } from '../api/lot-visits';
 import { findOpenVisit, testsOf, unitState, useLotView, zoneOf } from '../lot-view';
+import { useLotAnalysis } from '../use-lot-analysis';
 import { BeforeClear } from './before-clear';
 import { Changes } from './changes';
 import { CorrectionsPart } from './corrections-part';
@@ -48,6 +49,12 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
   const rule =
     ruleCard.data?.content.tests.find((one) => one.stageCode === view.stage?.code && one.system === view.system) ??
     null;
+  const analysis = useLotAnalysis(
+    lot,
+    testsOf(known.holds, view)[0] ?? null,
+    findOpenVisit(known.visits, view.stage?.code),
+    rule,
+  );
   const isGroundwork = ruleCard.data?.content.stages.find(({ code }) => code === view.stage?.code)?.covers === 'slab';
   const { abilities } = lot;
   // The thumb button is for whoever puts tests up; the superintendent's first act on a phone is the request.
@@ -93,6 +100,7 @@ export function LotSheet({ lot }: { lot: LotDetail }): ReactNode {
           canAddReading={abilities.canAddReading && !hasThumb}
           canTest={abilities.canTest && !hasThumb}
           abilities={abilities}
+          analysis={analysis}
         />
       )}
     </QueryState>

@@ -1,15 +1,23 @@
 import type { Hold, Reading } from '@holdwater/shared-types/holds/hold.contract.js';
 import type { LotAbilities } from '@holdwater/shared-types/lots/lot.contract.js';
-import { Fragment, type ReactNode } from 'react';
+import { Fragment, useMemo, type ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Act } from '../../../components/act';
 import { Icon } from '../../../components/icon';
 import { Numeral } from '../../../components/numeral';
 import { Panel } from '../../../components/panel';
 import { Plain } from '../../../components/plain';
+import { useLocale } from '../../../lib/i18n';
 import { useTimeWords } from '../../../lib/time';
+import { useIsPhone } from '../../../lib/use-media';
 import { StrikeReading } from '../../holds/components/strike-reading';
+import { logFactsOf, type LogFact } from '../../holds/log-facts';
+import type { FoundAnalysis } from '../../holds/use-test-analysis';
 import { useReadingWords } from '../reading-words';
+import { secondClock } from '../second-clock';
+import type { LotAnalysis } from '../use-lot-analysis';
+import { FactCells, FactLines } from './log-fact-cells';
+import { LogVerdict } from './log-verdict';
 import '../test-log.css';
 
 export interface TestLogProps {
@@ -22,11 +30,13 @@ export interface TestLogProps {
   canTest: boolean;
   /** What the reader may do to the readings themselves. */
   abilities: Pick<LotAbilities, 'canTest' | 'canAddReading'>;
+  /** The newest test worked out; null where it cannot be. */
+  analysis?: LotAnalysis | null;
 }
 
 /** The log of readings, test by test; a struck reading stays where it was, struck, with why. */
 export function TestLog(props: TestLogProps): ReactNode {
-  const { lotId, tests, systemWord, zone, canAddReading, canTest, abilities } = props;
+  const { lotId, tests, systemWord, zone, canAddReading, canTest, abilities, analysis = null } = props;
   const { t } = useTranslation(['lots', 'common']);
   const [latest, ...older] = tests;
   const mayRead = canAddReading && latest?.state === 'standing';
@@ -47,7 +57,8 @@ export function TestLog(props: TestLogProps): ReactNode {
   }
   return (
     <Panel title={<TestTitle hold={latest} systemWord={systemWord} />} side={act} isFlush>
-      <LogTable hold={latest} zone={zone} abilities={abilities} />
+      {analysis === null ? null : <LogVerdict analysis={analysis} hold={latest} zone={zone} />}
+      <LogTable hold={latest} zone={zone} abilities={abilities} found={analysis?.found} />
       {older.map((hold) => (
         <details key={hold.id} className="older-test">
           <summary>
@@ -68,13 +79,18 @@ function TestTitle({ hold, systemWord }: { hold: Hold; systemWord: string }): Re
 
 interface OfTest extends Pick<TestLogProps, 'zone' | 'abilities'> {
   hold: Hold;
+  found?: FoundAnalysis;
 }
 
-function LogTable({ hold, zone, abilities }: OfTest): ReactNode {
+function LogTable({ hold, zone, abilities, found }: OfTest): ReactNode {
   const { t } = useTranslation(['lots', 'common']);
   const words = useTimeWords();
   const readingWords = useReadingWords();
   const readings = [...hold.readings].sort((a, b) => b.at.localeCompare(a.at));
+  const isPhone = useIsPhone();
+  const facts = useMemo(() => (found === undefined ? null : logFactsOf(found)), [found]);
+  const hasAir = hold.medium !== 'water';
+  const columns = facts === null || isPhone ? [] : hasAir ? (['says', 'left'] as const) : (['since'] as const);
   const isLevel = readings.some(({ levelIn }) => levelIn !== null);
   const metric = readingWords.units === 'metric';
   const unit = isLevel ? t(metric ? 'log.cm' : 'log.in') : metric ? 'kPa' : 'psi';
@@ -90,6 +106,11 @@ function LogTable({ hold, zone, abilities }: OfTest): ReactNode {
             {metric ? '°C' : '°F'}
           </th>
           <th scope="col">{isLevel ? t('log.note') : t('log.valve')}</th>
+          {columns.map((column) => (
+            <th key={column} scope="col">
+              {t(`log.${column}`)}
+            </th>
+          ))}
           <th scope="col">{t('log.by')}</th>
         </tr>
       </thead>
@@ -102,12 +123,21 @@ function LogTable({ hold, zone, abilities }: OfTest): ReactNode {
             <Fragment key={reading.id}>
               {isNewDay ? (
                 <tr className="day-row">
-                  <th scope="colgroup" colSpan={5}>
+                  <th scope="colgroup" colSpan={5 + columns.length}>
                     {day}
                   </th>
                 </tr>
               ) : null}
-              <ReadingRow hold={hold} reading={reading} zone={zone} abilities={abilities} hasValve={!isLevel} />
+              <ReadingRow
+                hold={hold}
+                reading={reading}
+                zone={zone}
+                abilities={abilities}
+                hasValve={!isLevel}
+                found={found}
+                fact={reading.isStruck ? undefined : facts?.get(Date.parse(reading.at))}
+                columns={columns.length}
+              />
             </Fragment>
           );
         })}
@@ -119,9 +149,14 @@ function LogTable({ hold, zone, abilities }: OfTest): ReactNode {
 interface ReadingRowProps extends OfTest {
   reading: Reading;
   hasValve: boolean;
+  fact?: LogFact;
+  /** Columns that say what the reading comes to; none on a phone, where a line does. */
+  columns: number;
 }
 
-function ReadingRow({ hold, reading, zone, abilities, hasValve }: ReadingRowProps): ReactNode {
+function ReadingRow(props: ReadingRowProps): ReactNode {
+  const { hold, reading, zone, abilities, hasValve, found, fact, columns } = props;
+  const locale = useLocale();
   const { t } = useTranslation(['lots', 'common']);
   const words = useTimeWords();
   const readingWords = useReadingWords();
@@ -135,7 +170,7 @@ function ReadingRow({ hold, reading, zone, abilities, hasValve }: ReadingRowProp
   return (
     <tr className={reading.isStruck ? 'struck' : isGaugeOnly ? 'gauge-only' : undefined}>
       <td>
-        <Numeral text={words.clock(reading.at, zone)} />
+        <Numeral text={fact?.isToTheSecond ? secondClock(reading.at, zone, locale) : words.clock(reading.at, zone)} />
       </td>
       <td className={`num ${isOver ? 't-red' : ''}`}>{reading.isStruck ? <del>{number}</del> : number}</td>
       <td className="num n mid">{readingWords.temperature(reading)?.number ?? ''}</td>
@@ -146,13 +181,17 @@ function ReadingRow({ hold, reading, zone, abilities, hasValve }: ReadingRowProp
             {t(`log.valves.${reading.gaugeValve}`)}
           </span>
         ) : null}
-        {isGaugeOnly ? <span className="s mut row">{t('log.gaugeOnly')}</span> : null}
+        {isGaugeOnly && columns === 0 ? <span className="s mut row">{t('log.gaugeOnly')}</span> : null}
+        {fact === undefined || found === undefined ? null : (
+          <FactLines fact={fact} found={found} isWhole={columns === 0} />
+        )}
         {isOver ? <span className="s t-red row">{t('log.over')}</span> : null}
         {reading.note ? <span className="s mid row">{reading.note}</span> : null}
         {reading.isStruck ? (
           <span className="s t-red row">{t('log.struck', { why: reading.struckWhy ?? '' })}</span>
         ) : null}
       </td>
+      {columns === 0 ? null : <FactCells fact={fact} found={found} columns={columns} />}
       <td className="mid">
         {reading.byName}
         {reading.byRole === 'plumber' ? null : <span className="s mut row">{t(`common.roles.${reading.byRole}`)}</span>}
