@@ -1,5 +1,4 @@
 import 'reflect-metadata';
-import { setTimeout } from 'node:timers/promises';
 import { Test, type TestingModuleBuilder } from '@nestjs/testing';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { getConnectionToken } from '@nestjs/sequelize';
@@ -13,9 +12,6 @@ import { cloneDatabase, type TestDatabase } from './test-database.js';
 
 /** A Tuesday, 9:30 am in Denver: the present of a test unless it sets another. */
 export const testNow = '2027-03-02T16:30:00Z';
-
-/** How long a server may take to end before its test goes on without it. */
-const closeMs = 20_000;
 
 export interface TestApp {
   app: NestExpressApplication;
@@ -72,9 +68,7 @@ export async function startTestApp(options: TestAppOptions = {}): Promise<TestAp
     environment,
     get: app.get.bind(app),
     close: async () => {
-      // Seen on a busy machine, cause not known yet: a server stopped right after its start does not end. Said aloud, and not for ever.
-      const isClosed = await Promise.race([app.close().then(() => true), setTimeout(closeMs, false, { ref: false })]);
-      if (!isClosed) console.warn(`a server of this file had not ended after ${closeMs / 1000} s`);
+      await app.close();
       if (!options.database) await database.drop();
     },
   };
