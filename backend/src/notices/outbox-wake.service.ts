@@ -1,4 +1,3 @@
-import { setTimeout } from 'node:timers/promises';
 import { Inject, Injectable, type OnApplicationBootstrap, type OnApplicationShutdown } from '@nestjs/common';
 import { OnEvent } from '@nestjs/event-emitter';
 import { Interval } from '@nestjs/schedule';
@@ -12,8 +11,6 @@ import { OutboxWorker } from './outbox-worker.service.js';
 
 /** Nothing waits longer than this, even when every wake was lost. */
 const sweepMs = 5_000;
-/** How long the queue may take to end what it is at. */
-const stopMs = 5_000;
 
 /**
  * Wakes the outbox after a commit, in whichever process works it. The queue carries no data: what is due stands in our own tables, so a
@@ -55,13 +52,7 @@ export class OutboxWake implements OnApplicationBootstrap, OnApplicationShutdown
 
   async onApplicationShutdown(): Promise<void> {
     this.isOpen = false;
-    const stopped = this.boss.stop({ graceful: true, wait: true, timeout: stopMs }).then(
-      () => true,
-      (error: unknown) => this.logger.warn({ err: error }, 'the queue did not stop in order'),
-    );
-    // A stop that never answers must not keep the server from ending: what is due stands in our own tables.
-    const isDone = await Promise.race([stopped, setTimeout(2 * stopMs, false, { ref: false })]);
-    if (isDone === false) this.logger.warn('the queue did not answer its stop; the server ends without it');
+    await this.boss.stop({ graceful: true, wait: true, timeout: 5_000 });
   }
 
   @OnEvent(OUTBOX_WRITTEN)
