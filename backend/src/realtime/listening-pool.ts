@@ -13,6 +13,22 @@ export class ListeningPool extends pg.Pool {
     super(config);
     // from the first moment: the end that follows an error is what is acted upon
     this.on('connect', (client) => client.on('error', () => undefined));
+    this.on('release', (_error, client) => {
+      if (this.listener === client) this.listener = null;
+    });
+  }
+
+  /**
+   * Ends with the listener given back, whoever had it: the adapter gives it back only once it listens, and a pool waits for every client that
+   * is out. A server stopped right after its start would not end.
+   */
+  override end(): Promise<void>;
+  override end(callback: () => void): void;
+  override end(callback?: () => void): Promise<void> | void {
+    const ended = super.end();
+    this.dropListener();
+    if (callback === undefined) return ended;
+    void ended.then(callback);
   }
 
   override connect(): Promise<pg.PoolClient>;
@@ -24,7 +40,14 @@ export class ListeningPool extends pg.Pool {
   }
 
   private async connectListener(): Promise<pg.PoolClient> {
+    // whoever asks at the end hears nothing any more: a refusal would have the adapter ask again, for ever
+    const nothing = new Promise<pg.PoolClient>(() => undefined);
+    if (this.ending) return nothing;
     const client = await super.connect();
+    if (this.ending) {
+      client.release(true);
+      return nothing;
+    }
     this.dropListener();
     this.listener = client;
     client.once('end', () => {
