@@ -1,17 +1,12 @@
 import { useInfiniteQuery, useQuery } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
-import { Numeral } from '../../../components/numeral';
-import { QueryState } from '../../../lib/query-state';
-import { useTimeWords } from '../../../lib/time';
-import { useLedgerWords } from '../../threads/ledger-words';
 import { lotLedgerCheckQuery, lotLedgerQuery } from '../api/lot-ledger';
+import { ChangeLines } from './change-lines';
 
 /** What changed on the lot, newest first, and whether any entry was altered since. */
 export function Changes({ lotId, zone }: { lotId: string; zone: string }): ReactNode {
   const { t } = useTranslation('lots');
-  const words = useTimeWords();
-  const ledgerWords = useLedgerWords();
   const changes = useInfiniteQuery(lotLedgerQuery(lotId));
   return (
     <section className="title-part" aria-label={t('changes.title')}>
@@ -19,34 +14,17 @@ export function Changes({ lotId, zone }: { lotId: string; zone: string }): React
         <h2 className="lab">{t('changes.title')}</h2>
         <Verdict lotId={lotId} />
       </div>
-      <QueryState query={changes}>
-        {({ pages }) => (
-          <ol className="changes" reversed>
-            {pages
-              .flatMap(({ items }) => items)
-              .map((entry) => (
-                <li key={entry.sequence}>
-                  <span className="n mut">{entry.sequence}</span>
-                  <span className="mid nw">
-                    <Numeral text={words.day(entry.at, zone)} />
-                  </span>
-                  <span>
-                    <Numeral text={ledgerWords(entry, zone)} />
-                  </span>
-                  <span className="mid" title={entry.actorName ?? undefined}>
-                    {initials(entry.actorName)} <span className="hidden-words">{entry.actorName}</span>
-                  </span>
-                </li>
-              ))}
-          </ol>
-        )}
-      </QueryState>
-      {changes.hasNextPage ? (
-        <button type="button" className="link-act s" onClick={() => void changes.fetchNextPage()}>
-          {t('changes.more')}
-        </button>
-      ) : null}
+      <ChangeLines changes={changes} zone={zone} who={(name) => <Initials name={name} />} />
     </section>
+  );
+}
+
+/** The title block is narrow: initials, with the name for whoever points at or hears them. */
+function Initials({ name }: { name: string | null }): ReactNode {
+  return (
+    <span title={name ?? undefined}>
+      {initials(name)} <span className="hidden-words">{name}</span>
+    </span>
   );
 }
 
