@@ -27,6 +27,7 @@ export function pathsOf(stack: Stack, scene: Scene): Array<{ person: WorldPerson
         ...[`/calendar?date=${date}`, `/calendar?request=${world.lots[5].id}`, `/calendar?visit=${scene.booked.id}`],
         ...['/lots', '/lots/new', '/lots/import', `/lots/${failedLot}`, `/lots/${readyLot}`, `/lots/${readyLot}/edit`],
         ...[`/lots/${readyLot}/thread`, '/corrections', '/notices', '/settings', '/consents', '/rule-cards', ruleCard],
+        ...['/lots/houses', '/lots/houses/new', '/past-lots'],
       ],
     },
     { person: 'builderOwner', paths: ['/people'] },

@@ -11,6 +11,8 @@ import { lotQuery } from '../../lots/api/lot';
 import { lotPlansQuery } from '../api/plans';
 import { PlanSheet } from '../components/plan-sheet';
 import '../plans.css';
+import '../plan-print.css';
+import '../gauge-tag.css';
 
 /** How a house is put under test: the method chosen for each unit, stage and system, drawn on this very house. */
 export function PlanPage(): ReactNode {
