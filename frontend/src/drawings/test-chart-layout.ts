@@ -55,7 +55,8 @@ export function layOutChart(data: TestChartData, width: number, zone: string): C
     ...{ width, height, left, right, top, foot, valveTop, airTop, axis, fromMs, toMs, low, high },
     x: (atMs) => round(left + ((atMs - fromMs) / (toMs - fromMs)) * (right - left)),
     y: (value) => round(top + ((high - inside(value)) / (high - low)) * (foot - top)),
-    valueTicks: valueTicks(low, high, data.increment, foot - top),
+    // nothing is read above the rim
+    valueTicks: valueTicks(low, data.isLevel ? Math.min(high, 0) : high, data.increment, foot - top),
     ...timeTicks(fromMs, toMs, right - left, zone),
   };
 }

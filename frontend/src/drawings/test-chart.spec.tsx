@@ -47,6 +47,15 @@ describe('the chart of a test', () => {
     }
   });
 
+  it('prints no inches above the rim', () => {
+    const data = chartOf('sound');
+    const brimful = data.points.map((point) => ({ ...point, value: 0, isPast: false }));
+    const level = { ...data, isLevel: true, minimum: null, cone: [], increment: 0.25, points: brimful };
+    const { valueTicks } = layOutChart(level, 600, zone);
+    expect(valueTicks.length).toBeGreaterThan(1);
+    expect(Math.max(...valueTicks)).toBeLessThanOrEqual(0);
+  });
+
   it('draws what was read with the valve shut as a square, and the jump', () => {
     const data = chartOf('gaugeLeaks');
     expect(data.jumps).toEqual([{ atMs: data.points[3]?.atMs, from: 108, to: 112.5 }]);
